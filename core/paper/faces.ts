@@ -1,0 +1,138 @@
+import type { EmbeddedFont, FontkitFont } from 'pdfkit'
+import type { PaperDocument } from './document.ts'
+import { type FaceName } from './style.ts'
+
+/** Text set in one font: which glyphs, how far each moves on, both in thousandths of the size. */
+export interface GlyphRun {
+  readonly glyphs: readonly { readonly id: number; readonly codePoint: number; readonly width: number }[]
+  /** Kerning after each glyph. */
+  readonly kerns: readonly number[]
+  readonly width: number
+}
+
+type Glyph = GlyphRun['glyphs'][number]
+
+/** What is known about a font and does not depend on the document. Kept as long as its bytes are. */
+interface SharedFace {
+  readonly font: FontkitFont
+  readonly glyphs: Map<number, Glyph>
+  readonly kerns: Map<number, number>
+  readonly runs: Map<string, GlyphRun>
+}
+
+const RUN_LIMIT = 20_000
+const PADDING = 16
+const shared = new WeakMap<Uint8Array, SharedFace>()
+
+/** fontkit reads past the end of a font whose last glyph is empty: sixteen zeros behind it are enough. */
+const padded = (bytes: Uint8Array): Uint8Array => {
+  const longer = new Uint8Array(bytes.length + PADDING)
+  longer.set(bytes)
+  return longer
+}
+
+const isDigit = (codePoint: number): boolean => codePoint >= 48 && codePoint <= 57
+
+/** One font in one document. Spaces that may not break a line are drawn as the plain space, so that text copied out of the PDF has plain spaces. */
+export class Face {
+  readonly #shared: SharedFace
+  readonly #embedded: EmbeddedFont
+  readonly #encoded = new Map<GlyphRun, string>()
+
+  constructor(doc: PaperDocument, name: FaceName, bytes: Uint8Array) {
+    const known = shared.get(bytes)
+    this.#embedded = doc.openFont(name, known?.font ?? padded(bytes))
+    this.#embedded.unicode[0] = [0xfffd]
+    this.#shared = known ?? { font: this.#embedded.font, glyphs: new Map(), kerns: new Map(), runs: new Map() }
+    shared.set(bytes, this.#shared)
+  }
+
+  get id(): string {
+    return this.#embedded.id
+  }
+
+  /** The font's dictionary, which a page names among its resources. */
+  get reference() {
+    return this.#embedded.ref()
+  }
+
+  /** Whether the font draws this character. */
+  has(codePoint: number): boolean {
+    return this.#shared.glyphs.has(codePoint) || this.#shared.font.hasGlyphForCodePoint(codePoint)
+  }
+
+  /** The glyphs of text whose characters the font has. */
+  run(text: string): GlyphRun {
+    const { runs } = this.#shared
+    const known = runs.get(text)
+    if (known) return known
+    if (runs.size >= RUN_LIMIT) runs.clear()
+    const made = this.#make(text)
+    runs.set(text, made)
+    return made
+  }
+
+  /** The inside of a `TJ` array, without its first `<` and last `>`, so that neighbours can be joined. */
+  encode(run: GlyphRun): string {
+    const known = this.#encoded.get(run)
+    if (known !== undefined) return known
+    let text = ''
+    run.glyphs.forEach((glyph, index) => {
+      text += this.#code(glyph)
+      const kern = run.kerns[index] ?? 0
+      if (kern !== 0) text += `>${Math.round(-kern)}<`
+    })
+    this.#encoded.set(run, text)
+    return text
+  }
+
+  #make(text: string): GlyphRun {
+    const glyphs = Array.from(text, (sign) => this.#glyph(sign.codePointAt(0) ?? 32))
+    const kerns = glyphs.map((glyph, index) => this.#kern(glyph, glyphs[index + 1]))
+    const width = glyphs.reduce((sum, glyph) => sum + glyph.width, 0) + kerns.reduce((sum, kern) => sum + kern, 0)
+    return { glyphs, kerns, width }
+  }
+
+  #glyph(codePoint: number): Glyph {
+    const { glyphs, font } = this.#shared
+    const known = glyphs.get(codePoint)
+    if (known) return known
+    const { id, advanceWidth } = font.glyphForCodePoint(codePoint)
+    const glyph = { id, codePoint, width: (advanceWidth * 1000) / font.unitsPerEm }
+    glyphs.set(codePoint, glyph)
+    return glyph
+  }
+
+  /** Pair kerning, asked once a pair: fontkit takes 0.06 ms for it. Digits stay in their columns; ligatures are left out. */
+  #kern(glyph: Glyph, next: Glyph | undefined): number {
+    if (!next || (isDigit(glyph.codePoint) && isDigit(next.codePoint))) return 0
+    const { kerns, font } = this.#shared
+    const key = glyph.codePoint * 0x200000 + next.codePoint
+    const known = kerns.get(key)
+    if (known !== undefined) return known
+    const pair = String.fromCodePoint(glyph.codePoint, next.codePoint)
+    const { glyphs, advanceWidth } = font.layout(pair, ['kern'], 'latn', null, 'ltr')
+    const scale = 1000 / font.unitsPerEm
+    const kern = glyphs.length === 2 ? Math.round(advanceWidth * scale - glyph.width - next.width) : 0
+    kerns.set(key, kern)
+    return kern
+  }
+
+  #code(glyph: Glyph): string {
+    const code = this.#embedded.subset.includeGlyph(glyph.id)
+    this.#embedded.widths[code] ??= glyph.width
+    this.#embedded.unicode[code] ??= [glyph.codePoint]
+    return code.toString(16).padStart(4, '0')
+  }
+}
+
+export type Faces = Readonly<Record<FaceName, Face>>
+
+/** Opens the five fonts in a document. */
+export const openFaces = (doc: PaperDocument, fonts: Readonly<Record<FaceName, Uint8Array>>): Faces => ({
+  regular: new Face(doc, 'regular', fonts.regular),
+  italic: new Face(doc, 'italic', fonts.italic),
+  medium: new Face(doc, 'medium', fonts.medium),
+  semibold: new Face(doc, 'semibold', fonts.semibold),
+  fallback: new Face(doc, 'fallback', fonts.fallback),
+})

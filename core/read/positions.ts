@@ -1,0 +1,35 @@
+import type { Range } from '../glossary.ts'
+
+/**
+ * Lines and columns of a stretch of text. They are counted when asked for, so that a file without findings never pays.
+ *
+ * @param text the whole file; lines end with LF or CRLF
+ * @param from offset of the first character, in UTF-16 code units
+ * @param to offset after the last one, not before `from`
+ */
+export function rangeOf(text: string, from: number, to: number): Range {
+  const [line, column] = lineAndColumn(text, from)
+  const [endLine, endColumn] = lineAndColumn(text, to)
+  return { line, column, endLine, endColumn, offset: from, endOffset: to }
+}
+
+/**
+ * The text from an offset to the end of its line.
+ *
+ * @param text lines end with LF or CRLF
+ * @param offset of the first character that is wanted
+ */
+export function restOfLine(text: string, offset: number): string {
+  const end = text.indexOf('\n', offset)
+  return text.slice(offset, end === -1 ? text.length : end).replace(/\r$/, '')
+}
+
+function lineAndColumn(text: string, offset: number): [line: number, column: number] {
+  let line = 1
+  let start = 0
+  for (let end = text.indexOf('\n'); end !== -1 && end < offset; end = text.indexOf('\n', start)) {
+    line++
+    start = end + 1
+  }
+  return [line, offset - start + 1]
+}

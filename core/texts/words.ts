@@ -1,0 +1,31 @@
+import HandlebarsRuntime from 'handlebars/runtime.js'
+import ruleWords from '#core/generated/rule-words.js'
+import { registerHelpers, type WordScene } from './helpers.ts'
+
+/** What a finding says, and what to do about it. */
+export interface FindingWords {
+  readonly says: string
+  readonly do: string
+}
+
+type Printer = (scene: WordScene) => string
+
+const engine = HandlebarsRuntime.create()
+registerHelpers(engine)
+const printers = new Map<string, Printer>()
+
+function printer(key: string, part: 'says' | 'do'): Printer {
+  const name = `${key} ${part}`
+  const known = printers.get(name)
+  if (known) return known
+  const words = ruleWords[key]
+  if (!words) throw new Error(`The words of the rule ${key} are missing: generate the rules again.`)
+  const made = engine.template(words[part]())
+  printers.set(name, made)
+  return made
+}
+
+/** Fills the words of a shipped rule from a sheet. */
+export function ruleWordsFor(key: string, scene: WordScene): FindingWords {
+  return { says: printer(key, 'says')(scene), do: printer(key, 'do')(scene) }
+}

@@ -1,0 +1,21 @@
+import Handlebars from 'handlebars'
+import type { PlacedRule } from '#core/judge/book.ts'
+
+/** The name under which a rule's words are kept: two books may hold different rules of one name. */
+export const keyOf = ({ from, record }: PlacedRule): string => `${from}/${record.id}`
+
+/** JavaScript of the rules' words, precompiled: an object of functions by rule key. */
+export function precompileWords(rules: readonly PlacedRule[]): string {
+  const entries = rules.map((rule) => {
+    const { says, do: what } = rule.record
+    return `${JSON.stringify(keyOf(rule))}:{says:${spec(says)},do:${spec(what)}}`
+  })
+  return `export default {\n${entries.join(',\n')}\n}\n`
+}
+
+function spec(template: string): string {
+  const source = Handlebars.precompile(template, {
+    strict: false, noEscape: true, knownHelpersOnly: true, knownHelpers: { name: true, state: true, show: true, list: true },
+  })
+  return `()=>(${source})`
+}
