@@ -1,3 +1,4 @@
+import { problem } from './errors.ts'
 import type { Finding, Problem, Sheet } from './glossary.ts'
 import type { Install } from './install.ts'
 import { judge } from './judge/judge.ts'
@@ -8,7 +9,6 @@ import { checkShape } from './shape/shape.ts'
 import { buildSheets } from './sheets/build.ts'
 import { buildTopology } from './topology/build.ts'
 import type { Topology } from './topology/topology.ts'
-import { problem } from './errors.ts'
 
 /** Finds a rule book by the name under `report.rulebook`. */
 export interface Shelf {
@@ -45,7 +45,14 @@ export type Checked = Judged | Misshapen | Unreadable
 function bookFor(install: Install, shelf: Shelf): ShippedBook | Problem {
   const id = install.report.rulebook ?? 'iec'
   const book = shelf.find(id)
-  return book ?? problem('not-allowed-value', ['report', 'rulebook'], `There is no rule book “${id}”. At hand: ${shelf.names.join(', ')}.`)
+  return (
+    book ??
+    problem(
+      'not-allowed-value',
+      ['report', 'rulebook'],
+      `There is no rule book “${id}”. At hand: ${shelf.names.join(', ')}.`,
+    )
+  )
 }
 
 /**

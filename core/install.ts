@@ -77,7 +77,10 @@ export interface Supply {
 }
 
 export interface EarthingArrangement {
-  readonly electrode?: { readonly kind: 'foundation' | 'rod' | 'ring' | 'plate' | 'strip'; /** Ω */ readonly resistance?: Measured }
+  readonly electrode?: {
+    readonly kind: 'foundation' | 'rod' | 'ring' | 'plate' | 'strip' /** Ω */
+    readonly resistance?: Measured
+  }
   /** mm² */
   readonly earthing_conductor?: number
   /** mm², Ω */
@@ -304,7 +307,12 @@ export interface PvModule {
 
 export interface Battery {
   readonly into: string
-  readonly chemistry: 'lithium iron phosphate' | 'lithium nickel manganese cobalt' | 'lead-acid, vented' | 'lead-acid, valve-regulated' | 'sodium-ion'
+  readonly chemistry:
+    | 'lithium iron phosphate'
+    | 'lithium nickel manganese cobalt'
+    | 'lead-acid, vented'
+    | 'lead-acid, valve-regulated'
+    | 'sodium-ion'
   /** Wh */
   readonly usable: number
   /** W */
@@ -356,8 +364,19 @@ export interface Instrument {
   readonly uncertainty?: Readonly<Partial<Record<UncertaintyKind, number>>>
 }
 export type UncertaintyKind =
-  | 'insulation' | 'loop' | 'continuity' | 'electrode' | 'residual_time' | 'residual_current'
-  | 'voltage' | 'frequency' | 'current' | 'irradiance' | 'time' | 'array_voltage' | 'array_current'
+  | 'insulation'
+  | 'loop'
+  | 'continuity'
+  | 'electrode'
+  | 'residual_time'
+  | 'residual_current'
+  | 'voltage'
+  | 'frequency'
+  | 'current'
+  | 'irradiance'
+  | 'time'
+  | 'array_voltage'
+  | 'array_current'
 
 export interface InspectionItem {
   readonly item: string

@@ -8,7 +8,9 @@ run('npm', ['run', '--silent', 'build'])
 
 const OUT = 'dist/reports'
 mkdirSync(OUT, { recursive: true })
-const examples = readdirSync('examples').filter((name) => name.endsWith('.skerry.yaml')).toSorted()
+const examples = readdirSync('examples')
+  .filter((name) => name.endsWith('.skerry.yaml'))
+  .toSorted()
 
 function skerry(...args) {
   return spawnSync(process.execPath, ['dist/skerry.cjs', ...args], { encoding: 'utf8' })
@@ -19,7 +21,12 @@ for (const name of examples) {
   const file = `examples/${name}`
   const report = `${OUT}/${name.replace('.skerry.yaml', '.pdf')}`
   const { status, stdout } = skerry('check', file)
-  const summary = stdout.trimEnd().split('\n').filter((line) => /rule book/.test(line)).at(-1) ?? ''
+  const summary =
+    stdout
+      .trimEnd()
+      .split('\n')
+      .filter((line) => /rule book/.test(line))
+      .at(-1) ?? ''
   const rendered = skerry('render', file, '-o', report)
   const paper = rendered.status === 0 ? `report: ${report}` : 'no report: the file must be mended first'
   process.stdout.write(`${file}\n  check ended with ${status}. ${summary.trim()}\n  ${paper}\n`)

@@ -11,12 +11,18 @@ const gates = spawnSync('npm', ['run', '--silent', 'check'], { stdio: 'inherit' 
 
 const RESULTS = 'reports/tests.json'
 rmSync(RESULTS, { force: true })
-const tests = spawnSync('node_modules/.bin/vitest', ['run', '--reporter=default', '--reporter=json', `--outputFile.json=${RESULTS}`, '--coverage'], {
-  stdio: 'inherit',
-  env: { ...process.env, TZ: 'UTC', CI: '1' },
-})
+const tests = spawnSync(
+  'node_modules/.bin/vitest',
+  ['run', '--reporter=default', '--reporter=json', `--outputFile.json=${RESULTS}`, '--coverage'],
+  {
+    stdio: 'inherit',
+    env: { ...process.env, TZ: 'UTC', CI: '1' },
+  },
+)
 const { numPassedTests, numFailedTests, numPendingTests } = JSON.parse(readFileSync(RESULTS, 'utf8'))
 const ok = gates.status === 0 && tests.status === 0 && numPassedTests > 0
-process.stdout.write(`\n${gates.status === 0 ? 'All gates passed.' : 'A gate failed, see above.'}${numPendingTests > 0 ? ` ${numPendingTests} tests did not run.` : ''}\n`)
+process.stdout.write(
+  `\n${gates.status === 0 ? 'All gates passed.' : 'A gate failed, see above.'}${numPendingTests > 0 ? ` ${numPendingTests} tests did not run.` : ''}\n`,
+)
 process.stdout.write(`${numPassedTests} passed, ${numFailedTests} failed\n`)
 process.exitCode = ok ? 0 : 1

@@ -70,7 +70,10 @@ function repeated(rules: readonly PlacedRule[]): string[] {
 
 function baseOf(folder: BookFolder): Resolution {
   const rules = placed(folder)
-  const problems = repeated(rules).map((id) => ({ book: folder.book.id, message: `Two rules are called ${id}: give one of them another name.` }))
+  const problems = repeated(rules).map((id) => ({
+    book: folder.book.id,
+    message: `Two rules are called ${id}: give one of them another name.`,
+  }))
   if (problems.length > 0) return { ok: false, problems }
   const { id, title, version, note = '', parameters } = folder.book
   return { ok: true, book: { id, title, version, note, lineage: [id], parameters, rules, off: [] } }
@@ -81,19 +84,31 @@ function overlayProblems({ book, chapters }: BookFolder, base: ResolvedBook): st
   const own = placed({ book, chapters })
   return [
     ...repeated(own).map((id) => `Two rules are called ${id}: give one of them another name.`),
-    ...Object.keys(book.parameters).filter((name) => !Object.hasOwn(base.parameters, name)).map((name) =>
-      `The parameter ${name} is unknown to ${base.id}. It knows: ${Object.keys(base.parameters).join(', ')}.`),
-    ...(book.off ?? []).filter(({ rule }) => !known.has(rule)).map(({ rule }) => `Cannot switch off ${rule}: ${base.id} has no such rule.`),
-    ...own.filter(({ record }) => known.has(record.id) && record.replaces_because === undefined).map(({ record }) =>
-      `${record.id} takes the place of the rule of ${base.id} without a reason: add replaces_because.`),
-    ...own.filter(({ record }) => !known.has(record.id) && record.replaces_because !== undefined).map(({ record }) =>
-      `${record.id} says that it replaces a rule, but ${base.id} has none of that name.`),
+    ...Object.keys(book.parameters)
+      .filter((name) => !Object.hasOwn(base.parameters, name))
+      .map(
+        (name) =>
+          `The parameter ${name} is unknown to ${base.id}. It knows: ${Object.keys(base.parameters).join(', ')}.`,
+      ),
+    ...(book.off ?? [])
+      .filter(({ rule }) => !known.has(rule))
+      .map(({ rule }) => `Cannot switch off ${rule}: ${base.id} has no such rule.`),
+    ...own
+      .filter(({ record }) => known.has(record.id) && record.replaces_because === undefined)
+      .map(
+        ({ record }) =>
+          `${record.id} takes the place of the rule of ${base.id} without a reason: add replaces_because.`,
+      ),
+    ...own
+      .filter(({ record }) => !known.has(record.id) && record.replaces_because !== undefined)
+      .map(({ record }) => `${record.id} says that it replaces a rule, but ${base.id} has none of that name.`),
   ]
 }
 
 function overlayOn(folder: BookFolder, base: ResolvedBook): Resolution {
   const messages = overlayProblems(folder, base)
-  if (messages.length > 0) return { ok: false, problems: messages.map((message) => ({ book: folder.book.id, message })) }
+  if (messages.length > 0)
+    return { ok: false, problems: messages.map((message) => ({ book: folder.book.id, message })) }
   const { book } = folder
   const own = placed(folder)
   const replacing = new Map(own.map((rule) => [rule.record.id, rule]))
@@ -127,10 +142,22 @@ function overlayOn(folder: BookFolder, base: ResolvedBook): Resolution {
  * @param folders every folder at hand, by book id
  * @param seen books on the way here, to stop a circle
  */
-export function resolveBook(id: string, folders: ReadonlyMap<string, BookFolder>, seen: readonly string[] = []): Resolution {
+export function resolveBook(
+  id: string,
+  folders: ReadonlyMap<string, BookFolder>,
+  seen: readonly string[] = [],
+): Resolution {
   const folder = folders.get(id)
-  if (!folder) return { ok: false, problems: [{ book: id, message: `There is no rule book ${id}. At hand: ${[...folders.keys()].join(', ')}.` }] }
-  if (seen.includes(id)) return { ok: false, problems: [{ book: id, message: `The books extend each other in a circle: ${[...seen, id].join(' → ')}.` }] }
+  if (!folder)
+    return {
+      ok: false,
+      problems: [{ book: id, message: `There is no rule book ${id}. At hand: ${[...folders.keys()].join(', ')}.` }],
+    }
+  if (seen.includes(id))
+    return {
+      ok: false,
+      problems: [{ book: id, message: `The books extend each other in a circle: ${[...seen, id].join(' → ')}.` }],
+    }
   if (folder.book.extends === undefined) return baseOf(folder)
   const base = resolveBook(folder.book.extends, folders, [...seen, id])
   return base.ok ? overlayOn(folder, base.book) : base

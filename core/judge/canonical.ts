@@ -5,7 +5,11 @@ import type { ResolvedBook } from './book.ts'
 function canonical(value: unknown): unknown {
   if (Array.isArray(value)) return value.map(canonical)
   if (typeof value !== 'object' || value === null) return value
-  return Object.fromEntries(Object.entries(value).toSorted(([a], [b]) => (a < b ? -1 : 1)).map(([key, inner]) => [key, canonical(inner)]))
+  return Object.fromEntries(
+    Object.entries(value)
+      .toSorted(([a], [b]) => (a < b ? -1 : 1))
+      .map(([key, inner]) => [key, canonical(inner)]),
+  )
 }
 
 /** The hash that a report prints: SHA-256 over the resolved book in canonical JSON, in hex. */
@@ -16,7 +20,7 @@ export function hashOf(book: ResolvedBook): string {
 
 /** UTF-8 without the platform's encoder, which the language itself does not bring. */
 export function encodeUtf8(text: string): Uint8Array {
-  return Uint8Array.from(encodeURIComponent(text).matchAll(/%(..)|[^]/g), ([all, hex]) =>
+  return Uint8Array.from(encodeURIComponent(text).matchAll(/%(..)|./g), ([all, hex]) =>
     hex === undefined ? all.charCodeAt(0) : Number.parseInt(hex, 16),
   )
 }

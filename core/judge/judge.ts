@@ -16,7 +16,11 @@ export interface Case {
 const MOST_CORNERS = 4
 
 /** Whether `must` holds at every corner, and at some corner, of the readings' intervals. The values are restored. */
-function atTheEnds(rule: Rule, view: View, spans: readonly (readonly [string, Span])[]): { all: boolean; some: boolean } {
+function atTheEnds(
+  rule: Rule,
+  view: View,
+  spans: readonly (readonly [string, Span])[],
+): { all: boolean; some: boolean } {
   const { values } = view
   const kept = spans.map(([name]) => values[name])
   let [all, some] = [true, false]
@@ -100,7 +104,14 @@ export function judge(book: RuleBook, facts: Case): Finding[] {
 
 function notApplicable(rule: Rule, sheet: Sheet, state: State | null): Finding {
   return {
-    rule: rule.id, subject: sheet.id, state, verdict: 'not applicable', severity: rule.severity, path: sheet.path, related: [], missing: [],
+    rule: rule.id,
+    subject: sheet.id,
+    state,
+    verdict: 'not applicable',
+    severity: rule.severity,
+    path: sheet.path,
+    related: [],
+    missing: [],
   }
 }
 

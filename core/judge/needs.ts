@@ -1,6 +1,7 @@
 import type { RuleRecord, SheetSchema } from './rule.ts'
 
-const isSchema = (value: unknown): value is SheetSchema => typeof value === 'object' && value !== null && !Array.isArray(value)
+const isSchema = (value: unknown): value is SheetSchema =>
+  typeof value === 'object' && value !== null && !Array.isArray(value)
 
 /** The field at the head of an absolute `$data` pointer: `/loop_limit` and `/book/unbalance` give `loop_limit` and `book`. */
 function headOf(pointer: unknown): string[] {

@@ -1,5 +1,5 @@
-import * as checks from '#core/generated/rule-checks.js'
 import { BOOKS, RULES } from '#core/generated/books.js'
+import * as checks from '#core/generated/rule-checks.js'
 import type { Check, Rule, RuleBook } from './rule.ts'
 
 /** A rule in the generated list: its record without words, its schemas by the names of the compiled checks. */
@@ -43,7 +43,9 @@ export function shippedBook(id: string): ShippedBook | undefined {
   const all = RULES()
   const rules = stored.rules.flatMap((place) => {
     const rule = all[place]
-    return rule ? [{ ...rule, when: rule.when === null ? undefined : checkNamed(rule.when), must: checkNamed(rule.must) }] : []
+    return rule
+      ? [{ ...rule, when: rule.when === null ? undefined : checkNamed(rule.when), must: checkNamed(rule.must) }]
+      : []
   })
   return { ...stored, rules }
 }

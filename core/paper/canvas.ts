@@ -8,7 +8,11 @@ import type { Piece } from './shape.ts'
 import type { Segment } from './svg-path.ts'
 
 /** Kinds of artifact, ISO 32000-1, 14.8.2.2. */
-export type Artifact = '/Type /Layout' | '/Type /Background' | `/Type /Pagination /Subtype /${'Header' | 'Footer' | 'Watermark'}` | '/Type /Pagination'
+export type Artifact =
+  | '/Type /Layout'
+  | '/Type /Background'
+  | `/Type /Pagination /Subtype /${'Header' | 'Footer' | 'Watermark'}`
+  | '/Type /Pagination'
 
 export interface Stroke {
   readonly colour: string
@@ -16,7 +20,12 @@ export interface Stroke {
 }
 
 const sameLook = (a: Piece, b: Piece): boolean =>
-  a.face === b.face && a.size === b.size && a.colour === b.colour && a.rise === b.rise && a.spacing === b.spacing && !b.shape
+  a.face === b.face &&
+  a.size === b.size &&
+  a.colour === b.colour &&
+  a.rise === b.rise &&
+  a.spacing === b.spacing &&
+  !b.shape
 
 /** Writes on the current page. Coordinates in points from the page's top left, downward. */
 export class Canvas {
@@ -87,7 +96,13 @@ export class Canvas {
   }
 
   rule(x: number, y: number, toX: number, toY: number, stroke: Stroke): void {
-    this.stroke([['M', x, y], ['L', toX, toY]], stroke)
+    this.stroke(
+      [
+        ['M', x, y],
+        ['L', toX, toY],
+      ],
+      stroke,
+    )
   }
 
   photo(image: PdfImage, x: number, y: number, width: number, height: number): void {
@@ -117,7 +132,8 @@ export class Canvas {
   #shapes(pieces: Line['pieces'], x: number, baseline: number): void {
     let at = x
     for (const piece of pieces) {
-      if (piece.shape) this.saved(() => this.write(BADGE_SHAPES[piece.shape ?? 'dash'](at, baseline, piece.size, piece.colour)))
+      if (piece.shape)
+        this.saved(() => this.write(BADGE_SHAPES[piece.shape ?? 'dash'](at, baseline, piece.size, piece.colour)))
       at += piece.width
     }
   }

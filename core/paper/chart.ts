@@ -7,9 +7,18 @@ import { ellipse, rectangle } from './svg-shapes.ts'
 
 /** Depth lines around a skerry, outermost first; as on a chart, the shallower the water, the deeper the tint. In units of a square of 200. */
 const SEA = [
-  { ground: COLOUR.shoal, line: 'M-34 214 C-52 168 -30 130 -40 92 C-50 46 -8 28 22 2 C56 -28 110 -22 152 -14 C206 -4 238 40 236 92 C234 150 226 196 176 222 C112 252 -10 260 -34 214 Z' },
-  { ground: COLOUR.depth, line: 'M10 150 C-8 122 12 104 14 76 C18 44 52 46 74 30 C102 8 142 18 168 38 C196 60 206 96 194 126 C184 154 152 158 128 172 C92 192 30 184 10 150 Z' },
-  { ground: COLOUR.deep, line: 'M50 128 C42 112 58 104 58 90 C58 70 80 70 94 60 C114 48 142 58 152 76 C162 94 164 112 150 126 C138 138 122 134 108 144 C88 156 60 148 50 128 Z' },
+  {
+    ground: COLOUR.shoal,
+    line: 'M-34 214 C-52 168 -30 130 -40 92 C-50 46 -8 28 22 2 C56 -28 110 -22 152 -14 C206 -4 238 40 236 92 C234 150 226 196 176 222 C112 252 -10 260 -34 214 Z',
+  },
+  {
+    ground: COLOUR.depth,
+    line: 'M10 150 C-8 122 12 104 14 76 C18 44 52 46 74 30 C102 8 142 18 168 38 C196 60 206 96 194 126 C184 154 152 158 128 172 C92 192 30 184 10 150 Z',
+  },
+  {
+    ground: COLOUR.deep,
+    line: 'M50 128 C42 112 58 104 58 90 C58 70 80 70 94 60 C114 48 142 58 152 76 C162 94 164 112 150 126 C138 138 122 134 108 144 C88 156 60 148 50 128 Z',
+  },
 ].map(({ ground, line }) => ({ ground, line: pathOperators(readPath(line)) }))
 
 const LAND = [
@@ -40,10 +49,12 @@ const paintBorder = (canvas: Canvas, x: number, y: number, width: number, height
   const along = 2 * Math.round(width / SEGMENT / 2) + 1
   const down = 2 * Math.round(height / SEGMENT / 2) + 1
   for (let at = 0; at < along; at += 2) {
-    for (const top of [y, y + height - band]) canvas.rectangle(x + (at * width) / along, top, width / along, band, COLOUR.ink)
+    for (const top of [y, y + height - band])
+      canvas.rectangle(x + (at * width) / along, top, width / along, band, COLOUR.ink)
   }
   for (let at = 0; at < down; at += 2) {
-    for (const left of [x, x + width - band]) canvas.rectangle(left, y + (at * height) / down, band, height / down, COLOUR.ink)
+    for (const left of [x, x + width - band])
+      canvas.rectangle(left, y + (at * height) / down, band, height / down, COLOUR.ink)
   }
   const line = { colour: COLOUR.ink, width: 0.35 }
   canvas.stroke(rectangle(x, y, width, height, 0), line)
@@ -69,7 +80,14 @@ const paintSea = (canvas: Canvas, shaper: Shaper, scale: number): void => {
  *
  * @param x left, `y` top, `width`, `height` of the block, in points
  */
-export const paintChart = (canvas: Canvas, shaper: Shaper, x: number, y: number, width: number, height: number): void => {
+export const paintChart = (
+  canvas: Canvas,
+  shaper: Shaper,
+  x: number,
+  y: number,
+  width: number,
+  height: number,
+): void => {
   const scale = Math.max(0.78, (height * 1.02) / 200)
   canvas.saved(() => {
     canvas.write(`${pathOperators(rectangle(x + 5.6, y + 5.6, width - 11.2, height - 11.2, 0))} W n`)

@@ -1,6 +1,7 @@
 import type { EmbeddedFont, FontkitFont } from 'pdfkit'
 import type { PaperDocument } from './document.ts'
-import { type FaceName } from './style.ts'
+import { readKerning } from './kerning.ts'
+import type { FaceName } from './style.ts'
 
 /** Text set in one font: which glyphs, how far each moves on, both in thousandths of the size. */
 export interface GlyphRun {
@@ -16,7 +17,7 @@ type Glyph = GlyphRun['glyphs'][number]
 interface SharedFace {
   readonly font: FontkitFont
   readonly glyphs: Map<number, Glyph>
-  readonly kerns: Map<number, number>
+  readonly kern: (left: number, right: number) => number
   readonly runs: Map<string, GlyphRun>
 }
 
@@ -43,7 +44,12 @@ export class Face {
     const known = shared.get(bytes)
     this.#embedded = doc.openFont(name, known?.font ?? padded(bytes))
     this.#embedded.unicode[0] = [0xfffd]
-    this.#shared = known ?? { font: this.#embedded.font, glyphs: new Map(), kerns: new Map(), runs: new Map() }
+    this.#shared = known ?? {
+      font: this.#embedded.font,
+      glyphs: new Map(),
+      kern: readKerning(bytes),
+      runs: new Map(),
+    }
     shared.set(bytes, this.#shared)
   }
 
@@ -103,19 +109,11 @@ export class Face {
     return glyph
   }
 
-  /** Pair kerning, asked once a pair: fontkit takes 0.06 ms for it. Digits stay in their columns; ligatures are left out. */
+  /** Digits stay in their columns; ligatures are left out. */
   #kern(glyph: Glyph, next: Glyph | undefined): number {
     if (!next || (isDigit(glyph.codePoint) && isDigit(next.codePoint))) return 0
-    const { kerns, font } = this.#shared
-    const key = glyph.codePoint * 0x200000 + next.codePoint
-    const known = kerns.get(key)
-    if (known !== undefined) return known
-    const pair = String.fromCodePoint(glyph.codePoint, next.codePoint)
-    const { glyphs, advanceWidth } = font.layout(pair, ['kern'], 'latn', null, 'ltr')
-    const scale = 1000 / font.unitsPerEm
-    const kern = glyphs.length === 2 ? Math.round(advanceWidth * scale - glyph.width - next.width) : 0
-    kerns.set(key, kern)
-    return kern
+    const { kern, font } = this.#shared
+    return (kern(glyph.id, next.id) * 1000) / font.unitsPerEm
   }
 
   #code(glyph: Glyph): string {

@@ -1,9 +1,9 @@
+import { child, type Flow, type Laid, styled, textStrips } from './flow.ts'
 import { boxOf, flowBox, flowGrid, gridOf } from './flow-box.ts'
 import { flowDefinitions } from './flow-definitions.ts'
 import { flowFigure } from './flow-figure.ts'
 import { flowList } from './flow-list.ts'
 import { flowTable } from './flow-table.ts'
-import { child, type Flow, type Laid, styled, textStrips } from './flow.ts'
 import { changeFirst, type Strip, strip } from './strips.ts'
 import { BLOCK, COLOUR, HAIRLINE, MEASURE } from './style.ts'
 import type { Block, Group, Heading, Paragraph } from './tree.ts'
@@ -11,7 +11,10 @@ import type { Block, Group, Heading, Paragraph } from './tree.ts'
 const HEADINGS = { 1: BLOCK.h1, 2: BLOCK.h2, 3: BLOCK.h3, 4: BLOCK.h4 } as const
 
 const titleOf = (heading: Heading): string =>
-  heading.runs.map((run) => (run.kind === 'text' ? run.text : ' ')).join('').trim()
+  heading.runs
+    .map((run) => (run.kind === 'text' ? run.text : ' '))
+    .join('')
+    .trim()
 
 /** A heading holds on to what follows, stands in the outline, and, at the second level, hangs from a hairline. */
 const flowHeading = (heading: Heading, flow: Flow): Laid => {
@@ -23,7 +26,12 @@ const flowHeading = (heading: Heading, flow: Flow): Laid => {
       line.height,
       (canvas, shift, y) => {
         if (index === 0) {
-          canvas.doc.headings.push({ level: heading.level, title: titleOf(heading), page: canvas.doc.page.dictionary, top: y })
+          canvas.doc.headings.push({
+            level: heading.level,
+            title: titleOf(heading),
+            page: canvas.doc.page.dictionary,
+            top: y,
+          })
         }
         if (index === 0 && heading.level === 2) {
           const [left, right] = [flow.x + shift, flow.x + shift + flow.width]
@@ -41,7 +49,11 @@ const flowHeading = (heading: Heading, flow: Flow): Laid => {
 const flowParagraph = (paragraph: Paragraph, flow: Flow): Laid => {
   const text = styled(flow.base.text, [...flow.inherited, ...paragraph.classes])
   const width = text.align === 'left' ? Math.min(flow.width, MEASURE) : flow.width
-  return { strips: textStrips({ ...flow, width }, child(flow, 'P'), paragraph.runs, text), before: flow.base.before, after: flow.base.after }
+  return {
+    strips: textStrips({ ...flow, width }, child(flow, 'P'), paragraph.runs, text),
+    before: flow.base.before,
+    after: flow.base.after,
+  }
 }
 
 const flowGroup = (group: Group, flow: Flow): Laid => {
@@ -101,7 +113,11 @@ export const flowBlocks = (blocks: readonly Block[], flow: Flow): readonly Strip
     const before = Math.max(after, laid.before, first.before)
     const breakBefore = first.breakBefore || block.classes.includes('page-break')
     const hold = block.classes.includes('keep')
-    const held = hold ? laid.strips.map((one, at) => (at === laid.strips.length - 1 || one.hold === 2 ? one : { ...one, hold: 1 as const })) : laid.strips
+    const held = hold
+      ? laid.strips.map((one, at) =>
+          at === laid.strips.length - 1 || one.hold === 2 ? one : { ...one, hold: 1 as const },
+        )
+      : laid.strips
     strips.push(...changeFirst(anchored(held, block.id), { before, breakBefore }))
     after = laid.after
   }

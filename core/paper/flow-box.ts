@@ -7,10 +7,12 @@ import { BOX, type BoxStyle, CONTENT, GAP, GRID } from './style.ts'
 import type { Block, Group } from './tree.ts'
 
 /** The box that one of the classes stands for. */
-export const boxOf = (classes: readonly string[]): BoxStyle | undefined => classes.map((name) => BOX[name]).find((box) => box)
+export const boxOf = (classes: readonly string[]): BoxStyle | undefined =>
+  classes.map((name) => BOX[name]).find((box) => box)
 
 /** How many columns one of the classes asks for. */
-export const gridOf = (classes: readonly string[]): number | undefined => classes.map((name) => GRID[name]).find((count) => count)
+export const gridOf = (classes: readonly string[]): number | undefined =>
+  classes.map((name) => GRID[name]).find((count) => count)
 
 const inside = (group: Group, box: BoxStyle, flow: Flow): readonly Strip[] => {
   const left = box.pad.x + (box.bar?.width ?? 0)
@@ -30,7 +32,8 @@ const inside = (group: Group, box: BoxStyle, flow: Flow): readonly Strip[] => {
 export const flowBox = (group: Group, box: BoxStyle, flow: Flow): Laid => {
   const frame: Frame = {
     head: [],
-    paint: (canvas, shift, top, bottom) => paintBox(canvas, flow.shaper, box, flow.x + shift, top, flow.width, bottom - top),
+    paint: (canvas, shift, top, bottom) =>
+      paintBox(canvas, flow.shaper, box, flow.x + shift, top, flow.width, bottom - top),
   }
   const content = changeFirst(inside(group, box, flow), { before: 0 })
   const strips = [room(box.pad.y, 2), ...changeLast(content, { hold: 2 }), room(box.pad.y, 0)]
@@ -50,18 +53,26 @@ const flowCell = (block: Block, flow: Flow): Cell => {
 }
 
 const gridRow = (blocks: readonly Block[], width: number, flow: Flow): readonly Strip[] => {
-  const sides = blocks.map((block, index) => flowCell(block, { ...flow, x: flow.x + index * (width + GAP.columns), width }))
+  const sides = blocks.map((block, index) =>
+    flowCell(block, { ...flow, x: flow.x + index * (width + GAP.columns), width }),
+  )
   const pad = Math.max(0, ...sides.map(({ box }) => box?.pad.y ?? 0))
   const ground = (canvas: Canvas, shift: number, y: number, height: number) => {
     for (const { box, x } of sides) if (box) paintBox(canvas, flow.shaper, box, x + shift, y, width, height)
   }
-  return beside(sides.map(({ strips }) => ({ strips, shift: 0 })), { top: pad, bottom: pad }, CONTENT.height, ground)
+  return beside(
+    sides.map(({ strips }) => ({ strips, shift: 0 })),
+    { top: pad, bottom: pad },
+    CONTENT.height,
+    ground,
+  )
 }
 
 /** Children beside each other, row by row; text that is not cut into divs is divided evenly among the columns. */
 export const flowGrid = (group: Group, columns: number, flow: Flow): Laid => {
   const width = (flow.width - (columns - 1) * GAP.columns) / columns
-  if (!group.blocks.every((block) => block.kind === 'group' || block.kind === 'figure')) return flowColumns(group, columns, width, flow)
+  if (!group.blocks.every((block) => block.kind === 'group' || block.kind === 'figure'))
+    return flowColumns(group, columns, width, flow)
   const rows: Strip[] = []
   for (let at = 0; at < group.blocks.length; at += columns) {
     const row = gridRow(group.blocks.slice(at, at + columns), width, flow)
@@ -98,7 +109,9 @@ const flowColumns = (group: Group, columns: number, width: number, flow: Flow): 
   const all = poured(strips, Math.min(CONTENT.height, evenHeight(strips, columns)))
   const rows: Strip[] = []
   for (let at = 0; at < all.length; at += columns) {
-    const sides = all.slice(at, at + columns).map((side, index) => ({ strips: side, shift: index * (width + GAP.columns) }))
+    const sides = all
+      .slice(at, at + columns)
+      .map((side, index) => ({ strips: side, shift: index * (width + GAP.columns) }))
     rows.push(...beside(sides, { top: 0, bottom: 0 }, CONTENT.height, () => undefined))
   }
   return { strips: rows, before: 0, after: flow.base.after }

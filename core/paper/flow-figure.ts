@@ -2,8 +2,8 @@ import type { StructureElement } from 'pdfkit'
 import type { Canvas } from './canvas.ts'
 import { child, type Flow, type Laid, styled, textStrips } from './flow.ts'
 import { changeFirst, changeLast, type Strip, strip } from './strips.ts'
-import { drawSvg } from './svg.ts'
 import { BLOCK, CONTENT, PAGE } from './style.ts'
+import { drawSvg } from './svg.ts'
 import type { Figure } from './tree.ts'
 
 /** The caption's share of a page that a tall figure leaves free. */
@@ -41,7 +41,9 @@ const draw = (canvas: Canvas, figure: Figure, flow: Flow, x: number, y: number, 
 
 /** The rectangle that the figure covers, counted from the page's lower left (ISO 32000-1, 14.8.5.4.3). */
 const setBox = (element: StructureElement, x: number, y: number, { width, height }: Size): void => {
-  const corners = [x, PAGE.height - y - height, x + width, PAGE.height - y].map((value) => Math.round(value * 100) / 100)
+  const corners = [x, PAGE.height - y - height, x + width, PAGE.height - y].map(
+    (value) => Math.round(value * 100) / 100,
+  )
   element.dictionary.data.A = { O: 'Layout', Placement: 'Block', BBox: corners }
 }
 
@@ -59,6 +61,9 @@ export const flowFigure = (figure: Figure, flow: Flow): Laid => {
   if (figure.caption.length === 0) return { strips: [drawing], before, after }
   const caption = child({ ...flow, parent }, 'Caption')
   const lines = textStrips(flow, caption, figure.caption, styled(BLOCK.figcaption.text, figure.classes))
-  const spaced: readonly Strip[] = changeFirst(lines.map((line) => ({ ...line, hold: 2 as const })), { before: BLOCK.figcaption.before })
+  const spaced: readonly Strip[] = changeFirst(
+    lines.map((line) => ({ ...line, hold: 2 as const })),
+    { before: BLOCK.figcaption.before },
+  )
   return { strips: [{ ...drawing, hold: 2 }, ...changeLast(spaced, { hold: 0 })], before, after }
 }

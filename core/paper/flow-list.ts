@@ -15,7 +15,13 @@ export const flowInto = (blocks: readonly Block[], parent: StructureElement, flo
 const marker = (list: List, index: number): string => (list.ordered ? `${index + 1}.` : '•')
 
 /** Draws the number or the dot to the left of the item's first line. */
-const withMarker = (strips: readonly Strip[], label: StructureElement, sign: string, flow: Flow, text: TextStyle): readonly Strip[] => {
+const withMarker = (
+  strips: readonly Strip[],
+  label: StructureElement,
+  sign: string,
+  flow: Flow,
+  text: TextStyle,
+): readonly Strip[] => {
   const first = strips[0]
   if (!first) return strips
   const look = { face: text.face, size: text.size, rise: 0, colour: COLOUR.muted, spacing: 0 }

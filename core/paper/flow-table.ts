@@ -4,7 +4,7 @@ import type { Canvas } from './canvas.ts'
 import { columnWidths } from './columns.ts'
 import { child, type Flow, type Laid, styled, textStrips } from './flow.ts'
 import { flowInto } from './flow-list.ts'
-import { rowPainter, type RowPlace } from './row-paint.ts'
+import { type RowPlace, rowPainter } from './row-paint.ts'
 import { changeFirst, type Frame, framed, type Hold, type Strip, stackHeight } from './strips.ts'
 import { BLOCK, type BlockStyle, CELL, COLOUR, CONTENT } from './style.ts'
 import type { Cell, Row, Table } from './tree.ts'
@@ -94,10 +94,18 @@ const holdOf = (index: number, count: number, whole: boolean): Hold => {
   return index === 0 || index === count - 2 ? 1 : 0
 }
 
-const bodyStrips = (table: Table, element: StructureElement, flow: Flow, rows: Rows, limit: number): readonly Strip[] => {
+const bodyStrips = (
+  table: Table,
+  element: StructureElement,
+  flow: Flow,
+  rows: Rows,
+  limit: number,
+): readonly Strip[] => {
   const groups = table.bodies.map((body, group) => {
     const part = child({ ...flow, parent: element }, 'TBody')
-    return body.flatMap((row, index) => rows.strips(row, part, { part: 'body', index, last: index === body.length - 1, group }, limit))
+    return body.flatMap((row, index) =>
+      rows.strips(row, part, { part: 'body', index, last: index === body.length - 1, group }, limit),
+    )
   })
   const small = groups.reduce((sum, group) => sum + stackHeight(group), 0) < SMALL
   return groups.flatMap((group, at) =>

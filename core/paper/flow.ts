@@ -38,11 +38,15 @@ export const child = (flow: Flow, type: string, options: { alt?: string } = {}):
 }
 
 /** A text style as classes change it. */
-export const styled = (base: TextStyle, classes: readonly string[]): TextStyle =>
-  classes.reduce((style, name) => ({ ...style, ...TEXT_CLASS[name] }), base)
+export const styled = (base: TextStyle, classes: readonly string[]): TextStyle => {
+  let style = base
+  for (const name of classes) style = { ...style, ...TEXT_CLASS[name] }
+  return style
+}
 
 /** At least two lines of a paragraph stay together at either end of a page. */
-const holdOf = (index: number, count: number): Hold => (index < count - 1 && (index === 0 || index === count - 2) ? 2 : 0)
+const holdOf = (index: number, count: number): Hold =>
+  index < count - 1 && (index === 0 || index === count - 2) ? 2 : 0
 
 const offset = (line: Line, width: number, align: TextStyle['align']): number => {
   if (align === 'left') return 0
@@ -53,7 +57,12 @@ const offset = (line: Line, width: number, align: TextStyle['align']): number =>
 export const baselineOf = ({ leading, size }: TextStyle): number => (leading + 0.698 * size) / 2
 
 /** Lines of text, each marked as part of `element`. */
-export const textStrips = (flow: Flow, element: StructureElement, runs: readonly Run[], style: TextStyle): readonly Strip[] => {
+export const textStrips = (
+  flow: Flow,
+  element: StructureElement,
+  runs: readonly Run[],
+  style: TextStyle,
+): readonly Strip[] => {
   const lines = breakLines(flow.shaper.words(runs, style), flow.width)
   return lines.map((line, index) => {
     const x = flow.x + offset(line, flow.width, style.align)

@@ -18,7 +18,13 @@ const widthOf = (pieces: readonly Piece[]): number => pieces.reduce((sum, { widt
 const numbered = (text: string, { page, pages }: Spot): string =>
   text.replaceAll('{page}', String(page)).replaceAll('{pages}', String(pages))
 
-const paintRunning = (canvas: Canvas, shaper: Shaper, running: Running | undefined, spot: Spot, baseline: number): void => {
+const paintRunning = (
+  canvas: Canvas,
+  shaper: Shaper,
+  running: Running | undefined,
+  spot: Spot,
+  baseline: number,
+): void => {
   if (!running) return
   const { left, right } = typeof running === 'function' ? running(spot) : running
   const write = (text: string, place: (width: number) => number) => {
@@ -62,7 +68,8 @@ const paintWatermark = (canvas: Canvas, shaper: Shaper, word: string): void => {
  */
 export const paintFurniture = (canvas: Canvas, shaper: Shaper, options: PaperOptions, spot: Spot): void => {
   const { watermark, header, footer } = options
-  if (watermark) canvas.artifact('/Type /Pagination /Subtype /Watermark', () => paintWatermark(canvas, shaper, watermark))
+  if (watermark)
+    canvas.artifact('/Type /Pagination /Subtype /Watermark', () => paintWatermark(canvas, shaper, watermark))
   canvas.artifact('/Type /Pagination /Subtype /Header', () => paintRunning(canvas, shaper, header, spot, PAGE.headerAt))
   canvas.artifact('/Type /Pagination /Subtype /Footer', () => {
     paintScale(canvas, spot)

@@ -84,26 +84,46 @@ const checkAttributes = (element: Element): void => {
 
 const checkClosed = (element: Element): void => {
   if (VOID.has(element.tagName) || element.sourceCodeLocation?.endTag) return
-  throw problem('unclosed-tag', element, `<${element.tagName}> is not closed. Write </${element.tagName}> where it ends.`)
+  throw problem(
+    'unclosed-tag',
+    element,
+    `<${element.tagName}> is not closed. Write </${element.tagName}> where it ends.`,
+  )
 }
 
 const checkText = (node: TextNode, parent: string, allowed: readonly string[]): void => {
   if (node.value.trim() === '' || allowed.includes('#text')) return
   const words = node.value.trim().slice(0, 30)
-  throw problem('loose-text', node, `The text “${words}” stands directly in ${parent}. Put it into a block such as <p>.`)
+  throw problem(
+    'loose-text',
+    node,
+    `The text “${words}” stands directly in ${parent}. Put it into a block such as <p>.`,
+  )
 }
 
 const checkElement = (element: Element, parent: string, allowed: readonly string[]): void => {
   const { tagName } = element
   if (!(tagName in CONTENT) && tagName !== 'svg') {
-    throw problem('unknown-tag', element, `<${tagName}> is not part of the page's HTML. Allowed here: ${listed(allowed)}.`)
+    throw problem(
+      'unknown-tag',
+      element,
+      `<${tagName}> is not part of the page's HTML. Allowed here: ${listed(allowed)}.`,
+    )
   }
   if (!element.sourceCodeLocation) {
     const where = tagName === 'tbody' ? 'A row' : `The content of ${parent}`
-    throw new PaperError('misplaced-tag', `${where} stands outside <${tagName}>. Write <${tagName}> around it.`, firstPlace(element))
+    throw new PaperError(
+      'misplaced-tag',
+      `${where} stands outside <${tagName}>. Write <${tagName}> around it.`,
+      firstPlace(element),
+    )
   }
   if (!allowed.includes(tagName)) {
-    throw problem('misplaced-tag', element, `<${tagName}> may not stand in ${parent}. Allowed there: ${listed(allowed)}.`)
+    throw problem(
+      'misplaced-tag',
+      element,
+      `<${tagName}> may not stand in ${parent}. Allowed there: ${listed(allowed)}.`,
+    )
   }
 }
 

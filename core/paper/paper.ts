@@ -29,7 +29,6 @@
 import { Canvas } from './canvas.ts'
 import { PaperDocument } from './document.ts'
 import { openFaces } from './faces.ts'
-import { BLOCK, CONTENT, PAGE, SVG_CLASS } from './style.ts'
 import type { Flow } from './flow.ts'
 import { flowBlocks } from './flow-blocks.ts'
 import { paintFurniture } from './furniture.ts'
@@ -41,6 +40,7 @@ import { PaperError } from './problems.ts'
 import { readBlocks } from './read-blocks.ts'
 import { Shaper } from './shape.ts'
 import { paintPlaced } from './strips.ts'
+import { BLOCK, CONTENT, PAGE, SVG_CLASS } from './style.ts'
 
 const PRODUCER = 'Skerry'
 

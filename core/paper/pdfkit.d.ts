@@ -23,13 +23,6 @@ declare module 'pdfkit' {
     readonly unitsPerEm: number
     hasGlyphForCodePoint(codePoint: number): boolean
     glyphForCodePoint(codePoint: number): FontkitGlyph
-    layout(
-      text: string,
-      features: readonly string[],
-      script: string,
-      language: null,
-      direction: 'ltr',
-    ): { readonly glyphs: readonly FontkitGlyph[]; readonly advanceWidth: number }
   }
 
   export interface EmbeddedFont {

@@ -23,7 +23,8 @@ const readDefinitions = (element: Element, reading: Reading): Definitions => {
       continue
     }
     const entry = entries.at(-1)
-    if (!entry) throw problem('misplaced-tag', child, 'A <dd> comes before the first <dt>. Start the list with the term.')
+    if (!entry)
+      throw problem('misplaced-tag', child, 'A <dd> comes before the first <dt>. Start the list with the term.')
     entry.details.push(...reading.mixed(child))
   }
   return { ...common(element), kind: 'definitions', entries }

@@ -8,10 +8,15 @@ const readPhoto = (element: Element, reading: Reading) => {
   const name = attribute(element, 'src') ?? ''
   if (!reading.pictures.has(name)) {
     const known = [...reading.pictures].join(', ') || 'none'
-    throw problem('unknown-picture', element, `<img> shows “${name}”, which was not handed over. Pictures at hand: ${known}.`)
+    throw problem(
+      'unknown-picture',
+      element,
+      `<img> shows “${name}”, which was not handed over. Pictures at hand: ${known}.`,
+    )
   }
   const alternative = attribute(element, 'alt')?.trim()
-  if (!alternative) throw problem('missing-alternative', element, '<img> has no alt text. Say in words what the picture shows.')
+  if (!alternative)
+    throw problem('missing-alternative', element, '<img> has no alt text. Say in words what the picture shows.')
   return { picture: { kind: 'photo', name } as const, alternative }
 }
 

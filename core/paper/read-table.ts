@@ -25,13 +25,19 @@ const readColumns = (table: Element): readonly Column[] =>
   elements(table)
     .filter(({ tagName }) => tagName === 'colgroup')
     .flatMap(elements)
-    .flatMap((col) => Array.from({ length: readCount(col, 'span') }, () => ({ share: readShare(col), classes: classesOf(col) })))
+    .flatMap((col) =>
+      Array.from({ length: readCount(col, 'span') }, () => ({ share: readShare(col), classes: classesOf(col) })),
+    )
 
 const readCell = (element: Element, reading: Reading): Cell => {
   const header = element.tagName === 'th'
   const scope = attribute(element, 'scope')
   if (header && !SCOPES.includes(scope ?? '')) {
-    throw problem('header-without-scope', element, `This <th> has no scope. Write scope="col" or scope="row" (or colgroup, rowgroup).`)
+    throw problem(
+      'header-without-scope',
+      element,
+      `This <th> has no scope. Write scope="col" or scope="row" (or colgroup, rowgroup).`,
+    )
   }
   return { ...common(element), header, scope, span: readCount(element, 'colspan'), blocks: reading.mixed(element) }
 }
@@ -45,18 +51,25 @@ const rowsOf = (part: Element, reading: Reading): readonly Row[] => elements(par
 
 const checkShape = (rows: readonly Row[], declared: number, place: Place): number => {
   const first = rows[0]
-  if (!first) throw new PaperError('table-shape', 'The table has no row. Leave it out, or say in words that there is nothing.', place)
+  if (!first)
+    throw new PaperError(
+      'table-shape',
+      'The table has no row. Leave it out, or say in words that there is nothing.',
+      place,
+    )
   const width = declared || first.cells.reduce((sum, cell) => sum + cell.span, 0)
   for (const row of rows) {
     const found = row.cells.reduce((sum, cell) => sum + cell.span, 0)
-    if (found !== width) throw new PaperError('table-shape', `This row has ${found} columns, the table ${width}.`, row.place)
+    if (found !== width)
+      throw new PaperError('table-shape', `This row has ${found} columns, the table ${width}.`, row.place)
   }
   return width
 }
 
 const checkShares = (columns: readonly Column[], place: Place): void => {
   const sum = columns.reduce((total, { share }) => total + (share ?? 0), 0)
-  if (sum > 100.5) throw new PaperError('table-shape', `The column widths add up to ${sum}%. They may not exceed 100%.`, place)
+  if (sum > 100.5)
+    throw new PaperError('table-shape', `The column widths add up to ${sum}%. They may not exceed 100%.`, place)
 }
 
 /**
@@ -71,7 +84,8 @@ export const readTable = (element: Element, reading: Reading): Table => {
   const bodies = named('tbody').map((part) => rowsOf(part, reading))
   const declared = readColumns(element)
   const width = checkShape([...head, ...bodies.flat()], declared.length, placeOf(element))
-  const columns = declared.length > 0 ? declared : Array.from({ length: width }, () => ({ share: undefined, classes: [] }))
+  const columns =
+    declared.length > 0 ? declared : Array.from({ length: width }, () => ({ share: undefined, classes: [] }))
   checkShares(columns, placeOf(element))
   const caption = named('caption').flatMap((part) => readRuns(content(part)))
   return { ...common(element), kind: 'table', caption, columns, head, bodies }

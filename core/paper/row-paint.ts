@@ -31,25 +31,41 @@ const groundOf = (row: Row, table: readonly string[], place: RowPlace): string |
   return place.part === 'body' && table.includes('zebra') && place.index % 2 === 1 ? COLOUR.shoal : undefined
 }
 
+interface Rule {
+  readonly at: 'top' | 'bottom'
+  readonly colour: string
+  readonly width: number
+}
+
+const OPENING: Rule = { at: 'top', colour: COLOUR.ink, width: 0.8 }
+const UNDER_HEAD: Rule = { at: 'bottom', colour: COLOUR.ink, width: HAIRLINE }
+const BETWEEN_GROUPS: Rule = { at: 'top', colour: COLOUR.rule, width: HAIRLINE }
+const BETWEEN_ROWS: Rule = { at: 'bottom', colour: COLOUR.hairline, width: HAIRLINE * 0.8 }
+
+const rulesOf = ({ part, index, last, group }: RowPlace, plain: boolean): readonly Rule[] => {
+  const first = index === 0
+  if (part === 'head') return [...(first ? [OPENING] : []), ...(last ? [UNDER_HEAD] : [])]
+  return [...(first && group > 0 ? [BETWEEN_GROUPS] : []), ...(last || plain ? [] : [BETWEEN_ROWS])]
+}
+
 /**
  * What lies under a row: its ground, the line above the first header row, and the line below.
  *
  * @param table the table's classes: `zebra` shades every second row, `plain` leaves out the lines between rows
  */
-export const rowPainter =
-  (row: Row, table: readonly string[], place: RowPlace, x: number, width: number) =>
-  (canvas: Canvas, shift: number, y: number, height: number): void => {
+export const rowPainter = (row: Row, table: readonly string[], place: RowPlace, x: number, width: number) => {
+  const ground = groundOf(row, table, place)
+  const bar = row.classes.map((name) => BAR[name]).find((colour) => colour)
+  const rules = rulesOf(place, table.includes('plain'))
+  return (canvas: Canvas, shift: number, y: number, height: number): void => {
     const left = x + shift
-    const rule = (at: number, colour: string, weight: number) =>
-      canvas.rule(left, at, left + width, at, { colour, width: weight })
     canvas.artifact('/Type /Layout', () => {
-      const ground = groundOf(row, table, place)
       if (ground) canvas.rectangle(left, y, width, height, ground)
-      const bar = row.classes.map((name) => BAR[name]).find((colour) => colour)
       if (bar) canvas.rectangle(left, y, 2.2, height, bar)
-      if (place.part === 'head' && place.index === 0) rule(y, COLOUR.ink, 0.8)
-      if (place.part === 'head' && place.last) rule(y + height, COLOUR.ink, HAIRLINE)
-      if (place.part === 'body' && place.index === 0 && place.group > 0) rule(y, COLOUR.rule, HAIRLINE)
-      if (place.part === 'body' && !place.last && !table.includes('plain')) rule(y + height, COLOUR.hairline, HAIRLINE * 0.8)
+      for (const rule of rules) {
+        const at = rule.at === 'top' ? y : y + height
+        canvas.rule(left, at, left + width, at, rule)
+      }
     })
   }
+}

@@ -73,7 +73,11 @@ export const BLOCK = {
   definitions: { text: TABLE, before: 2, after: 8 },
   caption: { text: { ...BODY, face: 'semibold', size: 8.4, leading: 11.6 }, before: 0, after: 3.5 },
   figcaption: { text: { ...BODY, size: 7.8, leading: 10.6, colour: COLOUR.muted }, before: 4, after: 0 },
-  header: { text: { ...TABLE, face: 'medium', size: 7.4, leading: 9.8, colour: COLOUR.muted, spacing: 0.012 }, before: 0, after: 0 },
+  header: {
+    text: { ...TABLE, face: 'medium', size: 7.4, leading: 9.8, colour: COLOUR.muted, spacing: 0.012 },
+    before: 0,
+    after: 0,
+  },
   rowHeader: { text: { ...TABLE, face: 'medium' }, before: 0, after: 0 },
   cell: { text: TABLE, before: 0, after: 0 },
   table: { text: TABLE, before: 9, after: 13 },
@@ -94,14 +98,7 @@ export const TEXT_CLASS: Readonly<Record<string, Partial<TextStyle>>> = {
   alarm: { colour: COLOUR.alarm, face: 'medium' },
 }
 
-export type Shape =
-  | 'disc-tick'
-  | 'ring-tick'
-  | 'box-cross'
-  | 'square-cross'
-  | 'dotted-ring'
-  | 'half-diamond'
-  | 'dash'
+export type Shape = 'disc-tick' | 'ring-tick' | 'box-cross' | 'square-cross' | 'dotted-ring' | 'half-diamond' | 'dash'
 
 /** A verdict is a word behind a shape of its own; the colour only repeats what both say. */
 export const BADGE: Readonly<Record<string, { readonly shape: Shape; readonly colour: string }>> = {
@@ -127,7 +124,12 @@ export interface BoxStyle {
 export const BOX: Readonly<Record<string, BoxStyle>> = {
   box: { pad: { x: 9, y: 8 }, border: COLOUR.hairline },
   'box-tint': { pad: { x: 9, y: 8 }, ground: COLOUR.shoal },
-  'box-caution': { pad: { x: 11, y: 8 }, ground: COLOUR.alarmTint, border: COLOUR.alarm, bar: { width: 4, colour: COLOUR.alarm } },
+  'box-caution': {
+    pad: { x: 11, y: 8 },
+    ground: COLOUR.alarmTint,
+    border: COLOUR.alarm,
+    bar: { width: 4, colour: COLOUR.alarm },
+  },
   'box-note': { pad: { x: 11, y: 8 }, ground: COLOUR.shoal, bar: { width: 2.5, colour: COLOUR.abyss } },
   'box-island': { pad: { x: 11, y: 8 }, ground: COLOUR.lampTint, bar: { width: 2.5, colour: COLOUR.lamp } },
   'title-block': { pad: { x: 19, y: 20 }, reserve: 196 },

@@ -12,7 +12,8 @@ interface Arc {
 const QUARTER = Math.PI / 2
 
 /** Signed angle from one vector to another, in radians. */
-const angle = (ux: number, uy: number, vx: number, vy: number): number => Math.atan2(ux * vy - uy * vx, ux * vx + uy * vy)
+const angle = (ux: number, uy: number, vx: number, vy: number): number =>
+  Math.atan2(ux * vy - uy * vx, ux * vx + uy * vy)
 
 /** Centre, start angle, and turn of an arc given by its end points (SVG 2, B.2.4), radii made large enough (B.2.5). */
 const centred = (x0: number, y0: number, arc: Arc, x: number, y: number) => {
@@ -33,7 +34,16 @@ const centred = (x0: number, y0: number, arc: Arc, x: number, y: number) => {
   const turn = angle((px - ox) / rx, (py - oy) / ry, (-px - ox) / rx, (-py - oy) / ry)
   const full = 2 * Math.PI
   const swept = arc.sweep && turn < 0 ? turn + full : !arc.sweep && turn > 0 ? turn - full : turn
-  return { cx: cos * ox - sin * oy + (x0 + x) / 2, cy: sin * ox + cos * oy + (y0 + y) / 2, rx, ry, cos, sin, start, swept }
+  return {
+    cx: cos * ox - sin * oy + (x0 + x) / 2,
+    cy: sin * ox + cos * oy + (y0 + y) / 2,
+    rx,
+    ry,
+    cos,
+    sin,
+    start,
+    swept,
+  }
 }
 
 /**

@@ -43,7 +43,11 @@ const colourOf = (element: Element, name: string, value: string): string => {
   if (named) return named
   if (/^#[0-9a-fA-F]{6}$/.test(value)) return value.toLowerCase()
   const short = /^#([0-9a-fA-F])([0-9a-fA-F])([0-9a-fA-F])$/.exec(value)
-  if (short) return `#${short.slice(1).map((digit) => digit + digit).join('')}`.toLowerCase()
+  if (short)
+    return `#${short
+      .slice(1)
+      .map((digit) => digit + digit)
+      .join('')}`.toLowerCase()
   throw problem('svg-value', element, `${name} is “${value}”. Write #rgb, #rrggbb, none, currentColor, black or white.`)
 }
 
@@ -64,7 +68,12 @@ const weightOf = (element: Element, value: string): number =>
   ({ normal: 400, bold: 600 })[value] ?? numberOf(element, 'font-weight', value)
 
 const dashOf = (element: Element, value: string): readonly number[] =>
-  value === 'none' ? [] : value.trim().split(/[\s,]+/).map((part) => numberOf(element, 'stroke-dasharray', part))
+  value === 'none'
+    ? []
+    : value
+        .trim()
+        .split(/[\s,]+/)
+        .map((part) => numberOf(element, 'stroke-dasharray', part))
 
 type Reader = (paint: Paint, element: Element, value: string) => Partial<Paint>
 
@@ -74,10 +83,18 @@ export const PAINT_ATTRIBUTES: Readonly<Record<string, Reader>> = {
   stroke: (_, element, value) => ({ stroke: colourOf(element, 'stroke', value) }),
   'stroke-width': (_, element, value) => ({ strokeWidth: numberOf(element, 'stroke-width', value) }),
   'stroke-dasharray': (_, element, value) => ({ dash: dashOf(element, value) }),
-  'stroke-linecap': (_, element, value) => ({ cap: wordOf(element, 'stroke-linecap', value, ['butt', 'round', 'square']) }),
-  'stroke-linejoin': (_, element, value) => ({ join: wordOf(element, 'stroke-linejoin', value, ['miter', 'round', 'bevel']) }),
-  'fill-opacity': (paint, element, value) => ({ fillOpacity: paint.fillOpacity * numberOf(element, 'fill-opacity', value) }),
-  'stroke-opacity': (paint, element, value) => ({ strokeOpacity: paint.strokeOpacity * numberOf(element, 'stroke-opacity', value) }),
+  'stroke-linecap': (_, element, value) => ({
+    cap: wordOf(element, 'stroke-linecap', value, ['butt', 'round', 'square']),
+  }),
+  'stroke-linejoin': (_, element, value) => ({
+    join: wordOf(element, 'stroke-linejoin', value, ['miter', 'round', 'bevel']),
+  }),
+  'fill-opacity': (paint, element, value) => ({
+    fillOpacity: paint.fillOpacity * numberOf(element, 'fill-opacity', value),
+  }),
+  'stroke-opacity': (paint, element, value) => ({
+    strokeOpacity: paint.strokeOpacity * numberOf(element, 'stroke-opacity', value),
+  }),
   opacity: (paint, element, value) => faded(paint, numberOf(element, 'opacity', value)),
   'font-size': (_, element, value) => ({ fontSize: numberOf(element, 'font-size', value) }),
   'font-weight': (_, element, value) => ({ fontWeight: weightOf(element, value) }),

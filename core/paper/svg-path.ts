@@ -1,10 +1,7 @@
 import { arcCurves, type Curve } from './svg-arc.ts'
 
 /** A drawn line in absolute coordinates: only what PDF knows too. */
-export type Segment =
-  | readonly ['M' | 'L', number, number]
-  | readonly ['C', ...Curve]
-  | readonly ['Z']
+export type Segment = readonly ['M' | 'L', number, number] | readonly ['C', ...Curve] | readonly ['Z']
 
 /** What a path may not hold, as a finished sentence. The reader adds where it stands. */
 export class PathError extends Error {}
@@ -44,7 +41,8 @@ const commands = (data: string): readonly Command[] => {
     if (next) at++
     letter = next ?? letter.replace('M', 'L').replace('m', 'l')
     const count = COUNTS[letter.toUpperCase()]
-    if (count === undefined) throw new PathError(`The path uses “${letter}”. Allowed: ${Object.keys(COUNTS).join(' ')}, capital or small.`)
+    if (count === undefined)
+      throw new PathError(`The path uses “${letter}”. Allowed: ${Object.keys(COUNTS).join(' ')}, capital or small.`)
     if (!next && count === 0) throw new PathError('The path has a number after Z.')
     read.push({ letter, values: values(letter, count) })
     take(BETWEEN)

@@ -15,7 +15,14 @@ export interface SvgPicture {
 export type SvgNode = { readonly transform: Transform | undefined } & (
   | { readonly kind: 'group'; readonly nodes: readonly SvgNode[] }
   | { readonly kind: 'path'; readonly segments: readonly Segment[]; readonly paint: Paint }
-  | { readonly kind: 'text'; readonly text: string; readonly x: number; readonly y: number; readonly paint: Paint; readonly place: Place }
+  | {
+      readonly kind: 'text'
+      readonly text: string
+      readonly x: number
+      readonly y: number
+      readonly paint: Paint
+      readonly place: Place
+    }
 )
 
 type Styles = Readonly<Record<string, SvgStyle>>
@@ -40,11 +47,20 @@ const checkNode = (element: Element): void => {
   const own = GEOMETRY[element.tagName]
   if (!own) {
     const known = Object.keys(GEOMETRY).map((tag) => `<${tag}>`)
-    throw problem('unknown-tag', element, `<${element.tagName}> is not part of the drawings' SVG. Allowed: ${known.join(', ')}.`)
+    throw problem(
+      'unknown-tag',
+      element,
+      `<${element.tagName}> is not part of the drawings' SVG. Allowed: ${known.join(', ')}.`,
+    )
   }
   for (const { name } of element.attrs) {
-    if (own.includes(name) || EVERYWHERE.includes(name) || name in PAINT_ATTRIBUTES || name.startsWith('data-')) continue
-    throw problem('unknown-attribute', element, `<${element.tagName}> has an attribute ${name}, which drawings do not know.`)
+    if (own.includes(name) || EVERYWHERE.includes(name) || name in PAINT_ATTRIBUTES || name.startsWith('data-'))
+      continue
+    throw problem(
+      'unknown-attribute',
+      element,
+      `<${element.tagName}> has an attribute ${name}, which drawings do not know.`,
+    )
   }
 }
 
@@ -54,7 +70,10 @@ const number = (element: Element, name: string, missing = 0): number => {
 }
 
 const points = (element: Element): readonly number[] => {
-  const parts = (attribute(element, 'points') ?? '').trim().split(/[\s,]+/).filter((part) => part !== '')
+  const parts = (attribute(element, 'points') ?? '')
+    .trim()
+    .split(/[\s,]+/)
+    .filter((part) => part !== '')
   if (parts.length % 2 === 0) return parts.map((part) => numberOf(element, 'points', part))
   throw problem('svg-value', element, `points of <${element.tagName}> has an odd count of numbers. Each point is x,y.`)
 }
@@ -70,7 +89,10 @@ const pathOf = (element: Element): readonly Segment[] => {
 
 const SHAPES: Readonly<Record<string, (element: Element) => readonly Segment[]>> = {
   path: pathOf,
-  line: (e) => [['M', number(e, 'x1'), number(e, 'y1')], ['L', number(e, 'x2'), number(e, 'y2')]],
+  line: (e) => [
+    ['M', number(e, 'x1'), number(e, 'y1')],
+    ['L', number(e, 'x2'), number(e, 'y2')],
+  ],
   polyline: (e) => polyline(points(e), false),
   polygon: (e) => polyline(points(e), true),
   rect: (e) => rectangle(number(e, 'x'), number(e, 'y'), number(e, 'width'), number(e, 'height'), number(e, 'rx')),
@@ -81,13 +103,20 @@ const SHAPES: Readonly<Record<string, (element: Element) => readonly Segment[]>>
 /** `dy` moves text by user units, or by its own size when written in em. */
 const shift = (element: Element, paint: Paint): number => {
   const value = attribute(element, 'dy') ?? '0'
-  return value.endsWith('em') ? numberOf(element, 'dy', value.slice(0, -2)) * paint.fontSize : numberOf(element, 'dy', value)
+  return value.endsWith('em')
+    ? numberOf(element, 'dy', value.slice(0, -2)) * paint.fontSize
+    : numberOf(element, 'dy', value)
 }
 
 const words = (element: Element): string => {
   const inner = elements(element)[0]
-  if (inner) throw problem('misplaced-tag', inner, `<${inner.tagName}> may not stand in <text>. Use one <text> for each piece.`)
-  return element.childNodes.map((node) => (isText(node) ? node.value : '')).join('').replace(/\s+/g, ' ').trim()
+  if (inner)
+    throw problem('misplaced-tag', inner, `<${inner.tagName}> may not stand in <text>. Use one <text> for each piece.`)
+  return element.childNodes
+    .map((node) => (isText(node) ? node.value : ''))
+    .join('')
+    .replace(/\s+/g, ' ')
+    .trim()
 }
 
 const readNode = (element: Element, inherited: Paint, styles: Styles): readonly SvgNode[] => {
@@ -107,15 +136,20 @@ const readNode = (element: Element, inherited: Paint, styles: Styles): readonly 
 
 const readNodes = (nodes: readonly Node[], paint: Paint, styles: Styles): readonly SvgNode[] =>
   nodes.flatMap((node) => {
-    if (isText(node) && node.value.trim() !== '') throw problem('loose-text', node, 'Text in a drawing stands in <text>.')
+    if (isText(node) && node.value.trim() !== '')
+      throw problem('loose-text', node, 'Text in a drawing stands in <text>.')
     return isElement(node) ? readNode(node, paint, styles) : []
   })
 
 const viewBox = (element: Element): SvgPicture['box'] => {
-  const numbers = (attribute(element, 'viewBox') ?? '').trim().split(/[\s,]+/).map(Number)
+  const numbers = (attribute(element, 'viewBox') ?? '')
+    .trim()
+    .split(/[\s,]+/)
+    .map(Number)
   const [x, y, width, height] = numbers
   const complete = numbers.length === 4 && numbers.every(Number.isFinite)
-  if (complete && x !== undefined && y !== undefined && width && height && width > 0 && height > 0) return { x, y, width, height }
+  if (complete && x !== undefined && y !== undefined && width && height && width > 0 && height > 0)
+    return { x, y, width, height }
   throw problem('svg-value', element, '<svg> needs viewBox="x y width height" with a width and height above zero.')
 }
 

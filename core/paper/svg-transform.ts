@@ -33,12 +33,19 @@ export const readTransform = (element: Element): Transform | undefined => {
   if (value === undefined || value === '') return undefined
   let matrix: Transform = [1, 0, 0, 1, 0, 0]
   const rest = value.replace(/([a-zA-Z]+)\s*\(([^)]*)\)[\s,]*/g, (part, name: string, list: string) => {
-    const numbers = list.trim().split(/[\s,]+/).map(Number)
+    const numbers = list
+      .split(/[\s,]+/)
+      .filter((word) => word !== '')
+      .map(Number)
     const made = numbers.every(Number.isFinite) ? MAKERS[name]?.(numbers) : undefined
     if (!made) return part
     matrix = after(matrix, made)
     return ''
   })
   if (rest === '') return matrix
-  throw problem('svg-value', element, `transform is “${value}”. Allowed: translate(x y), scale(x y), rotate(degrees x y).`)
+  throw problem(
+    'svg-value',
+    element,
+    `transform is “${value}”. Allowed: translate(x y), scale(x y), rotate(degrees x y).`,
+  )
 }

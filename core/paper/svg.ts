@@ -80,7 +80,14 @@ class Drawing {
  * @param x left edge, `y` top edge, `width`: points
  * @throws PaperError unknown-character, when a text holds a character that no font has
  */
-export const drawSvg = (canvas: Canvas, shaper: Shaper, picture: SvgPicture, x: number, y: number, width: number): void => {
+export const drawSvg = (
+  canvas: Canvas,
+  shaper: Shaper,
+  picture: SvgPicture,
+  x: number,
+  y: number,
+  width: number,
+): void => {
   const { box, nodes } = picture
   const scale = width / box.width
   canvas.saved(() => {

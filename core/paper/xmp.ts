@@ -10,7 +10,13 @@ export interface About {
   readonly conformance: 'A' | 'B'
 }
 
-const ESCAPES: Readonly<Record<string, string>> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;', "'": '&apos;' }
+const ESCAPES: Readonly<Record<string, string>> = {
+  '&': '&amp;',
+  '<': '&lt;',
+  '>': '&gt;',
+  '"': '&quot;',
+  "'": '&apos;',
+}
 
 /**
  * Text as it may stand in XML content or in an attribute.
@@ -18,8 +24,9 @@ const ESCAPES: Readonly<Record<string, string>> = { '&': '&amp;', '<': '&lt;', '
  * @param text any text; characters that XML 1.0 forbids (control characters) are dropped
  */
 export const escapeXml = (text: string): string =>
-  // biome-ignore lint/suspicious/noControlCharactersInRegex: these are what XML 1.0, 2.2 forbids.
-  text.replace(/[\u0000-\u0008\u000b\u000c\u000e-\u001f\ufffe\uffff]/g, '').replace(/[&<>"']/g, (sign) => ESCAPES[sign] ?? sign)
+  text
+    .replace(/[\u0000-\u0008\u000b\u000c\u000e-\u001f\ufffe\uffff]/g, '')
+    .replace(/[&<>"']/g, (sign) => ESCAPES[sign] ?? sign)
 
 /** PDF/A wants a schema of its own for each property that it does not know; `pdfuaid:part` is one (ISO 19005-3, 6.6.2.3). */
 const EXTENSION = `<rdf:Description rdf:about="" xmlns:pdfaExtension="http://www.aiim.org/pdfa/ns/extension/" xmlns:pdfaSchema="http://www.aiim.org/pdfa/ns/schema#" xmlns:pdfaProperty="http://www.aiim.org/pdfa/ns/property#">

@@ -1,7 +1,7 @@
+import type { Cable } from '#core/install.ts'
 import factors from '#schemas/tables/adiabatic-factors.json' with { type: 'json' }
 import sizes from '#schemas/tables/conductor-sizes.json' with { type: 'json' }
 import rules from '#schemas/tables/protective-conductors.json' with { type: 'json' }
-import type { Cable } from '#core/install.ts'
 
 /**
  * Factor k in A·√s/mm² of a conductor that is a core of a cable; undefined where the insulation is not stated.

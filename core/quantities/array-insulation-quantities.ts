@@ -4,14 +4,21 @@ import type { Quantity } from './quantity.ts'
 
 /** What insulation is tested with and held against, alike for an array and for each of its strings. */
 export function arrayInsulationQuantities<Item extends { readonly array: PvArray }>(): Quantity<Item>[] {
-  const from = ['modules_in_series', 'module.voc', 'book.array_band', 'book.array_band_factor', 'site.position.altitude']
+  const from = [
+    'modules_in_series',
+    'module.voc',
+    'book.array_band',
+    'book.array_band_factor',
+    'site.position.altitude',
+  ]
   const source = 'IEC 62446-1:2016+A1:2018, 6.7, as printed for EN 62446-1:2019 by a Swiss test house'
   return [
     {
       name: 'system_voltage',
       unit: 'V',
       title: 'System voltage that selects the test voltage',
-      formula: 'N · Voc · factor of the rule book, or · kT by altitude: 1.15 up to 800 m, 1.20 up to 1500 m, 1.25 above',
+      formula:
+        'N · Voc · factor of the rule book, or · kT by altitude: 1.15 up to 800 m, 1.20 up to 1500 m, 1.25 above',
       source: 'the rule book; kT as printed by a Swiss test house',
       from,
       compute: ({ array }, scene) => systemVoltage(array, scene),

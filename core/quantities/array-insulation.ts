@@ -1,6 +1,6 @@
+import type { PvArray } from '#core/install.ts'
 import altitudes from '#schemas/tables/altitude-factors.json' with { type: 'json' }
 import bands from '#schemas/tables/array-insulation.json' with { type: 'json' }
-import type { PvArray } from '#core/install.ts'
 import type { InsulationTest } from './circuit-insulation.ts'
 import type { Scene } from './quantity.ts'
 

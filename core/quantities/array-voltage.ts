@@ -1,5 +1,5 @@
-import factors from '#schemas/tables/voltage-temperature-factors.json' with { type: 'json' }
 import type { PvArray, PvModule } from '#core/install.ts'
+import factors from '#schemas/tables/voltage-temperature-factors.json' with { type: 'json' }
 
 /** Cell temperature at standard test conditions, °C (IEC 60904-3). */
 const STC = 25

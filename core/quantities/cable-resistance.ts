@@ -1,5 +1,5 @@
-import table from '#schemas/tables/conductor-resistance.json' with { type: 'json' }
 import type { Cable } from '#core/install.ts'
+import table from '#schemas/tables/conductor-resistance.json' with { type: 'json' }
 
 const ROWS: Readonly<Record<string, Readonly<Record<string, number>>>> = table.rows
 

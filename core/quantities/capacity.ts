@@ -1,6 +1,6 @@
+import type { Cable } from '#core/install.ts'
 import capacities from '#schemas/tables/current-carrying-capacity.json' with { type: 'json' }
 import groups from '#schemas/tables/grouping-factors.json' with { type: 'json' }
-import type { Cable } from '#core/install.ts'
 
 type Rows<Cell> = Readonly<Record<string, Cell | undefined>>
 const CAPACITIES: Rows<Rows<Rows<number>>> = capacities.rows

@@ -1,5 +1,5 @@
-import table from '#schemas/tables/disconnection-times.json' with { type: 'json' }
 import type { Earthing } from '#core/install.ts'
+import table from '#schemas/tables/disconnection-times.json' with { type: 'json' }
 
 interface Band {
   readonly above: number

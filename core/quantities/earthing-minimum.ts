@@ -1,5 +1,5 @@
-import table from '#schemas/tables/bonding-conductors.json' with { type: 'json' }
 import type { Earthing } from '#core/install.ts'
+import table from '#schemas/tables/bonding-conductors.json' with { type: 'json' }
 
 /**
  * Smallest earthing conductor in mm² of copper.

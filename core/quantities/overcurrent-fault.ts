@@ -4,8 +4,8 @@ import { distributionTime } from './disconnection-time.ts'
 import { faultCurrentAlong, loopLimit, loopLimitMeasured } from './loop-impedance.ts'
 import { usable } from './loop-reading.ts'
 import { loopExpected, resistanceToDevice } from './loop-route.ts'
-import { operatingCurrent } from './overcurrent-operating.ts'
 import type { OvercurrentItem } from './overcurrent-item.ts'
+import { operatingCurrent } from './overcurrent-operating.ts'
 import type { Quantity, Scene } from './quantity.ts'
 
 function largestLoop(id: string, scene: Scene): number | undefined {

@@ -1,6 +1,6 @@
+import type { Device } from '#core/install.ts'
 import breakers from '#schemas/tables/breaker-bands.json' with { type: 'json' }
 import fuses from '#schemas/tables/fuse-currents.json' with { type: 'json' }
-import type { Device } from '#core/install.ts'
 
 const FUSE_ROWS: Readonly<Record<string, Readonly<Record<string, number>> | undefined>> = fuses.rows
 

@@ -1,5 +1,5 @@
-import type { Install } from '#core/install.ts'
 import type { SheetValue, Subject } from '#core/glossary.ts'
+import type { Install } from '#core/install.ts'
 import type { Topology } from '#core/topology/topology.ts'
 import type { Parameters } from './parameters.ts'
 

@@ -1,6 +1,6 @@
+import type { ResidualProtection } from '#core/install.ts'
 import currents from '#schemas/tables/residual-trip-currents.json' with { type: 'json' }
 import times from '#schemas/tables/residual-trip-times.json' with { type: 'json' }
-import type { ResidualProtection } from '#core/install.ts'
 
 /** Residual current of a trip-time test, as a multiple of the rated one. */
 export type TestMultiple = 'rated' | 'double' | 'five times'
@@ -36,7 +36,10 @@ export function shortestTripTime(
  *
  * @source EN 61008-1 for types AC and A; F as A; B from memory
  */
-export function rampBand({ type, residual }: ResidualProtection): { readonly lowest: number; readonly highest: number } {
+export function rampBand({ type, residual }: ResidualProtection): {
+  readonly lowest: number
+  readonly highest: number
+} {
   const { lowest, highest, highestSmall } = currents.rows[type]
   return { lowest: lowest * residual, highest: (residual <= currents.small ? highestSmall : highest) * residual }
 }

@@ -1,6 +1,6 @@
-import table from '#schemas/tables/uncertainty.json' with { type: 'json' }
 import type { Reading, Span } from '#core/glossary.ts'
 import type { Instrument, UncertaintyKind } from '#core/install.ts'
+import table from '#schemas/tables/uncertainty.json' with { type: 'json' }
 
 /** A relative uncertainty and where it comes from. */
 export interface Uncertainty {

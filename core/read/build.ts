@@ -1,4 +1,12 @@
-import { type Event, EVENT_ID, getScalarValue, type MappingEvent, SCALAR_STYLE, type ScalarEvent, type SequenceEvent } from 'js-yaml'
+import {
+  EVENT_ID,
+  type Event,
+  getScalarValue,
+  type MappingEvent,
+  SCALAR_STYLE,
+  type ScalarEvent,
+  type SequenceEvent,
+} from 'js-yaml'
 import { type Fault, problem } from '../errors.ts'
 import type { Path, Problem } from '../glossary.ts'
 import { NOWHERE, type Parsed } from './events.ts'

@@ -32,7 +32,7 @@ export function decimal(text: string): Decimal {
  */
 export function convert(number: Decimal, from: Unit, to: Unit): number {
   const power = number.exponent + from.power - to.power
-  const common = from.times > to.times ? to.times : from.times
+  const common = Math.min(from.times, to.times)
   const digits = BigInt(number.digits) * BigInt(from.times / common)
   const value = Number(`${digits}e${power}`) / (to.times / common)
   return number.negative && value !== 0 ? -value : value

@@ -1,10 +1,10 @@
-import { COLLECTION_STYLE, type Event, EVENT_ID, SCALAR_STYLE, type ScalarEvent } from 'js-yaml'
+import { COLLECTION_STYLE, EVENT_ID, type Event, SCALAR_STYLE, type ScalarEvent } from 'js-yaml'
 import { problem } from '../errors.ts'
 import type { Path, Problem } from '../glossary.ts'
 import { NOWHERE, type Parsed, ROOT, stretchOf } from './events.ts'
 import { type Change, insertion } from './insert.ts'
 import { child, type Step } from './locate.ts'
-import { type Explain, read, type ReadResult } from './read.ts'
+import { type Explain, type ReadResult, read } from './read.ts'
 import { type Quotes, writeScalar } from './scalar-source.ts'
 import { sameTree, withValue } from './tree.ts'
 import { quote } from './words.ts'
@@ -76,7 +76,9 @@ function changeFor(parsed: Parsed, path: Path, text: string): Change | undefined
 }
 
 function isFlow(event: Event | undefined): boolean {
-  return (event?.type === EVENT_ID.MAPPING || event?.type === EVENT_ID.SEQUENCE) && event.style === COLLECTION_STYLE.FLOW
+  return (
+    (event?.type === EVENT_ID.MAPPING || event?.type === EVENT_ID.SEQUENCE) && event.style === COLLECTION_STYLE.FLOW
+  )
 }
 
 /** A value in place of one that stands there already; what takes several lines is only replaced if it is text. */

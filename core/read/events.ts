@@ -1,4 +1,4 @@
-import { type Event, EVENT_ID, getScalarValue, type ScalarEvent, SCALAR_STYLE } from 'js-yaml'
+import { EVENT_ID, type Event, getScalarValue, SCALAR_STYLE, type ScalarEvent } from 'js-yaml'
 
 /** A parsed file: its text and the parser's flat list of events, which point into the text. */
 export interface Parsed {

@@ -1,12 +1,12 @@
 import { type Document, Lexer, parseDocument, type YAMLError } from 'yaml'
-import { problem, type ProblemCode } from '../errors.ts'
+import { type ProblemCode, problem } from '../errors.ts'
 import type { Problem } from '../glossary.ts'
 import { rangeOf, restOfLine } from './positions.ts'
 import { type Excess, prescan } from './prescan.ts'
 import { problemList } from './problem-list.ts'
 import { type Locate, read } from './read.ts'
 import * as refusals from './refusals.ts'
-import { type Scene, wordsFor } from './syntax-words.ts'
+import { isEcho, type Scene, wordsFor } from './syntax-words.ts'
 import { quote } from './words.ts'
 
 /**
@@ -84,9 +84,9 @@ function inWords(text: string, errors: readonly YAMLError[]): readonly Problem[]
   for (const error of [...errors].sort((one, other) => one.pos[0] - other.pos[0])) {
     const [start] = error.pos
     if (start <= told) continue
-    const lineEnd = text.indexOf('\n', start)
-    told = lineEnd === -1 ? text.length : lineEnd
-    found.add(() => problemOf(text, error))
+    const echo = told !== -1 && isEcho(sceneOf(text, error))
+    told = start + restOfLine(text, start).length
+    if (!echo) found.add(() => problemOf(text, error))
   }
   return found.all()
 }

@@ -4,7 +4,7 @@ import { afterIndicator, afterNode, NOWHERE, type Parsed, stretchOf } from './ev
 import type { Step } from './locate.ts'
 import type { PlainValue } from './plain.ts'
 import { rangeOf, restOfLine } from './positions.ts'
-import { writeKey, writeScalar, type Written } from './scalar-source.ts'
+import { type Written, writeKey, writeScalar } from './scalar-source.ts'
 
 /** A stretch of the text and what comes in its place; `value` is what the new scalar is read as. */
 export interface Change {
@@ -72,7 +72,12 @@ function lengthOf({ events }: Parsed, index: number): number {
 }
 
 /** `, key: value` behind the last entry, or alone between the brackets. */
-function intoBrackets(place: Place, event: MappingEvent | SequenceEvent, missing: Path, text: string): Change | undefined {
+function intoBrackets(
+  place: Place,
+  event: MappingEvent | SequenceEvent,
+  missing: Path,
+  text: string,
+): Change | undefined {
   const { parsed, step } = place
   if (!/[{[]/.test(parsed.text.charAt(event.start))) return undefined
   const { source, value } = inFlow(missing, text)

@@ -87,7 +87,10 @@ export function numberFault(source: string, otherwise: string): Fault | undefine
 
 /** Digits from the first to the last that is not zero, without the exponent. */
 function significantDigits(source: string): string {
-  return source.replace(/[eE].*$/, '').replace(/[^0-9]/g, '').replace(/^0+|0+$/g, '')
+  return source
+    .replace(/[eE].*$/, '')
+    .replace(/[^0-9]/g, '')
+    .replace(/^0+|0+$/g, '')
 }
 
 function rounded(source: string): string {

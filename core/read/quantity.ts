@@ -43,7 +43,10 @@ function unitOf(kind: string, unit: string): Unit {
 
 /** One kind of blank, one kind of minus. */
 function tidy(text: string): string {
-  return text.replace(BLANKS, ' ').trim().replace(/^[\u2212\u2012\u2013]/, '-')
+  return text
+    .replace(BLANKS, ' ')
+    .trim()
+    .replace(/^[\u2212\u2012\u2013]/, '-')
 }
 
 function parseText(text: string, kind: string, wanted: Unit): Parsed<number> {

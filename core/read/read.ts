@@ -58,7 +58,8 @@ export function read(text: string, explain?: Explain): ReadResult {
 
 /** The fast parser stops at its first error, and takes tabs amiss that the slow reader lets pass. */
 function firstError(text: string, reason: string, range: Range): Problem {
-  if (restOfLine(text, range.offset - range.column + 1).includes('\t')) return problem('tab', [], 'A tab stands in this line: replace it by spaces.', range)
+  if (restOfLine(text, range.offset - range.column + 1).includes('\t'))
+    return problem('tab', [], 'A tab stands in this line: replace it by spaces.', range)
   const message = `This is not well-formed YAML (${reason}): look at this line and the one before it.`
   return problem('syntax', [], message, range)
 }

@@ -1,7 +1,7 @@
 import type { Fault } from '../errors.ts'
 import type { Cable, Device } from '../install.ts'
 import { type Block, isBlock, quantityUnder, together, unknownKey, wordUnder } from './block.ts'
-import { type Parsed, parseQuantity } from './quantity.ts'
+import type { Parsed } from './quantity.ts'
 import { either, quote } from './words.ts'
 
 const BREAKER = /^([BCD]) ?([0-9]{1,4}(?:\.[0-9])?)(?: ?A)?$/
@@ -26,7 +26,8 @@ function shortDevice(value: unknown): Parsed<Device> {
   if (typeof value !== 'string') return noDevice(`This is not a protective device: ${DEVICES}.`)
   const text = value.trim()
   const [, curve, breaker] = BREAKER.exec(text) ?? []
-  if (curve === 'B' || curve === 'C' || curve === 'D') return rated(text, { kind: 'breaker', curve, rated: Number(breaker) })
+  if (curve === 'B' || curve === 'C' || curve === 'D')
+    return rated(text, { kind: 'breaker', curve, rated: Number(breaker) })
   const fuse = FUSE.exec(text)?.[1]
   if (fuse !== undefined) return rated(text, { kind: 'fuse', curve: 'gG', rated: Number(fuse) })
   return noDevice(`${quote(text)} is not a protective device that is known: ${mendedDevice(text)}.`)
@@ -57,7 +58,8 @@ function longDevice(block: Block): Parsed<Device> {
   const device = shortDevice(block[name])
   if (!device.ok) return { ...device, at: [name] }
   const { kind } = device.value
-  if (kind !== name) return { ...noDevice(`${quote(String(block[name]))} is a ${kind}: write “${kind}” before it.`), at: [name] }
+  if (kind !== name)
+    return { ...noDevice(`${quote(String(block[name]))} is a ${kind}: write “${kind}” before it.`), at: [name] }
   const parts = [
     quantityUnder(block, 'breaking', 'current', 'A'),
     quantityUnder(block, 'let_through', 'let-through', 'A²s'),
@@ -107,7 +109,8 @@ function cores(value: unknown): Parsed<Pick<Cable, 'line' | 'neutral' | 'protect
   if (typeof value !== 'string') return noCable(`This is not a cable: ${CABLES}.`)
   const text = value.trim()
   const [, count, letter = '', size] = TYPE.exec(text) ?? []
-  if (count === undefined || size === undefined) return noCable(`${quote(text)} is not a cable that is known: ${mendedCable(text)}.`)
+  if (count === undefined || size === undefined)
+    return noCable(`${quote(text)} is not a cable that is known: ${mendedCable(text)}.`)
   const line = Number(size)
   const fault = sizeFault(line)
   if (fault !== undefined) return { ok: false, ...fault }

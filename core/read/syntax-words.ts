@@ -25,6 +25,8 @@ interface Wording {
 /** `>` or `|` where a value begins, with more than the header of a block of text behind it. */
 const BOUND = /(?<=[:-] )[|>].*$/
 
+const NO_DASHES = 'Items inside brackets have no dashes: delete the dash, and separate the items by commas.'
+
 /** What each error of the parser means to whoever wrote the file. The first that fits is told. */
 const WORDINGS: readonly Wording[] = [
   {
@@ -38,7 +40,7 @@ const WORDINGS: readonly Wording[] = [
     reason: /Block scalar header|Not a YAML token/,
     when: ({ line }) => BOUND.test(line),
     problem: 'needs-quotes',
-    say: ({ line }) => quotesNeeded(BOUND.exec(line)?.[0] ?? line),
+    say: ({ line }) => quotesNeeded(line.slice(line.search(BOUND))),
   },
   {
     code: 'BAD_DQ_ESCAPE',
@@ -51,6 +53,13 @@ const WORDINGS: readonly Wording[] = [
     when: ({ line }) => /^\s*[^\s:#]+:[^\s:]/.test(line),
     problem: 'missing-space',
     say: ({ line }) => `A space is missing after the colon: write “${line.trim().replace(':', ': ')}”.`,
+  },
+  {
+    code: 'MULTILINE_IMPLICIT_KEY',
+    reason: /flow sequence/,
+    when: ({ rest }) => /^- /.test(rest),
+    problem: 'indentation',
+    say: () => NO_DASHES,
   },
   {
     code: 'MULTILINE_IMPLICIT_KEY',
@@ -76,6 +85,12 @@ const WORDINGS: readonly Wording[] = [
       `The next line is indented as if it belonged to the value ${quote(rest)}: align it with the keys it stands among.`,
   },
   { code: 'BAD_INDENT', problem: 'indentation', say: ({ line }) => misaligned(line) },
+  {
+    code: 'BLOCK_IN_FLOW',
+    when: ({ rest }) => /^- /.test(rest),
+    problem: 'indentation',
+    say: () => NO_DASHES,
+  },
   {
     code: 'BLOCK_IN_FLOW',
     problem: 'missing-comma',
@@ -116,13 +131,21 @@ const WORDINGS: readonly Wording[] = [
     code: 'UNEXPECTED_TOKEN',
     reason: /block-seq-ind/,
     problem: 'indentation',
-    say: () => 'A list item stands where a key belongs: put the list under a key, or indent it by two more spaces.',
+    say: ({ rest }) =>
+      `A list cannot begin on the line of its key: put ${quote(rest)} on the line below, indented by two spaces.`,
   },
   {
     code: 'UNEXPECTED_TOKEN',
     reason: /Unexpected ,|empty item/,
     problem: 'missing-comma',
     say: () => 'There is a comma with nothing in front of it: delete it, or write the missing entry.',
+  },
+  {
+    code: 'UNEXPECTED_TOKEN',
+    when: (scene) => /["']\s*$/.test(inFront(scene)),
+    problem: 'unclosed-quote',
+    say: ({ rest }) =>
+      `The quotes end in front of ${quote(rest)}: where a quote belongs to the text, use the other kind of quotes around it.`,
   },
   {
     code: 'UNEXPECTED_TOKEN',
@@ -144,11 +167,27 @@ const WORDINGS: readonly Wording[] = [
  */
 export function wordsFor(scene: Scene): { readonly code: ProblemCode; readonly message: string } {
   const wording = WORDINGS.find(
-    ({ code, reason, when }) =>
-      code === scene.code && (reason?.test(scene.reason) ?? true) && (when?.(scene) ?? true),
+    ({ code, reason, when }) => code === scene.code && (reason?.test(scene.reason) ?? true) && (when?.(scene) ?? true),
   )
   if (wording !== undefined) return { code: wording.problem, message: wording.say(scene) }
-  return { code: 'syntax', message: `This is not well-formed YAML (${scene.reason}): look at this line and the one before.` }
+  return {
+    code: 'syntax',
+    message: `This is not well-formed YAML (${scene.reason}): look at this line and the one before.`,
+  }
+}
+
+/** The line up to the error. */
+function inFront({ line, rest }: Scene): string {
+  return line.slice(0, line.length - rest.length)
+}
+
+/** Whether an error is only the echo of an earlier one: the parser has lost its place and takes no line for what it is. */
+export function isEcho(scene: Scene): boolean {
+  return (
+    scene.code === 'UNEXPECTED_TOKEN' &&
+    / at node end| in YAML stream/.test(scene.reason) &&
+    inFront(scene).trim() === ''
+  )
 }
 
 /** The value that begins here, up to what ends it inside brackets or before a comment. */

@@ -23,7 +23,9 @@ export function withValue(tree: unknown, path: Path, value: unknown): unknown {
 /** Whether two trees hold the same values; the order of keys does not matter. */
 export function sameTree(one: unknown, other: unknown): boolean {
   if (Array.isArray(one)) {
-    return Array.isArray(other) && one.length === other.length && one.every((item, index) => sameTree(item, other[index]))
+    return (
+      Array.isArray(other) && one.length === other.length && one.every((item, index) => sameTree(item, other[index]))
+    )
   }
   if (!isBlock(one)) return Object.is(one, other)
   if (!isBlock(other)) return false

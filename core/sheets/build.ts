@@ -34,16 +34,24 @@ function measure(
   if (span.low !== span.high) into.spans[field.name] = span
 }
 
-function fillState<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene, state: State, instrument: Parameters<typeof spanOf>[2]): Columns {
+function fillState<Item>(
+  plan: SheetPlan<Item>,
+  item: Item,
+  scene: Scene,
+  state: State,
+  instrument: Parameters<typeof spanOf>[2],
+): Columns {
   const into = columns()
   for (const field of plan.inState ?? []) put(into, field.name, field.value(item, scene, state))
-  for (const field of plan.measuredInState ?? []) measure(into, field, field.path(item, state), field.reading(item, scene, state), instrument)
+  for (const field of plan.measuredInState ?? [])
+    measure(into, field, field.path(item, state), field.reading(item, scene, state), instrument)
   return into
 }
 
 function compute<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene, into: Columns): void {
   const known: Record<string, SheetValue | undefined> = into.values as Record<string, SheetValue>
-  for (const quantity of plan.quantities ?? []) put(into, quantity.name, quantity.compute(item, scene, known satisfies Known))
+  for (const quantity of plan.quantities ?? [])
+    put(into, quantity.name, quantity.compute(item, scene, known satisfies Known))
 }
 
 function sheetOf<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene): Sheet {
@@ -55,7 +63,8 @@ function sheetOf<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene): Sheet {
     common.at[field.name] = [...path, ...field.at]
     put(common, field.name, field.value(item, scene))
   }
-  for (const field of plan.measured ?? []) measure(common, field, field.path(item), field.reading(item, scene), instrument)
+  for (const field of plan.measured ?? [])
+    measure(common, field, field.path(item), field.reading(item, scene), instrument)
   compute(plan, item, scene, common)
   const grid = fillState(plan, item, scene, 'grid', instrument)
   const island = fillState(plan, item, scene, 'island', instrument)

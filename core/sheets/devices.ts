@@ -1,8 +1,8 @@
-import { overcurrentFamily } from '#core/quantities/overcurrent.ts'
-import { residualCurrentFamily } from '#core/quantities/residual-current.ts'
-import type { OvercurrentDevice, ResidualCurrentDevice, ResidualTest } from '#core/install.ts'
 import type { State } from '#core/glossary.ts'
+import type { OvercurrentDevice, ResidualCurrentDevice, ResidualTest } from '#core/install.ts'
+import { overcurrentFamily } from '#core/quantities/overcurrent.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
+import { residualCurrentFamily } from '#core/quantities/residual-current.ts'
 import { fromTree } from './place.ts'
 import { entered, type SheetPlan, type StateMeasuredField } from './plan.ts'
 
@@ -23,7 +23,10 @@ function residualReading(
   kind: 'residual_time' | 'residual_current',
 ): StateMeasuredField<ResidualItem> {
   return {
-    name, unit, title, kind,
+    name,
+    unit,
+    title,
+    kind,
     path: ({ id }, state) => ['readings', 'residual_current', id, state, name],
     reading: (item, scene, state) => testOf(item, scene, state)?.[name],
   }
@@ -49,24 +52,57 @@ export const residualCurrentPlan: SheetPlan<ResidualItem> = {
     entered('residual', 'mA', 'Rated residual current', ['residual'], ({ device }) => device.residual),
     entered('delayed', '', 'Time-delayed', ['delay'], ({ device }) => device.delay === 'S'),
     entered('backed_up', '', 'On the backed-up side', ['fed_from'], ({ id }, scene) => fromTree(id, scene)?.backedUp),
-    entered('feeds_changeover', '', 'Upstream of the changeover', ['fed_from'], ({ id }, { install, topology }) =>
-      topology.nodes.get(install.changeover.id)?.route.includes(id) ?? false),
-    entered('circuits_below', '', 'Circuits that it protects', ['fed_from'], ({ id }, { topology }) => topology.circuitsBelow(id)),
-    entered('types_needed', '', 'Types that the island\'s inverters ask for', ['type'], (_, scene) => typesNeeded(scene)),
-    entered('island_separation', '', 'Separation between d.c. and a.c. in the island\'s inverters', ['type'], (_, { install, topology }) =>
-      topology.inverters.island.flatMap((id) => install.inverters?.[id]?.separation ?? [])),
+    entered(
+      'feeds_changeover',
+      '',
+      'Upstream of the changeover',
+      ['fed_from'],
+      ({ id }, { install, topology }) => topology.nodes.get(install.changeover.id)?.route.includes(id) ?? false,
+    ),
+    entered('circuits_below', '', 'Circuits that it protects', ['fed_from'], ({ id }, { topology }) =>
+      topology.circuitsBelow(id),
+    ),
+    entered('types_needed', '', "Types that the island's inverters ask for", ['type'], (_, scene) =>
+      typesNeeded(scene),
+    ),
+    entered(
+      'island_separation',
+      '',
+      "Separation between d.c. and a.c. in the island's inverters",
+      ['type'],
+      (_, { install, topology }) =>
+        topology.inverters.island.flatMap((id) => install.inverters?.[id]?.separation ?? []),
+    ),
     entered('earthing_system', '', 'Earthing system', ['fed_from'], (_, { install }) => install.supply.earthing),
   ],
   inState: [
-    { name: 'live', unit: '', title: 'Live', at: ['fed_from'], value: ({ id }, { topology }, state) => topology.live(id, state) },
-    { name: 'half_tripped', unit: '', title: 'Operated at half its rated residual current', at: [], value: (item, scene, state) => {
-      const half = testOf(item, scene, state)?.half
-      return half && 'value' in half ? half.noTrip !== true : undefined
-    } },
-    { name: 'rated_tripped', unit: '', title: 'Operated at its rated residual current', at: [], value: (item, scene, state) => {
-      const rated = testOf(item, scene, state)?.rated
-      return rated && 'value' in rated ? rated.noTrip !== true : undefined
-    } },
+    {
+      name: 'live',
+      unit: '',
+      title: 'Live',
+      at: ['fed_from'],
+      value: ({ id }, { topology }, state) => topology.live(id, state),
+    },
+    {
+      name: 'half_tripped',
+      unit: '',
+      title: 'Operated at half its rated residual current',
+      at: [],
+      value: (item, scene, state) => {
+        const half = testOf(item, scene, state)?.half
+        return half && 'value' in half ? half.noTrip !== true : undefined
+      },
+    },
+    {
+      name: 'rated_tripped',
+      unit: '',
+      title: 'Operated at its rated residual current',
+      at: [],
+      value: (item, scene, state) => {
+        const rated = testOf(item, scene, state)?.rated
+        return rated && 'value' in rated ? rated.noTrip !== true : undefined
+      },
+    },
   ],
   measuredInState: [
     residualReading('half', 'ms', 'Test at half the rated residual current', 'residual_time'),
@@ -93,8 +129,16 @@ export const overcurrentPlan: SheetPlan<OvercurrentItem> = {
     entered('kind', '', 'Kind of device', ['device'], ({ device }) => device.device.kind),
     entered('curve', '', 'Characteristic', ['device'], ({ device }) => device.device.curve),
     entered('rated', 'A', 'Rating', ['device'], ({ device }) => device.device.rated),
-    entered('breaking_capacity', 'A', 'Breaking capacity', ['breaking'], ({ device }) => device.breaking ?? device.device.breaking),
+    entered(
+      'breaking_capacity',
+      'A',
+      'Breaking capacity',
+      ['breaking'],
+      ({ device }) => device.breaking ?? device.device.breaking,
+    ),
     entered('backed_up', '', 'On the backed-up side', ['fed_from'], ({ id }, scene) => fromTree(id, scene)?.backedUp),
-    entered('circuits_below', '', 'Circuits that it protects', ['fed_from'], ({ id }, { topology }) => topology.circuitsBelow(id)),
+    entered('circuits_below', '', 'Circuits that it protects', ['fed_from'], ({ id }, { topology }) =>
+      topology.circuitsBelow(id),
+    ),
   ],
 }

@@ -1,24 +1,45 @@
+import type { Subject } from '#core/glossary.ts'
 import { changeoverPlan } from './changeover.ts'
 import { circuitPlan } from './circuit.ts'
 import { overcurrentPlan, residualCurrentPlan } from './devices.ts'
 import { installationPlan } from './installation.ts'
 import { busPlan, meterPlan } from './metering.ts'
 import { earthingPlan, supplyPlan } from './origin.ts'
+import type { FieldWords } from './plan.ts'
 import { instrumentPlan, loadStepPlan, personPlan, transferPlan } from './record.ts'
 import { arrayPlan, batteryPlan, inverterPlan } from './sources.ts'
 import { stringPlan } from './string.ts'
-import type { FieldWords } from './plan.ts'
-import type { Subject } from '#core/glossary.ts'
 
 /** Every kind of sheet, in the order of the report. */
 export const PLANS = [
-  installationPlan, supplyPlan, earthingPlan, changeoverPlan, overcurrentPlan, residualCurrentPlan, circuitPlan, inverterPlan,
-  arrayPlan, stringPlan, batteryPlan, meterPlan, busPlan, instrumentPlan, transferPlan, loadStepPlan, personPlan,
+  installationPlan,
+  supplyPlan,
+  earthingPlan,
+  changeoverPlan,
+  overcurrentPlan,
+  residualCurrentPlan,
+  circuitPlan,
+  inverterPlan,
+  arrayPlan,
+  stringPlan,
+  batteryPlan,
+  meterPlan,
+  busPlan,
+  instrumentPlan,
+  transferPlan,
+  loadStepPlan,
+  personPlan,
 ] as const
 
 /** Words for every field that a rule may name, by subject. */
 export function fieldsOf(subject: Subject): ReadonlyMap<string, FieldWords> {
   const plan = PLANS.find((candidate) => candidate.subject === subject)
-  const lists: readonly (readonly FieldWords[] | undefined)[] = [plan?.entered, plan?.quantities, plan?.inState, plan?.measured, plan?.measuredInState]
+  const lists: readonly (readonly FieldWords[] | undefined)[] = [
+    plan?.entered,
+    plan?.quantities,
+    plan?.inState,
+    plan?.measured,
+    plan?.measuredInState,
+  ]
   return new Map(lists.flatMap((list) => list ?? []).map((field) => [field.name, field]))
 }

@@ -1,5 +1,5 @@
-import type { Circuit } from '#core/install.ts'
 import type { State } from '#core/glossary.ts'
+import type { Circuit } from '#core/install.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
 
 /** Ids of the residual-current protection that a fault current of the circuit passes in the state; its own device under its own id. */

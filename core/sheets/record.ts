@@ -1,5 +1,5 @@
-import type { Instrument, LoadStep, Person, Transfer } from '#core/install.ts'
 import { LINES } from '#core/glossary.ts'
+import type { Instrument, LoadStep, Person, Transfer } from '#core/install.ts'
 import { entered, type MeasuredField, type SheetPlan } from './plan.ts'
 
 export interface InstrumentItem {
@@ -18,15 +18,33 @@ export const instrumentPlan: SheetPlan<InstrumentItem> = {
     entered('serial', '', 'Serial number', ['serial'], ({ instrument }) => instrument.serial),
     entered('calibrated', '', 'Calibrated on', ['calibrated'], ({ instrument }) => instrument.calibrated),
     entered('due', '', 'Calibration due', ['due'], ({ instrument }) => instrument.due),
-    entered('due_before_end', '', 'Calibration ran out before the inspection ended', ['due'], ({ instrument }, { install }) => {
-      const end = install.report.inspected?.to ?? install.report.inspected?.from
-      return end === undefined ? undefined : instrument.due < end
-    }),
-    entered('calibrated_after_start', '', 'Calibrated only after the inspection began', ['calibrated'], ({ instrument }, { install }) => {
-      const start = install.report.inspected?.from
-      return start === undefined ? undefined : instrument.calibrated > start
-    }),
-    entered('due_before_calibrated', '', 'Due before it was calibrated', ['due'], ({ instrument }) => instrument.due <= instrument.calibrated),
+    entered(
+      'due_before_end',
+      '',
+      'Calibration ran out before the inspection ended',
+      ['due'],
+      ({ instrument }, { install }) => {
+        const end = install.report.inspected?.to ?? install.report.inspected?.from
+        return end === undefined ? undefined : instrument.due < end
+      },
+    ),
+    entered(
+      'calibrated_after_start',
+      '',
+      'Calibrated only after the inspection began',
+      ['calibrated'],
+      ({ instrument }, { install }) => {
+        const start = install.report.inspected?.from
+        return start === undefined ? undefined : instrument.calibrated > start
+      },
+    ),
+    entered(
+      'due_before_calibrated',
+      '',
+      'Due before it was calibrated',
+      ['due'],
+      ({ instrument }) => instrument.due <= instrument.calibrated,
+    ),
   ],
 }
 
@@ -39,7 +57,10 @@ type TransferReading = 'dark_after' | 'restored_after' | 'observed' | 'gap'
 
 function transferReading(name: TransferReading, title: string): MeasuredField<TransferItem> {
   return {
-    name, unit: 's', title, kind: 'time',
+    name,
+    unit: 's',
+    title,
+    kind: 'time',
     path: ({ index }) => ['readings', 'transfers', index, name],
     reading: ({ transfer }) => transfer[name],
   }
@@ -55,25 +76,41 @@ export const transferPlan: SheetPlan<TransferItem> = {
     entered('to', '', 'To the state', ['to'], ({ transfer }) => transfer.to),
     entered('cause', '', 'How it was brought about', ['cause'], ({ transfer }) => transfer.cause),
     entered('cause_upstream', '', 'By opening the supply upstream of the changeover', ['cause'], ({ transfer }) =>
-      transfer.cause === undefined ? undefined : /upstream/i.test(transfer.cause)),
+      transfer.cause === undefined ? undefined : /upstream/i.test(transfer.cause),
+    ),
     entered('poles_expected', '', 'Poles to be found dead', ['grid_terminals'], (_, { install }) => [
-      ...LINES.slice(0, install.supply.nominal.phases), 'N']),
-    entered('poles_read', '', 'Poles that were read', ['grid_terminals'], ({ transfer }) => Object.keys(transfer.grid_terminals ?? {})),
+      ...LINES.slice(0, install.supply.nominal.phases),
+      'N',
+    ]),
+    entered('poles_read', '', 'Poles that were read', ['grid_terminals'], ({ transfer }) =>
+      Object.keys(transfer.grid_terminals ?? {}),
+    ),
     entered('poles_not_read', '', 'Poles that were not read', ['grid_terminals'], ({ transfer }, { install }) =>
-      [...LINES.slice(0, install.supply.nominal.phases), 'N'].filter((pole) => !Object.hasOwn(transfer.grid_terminals ?? {}, pole))),
-    entered('reconnect_after', 's', 'Waiting time set in the island\'s inverter', [], (_, { install, topology }) =>
-      topology.inverters.island.map((id) => install.inverters?.[id]?.interface_protection?.reconnect_after).find((time) => time !== undefined)),
+      [...LINES.slice(0, install.supply.nominal.phases), 'N'].filter(
+        (pole) => !Object.hasOwn(transfer.grid_terminals ?? {}, pole),
+      ),
+    ),
+    entered('reconnect_after', 's', "Waiting time set in the island's inverter", [], (_, { install, topology }) =>
+      topology.inverters.island
+        .map((id) => install.inverters?.[id]?.interface_protection?.reconnect_after)
+        .find((time) => time !== undefined),
+    ),
   ],
   measured: [
     transferReading('dark_after', 'From the loss of the grid to dead terminals'),
     transferReading('restored_after', 'From the loss of the grid to restored supply'),
     transferReading('observed', 'From the return of the grid to the transfer back'),
     transferReading('gap', 'Interruption at the transfer back'),
-    ...([...LINES, 'N'] as const).map((pole): MeasuredField<TransferItem> => ({
-      name: `grid_${pole}`, unit: 'V', title: `Voltage left on the grid terminal ${pole}`, kind: 'voltage',
-      path: ({ index }) => ['readings', 'transfers', index, 'grid_terminals', pole],
-      reading: ({ transfer }) => transfer.grid_terminals?.[pole],
-    })),
+    ...([...LINES, 'N'] as const).map(
+      (pole): MeasuredField<TransferItem> => ({
+        name: `grid_${pole}`,
+        unit: 'V',
+        title: `Voltage left on the grid terminal ${pole}`,
+        kind: 'voltage',
+        path: ({ index }) => ['readings', 'transfers', index, 'grid_terminals', pole],
+        reading: ({ transfer }) => transfer.grid_terminals?.[pole],
+      }),
+    ),
   ],
 }
 
@@ -93,12 +130,38 @@ export const loadStepPlan: SheetPlan<LoadStepItem> = {
     entered('tripped', '', 'The supply tripped', ['tripped'], ({ step }) => step.tripped),
     entered('nominal_voltage', 'V', 'Nominal voltage', [], (_, { install }) => install.supply.nominal.voltage),
     entered('nominal_frequency', 'Hz', 'Nominal frequency', [], (_, { install }) => install.supply.nominal.frequency),
-    entered('voltage_floor', 'V', 'Nominal voltage less 15 %', [], (_, { install }) => install.supply.nominal.voltage * 0.85),
-    entered('frequency_floor', 'Hz', 'Nominal frequency less 2 %', [], (_, { install }) => install.supply.nominal.frequency * 0.98),
+    entered(
+      'voltage_floor',
+      'V',
+      'Nominal voltage less 15 %',
+      [],
+      (_, { install }) => install.supply.nominal.voltage * 0.85,
+    ),
+    entered(
+      'frequency_floor',
+      'Hz',
+      'Nominal frequency less 2 %',
+      [],
+      (_, { install }) => install.supply.nominal.frequency * 0.98,
+    ),
   ],
   measured: [
-    { name: 'lowest_voltage', unit: 'V', title: 'Lowest voltage', kind: 'voltage', path: ({ index }) => ['readings', 'load_steps', index, 'lowest_voltage'], reading: ({ step }) => step.lowest_voltage },
-    { name: 'lowest_frequency', unit: 'Hz', title: 'Lowest frequency', kind: 'frequency', path: ({ index }) => ['readings', 'load_steps', index, 'lowest_frequency'], reading: ({ step }) => step.lowest_frequency },
+    {
+      name: 'lowest_voltage',
+      unit: 'V',
+      title: 'Lowest voltage',
+      kind: 'voltage',
+      path: ({ index }) => ['readings', 'load_steps', index, 'lowest_voltage'],
+      reading: ({ step }) => step.lowest_voltage,
+    },
+    {
+      name: 'lowest_frequency',
+      unit: 'Hz',
+      title: 'Lowest frequency',
+      kind: 'frequency',
+      path: ({ index }) => ['readings', 'load_steps', index, 'lowest_frequency'],
+      reading: ({ step }) => step.lowest_frequency,
+    },
   ],
 }
 

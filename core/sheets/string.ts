@@ -1,6 +1,6 @@
-import { stringFamily } from '#core/quantities/string.ts'
 import type { PvArray, StringReadings } from '#core/install.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
+import { stringFamily } from '#core/quantities/string.ts'
 import { entered, type MeasuredField, type SheetPlan } from './plan.ts'
 
 /** One string of an array, `A1/1`: with its readings where there are any. */
@@ -16,11 +16,24 @@ export interface StringItem {
 function stringsOf(arrayId: string, array: PvArray, { install }: Scene): StringItem[] {
   return Array.from({ length: array.strings }, (_, index) => {
     const readings = install.readings?.arrays?.[arrayId]?.strings?.[index]
-    return { id: `${arrayId}/${index + 1}`, arrayId, array, index, readings: readings && !('not_tested' in readings) ? readings : undefined }
+    return {
+      id: `${arrayId}/${index + 1}`,
+      arrayId,
+      array,
+      index,
+      readings: readings && !('not_tested' in readings) ? readings : undefined,
+    }
   })
 }
 
-const readingPath = ({ arrayId, index }: StringItem, name: string) => ['readings', 'arrays', arrayId, 'strings', index, name]
+const readingPath = ({ arrayId, index }: StringItem, name: string) => [
+  'readings',
+  'arrays',
+  arrayId,
+  'strings',
+  index,
+  name,
+]
 
 function stringReading(
   name: 'voc' | 'isc' | 'irradiance' | 'cell_temperature' | 'insulation',
@@ -28,7 +41,14 @@ function stringReading(
   title: string,
   kind: MeasuredField<StringItem>['kind'],
 ): MeasuredField<StringItem> {
-  return { name, unit, title, kind, path: (item) => readingPath(item, name), reading: ({ readings }) => readings?.[name] }
+  return {
+    name,
+    unit,
+    title,
+    kind,
+    path: (item) => readingPath(item, name),
+    reading: ({ readings }) => readings?.[name],
+  }
 }
 
 /** What the rules see of a string. */
@@ -41,7 +61,13 @@ export const stringPlan: SheetPlan<StringItem> = {
   quantities: stringFamily.quantities,
   entered: [
     entered('array', '', 'Array', [], ({ arrayId }) => arrayId),
-    entered('modules_in_series', '', 'Modules in series', ['modules_in_series'], ({ array }) => array.modules_in_series),
+    entered(
+      'modules_in_series',
+      '',
+      'Modules in series',
+      ['modules_in_series'],
+      ({ array }) => array.modules_in_series,
+    ),
     entered('strings', '', 'Strings in the array', ['strings'], ({ array }) => array.strings),
     entered('polarity', '', 'Polarity', [], ({ readings }) => readings?.polarity),
     entered('taken', '', 'When it was read', [], ({ readings }) => readings?.taken),

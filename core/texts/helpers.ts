@@ -1,5 +1,5 @@
-import type { Parameters } from '#core/quantities/parameters.ts'
 import type { Sheet, SheetValue, State } from '#core/glossary.ts'
+import type { Parameters } from '#core/quantities/parameters.ts'
 import { fieldsOf } from '#core/sheets/plans.ts'
 import { labelOf, STATE_WORDS } from './label.ts'
 import { shown } from './value.ts'
@@ -18,7 +18,7 @@ export interface Templating {
   registerHelper(name: string, helper: (this: WordScene, ...given: unknown[]) => string): void
 }
 
-function valueOf({ sheet, state }: WordScene, name: string): SheetValue | undefined {
+function fieldValue({ sheet, state }: WordScene, name: string): SheetValue | undefined {
   return (state === null ? undefined : sheet.inState[state][name]) ?? sheet.values[name]
 }
 
@@ -28,7 +28,7 @@ function show(scene: WordScene, name: string): string {
     const value = (scene.parameters as unknown as Readonly<Record<string, SheetValue | null>>)[parameter]
     return shown(value ?? undefined, scene.units[parameter] ?? '')
   }
-  return shown(valueOf(scene, name), fieldsOf(scene.sheet.subject).get(name)?.unit ?? '')
+  return shown(fieldValue(scene, name), fieldsOf(scene.sheet.subject).get(name)?.unit ?? '')
 }
 
 /** Teaches a templating engine the helpers of the rules' words: `{{name}}`, `{{state}}`, `{{show "field"}}`, `{{list "field"}}`. */

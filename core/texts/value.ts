@@ -10,9 +10,11 @@ export function joined(words: readonly string[]): string {
 /** A sheet value as people read it. */
 export function shown(value: SheetValue | undefined, unit: string): string {
   if (value === undefined) return 'not stated'
-  if (typeof value === 'number') return value === Number.POSITIVE_INFINITY && unit === 'ms' ? 'no trip' : withUnit(value, unit)
+  if (typeof value === 'number')
+    return value === Number.POSITIVE_INFINITY && unit === 'ms' ? 'no trip' : withUnit(value, unit)
   if (typeof value === 'boolean') return value ? 'yes' : 'no'
   if (typeof value === 'string') return value
-  if (Array.isArray(value)) return value.length === 0 ? 'none' : joined(value.map((item: SheetValue) => shown(item, unit)))
+  if (Array.isArray(value))
+    return value.length === 0 ? 'none' : joined(value.map((item: SheetValue) => shown(item, unit)))
   return joined(Object.entries(value as Record<string, SheetValue>).map(([key, item]) => `${key} ${shown(item, unit)}`))
 }

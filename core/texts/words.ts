@@ -1,4 +1,5 @@
-import HandlebarsRuntime from 'handlebars/runtime.js'
+import type Handlebars from 'handlebars'
+import runtime from 'handlebars/runtime.js'
 import ruleWords from '#core/generated/rule-words.js'
 import { registerHelpers, type WordScene } from './helpers.ts'
 
@@ -10,7 +11,8 @@ export interface FindingWords {
 
 type Printer = (scene: WordScene) => string
 
-const engine = HandlebarsRuntime.create()
+/** The package declares no types for its runtime: it is the full engine without the compiler. */
+const engine = (runtime as unknown as typeof Handlebars).create()
 registerHelpers(engine)
 const printers = new Map<string, Printer>()
 

@@ -59,11 +59,12 @@ const circuits = Array.from({ length: 46 }, (_, i) => {
 })
 
 const groups = ['Grid', 'Island', 'Changeover to the island', 'Changeover to the grid'].map(
-  (state, g) => `<tbody><tr><th scope="rowgroup" colspan="4">${state}</th></tr>${Array.from(
-    { length: 9 },
-    (_, i) =>
-      `<tr${state === 'Island' && i === 2 ? ' class="row-island"' : ''}><th scope="row">${['Voltage L1', 'Voltage L2', 'Voltage L3', 'Frequency', 'Rotation', 'Neutral to earth', 'Link resistance', 'Trip at rated current', 'Trip at five times'][i]}</th><td class="num">${230 + ((i * 7 + g) % 5)} V</td><td class="num">207 V to 253 V</td><td>${badge(i === 5 ? 4 : 0)}</td></tr>`,
-  ).join('')}</tbody>`,
+  (state, g) =>
+    `<tbody><tr><th scope="rowgroup" colspan="4">${state}</th></tr>${Array.from(
+      { length: 9 },
+      (_, i) =>
+        `<tr${state === 'Island' && i === 2 ? ' class="row-island"' : ''}><th scope="row">${['Voltage L1', 'Voltage L2', 'Voltage L3', 'Frequency', 'Rotation', 'Neutral to earth', 'Link resistance', 'Trip at rated current', 'Trip at five times'][i]}</th><td class="num">${230 + ((i * 7 + g) % 5)} V</td><td class="num">207 V to 253 V</td><td>${badge(i === 5 ? 4 : 0)}</td></tr>`,
+    ).join('')}</tbody>`,
 )
 
 const PROSE =

@@ -11,10 +11,22 @@ const bin = (name: string): string => `node_modules/.bin/${name}`
 /** Everything that holds the line, cheap things first. */
 export const GATES: readonly Gate[] = [
   { name: 'format and lint', command: [bin('biome'), 'check', '--error-on-warnings', '.'], saw: /Checked (\d+) files/ },
-  { name: 'promises', command: [bin('oxlint'), '--type-aware', 'core', 'cli', 'tools', 'tests'], saw: /on (\d+) files/ },
+  {
+    name: 'promises',
+    command: [bin('oxlint'), '--type-aware', 'core', 'cli', 'tools', 'tests'],
+    saw: /on (\d+) files/,
+  },
   { name: 'types', command: [bin('tsc'), '-p', '.', '--extendedDiagnostics'], saw: /^Files:\s+(\d+)/m },
   { name: 'pure core', command: [bin('tsc'), '-p', 'core', '--extendedDiagnostics'], saw: /^Files:\s+(\d+)/m },
-  { name: 'arrows and licences', command: [bin('depcruise'), '--config', '.dependency-cruiser.cjs', 'core', 'cli', 'tools', 'tests'], saw: /\((\d+) modules/ },
+  {
+    name: 'arrows and licences',
+    command: [bin('depcruise'), '--config', '.dependency-cruiser.cjs', 'core', 'cli', 'tools', 'tests'],
+    saw: /\((\d+) modules/,
+  },
   { name: 'dead code', command: ['node', '--import', 'tsx', 'tools/gates/dead-code.ts'], saw: /(\d+) files/ },
-  { name: 'generated files are fresh', command: ['node', '--import', 'tsx', 'tools/gates/freshness.ts'], saw: /(\d+) generated files/ },
+  {
+    name: 'generated files are fresh',
+    command: ['node', '--import', 'tsx', 'tools/gates/freshness.ts'],
+    saw: /(\d+) generated files/,
+  },
 ]

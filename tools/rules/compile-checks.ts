@@ -15,7 +15,14 @@ export async function compileChecks(schemas: ReadonlyMap<string, SheetSchema>): 
   const source = standalone.default(ajv, Object.fromEntries([...schemas.keys()].map((name) => [name, name])))
   const { outputFiles } = await build({
     stdin: { contents: source, resolveDir: import.meta.dirname, loader: 'js' },
-    bundle: true, write: false, format: 'esm', platform: 'neutral', target: 'es2023', minify: true, charset: 'utf8', mainFields: ['main'],
+    bundle: true,
+    write: false,
+    format: 'esm',
+    platform: 'neutral',
+    target: 'es2023',
+    minify: true,
+    charset: 'utf8',
+    mainFields: ['main'],
   })
   const [file] = outputFiles
   if (!file) throw new Error('esbuild gave no output for the rules')

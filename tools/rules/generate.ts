@@ -39,7 +39,10 @@ function namer(): { readonly nameOf: (schema: SheetSchema) => string; readonly n
   }
 }
 
-function stored({ record, ...rule }: PlacedRule, nameOf: (schema: SheetSchema) => string): StoredRule & { readonly key: string } {
+function stored(
+  { record, ...rule }: PlacedRule,
+  nameOf: (schema: SheetSchema) => string,
+): StoredRule & { readonly key: string } {
   return {
     key: keyOf({ record, ...rule }),
     id: record.id,

@@ -15,7 +15,10 @@ export function precompileWords(rules: readonly PlacedRule[]): string {
 
 function spec(template: string): string {
   const source = Handlebars.precompile(template, {
-    strict: false, noEscape: true, knownHelpersOnly: true, knownHelpers: { name: true, state: true, show: true, list: true },
+    strict: false,
+    noEscape: true,
+    knownHelpersOnly: true,
+    knownHelpers: { name: true, state: true, show: true, list: true },
   })
   return `()=>(${source})`
 }

@@ -6,8 +6,8 @@ import {
   protectiveConductorByTable,
   standardSize,
 } from '#core/quantities/adiabatic.ts'
-import { bondingMinimum, earthingConductorMinimum, electrodeLimit } from '#core/quantities/earthing-minimum.ts'
 import { insulationTest } from '#core/quantities/circuit-insulation.ts'
+import { bondingMinimum, earthingConductorMinimum, electrodeLimit } from '#core/quantities/earthing-minimum.ts'
 import table from '#schemas/tables/adiabatic-factors.json' with { type: 'json' }
 import { cable } from '../topology/bakery.ts'
 

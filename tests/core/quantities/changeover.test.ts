@@ -1,9 +1,9 @@
 import { describe, expect, test } from 'vitest'
 import type { Changeover, Install, Inverter } from '#core/install.ts'
 import { changeoverFamily } from '#core/quantities/changeover.ts'
+import { switchedPoles } from '#core/quantities/changeover-load.ts'
 import { highestLostNeutral, lostNeutralVoltages } from '#core/quantities/changeover-lost-neutral.ts'
 import { mostLoadedLine } from '#core/quantities/circuit-network.ts'
-import { switchedPoles } from '#core/quantities/changeover-load.ts'
 import { bakery, cable, plainCircuit } from '../topology/bakery.ts'
 import { compute, sceneOf } from './circuit-scene.ts'
 

@@ -2,15 +2,15 @@ import { describe, expect, test } from 'vitest'
 import adiabatic from '#schemas/tables/adiabatic-factors.json' with { type: 'json' }
 import bonding from '#schemas/tables/bonding-conductors.json' with { type: 'json' }
 import breakers from '#schemas/tables/breaker-bands.json' with { type: 'json' }
+import resistance from '#schemas/tables/conductor-resistance.json' with { type: 'json' }
+import sizes from '#schemas/tables/conductor-sizes.json' with { type: 'json' }
 import capacities from '#schemas/tables/current-carrying-capacity.json' with { type: 'json' }
+import times from '#schemas/tables/disconnection-times.json' with { type: 'json' }
 import fuses from '#schemas/tables/fuse-currents.json' with { type: 'json' }
 import grouping from '#schemas/tables/grouping-factors.json' with { type: 'json' }
 import insulation from '#schemas/tables/insulation-minima.json' with { type: 'json' }
 import intervals from '#schemas/tables/periodic-intervals.json' with { type: 'json' }
 import protective from '#schemas/tables/protective-conductors.json' with { type: 'json' }
-import resistance from '#schemas/tables/conductor-resistance.json' with { type: 'json' }
-import sizes from '#schemas/tables/conductor-sizes.json' with { type: 'json' }
-import times from '#schemas/tables/disconnection-times.json' with { type: 'json' }
 
 const tables = {
   adiabatic,

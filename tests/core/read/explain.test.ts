@@ -6,7 +6,13 @@ import { wordsFor } from '#core/read/syntax-words.ts'
 
 describe('syntax errors in plain words', () => {
   it.each([
-    ['an insulation reading without quotes', 'a: 1\nb: >999 MΩ at 500 V\n', 'needs-quotes', 2, 'write ">999 MΩ at 500 V"'],
+    [
+      'an insulation reading without quotes',
+      'a: 1\nb: >999 MΩ at 500 V\n',
+      'needs-quotes',
+      2,
+      'write ">999 MΩ at 500 V"',
+    ],
     ['the same inside braces', 'K1: { insulation: >999 MΩ, polarity: correct }', 'needs-quotes', 1, 'write ">999 MΩ"'],
     ['a bar without quotes', 'a: | x\n  y\n', 'needs-quotes', 1, 'write "| x"'],
     ['an at sign', 'a: @home # note\n', 'needs-quotes', 1, 'write "@home"'],
@@ -18,7 +24,13 @@ describe('syntax errors in plain words', () => {
     ['a single quote that is never closed', "a: 'it\n", 'unclosed-quote', 1, "write ' at the end of"],
     ['a bracket that is never closed', 'a: [1, 2\nb: 3\n', 'unclosed-bracket', 1, 'not closed by “]”'],
     ['a brace whose content is not indented', 'a: { b: 1,\nc: 2 }\n', 'unclosed-bracket', 1, 'indent what is inside'],
-    ['brackets that are crossed', 'a: { b: [1,2}, c: 1 }\n', 'unclosed-bracket', 1, '“[1,2}, c: 1 }” is not closed by “]”'],
+    [
+      'brackets that are crossed',
+      'a: { b: [1,2}, c: 1 }\n',
+      'unclosed-bracket',
+      1,
+      '“[1,2}, c: 1 }” is not closed by “]”',
+    ],
     ['an inner bracket that is closed', 'a: [ [1], 2\nb: 3\n', 'unclosed-bracket', 1, '“[ [1], 2” is not closed'],
     ['a bracket that was never opened', 'a: }\n', 'unclosed-bracket', 1, 'never opened'],
     ['no space after the colon', 'a:1\nb: 2\n', 'missing-space', 1, 'write “a: 1”'],
@@ -34,13 +46,22 @@ describe('syntax errors in plain words', () => {
     ['a comma missing between entries', 'a: { b: 1 c: 2 }\n', 'missing-comma', 1, 'A comma is missing in “1 c: 2 }”'],
     ['a comma missing between quotes', 'a: [ "b" "c" ]\n', 'missing-comma', 1, 'in front of “"c" ]”'],
     ['two commas', 'a: [ 1,, 2 ]\n', 'missing-comma', 1, 'nothing in front of it'],
-    ['text behind a quote', 'a: "x" y\n', 'syntax', 1, '“y” does not belong'],
+    ['text behind a quote', 'a: "x" y\n', 'unclosed-quote', 1, 'The quotes end in front of “y”'],
+    ['a quote inside quotes', "note: 'it's fine'\n", 'unclosed-quote', 1, 'use the other kind of quotes'],
+    ['text behind brackets', 'a: [ 1 ] x\n', 'syntax', 1, '“x” does not belong'],
+    ['a list on the line of its key', 'a: - b\n   - c\n', 'indentation', 1, 'put “- b” on the line below'],
+    ['dashes inside brackets', 'a: [ - b ]\n', 'indentation', 1, 'delete the dash'],
+    ['dashes inside brackets, line by line', 'a: [\n  - b\n  - c ]\n', 'indentation', 2, 'delete the dash'],
     ['an escape that is none', 'a: "C:\\data"\n', 'bad-escape', 1, '“\\d” means nothing'],
     ['a key of a thousand letters', `${'k'.repeat(1100)}: 1\n? "\\d"\n`, 'text-too-long', 1, 'missing colon or quote'],
   ])('%s', (_, text, code, line, words) => {
     const result = read(text, explain)
     expect(result).toMatchObject({ ok: false })
-    expect(result.ok ? [] : result.problems[0]).toMatchObject({ code, range: { line }, message: expect.stringContaining(words) })
+    expect(result.ok ? [] : result.problems[0]).toMatchObject({
+      code,
+      range: { line },
+      message: expect.stringContaining(words),
+    })
   })
 
   it('all of them at once, in the order of the file, the first of each line', () => {
@@ -48,8 +69,24 @@ describe('syntax errors in plain words', () => {
     expect(explain(text).map(({ range }) => range?.line)).toEqual([1, 3, 4, 5])
   })
 
+  it('but not the echoes of one that made the parser lose its place', () => {
+    expect(explain('a: {b: 1}}\nc: 2\nd: 3\n')).toMatchObject([{ code: 'unclosed-bracket' }])
+  })
+
   it('and what is refused besides, where the slow reader comes across it', () => {
-    const text = ['a: "\\d"', 'b: 1', 'bcd: 1', 'bcd: 2', '? [ x ]', ': y', 'c: !foo 1', 'd: !!set [ x ]', 'e: &x &y 1', 'f: !a !b 1', 'g: &z *x']
+    const text = [
+      'a: "\\d"',
+      'b: 1',
+      'bcd: 1',
+      'bcd: 2',
+      '? [ x ]',
+      ': y',
+      'c: !foo 1',
+      'd: !!set [ x ]',
+      'e: &x &y 1',
+      'f: !a !b 1',
+      'g: &z *x',
+    ]
     expect(explain(text.join('\n')).map(({ code, range }) => [range?.line, code])).toEqual([
       [1, 'bad-escape'],
       [4, 'duplicate-key'],
@@ -134,6 +171,9 @@ describe('reading with comments', () => {
   it('gives the problems of a file that is not sound', () => {
     expect(readWithComments('a: @x\n')).toMatchObject({ ok: false, problems: [{ code: 'needs-quotes' }] })
     expect(readWithComments('a: !x 1\n')).toMatchObject({ ok: false, problems: [{ code: 'tag' }] })
-    expect(readWithComments(`${'k'.repeat(1100)}: 1`)).toMatchObject({ ok: false, problems: [{ code: 'text-too-long' }] })
+    expect(readWithComments(`${'k'.repeat(1100)}: 1`)).toMatchObject({
+      ok: false,
+      problems: [{ code: 'text-too-long' }],
+    })
   })
 })

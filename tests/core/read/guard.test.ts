@@ -41,8 +41,16 @@ describe('what is refused before any parser sees the text', () => {
   })
 
   it('names each kind of character by what is to be done', () => {
-    expect(guard('a\u0007').map(({ message }) => message).join()).toContain('cannot be seen')
-    expect(guard('a\rb').map(({ message }) => message).join()).toContain('LF or CRLF')
+    expect(
+      guard('a\u0007')
+        .map(({ message }) => message)
+        .join(),
+    ).toContain('cannot be seen')
+    expect(
+      guard('a\rb')
+        .map(({ message }) => message)
+        .join(),
+    ).toContain('LF or CRLF')
   })
 
   it('tells the first two hundred and counts the rest', () => {
@@ -100,9 +108,12 @@ describe('directives', () => {
     expect(codes('\ufeff ...\n')).toEqual(['indentation'])
   })
 
-  it.each(['...x: 1\n', 'a: |\n...\n', ' ---x: 1\n'])('leaves dots alone that are no mark, or stand behind the values: %j', (text) => {
-    expect(guard(text)).toEqual([])
-  })
+  it.each(['...x: 1\n', 'a: |\n...\n', ' ---x: 1\n'])(
+    'leaves dots alone that are no mark, or stand behind the values: %j',
+    (text) => {
+      expect(guard(text)).toEqual([])
+    },
+  )
 
   it('leaves a line alone that begins with a percent sign inside a text', () => {
     expect(guard('note: |\n% of the charge\n')).toEqual([])

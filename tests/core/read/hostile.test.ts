@@ -81,6 +81,7 @@ describe('well-formed YAML that is not part of the format', () => {
     ['a: "\\U0001F50C"', { a: '\u{1f50c}' }],
     ['{ "b:c", d: 1,5: 2 }', { 'b:c': null, d: 1, 5: 2 }],
     ['{ a: , b }', { a: null, b: null }],
+    ['{ 5: , 6 }', { 5: null, 6: null }],
     ['a: >9\n', undefined],
     ['a: >\n  text\n', { a: 'text\n' }],
     ['a: >2\n\n', undefined],
@@ -149,14 +150,21 @@ describe('limits', () => {
 
 /** Blocks below each other, the innermost with a value. */
 function indented(depth: number): string {
-  return Array.from({ length: depth }, (_, level) => `${' '.repeat(level)}k:`).join('\n').concat(' x')
+  return Array.from({ length: depth }, (_, level) => `${' '.repeat(level)}k:`)
+    .join('\n')
+    .concat(' x')
 }
 
 describe('the documents that bring a parser down for good', () => {
   it('a hundred of them in a row, with and without their ends, through both readers', () => {
     for (let round = 0; round < 100; round++) {
       const depth = 1000 + round * 10
-      const text = round % 3 === 0 ? '['.repeat(depth) : round % 3 === 1 ? '[{a: '.repeat(depth) : `${'['.repeat(depth)}${']'.repeat(depth)}`
+      const text =
+        round % 3 === 0
+          ? '['.repeat(depth)
+          : round % 3 === 1
+            ? '[{a: '.repeat(depth)
+            : `${'['.repeat(depth)}${']'.repeat(depth)}`
       expect(problemsOf(text)).toMatchObject([{ code: 'too-deep' }])
       expect(explain(text)).toMatchObject([{ code: 'too-deep' }])
     }

@@ -86,7 +86,13 @@ describe('quantities in the unit of their place', () => {
     ['1234567890123456 V', 'voltage', 'V', 'number-too-precise', '16 digits'],
     ['1e999 V', 'voltage', 'V', 'number-not-finite', 'beyond the range'],
     [Number.NaN, 'voltage', 'V', 'number-not-finite', '230 V'],
-    ['20 A', 'voltage', 'V', 'unit-of-wrong-kind', 'is a current, and this place takes a voltage: write it in V, mV or kV, for example 230 V.'],
+    [
+      '20 A',
+      'voltage',
+      'V',
+      'unit-of-wrong-kind',
+      'is a current, and this place takes a voltage: write it in V, mV or kV, for example 230 V.',
+    ],
     ['20 mm', 'area', 'mm²', 'unit-of-wrong-kind', 'is a length'],
     ['-12 °', 'temperature', '°C', 'unit-of-wrong-kind', 'is an angle'],
     ['5 A', 'factor', '', 'unit-of-wrong-kind', 'write it without a unit, for example 2.0x'],
@@ -127,8 +133,18 @@ describe('quantities in the unit of their place', () => {
   })
 
   it.each([
-    ['voltage', 'V'], ['current', 'mA'], ['insulation', 'Mohm'], ['area', 'mm²'], ['temperature', '°C'], ['coefficient', '%/K'],
-    ['factor', ''], ['let-through', 'A²s'], ['irradiance', 'W/m²'], ['gas-current', 'mA/Ah'], ['angle', '°'], ['time', 'h'],
+    ['voltage', 'V'],
+    ['current', 'mA'],
+    ['insulation', 'Mohm'],
+    ['area', 'mm²'],
+    ['temperature', '°C'],
+    ['coefficient', '%/K'],
+    ['factor', ''],
+    ['let-through', 'A²s'],
+    ['irradiance', 'W/m²'],
+    ['gas-current', 'mA/Ah'],
+    ['angle', '°'],
+    ['time', 'h'],
   ])('%s in %s is read back as it was printed', (kind, unit) => {
     fc.assert(
       fc.property(fc.double({ noNaN: true, min: -1e15, max: 1e15 }), (any) => {

@@ -31,12 +31,48 @@ describe.each(FIXTURES)('%s', (_, text) => {
 
 /** Texts that tempt a reader: numbers, words, indicators, blanks at the ends. */
 const text = fc.oneof(
-  fc.constantFrom('B16', '3G2.5', '>999 MΩ', '1,5 ohm', '0417-A', 'no trip', 'yes', 'null', '~', '', ' ', '012', '1:30', '- x', '# x'),
-  fc.constantFrom('a: b', 'it’s', "it's", '"q"', 'line\nline', 'line\n\n  line\n', '2026-10-12', '@x', '`x`', '%', '{x}', '[', '\\n', 'Ω'),
+  fc.constantFrom(
+    'B16',
+    '3G2.5',
+    '>999 MΩ',
+    '1,5 ohm',
+    '0417-A',
+    'no trip',
+    'yes',
+    'null',
+    '~',
+    '',
+    ' ',
+    '012',
+    '1:30',
+    '- x',
+    '# x',
+  ),
+  fc.constantFrom(
+    'a: b',
+    'it’s',
+    "it's",
+    '"q"',
+    'line\nline',
+    'line\n\n  line\n',
+    '2026-10-12',
+    '@x',
+    '`x`',
+    '%',
+    '{x}',
+    '[',
+    '\\n',
+    'Ω',
+  ),
   fc.string({ maxLength: 12, unit: fc.constantFrom(...'aB1 .:-#,\'"[]{}|>&*!?%@\\~µΩ\n') }),
 )
-const number = fc.double({ noNaN: true, noDefaultInfinity: true, min: -1e9, max: 1e9 }).map((any) => Number(any.toFixed(4)))
-const key = fc.oneof(fc.constantFrom('K1', 'fed_from', '1', 'yes', 'a b', 'a: b', '2.0'), fc.string({ minLength: 1, maxLength: 5 }))
+const number = fc
+  .double({ noNaN: true, noDefaultInfinity: true, min: -1e9, max: 1e9 })
+  .map((any) => Number(any.toFixed(4)))
+const key = fc.oneof(
+  fc.constantFrom('K1', 'fed_from', '1', 'yes', 'a b', 'a: b', '2.0'),
+  fc.string({ minLength: 1, maxLength: 5 }),
+)
 const { tree } = fc.letrec((tie) => ({
   tree: fc.oneof(
     { maxDepth: 3, depthSize: 'small' },
@@ -50,10 +86,14 @@ const { tree } = fc.letrec((tie) => ({
 
 const STYLES: Readonly<Record<string, (value: unknown) => string>> = {
   'blocks, as the package yaml prints them': (value) => stringify(value, { aliasDuplicateObjects: false }),
-  'brackets, as the package yaml prints them': (value) => stringify(value, { collectionStyle: 'flow', aliasDuplicateObjects: false }),
-  'blocks indented by four, single quotes': (value) => stringify(value, { indent: 4, singleQuote: true, aliasDuplicateObjects: false }),
-  'everything in double quotes': (value) => stringify(value, { defaultStringType: 'QUOTE_DOUBLE', aliasDuplicateObjects: false }),
-  'long texts as blocks of text': (value) => stringify(value, { lineWidth: 20, blockQuote: 'literal', aliasDuplicateObjects: false }),
+  'brackets, as the package yaml prints them': (value) =>
+    stringify(value, { collectionStyle: 'flow', aliasDuplicateObjects: false }),
+  'blocks indented by four, single quotes': (value) =>
+    stringify(value, { indent: 4, singleQuote: true, aliasDuplicateObjects: false }),
+  'everything in double quotes': (value) =>
+    stringify(value, { defaultStringType: 'QUOTE_DOUBLE', aliasDuplicateObjects: false }),
+  'long texts as blocks of text': (value) =>
+    stringify(value, { lineWidth: 20, blockQuote: 'literal', aliasDuplicateObjects: false }),
   'blocks, as js-yaml prints them': (value) => dump(value, { noRefs: true }),
   'brackets from the second level, as js-yaml prints them': (value) => dump(value, { noRefs: true, flowLevel: 1 }),
   JSON: (value) => JSON.stringify(value, null, 1),
@@ -75,11 +115,56 @@ describe('both readers agree on generated files', () => {
 })
 
 /** What the fast way refuses on purpose although it is well-formed, and where it is stricter about tabs and margins. */
-const STRICTER: ReadonlySet<string> = new Set(['decimal-comma', 'missing-space', 'needs-quotes', 'forbidden-character', 'tab', 'syntax'])
+const STRICTER: ReadonlySet<string> = new Set([
+  'decimal-comma',
+  'missing-space',
+  'needs-quotes',
+  'forbidden-character',
+  'tab',
+  'syntax',
+])
 
 const PIECES = [
-  ' ', '  ', '\n', '\t', '-', '- ', '? ', ': ', ':', ',', '[', ']', '{', '}', '#', ' #', '"', "'", '|', '>', '|-\n', '&a', '*a', '!t ', '%', '@',
-  '`', '0', '1', '.', '~', '\r\n', '---\n', '...\n', '\\', 'null', '\u00a0', '\ufeff', '<<', '1e5',
+  ' ',
+  '  ',
+  '\n',
+  '\t',
+  '-',
+  '- ',
+  '? ',
+  ': ',
+  ':',
+  ',',
+  '[',
+  ']',
+  '{',
+  '}',
+  '#',
+  ' #',
+  '"',
+  "'",
+  '|',
+  '>',
+  '|-\n',
+  '&a',
+  '*a',
+  '!t ',
+  '%',
+  '@',
+  '`',
+  '0',
+  '1',
+  '.',
+  '~',
+  '\r\n',
+  '---\n',
+  '...\n',
+  '\\',
+  'null',
+  '\u00a0',
+  '\ufeff',
+  '<<',
+  '1e5',
 ]
 const PARTS = FIXTURES.flatMap(([, file]) => file.split(/\n(?=\S)/))
 

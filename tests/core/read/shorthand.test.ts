@@ -9,9 +9,18 @@ describe('protective devices', () => {
     ['C0.5', { kind: 'breaker', curve: 'C', rated: 0.5 }],
     ['gG 35', { kind: 'fuse', curve: 'gG', rated: 35 }],
     [' gG35 ', { kind: 'fuse', curve: 'gG', rated: 35 }],
-    [{ breaker: 'B16', breaking: '6 kA' }, { kind: 'breaker', curve: 'B', rated: 16, breaking: 6000 }],
-    [{ breaker: 'B16', let_through: '18000 A²s' }, { kind: 'breaker', curve: 'B', rated: 16, let_through: 18000 }],
-    [{ breaking: 50000, fuse: 'gG 32' }, { kind: 'fuse', curve: 'gG', rated: 32, breaking: 50000 }],
+    [
+      { breaker: 'B16', breaking: '6 kA' },
+      { kind: 'breaker', curve: 'B', rated: 16, breaking: 6000 },
+    ],
+    [
+      { breaker: 'B16', let_through: '18000 A²s' },
+      { kind: 'breaker', curve: 'B', rated: 16, let_through: 18000 },
+    ],
+    [
+      { breaking: 50000, fuse: 'gG 32' },
+      { kind: 'fuse', curve: 'gG', rated: 32, breaking: 50000 },
+    ],
   ])('%j', (value, device) => {
     expect(parseDevice(value)).toEqual({ ok: true, value: device })
   })
@@ -33,9 +42,19 @@ describe('protective devices', () => {
     [{ breaker: 'gG 35' }, 'device-unknown', 'write “fuse” before it', ['breaker']],
     [{ fuse: 'gG 35', breaking: '6 kV' }, 'unit-of-wrong-kind', 'takes a current', ['breaking']],
     [{ fuse: 'gG 35', let_through: '6,5' }, 'decimal-comma', 'write 6.5', ['let_through']],
-    [{ fuse: 'gG 35', curve: 'B' }, 'unknown-key', '“curve” is not known here: write breaker, fuse, breaking or let_through', ['curve']],
+    [
+      { fuse: 'gG 35', curve: 'B' },
+      'unknown-key',
+      '“curve” is not known here: write breaker, fuse, breaking or let_through',
+      ['curve'],
+    ],
   ])('%j is refused', (value, code, words, at) => {
-    expect(parseDevice(value)).toMatchObject({ ok: false, code, message: expect.stringContaining(words), ...(at && { at }) })
+    expect(parseDevice(value)).toMatchObject({
+      ok: false,
+      code,
+      message: expect.stringContaining(words),
+      ...(at && { at }),
+    })
   })
 })
 
@@ -60,7 +79,10 @@ describe('cables', () => {
       { line: '2.5 mm²', neutral: 2.5, protective: '1.5 mm2', cores: 3 },
       { line: 2.5, neutral: 2.5, protective: 1.5, cores: 3 },
     ],
-    [{ line: 16, cores: 1, material: 'aluminium', conductor_class: 1 }, { line: 16, cores: 1, material: 'aluminium', conductor_class: 1 }],
+    [
+      { line: 16, cores: 1, material: 'aluminium', conductor_class: 1 },
+      { line: 16, cores: 1, material: 'aluminium', conductor_class: 1 },
+    ],
   ])('%j', (value, cable) => {
     expect(parseCable(value)).toEqual({ ok: true, value: { ...copper, ...cable } })
   })
@@ -115,9 +137,19 @@ describe('cables', () => {
     [{ type: '3G2.5', grouped: 2 }, 'missing-key', '{ circuits: 2, as: single layer }', ['grouped']],
     [{ type: '3G2.5', grouped: { circuits: 2 } }, 'missing-key', 'two keys', ['grouped']],
     [{ type: '3G2.5', grouped: { circuits: 2, as: 'heap' } }, 'not-allowed-value', 'write bunched,', ['grouped', 'as']],
-    [{ type: '3G2.5', grouped: { circuits: '2', as: 'bunched' } }, 'wrong-type', 'whole number', ['grouped', 'circuits']],
+    [
+      { type: '3G2.5', grouped: { circuits: '2', as: 'bunched' } },
+      'wrong-type',
+      'whole number',
+      ['grouped', 'circuits'],
+    ],
   ])('%j is refused', (value, code, words, at) => {
-    expect(parseCable(value)).toMatchObject({ ok: false, code, message: expect.stringContaining(words), ...(at && { at }) })
+    expect(parseCable(value)).toMatchObject({
+      ok: false,
+      code,
+      message: expect.stringContaining(words),
+      ...(at && { at }),
+    })
   })
 
   it('every size of the list is accepted', () => {

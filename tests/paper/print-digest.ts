@@ -1,0 +1,4 @@
+import { createHash } from 'node:crypto'
+import { sample } from './page.ts'
+
+process.stdout.write(createHash('sha256').update(sample()).digest('hex'))
