@@ -1,8 +1,8 @@
 import type { Flow } from './flow.ts'
 import { styled } from './flow.ts'
 import { extent } from './lines.ts'
-import { BLOCK, CELL, LIST } from './style.ts'
-import type { Block, Cell, Table } from './tree.ts'
+import { BLOCK, CELL, LIST, type TextStyle } from './style.ts'
+import type { Block, Cell, Row, Table } from './tree.ts'
 
 interface Extent {
   readonly least: number
@@ -12,43 +12,60 @@ interface Extent {
 /** A drawing in a cell asks for this much, in points, unless the column has a width. */
 const PICTURE = 60
 
-const measured = (block: Block, cell: Cell, flow: Flow): Extent => {
-  if (block.kind === 'figure') return { least: PICTURE, most: PICTURE }
-  if (block.kind === 'paragraph' || block.kind === 'heading') {
-    const style = styled(cell.header ? BLOCK.rowHeader.text : BLOCK.cell.text, block.classes)
-    return extent(flow.shaper.words(block.runs, style))
-  }
-  if (block.kind === 'list') {
-    const inner = widest(block.items.flat(), cell, flow)
-    return { least: inner.least + LIST.indent, most: inner.most + LIST.indent }
-  }
-  return block.kind === 'group' ? widest(block.blocks, cell, flow) : { least: PICTURE, most: flow.width / 2 }
+/** How the words of a cell look: its own style, and every class that reaches it. */
+interface Setting {
+  readonly style: TextStyle
+  readonly classes: readonly string[]
 }
 
-const widest = (blocks: readonly Block[], cell: Cell, flow: Flow): Extent =>
+const measured = (block: Block, setting: Setting, flow: Flow): Extent => {
+  if (block.kind === 'paragraph' || block.kind === 'heading') {
+    const base = block.kind === 'heading' ? BLOCK[`h${block.level}`].text : setting.style
+    return extent(flow.shaper.words(block.runs, styled(base, [...setting.classes, ...block.classes])))
+  }
+  if (block.kind === 'list') {
+    const inner = widest(block.items.flat(), setting, flow)
+    return { least: inner.least + LIST.indent, most: inner.most + LIST.indent }
+  }
+  if (block.kind === 'group') return widest(block.blocks, setting, flow)
+  return { least: PICTURE, most: block.kind === 'figure' ? PICTURE : flow.width / 2 }
+}
+
+const widest = (blocks: readonly Block[], setting: Setting, flow: Flow): Extent =>
   blocks.reduce<Extent>(
     (sum, block) => {
-      const own = measured(block, cell, flow)
+      const own = measured(block, setting, flow)
       return { least: Math.max(sum.least, own.least), most: Math.max(sum.most, own.most) }
     },
     { least: 0, most: 0 },
   )
 
+/** Each cell that alone fills a column without a width, with the column's number. */
+const deciding = (table: Table, row: Row): readonly { readonly cell: Cell; readonly column: number }[] => {
+  let at = 0
+  return row.cells.flatMap((cell) => {
+    const column = at
+    at += cell.span
+    return cell.span === 1 && table.columns[column]?.share === undefined ? [{ cell, column }] : []
+  })
+}
+
 /** What each column's own cells ask for, cells over several columns left out. */
 const asked = (table: Table, flow: Flow): readonly Extent[] => {
-  const columns = table.columns.map(() => ({ least: 0, most: 0 }))
+  const extents = table.columns.map((): Extent => ({ least: 0, most: 0 }))
   for (const row of [...table.head, ...table.bodies.flat()]) {
-    let at = 0
-    for (const cell of row.cells) {
-      const column = columns[at]
-      at += cell.span
-      if (!column || cell.span > 1 || table.columns[at - 1]?.share !== undefined) continue
-      const { least, most } = widest(cell.blocks, cell, flow)
-      column.least = Math.max(column.least, least + 2 * CELL.x)
-      column.most = Math.max(column.most, most + 2 * CELL.x)
+    for (const { cell, column } of deciding(table, row)) {
+      const classes = [...flow.inherited, ...(table.columns[column]?.classes ?? []), ...row.classes, ...cell.classes]
+      const style = cell.header ? BLOCK.rowHeader.text : BLOCK.cell.text
+      const { least, most } = widest(cell.blocks, { style, classes }, flow)
+      const before = extents[column] ?? { least: 0, most: 0 }
+      extents[column] = {
+        least: Math.max(before.least, least + 2 * CELL.x),
+        most: Math.max(before.most, most + 2 * CELL.x),
+      }
     }
   }
-  return columns
+  return extents
 }
 
 const total = (values: readonly number[]): number => values.reduce((sum, value) => sum + value, 0)

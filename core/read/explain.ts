@@ -28,6 +28,7 @@ const EXCESS = {
   depth: refusals.TOO_DEEP,
   keys: refusals.TOO_MANY_KEYS,
   items: refusals.TOO_MANY_ITEMS,
+  tokens: refusals.TOO_MANY_TOKENS,
 } as const satisfies Readonly<Record<Excess['limit'], unknown>>
 
 /**

@@ -21,7 +21,8 @@ const WORDS: ReadonlyMap<string, boolean | null> = new Map([
 const NUMBER = /^[-+]?(?:\.[0-9]+|[0-9]+(?:\.[0-9]*)?)(?:[eE][-+]?[0-9]+)?$/
 const NOT_FINITE = /^(?:[-+]?\.(?:inf|Inf|INF)|\.(?:nan|NaN|NAN))$/
 const OTHER_RADIX = /^[-+]?0(?:o[0-7]+|x[0-9a-fA-F]+)$/
-const UNDERSCORES = /^[-+]?[0-9][0-9_]*_[0-9_]*(?:\.[0-9_]*)?$/
+/** With or without underscores; whether there is one is asked besides, to keep the pattern quick on long text. */
+const UNDERSCORES = /^[-+]?[0-9][0-9_]*(?:\.[0-9_]*)?$/
 const SEXAGESIMAL = /^[-+]?[0-9]+(?::[0-5]?[0-9])+(?:\.[0-9]*)?$/
 const LEADING_ZERO = /^([-+]?)0+(?=[0-9])/
 const SMALLEST_NORMAL = 2.3e-308
@@ -109,7 +110,7 @@ function strangeNumber(source: string): Fault | undefined {
   if (OTHER_RADIX.test(source)) {
     return { code: 'number-radix', message: `${quote(source)} is not decimal: write ${decimal(source)}.` }
   }
-  if (UNDERSCORES.test(source)) {
+  if (source.includes('_') && UNDERSCORES.test(source)) {
     const mended = source.replaceAll('_', '')
     return { code: 'number-separator', message: `${quote(source)} has separators between its digits: write ${mended}.` }
   }

@@ -1,8 +1,8 @@
-import { MAX_DEPTH, MAX_ITEMS, MAX_KEYS } from './limits.ts'
+import { MAX_DEPTH, MAX_ITEMS, MAX_KEYS, MAX_TOKENS } from './limits.ts'
 
 /** Which limit a text breaks, and where. */
 export interface Excess {
-  readonly limit: 'depth' | 'keys' | 'items'
+  readonly limit: 'depth' | 'keys' | 'items' | 'tokens'
   readonly offset: number
 }
 
@@ -37,12 +37,13 @@ class Scan {
   #flow = 0
   #keys = 0
   #items = 0
+  #tokens = 0
   /** Columns of the open blocks, doubled; a list in the column of its key is one more. */
   readonly #blocks: number[] = []
 
   take(token: string): Excess | undefined {
     if (MARKS.has(token)) return undefined
-    const limit = this.#count(token)
+    const limit = this.#count(token) ?? this.#token(token)
     const offset = this.#offset
     this.#advance(token)
     return limit === undefined ? undefined : { limit, offset }
@@ -90,6 +91,11 @@ class Scan {
 
   #item(): Excess['limit'] | undefined {
     return ++this.#items > MAX_ITEMS + MAX_KEYS ? 'items' : undefined
+  }
+
+  #token(token: string): Excess['limit'] | undefined {
+    if (token.trim() !== '') this.#tokens++
+    return this.#tokens > MAX_TOKENS ? 'tokens' : undefined
   }
 
   #advance(token: string): void {

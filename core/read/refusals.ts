@@ -1,5 +1,5 @@
 import type { Fault } from '../errors.ts'
-import { MAX_DEPTH, MAX_ITEMS, MAX_KEYS, MAX_SCALAR } from './limits.ts'
+import { MAX_DEPTH, MAX_ITEMS, MAX_KEYS, MAX_SCALAR, MAX_TOKENS } from './limits.ts'
 import { quote } from './words.ts'
 
 /** What both readers say about YAML that is well formed and still not part of the format. */
@@ -24,6 +24,11 @@ export const TOO_MANY_KEYS: Fault = {
 export const TOO_MANY_ITEMS: Fault = {
   code: 'too-many-items',
   message: `The lists have more than ${MAX_ITEMS} items together: ${SPLIT}`,
+}
+
+export const TOO_MANY_TOKENS: Fault = {
+  code: 'too-large',
+  message: `The file holds more than ${MAX_TOKENS} words and marks, too many to explain what is wrong: ${SPLIT}`,
 }
 
 export const COMPLEX_KEY: Fault = {

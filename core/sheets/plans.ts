@@ -43,3 +43,10 @@ export function fieldsOf(subject: Subject): ReadonlyMap<string, FieldWords> {
   ]
   return new Map(lists.flatMap((list) => list ?? []).map((field) => [field.name, field]))
 }
+
+/** Names of the fields that hold in one state only. */
+export function stateFieldsOf(subject: Subject): ReadonlySet<string> {
+  const plan = PLANS.find((candidate) => candidate.subject === subject)
+  const lists: readonly (readonly FieldWords[] | undefined)[] = [plan?.inState, plan?.measuredInState]
+  return new Set(lists.flatMap((list) => list ?? []).map(({ name }) => name))
+}

@@ -53,11 +53,17 @@ export function median(values: readonly number[]): number {
 }
 
 /** Medians of several contestants, run in turns in changing order so that a slow moment of the machine hits them all. */
-export async function compare(contestants: readonly Contestant[], rounds: number): Promise<ReadonlyMap<string, number>> {
+export async function compare(
+  contestants: readonly Contestant[],
+  rounds: number,
+): Promise<ReadonlyMap<string, number>> {
   const times = new Map<string, number[]>(contestants.map(({ name }) => [name, []]))
   for (const contestant of contestants) await once(contestant)
   for (let round = 0; round < rounds; round += 1) {
-    const order = [...contestants.slice(round % contestants.length), ...contestants.slice(0, round % contestants.length)]
+    const order = [
+      ...contestants.slice(round % contestants.length),
+      ...contestants.slice(0, round % contestants.length),
+    ]
     for (const contestant of order) times.get(contestant.name)?.push((await once(contestant)).milliseconds)
   }
   return new Map([...times].map(([name, list]) => [name, median(list)]))

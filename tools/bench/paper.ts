@@ -18,7 +18,9 @@ const render = () => renderReport(judged, { text, file: FILE, fonts, created: '2
 
 function plain(pages: number): number {
   const font = 'node_modules/@expo-google-fonts/ibm-plex-sans/400Regular/IBMPlexSans_400Regular.ttf'
-  const { stdout } = spawnSync(process.execPath, ['tools/bench/plain-pdf.mjs', String(pages), String(ROUNDS), font], { encoding: 'utf8' })
+  const { stdout } = spawnSync(process.execPath, ['tools/bench/plain-pdf.mjs', String(pages), String(ROUNDS), font], {
+    encoding: 'utf8',
+  })
   return Number(stdout)
 }
 

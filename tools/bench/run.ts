@@ -30,7 +30,14 @@ function writeFiles(folder: string, count: number, circuits: number): string[] {
 
 function bundleBaseline(): string {
   const outfile = join(work, 'parse-and-shape.cjs')
-  buildSync({ entryPoints: ['tools/bench/parse-and-shape.ts'], bundle: true, platform: 'node', format: 'cjs', minify: true, outfile })
+  buildSync({
+    entryPoints: ['tools/bench/parse-and-shape.ts'],
+    bundle: true,
+    platform: 'node',
+    format: 'cjs',
+    minify: true,
+    outfile,
+  })
   return outfile
 }
 
@@ -63,7 +70,10 @@ async function manyFiles(baseline: string): Promise<void> {
   printTable(`${MANY} files of 300 lines`, medians)
   const { megabytes } = await once(check, true)
   process.stdout.write(`  memory at its highest: ${megabytes.toFixed(0)} MB\n`)
-  const half = { name: `skerry check, ${MANY / 2} files`, command: [NODE, SKERRY, 'check', ...files.slice(0, MANY / 2)] }
+  const half = {
+    name: `skerry check, ${MANY / 2} files`,
+    command: [NODE, SKERRY, 'check', ...files.slice(0, MANY / 2)],
+  }
   printTable('Growth with files', await compare([half, check], 3))
 }
 
@@ -72,7 +82,10 @@ async function growth(): Promise<void> {
   const medians = await compare(
     [
       { name: 'skerry --version', command: [NODE, SKERRY, '--version'] },
-      ...sizes.map((size) => ({ name: `${size} circuits`, command: [NODE, SKERRY, 'check', '--quiet', ...writeFiles(`of-${size}`, 1, size)] })),
+      ...sizes.map((size) => ({
+        name: `${size} circuits`,
+        command: [NODE, SKERRY, 'check', '--quiet', ...writeFiles(`of-${size}`, 1, size)],
+      })),
     ],
     9,
   )

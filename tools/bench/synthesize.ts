@@ -15,7 +15,18 @@ function chance(seed: number): () => number {
   }
 }
 
-const SERVES = ['Sockets', 'Lights', 'Cold store', 'Workshop', 'Pump', 'Office', 'Heat pump', 'Ventilation', 'Door', 'Server'] as const
+const SERVES = [
+  'Sockets',
+  'Lights',
+  'Cold store',
+  'Workshop',
+  'Pump',
+  'Office',
+  'Heat pump',
+  'Ventilation',
+  'Door',
+  'Server',
+] as const
 const CABLES = [
   { type: '3G1.5', size: 1.5, perMetre: 0.0242, rated: 10 },
   { type: '3G2.5', size: 2.5, perMetre: 0.01482, rated: 16 },

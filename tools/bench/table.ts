@@ -4,6 +4,8 @@ export function printTable(title: string, medians: ReadonlyMap<string, number>, 
   const width = Math.max(...[...medians.keys()].map((name) => name.length))
   process.stdout.write(`\n${title}\n`)
   for (const [name, value] of medians) {
-    process.stdout.write(`  ${name.padEnd(width)}  ${value.toFixed(1).padStart(9)} ${unit}  ${(value / base).toFixed(2).padStart(6)} ×\n`)
+    process.stdout.write(
+      `  ${name.padEnd(width)}  ${value.toFixed(1).padStart(9)} ${unit}  ${(value / base).toFixed(2).padStart(6)} ×\n`,
+    )
   }
 }

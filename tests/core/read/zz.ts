@@ -1,6 +1,0 @@
-import { explain } from '#core/read/explain.ts'
-import { read } from '#core/read/read.ts'
-const N=512*1024
-const fill=(s:string)=>s.repeat(Math.floor((N-10)/s.length))
-const docs:Record<string,string>={nul:fill('\0'),lines:fill('a: 1\n'),quote:'"'+fill('x\n'),q2:fill('"a" '),sq:fill("' "),open:fill('[,'),colon:fill(': '),cc:fill('a: b: c\n'),esc:'"'+fill('\\d')+'"',tab:fill('\ta\n'),hash:fill('#'),dash:fill('- '),bar:fill('a: |x\n'),gt:fill('a: >9 x\n'),brk:fill('[\n'),at:fill('a: @\n'),anchors:fill('&a '),tags:fill('!t '),amp:fill('- &a b\n'),star:fill('- *a\n'),close:fill(']'),brace:fill('{}'),q:fill('? '),sp:'a:'+fill(' '),nl:fill('\n'),crlf:fill('\r\n'),one:fill('x'),flowmap:'{'+fill('a:1,')+'}',digits:'a: '+fill('9'),comma:'{'+fill('1,5 x,')+'}',dq:'a: "'+fill('\\\\')+'\\U"', pct:fill('%\n'), docsep:fill('---\n'), dots:'a: 1\n'+fill('...\n'), nums:'['+fill('1_0:0,')+']', us:'a: 1'+fill('_'), sex:'a: 1'+fill(':1'), bs:'"'+fill('\\')+'"', hdr: 'a: |'+fill(' #'), hdr2:'a: '+fill('|')+'\n  b', us2:'a: '+fill('1_')+'x', col:fill('a:')+' b', zero:'a: '+fill('0')+'x',zero2:'a: '+fill('0'), flow2:'[{a: '+fill('"x": y,')}
-for(const [k,d] of Object.entries(docs)){const s=performance.now();const r=read(d,explain);const t=performance.now()-s; console.log(k,d.length,t.toFixed(0)+'ms',r.ok?'ok':r.problems.length+' '+r.problems[0]!.code, t>1000?'   <<<<':'')}

@@ -1,0 +1,188 @@
+import fc from 'fast-check'
+import { describe, expect, test } from 'vitest'
+import { breakLines } from '#core/paper/lines.ts'
+import type { Word } from '#core/paper/shape.ts'
+import { page } from './page.ts'
+import { flat, Objects, structureOf } from './pdf-objects.ts'
+import { run, withFile, wordsOf } from './tools.ts'
+
+interface Spot {
+  readonly word: string
+  readonly left: number
+  readonly top: number
+  readonly right: number
+}
+
+/** Where each word stands, in points from the top left. */
+const spotsOf = (html: string): readonly Spot[] => {
+  const boxes = withFile('page.pdf', page(html), (path) => run('pdftotext', '-bbox', path, '-'))
+  return [...boxes.matchAll(/<word xMin="([\d.]+)" yMin="([\d.]+)" xMax="([\d.]+)" yMax="[\d.]+">(.*?)<\/word>/g)].map(
+    ([, left, top, right, word = '']) => ({ word, left: Number(left), top: Number(top), right: Number(right) }),
+  )
+}
+
+const spot = (spots: readonly Spot[], word: string): Spot => {
+  const found = spots.find((one) => one.word === word)
+  if (!found) throw new Error(`no word ${word}`)
+  return found
+}
+
+const row = (...cells: readonly string[]) => `<tr>${cells.map((cell) => `<td>${cell}</td>`).join('')}</tr>`
+
+describe('tables', () => {
+  test('figures of a num column end at the same place', () => {
+    const spots = spotsOf(
+      `<table><colgroup><col><col class="num"></colgroup><tbody>${row('a', '7')}${row('b', '1234')}</tbody></table>`,
+    )
+    expect(spot(spots, '7').right).toBeCloseTo(spot(spots, '1234').right, 1)
+  })
+
+  test('columns have the widths that they ask for', () => {
+    const spots = spotsOf(
+      `<table><colgroup><col width="25%"><col style="width:25%" span="2"><col width="25%"></colgroup><tbody>${row('a', 'b', 'c', 'd')}</tbody></table>`,
+    )
+    const steps = ['b', 'c', 'd'].map((word, index) => spot(spots, word).left - spot(spots, 'abc'.charAt(index)).left)
+    for (const step of steps) expect(step).toBeCloseTo((595.28 - (35 * 72) / 25.4) / 4, 0)
+  })
+
+  test('where the content decides, no word is broken while there is room, whatever the cells hold', () => {
+    const cells = [
+      '<ul><li>Selectivity</li><li>two</li></ul>',
+      '<div><p>Disconnection</p></div>',
+      '<h4>Heading</h4>',
+      '<dl><dt>Term</dt><dd>detail</dd></dl>',
+      '<figure><svg role="img" aria-label="dot" viewBox="0 0 4 4"><circle r="1"/></svg></figure>',
+      '',
+      'words that go on over several lines in their cell<br>and break',
+    ]
+    const words = spotsOf(
+      `<h1>a</h1><h2>b</h2><h3>c</h3><table><tbody>${row(...cells)}${row('1', '2', '3', '4', '5', '6', '7')}</tbody></table>`,
+    ).map(({ word }) => word)
+    expect(words).toEqual(
+      expect.arrayContaining(['Selectivity', 'Disconnection', 'Heading', 'Term', 'detail', 'break']),
+    )
+  })
+
+  test('a table that asks for more than the page still keeps inside it', () => {
+    const spots = spotsOf(
+      `<table><tbody>${row(...Array.from({ length: 12 }, (_, i) => `Disconnectiontime${i}`))}</tbody></table>`,
+    )
+    expect(Math.max(...spots.map(({ right }) => right))).toBeLessThan(595.28 - 42)
+  })
+
+  test('columns without a width share what the others leave, even when that is nothing', () => {
+    const html = `<table class="plain"><colgroup><col width="100%"><col></colgroup><tbody>${row('a', '')}</tbody></table>`
+    expect(wordsOf(page(html))).toContain('a')
+  })
+
+  test('text in the middle of its cell', () => {
+    const spots = spotsOf('<table><tbody><tr><td class="centre">mid</td></tr></tbody></table>')
+    const middle = (spot(spots, 'mid').left + spot(spots, 'mid').right) / 2
+    expect(middle).toBeCloseTo((20 * 72) / 25.4 + (595.28 - (35 * 72) / 25.4) / 2, 0)
+  })
+})
+
+describe('boxes and columns', () => {
+  test('divs of a grid stand beside each other, the next row below', () => {
+    const cells = ['one', 'two', 'three'].map((word) => `<div class="box"><p>${word}</p></div>`)
+    const spots = spotsOf(`<div class="grid-2">${cells.join('')}</div>`)
+    expect(spot(spots, 'one').top).toBe(spot(spots, 'two').top)
+    expect(spot(spots, 'three').left).toBe(spot(spots, 'one').left)
+    expect(spot(spots, 'three').top).toBeGreaterThan(spot(spots, 'one').top)
+  })
+
+  test('a box may hold a grid, and a grid a box beside a plain section', () => {
+    const spots = spotsOf(
+      '<section class="box columns-2"><div><p>left</p></div><section class="box-note"><p>right</p></section></section>',
+    )
+    expect(spot(spots, 'right').left).toBeGreaterThan(spot(spots, 'left').left + 200)
+  })
+
+  test('a box in balanced columns is drawn in its own column', () => {
+    const text = '<p>words of a column that fill a few lines here and there</p>'
+    const spots = spotsOf(`<div class="columns-2">${text.repeat(3)}<div class="box"><p>boxed</p></div></div>`)
+    expect(spot(spots, 'boxed').left).toBeGreaterThan(300)
+  })
+
+  test('an empty box is no trouble', () => {
+    expect(wordsOf(page('<div class="box"></div><div class="columns-3"></div><ul></ul><dl></dl><p>end</p>'))).toBe(
+      'end ',
+    )
+  })
+})
+
+describe('lists', () => {
+  test('terms take less room, or half of it', () => {
+    const list = (classes: string) => `<dl class="${classes}"><dt>term</dt><dd>detail</dd></dl>`
+    const narrow = spot(spotsOf(list('plain')), 'detail').left
+    expect(spot(spotsOf(list('wide-terms')), 'detail').left).toBeGreaterThan(narrow + 80)
+  })
+
+  test('an item of several blocks keeps its number beside the first', () => {
+    const spots = spotsOf('<ol><li><p>first</p><p>second</p></li><li></li></ol>')
+    expect(spot(spots, '1.').top).toBe(spot(spots, 'first').top)
+    expect(spot(spots, 'second').left).toBe(spot(spots, 'first').left)
+  })
+})
+
+describe('text', () => {
+  test('a superscript stands higher, a subscript lower', () => {
+    const content = (html: string) => {
+      const objects = new Objects(page(html))
+      const [first] = objects.list(objects.dictionary(objects.catalog['/Pages'])['/Kids'])
+      const text = new TextDecoder('latin1').decode(objects.stream(objects.dictionary(first)['/Contents']))
+      return [...text.matchAll(/1 0 0 -1 [\d.]+ ([\d.]+) Tm/g)].map(([, y]) => Number(y))
+    }
+    const [base = 0, up = 0, down = 0] = content('<p>a<sup>b</sup><sub>c</sub></p>')
+    expect(up).toBeLessThan(base)
+    expect(down).toBeGreaterThan(base)
+  })
+
+  test('lines that the author makes, also empty ones', () => {
+    const spots = spotsOf('<p>one<br><br>three<br></p>')
+    expect(spot(spots, 'three').top - spot(spots, 'one').top).toBeCloseTo(2 * 12.8, 1)
+  })
+
+  test('a hyphen between letters ends a line, one before a number does not', () => {
+    const html = `<table><colgroup><col width="10%"><col width="90%"></colgroup><tbody>${row('change-over 5 −20', 'b')}</tbody></table>`
+    expect(spotsOf(html).map(({ word }) => word)).toEqual(expect.arrayContaining(['change-', 'over', '−20']))
+  })
+
+  test('a drawing may be as wide as asked', () => {
+    const objects = new Objects(
+      page('<figure><svg role="img" aria-label="dot" viewBox="0 0 4 4" width="25%"><circle r="1"/></svg></figure>'),
+    )
+    const [figure] = flat(structureOf(objects)).filter(({ type }) => type === '/Figure')
+    const [left = 0, , right = 0] = objects.list(objects.dictionary(figure?.entries['/A'])['/BBox']).map(Number)
+    expect(right - left).toBeCloseTo((595.28 - (35 * 72) / 25.4) / 4, 0)
+  })
+})
+
+describe('setting lines', () => {
+  const word = (width: number): Word => ({
+    pieces: [
+      {
+        face: 'regular',
+        size: 10,
+        rise: 0,
+        colour: '#000000',
+        spacing: 0,
+        width,
+        run: { glyphs: [{ id: 1, codePoint: 97, width: width * 100 }], kerns: [0], width: width * 100 },
+      },
+    ],
+    width,
+    space: undefined,
+    forced: false,
+  })
+
+  test('no line is wider than its column unless a single letter is, and no word is lost', () => {
+    fc.assert(
+      fc.property(fc.array(fc.double({ min: 0.1, max: 90, noNaN: true }), { minLength: 1 }), (widths) => {
+        const lines = breakLines(widths.map(word), 100)
+        expect(lines.flatMap(({ pieces }) => pieces)).toHaveLength(widths.length)
+        for (const line of lines) expect(line.width).toBeLessThanOrEqual(100.02)
+      }),
+    )
+  })
+})
