@@ -38,7 +38,10 @@ export const beside = (
   let rest = sides
   do {
     const part = rest.map((side) => ({ ...side, strips: taken(side.strips, limit - pad.top - pad.bottom) }))
-    rest = rest.map((side, index) => ({ ...side, strips: side.strips.slice(part[index]?.strips.length ?? 0) }))
+    rest = rest.map((side) => ({
+      ...side,
+      strips: side.strips.slice(taken(side.strips, limit - pad.top - pad.bottom).length),
+    }))
     const height = Math.max(0, ...part.map(({ strips }) => stackHeight(strips))) + pad.top + pad.bottom
     made.push(
       strip(height, (canvas, shift, y) => {

@@ -81,11 +81,6 @@ export class Canvas {
     this.write('EMC')
   }
 
-  fill(segments: readonly Segment[], colour: string): void {
-    this.#setColour(colour)
-    this.write(`${pathOperators(segments)}\nf`)
-  }
-
   rectangle(x: number, y: number, width: number, height: number, colour: string): void {
     this.#setColour(colour)
     this.write(`${num(x)} ${num(y)} ${num(width)} ${num(height)} re f`)

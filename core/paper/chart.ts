@@ -5,6 +5,8 @@ import { COLOUR } from './style.ts'
 import { readPath } from './svg-path.ts'
 import { ellipse, rectangle } from './svg-shapes.ts'
 
+const drawn = (path: string) => readPath(path, (sentence) => new Error(sentence))
+
 /** Depth lines around a skerry, outermost first; as on a chart, the shallower the water, the deeper the tint. In units of a square of 200. */
 const SEA = [
   {
@@ -19,13 +21,13 @@ const SEA = [
     ground: COLOUR.deep,
     line: 'M50 128 C42 112 58 104 58 90 C58 70 80 70 94 60 C114 48 142 58 152 76 C162 94 164 112 150 126 C138 138 122 134 108 144 C88 156 60 148 50 128 Z',
   },
-].map(({ ground, line }) => ({ ground, line: pathOperators(readPath(line)) }))
+].map(({ ground, line }) => ({ ground, line: pathOperators(drawn(line)) }))
 
 const LAND = [
   'M82 114 C76 106 86 100 88 92 C90 82 104 82 112 78 C122 74 134 82 134 92 C134 100 138 108 128 114 C120 118 114 114 106 120 C98 126 88 122 82 114 Z',
   'M60 158 C58 153 64 150 69 152 C74 154 76 159 71 162 C66 164 61 162 60 158 Z',
   'M176 60 C178 56 184 57 186 61 C187 65 182 68 178 66 C175 65 174 62 176 60 Z',
-].map((line) => pathOperators(readPath(line)))
+].map((line) => pathOperators(drawn(line)))
 
 /** Depths in metres, as soundings stand on a chart: where, and how deep. */
 const SOUNDINGS = [

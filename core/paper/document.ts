@@ -64,13 +64,17 @@ export class PaperDocument extends PDFDocument {
   finish(): Uint8Array {
     this.end()
     if (!this.complete) throw new Error('A PDF object was opened and not ended.')
-    return joined(this.chunks ?? [])
+    return joined(this.written)
+  }
+
+  private get written(): Uint8Array[] {
+    this.chunks ??= []
+    return this.chunks
   }
 
   /** Takes the bytes directly, without a stream. */
   override push(chunk: Uint8Array | null): boolean {
-    this.chunks ??= []
-    if (chunk) this.chunks.push(chunk)
+    if (chunk) this.written.push(chunk)
     return true
   }
 
@@ -120,7 +124,7 @@ export class PaperDocument extends PDFDocument {
 
   /** The identifier is the digest of everything before the trailer: the same content, the same identifier. */
   protected override _finalize(): void {
-    this._id = sha256(joined(this.chunks ?? [])).slice(0, 16)
+    this._id = sha256(joined(this.written)).slice(0, 16)
     super._finalize()
     this.complete = true
   }

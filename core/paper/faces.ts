@@ -5,13 +5,16 @@ import type { FaceName } from './style.ts'
 
 /** Text set in one font: which glyphs, how far each moves on, both in thousandths of the size. */
 export interface GlyphRun {
-  readonly glyphs: readonly { readonly id: number; readonly codePoint: number; readonly width: number }[]
-  /** Kerning after each glyph. */
-  readonly kerns: readonly number[]
+  /** `kern` changes how far a glyph moves on because of the one that follows. */
+  readonly glyphs: readonly (Glyph & { readonly kern: number })[]
   readonly width: number
 }
 
-type Glyph = GlyphRun['glyphs'][number]
+export interface Glyph {
+  readonly id: number
+  readonly codePoint: number
+  readonly width: number
+}
 
 /** What is known about a font and does not depend on the document. Kept as long as its bytes are. */
 interface SharedFace {
@@ -83,20 +86,18 @@ export class Face {
     const known = this.#encoded.get(run)
     if (known !== undefined) return known
     let text = ''
-    run.glyphs.forEach((glyph, index) => {
+    for (const glyph of run.glyphs) {
       text += this.#code(glyph)
-      const kern = run.kerns[index] ?? 0
-      if (kern !== 0) text += `>${Math.round(-kern)}<`
-    })
+      if (glyph.kern !== 0) text += `>${Math.round(-glyph.kern)}<`
+    }
     this.#encoded.set(run, text)
     return text
   }
 
   #make(text: string): GlyphRun {
-    const glyphs = Array.from(text, (sign) => this.#glyph(sign.codePointAt(0) ?? 32))
-    const kerns = glyphs.map((glyph, index) => this.#kern(glyph, glyphs[index + 1]))
-    const width = glyphs.reduce((sum, glyph) => sum + glyph.width, 0) + kerns.reduce((sum, kern) => sum + kern, 0)
-    return { glyphs, kerns, width }
+    const plain = Array.from(text, (sign) => this.#glyph(Number(sign.codePointAt(0))))
+    const glyphs = plain.map((glyph, index) => ({ ...glyph, kern: this.#kern(glyph, plain[index + 1]) }))
+    return { glyphs, width: glyphs.reduce((sum, { width, kern }) => sum + width + kern, 0) }
   }
 
   #glyph(codePoint: number): Glyph {

@@ -32,7 +32,7 @@ const inside = (group: Group, box: BoxStyle, flow: Flow): readonly Strip[] => {
 export const flowBox = (group: Group, box: BoxStyle, flow: Flow): Laid => {
   const frame: Frame = {
     head: [],
-    paint: (canvas, shift, top, bottom) =>
+    under: (canvas, shift, top, bottom) =>
       paintBox(canvas, flow.shaper, box, flow.x + shift, top, flow.width, bottom - top),
   }
   const content = changeFirst(inside(group, box, flow), { before: 0 })

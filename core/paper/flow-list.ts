@@ -4,10 +4,18 @@ import { changeFirst, type Strip } from './strips.ts'
 import { BLOCK, COLOUR, LIST, MEASURE, type TextStyle } from './style.ts'
 import type { Block, List } from './tree.ts'
 
+/** A picture lower than a line stands in the middle of it, level with the words beside it. */
+const level = (strips: readonly Strip[], leading: number): readonly Strip[] =>
+  strips.map((one) => {
+    const above = Math.max(0, (leading - one.height) / 2)
+    return { ...one, height: one.height + 2 * above, paint: (canvas, shift, y) => one.paint(canvas, shift, y + above) }
+  })
+
 /** A cell's or an item's only paragraph belongs to the element itself; several blocks become its children. */
 export const flowInto = (blocks: readonly Block[], parent: StructureElement, flow: Flow): readonly Strip[] => {
   const [only, ...others] = blocks
   const inner = { ...flow, parent }
+  if (only?.kind === 'figure' && others.length === 0) return level(flow.blocks(blocks, inner), flow.base.text.leading)
   if (only?.kind !== 'paragraph' || others.length > 0) return flow.blocks(blocks, inner)
   return textStrips(inner, parent, only.runs, styled(flow.base.text, [...flow.inherited, ...only.classes]))
 }

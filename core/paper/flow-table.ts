@@ -128,7 +128,7 @@ export const flowTable = (table: Table, flow: Flow): Laid => {
     const [left, right] = [flow.x + shift, flow.x + shift + flow.width]
     canvas.artifact('/Type /Layout', () => canvas.rule(left, bottom, right, bottom, { colour: COLOUR.ink, width: 0.8 }))
   }
-  const frame: Frame = { head, paint: close }
+  const frame: Frame = { head, over: close }
   const inner = framed([...head, ...body], frame)
   const spaced = caption.length > 0 ? changeFirst(inner, { before: BLOCK.caption.after }) : inner
   return { strips: [...caption, ...spaced], before: BLOCK.table.before, after: BLOCK.table.after }

@@ -12,7 +12,7 @@ const letters = (word: Word): readonly Word[] => {
     if (piece.shape) return [piece]
     return piece.run.glyphs.map((glyph) => ({
       ...piece,
-      run: { glyphs: [glyph], kerns: [0], width: glyph.width },
+      run: { glyphs: [{ ...glyph, kern: 0 }], width: glyph.width },
       width: (glyph.width * piece.size) / 1000 + piece.spacing,
     }))
   })

@@ -1,10 +1,7 @@
 import type { Segment } from './svg-path.ts'
 
 /** A number as PDF content holds it: thousandths are finer than any printer. */
-export const num = (value: number): string => {
-  const rounded = Math.round(value * 1000) / 1000
-  return Object.is(rounded, -0) ? '0' : String(rounded)
-}
+export const num = (value: number): string => String(Math.round(value * 1000) / 1000)
 
 /** The six numbers of a matrix, fine enough that a whole page of user units stays in place. */
 export const matrix = (values: readonly number[]): string =>

@@ -13,6 +13,8 @@ export interface Entry {
 }
 
 interface Item {
+  /** 0 for the outline itself. */
+  readonly level: number
   readonly entry: Entry | undefined
   readonly reference: PdfReference
   readonly children: Item[]
@@ -23,18 +25,18 @@ const OPEN_LEVEL = 1
 const HEADROOM = 12
 
 const nest = (doc: PDFDocument, reference: PdfReference, entries: readonly Entry[]): Item => {
-  const root: Item = { entry: undefined, reference, children: [] }
-  const open: Item[] = [root]
+  const root: Item = { level: 0, entry: undefined, reference, children: [] }
+  let open: readonly Item[] = [root]
   for (const entry of entries) {
-    while (open.length > 1 && (open.at(-1)?.entry?.level ?? 0) >= entry.level) open.pop()
-    const item: Item = { entry, reference: doc.ref({}), children: [] }
-    open.at(-1)?.children.push(item)
-    open.push(item)
+    const above = open.filter(({ level }) => level < entry.level)
+    const item: Item = { level: entry.level, entry, reference: doc.ref({}), children: [] }
+    above.at(-1)?.children.push(item)
+    open = [...above, item]
   }
   return root
 }
 
-const isOpen = (item: Item): boolean => (item.entry?.level ?? 0) <= OPEN_LEVEL
+const isOpen = (item: Item): boolean => item.level <= OPEN_LEVEL
 
 /** How many items show when this one is opened (ISO 32000-1, table 153). */
 const showing = (item: Item): number =>

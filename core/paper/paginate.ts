@@ -1,4 +1,4 @@
-import type { Frame, Placed, Strip } from './strips.ts'
+import type { Frame, Hold, Placed, Strip } from './strips.ts'
 
 /** A page: header rows that are repeated because their table goes on, then the page's own strips. */
 export interface Page {
@@ -9,17 +9,20 @@ export interface Page {
 const heightOf = (strips: readonly Strip[], atTop: boolean): number =>
   strips.reduce((sum, one, index) => sum + one.height + (index === 0 && atTop ? 0 : one.before), 0)
 
-const reach = (strips: readonly Strip[], from: number, hold: number): number => {
+/** The strips from `from` on of which each holds on to the next at least so strongly. */
+const holding = (strips: readonly Strip[], from: number, hold: Hold): readonly Strip[] => {
   let end = from
-  while (end < strips.length - 1 && (strips[end]?.hold ?? 0) >= hold) end++
-  return end + 1
+  for (let one = strips[end]; one && one.hold >= hold && strips[end + 1]?.breakBefore === false; one = strips[end])
+    end++
+  return strips.slice(from, end + 1)
 }
 
 /** The strips from `from` on that stay together: all that hold, or only what holds strongly when that is more than a page. */
 const chunkAt = (strips: readonly Strip[], from: number, room: number): readonly Strip[] => {
-  const [weak, strong] = [1, 2].map((hold) => strips.slice(from, reach(strips, from, hold)))
-  if (weak && heightOf(weak, true) <= room) return weak
-  return strong && heightOf(strong, true) <= room ? strong : strips.slice(from, from + 1)
+  const weak = holding(strips, from, 1)
+  if (heightOf(weak, true) <= room) return weak
+  const strong = holding(strips, from, 2)
+  return heightOf(strong, true) <= room ? strong : strips.slice(from, from + 1)
 }
 
 /** Fills pages one after the other. */
@@ -42,9 +45,7 @@ class Filler {
     return this.#placed.length === 0
   }
 
-  add(chunk: readonly Strip[]): void {
-    const [first] = chunk
-    if (!first) return
+  add(first: Strip, chunk: readonly Strip[]): void {
     const full = this.#y + heightOf(chunk, this.#empty) > this.#bottom + 0.01
     if (!this.#empty && (full || first.breakBefore)) this.turn()
     if (this.#empty) this.#repeat(first)
@@ -83,12 +84,14 @@ class Filler {
  */
 export const paginate = (strips: readonly Strip[], top: number, bottom: number): readonly Page[] => {
   const filler = new Filler(top, bottom)
-  for (let at = 0; at < strips.length; ) {
-    const heads = Math.max(0, ...(strips[at]?.frames ?? []).map(({ head }) => heightOf(head, true)))
+  let next = 0
+  strips.forEach((first, at) => {
+    if (at < next) return
+    const heads = Math.max(0, ...first.frames.map(({ head }) => heightOf(head, true)))
     const chunk = chunkAt(strips, at, bottom - top - heads)
-    filler.add(chunk)
-    at += chunk.length
-  }
+    filler.add(first, chunk)
+    next = at + chunk.length
+  })
   filler.turn()
   return filler.pages
 }

@@ -24,7 +24,7 @@ const marked = (marks: Marks, element: Element): Marks => {
 
 const textRun = (node: TextNode, marks: Marks): Run => {
   const location = node.sourceCodeLocation
-  const source = { place: placeOf(node), from: location?.startOffset ?? 0, to: location?.endOffset ?? 0 }
+  const source = { place: placeOf(node), from: Number(location?.startOffset), to: Number(location?.endOffset) }
   return { kind: 'text', text: node.value.replace(/[ \t\n\r\f]+/g, ' '), marks, source }
 }
 

@@ -26,7 +26,7 @@ export interface Word {
 
 type Look = Pick<Piece, 'face' | 'size' | 'rise' | 'colour' | 'spacing'>
 
-const NO_GLYPHS: GlyphRun = { glyphs: [], kerns: [], width: 0 }
+const NO_GLYPHS: GlyphRun = { glyphs: [], width: 0 }
 const BREAK_HERE = 0x200b
 const PLAIN_SPACES = new Set([0x00a0, 0x202f, 0x2009])
 
@@ -117,7 +117,7 @@ export class Shaper {
   }
 
   #faceFor(sign: string, face: FaceName, source: Source | undefined): FaceName {
-    const codePoint = sign.codePointAt(0) ?? 0
+    const codePoint = Number(sign.codePointAt(0))
     if (codePoint < 0x7f || this.#faces[face].has(codePoint)) return face
     if (this.#faces.fallback.has(codePoint)) return 'fallback'
     throw missing(sign, codePoint, source, this.#html)
@@ -126,7 +126,8 @@ export class Shaper {
   #piece(text: string, look: Look, face: FaceName): Piece {
     const run = this.#faces[face].run(text)
     const width = (run.width * look.size) / 1000 + run.glyphs.length * look.spacing
-    return { ...look, face, run, width }
+    const { size, rise, colour, spacing } = look
+    return { face, size, rise, colour, spacing, run, width }
   }
 }
 
@@ -149,7 +150,7 @@ const tokens = (text: string): readonly string[] => {
     part = ''
   }
   signs.forEach((sign, index) => {
-    const codePoint = sign.codePointAt(0) ?? 0
+    const codePoint = Number(sign.codePointAt(0))
     if (sign === ' ') close(' ')
     else if (codePoint === BREAK_HERE) close('')
     else part += PLAIN_SPACES.has(codePoint) ? ' ' : sign

@@ -85,7 +85,7 @@ export const srgbProfile = (): Uint8Array => {
   view.setUint32(128, tags.length)
   const bytes = new Uint8Array(view.buffer)
   tags.forEach(([name, data], index) => {
-    const at = places.get(data) ?? 0
+    const at = Number(places.get(data))
     signature(view, 132 + index * 12, name)
     view.setUint32(136 + index * 12, at)
     view.setUint32(140 + index * 12, data.length)

@@ -6,10 +6,15 @@ import type { Canvas } from './canvas.ts'
  */
 export type Hold = 0 | 1 | 2
 
+export type FramePaint = (canvas: Canvas, shift: number, top: number, bottom: number) => void
+
 /** Something that reaches around strips: a box, or a table with the header rows that are repeated on each page. */
 export interface Frame {
   readonly head: readonly Strip[]
-  readonly paint: ((canvas: Canvas, shift: number, top: number, bottom: number) => void) | undefined
+  /** Draws under the strips that it reaches around. */
+  readonly under?: FramePaint
+  /** Draws over them. */
+  readonly over?: FramePaint
 }
 
 /** The smallest piece that a page break leaves whole: a line, a row, a figure. Lengths in points. */
@@ -71,7 +76,7 @@ export const stacked = (strips: readonly Strip[], y: number): readonly Placed[] 
 export const stackHeight = (strips: readonly Strip[]): number =>
   strips.reduce((sum, one, index) => sum + one.height + (index === 0 ? 0 : one.before), 0)
 
-/** Draws placed strips, frames first so that they lie underneath. */
+/** Draws placed strips, and what their frames put under and over them. */
 export const paintPlaced = (canvas: Canvas, shift: number, placed: readonly Placed[]): void => {
   const spans = new Map<Frame, { top: number; bottom: number }>()
   for (const { strip: one, y } of placed) {
@@ -80,6 +85,7 @@ export const paintPlaced = (canvas: Canvas, shift: number, placed: readonly Plac
       spans.set(frame, { top: span?.top ?? y, bottom: y + one.height })
     }
   }
-  for (const [frame, { top, bottom }] of spans) frame.paint?.(canvas, shift, top, bottom)
+  for (const [frame, { top, bottom }] of spans) frame.under?.(canvas, shift, top, bottom)
   for (const { strip: one, y } of placed) one.paint(canvas, shift, y)
+  for (const [frame, { top, bottom }] of spans) frame.over?.(canvas, shift, top, bottom)
 }

@@ -3,8 +3,8 @@ import { arcCurves, type Curve } from './svg-arc.ts'
 /** A drawn line in absolute coordinates: only what PDF knows too. */
 export type Segment = readonly ['M' | 'L', number, number] | readonly ['C', ...Curve] | readonly ['Z']
 
-/** What a path may not hold, as a finished sentence. The reader adds where it stands. */
-export class PathError extends Error {}
+/** Makes the error for a path that cannot be read, from a finished sentence. */
+type Refuse = (sentence: string) => Error
 
 const COUNTS: Readonly<Record<string, number>> = { M: 2, L: 2, H: 1, V: 1, C: 6, Q: 4, A: 7, Z: 0 }
 const NUMBER = /[+-]?(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?/y
@@ -17,7 +17,7 @@ interface Command {
 }
 
 /** Reads commands with their numbers; a command whose numbers repeat stands once for each set. */
-const commands = (data: string): readonly Command[] => {
+const commands = (data: string, refuse: Refuse): readonly Command[] => {
   let at = 0
   const take = (pattern: RegExp): string | undefined => {
     pattern.lastIndex = at
@@ -30,7 +30,7 @@ const commands = (data: string): readonly Command[] => {
       take(BETWEEN)
       const isFlag = letter.toUpperCase() === 'A' && (index === 3 || index === 4)
       const found = take(isFlag ? FLAG : NUMBER)
-      if (found === undefined) throw new PathError(`The path wants a number at “${data.slice(at, at + 12)}”.`)
+      if (found === undefined) throw refuse(`The path wants a number at “${data.slice(at, at + 12)}”.`)
       return Number(found)
     })
   const read: Command[] = []
@@ -42,12 +42,12 @@ const commands = (data: string): readonly Command[] => {
     letter = next ?? letter.replace('M', 'L').replace('m', 'l')
     const count = COUNTS[letter.toUpperCase()]
     if (count === undefined)
-      throw new PathError(`The path uses “${letter}”. Allowed: ${Object.keys(COUNTS).join(' ')}, capital or small.`)
-    if (!next && count === 0) throw new PathError('The path has a number after Z.')
+      throw refuse(`The path uses “${letter}”. Allowed: ${Object.keys(COUNTS).join(' ')}, capital or small.`)
+    if (!next && count === 0) throw refuse('The path has a number after Z.')
     read.push({ letter, values: values(letter, count) })
     take(BETWEEN)
   }
-  if (read[0] && read[0].letter.toUpperCase() !== 'M') throw new PathError('The path does not start with M.')
+  if (read[0] && read[0].letter.toUpperCase() !== 'M') throw refuse('The path does not start with M.')
   return read
 }
 
@@ -69,7 +69,7 @@ const absolute = ({ letter, values }: Command, pen: Pen): readonly number[] => {
 }
 
 /** Missing numbers cannot occur: `commands` has counted them. */
-const pick = (values: readonly number[], index: number): number => values[index] ?? 0
+const pick = (values: readonly number[], index: number): number => Number(values[index])
 
 const arc = (pen: Pen, values: readonly number[], x: number, y: number): Segment[] => {
   const [rx, ry] = [Math.abs(pick(values, 0)), Math.abs(pick(values, 1))]
@@ -124,13 +124,13 @@ const follow = (pen: Pen, segment: Segment): void => {
  * Path data as moves, lines and cubic curves in absolute coordinates.
  *
  * @param data the `d` attribute: M L H V C Q A Z, capital (absolute) or small (relative)
- * @throws PathError naming what was found and what is allowed
+ * @param refuse makes what is thrown when the path holds something else
  * @source SVG 2 (W3C Candidate Recommendation 2018), 9.3
  */
-export const readPath = (data: string): readonly Segment[] => {
+export const readPath = (data: string, refuse: Refuse): readonly Segment[] => {
   const pen: Pen = { x: 0, y: 0, startX: 0, startY: 0 }
   const segments: Segment[] = []
-  for (const command of commands(data)) {
+  for (const command of commands(data, refuse)) {
     for (const segment of drawn(command, pen)) {
       follow(pen, segment)
       segments.push(segment)

@@ -2,7 +2,7 @@ import { attribute, content, type Element, elements, isElement, isText, type Nod
 import type { Place } from './problems.ts'
 import type { SvgStyle } from './style.ts'
 import { FIRST_PAINT, numberOf, PAINT_ATTRIBUTES, type Paint, paintOf } from './svg-paint.ts'
-import { PathError, readPath, type Segment } from './svg-path.ts'
+import { readPath, type Segment } from './svg-path.ts'
 import { ellipse, polyline, rectangle } from './svg-shapes.ts'
 import { readTransform, type Transform } from './svg-transform.ts'
 
@@ -78,14 +78,8 @@ const points = (element: Element): readonly number[] => {
   throw problem('svg-value', element, `points of <${element.tagName}> has an odd count of numbers. Each point is x,y.`)
 }
 
-const pathOf = (element: Element): readonly Segment[] => {
-  try {
-    return readPath(attribute(element, 'd') ?? '')
-  } catch (error) {
-    if (error instanceof PathError) throw problem('svg-value', element, error.message)
-    throw error
-  }
-}
+const pathOf = (element: Element): readonly Segment[] =>
+  readPath(attribute(element, 'd') ?? '', (sentence) => problem('svg-value', element, sentence))
 
 const SHAPES: Readonly<Record<string, (element: Element) => readonly Segment[]>> = {
   path: pathOf,

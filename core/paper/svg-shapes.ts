@@ -40,7 +40,7 @@ export const rectangle = (x: number, y: number, width: number, height: number, r
 export const polyline = (points: readonly number[], closed: boolean): readonly Segment[] => {
   const segments: Segment[] = []
   for (let i = 0; i + 1 < points.length; i += 2) {
-    segments.push([i === 0 ? 'M' : 'L', points[i] ?? 0, points[i + 1] ?? 0])
+    segments.push([i === 0 ? 'M' : 'L', Number(points[i]), Number(points[i + 1])])
   }
   return closed ? [...segments, ['Z']] : segments
 }

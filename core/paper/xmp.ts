@@ -10,14 +10,6 @@ export interface About {
   readonly conformance: 'A' | 'B'
 }
 
-const ESCAPES: Readonly<Record<string, string>> = {
-  '&': '&amp;',
-  '<': '&lt;',
-  '>': '&gt;',
-  '"': '&quot;',
-  "'": '&apos;',
-}
-
 /**
  * Text as it may stand in XML content or in an attribute.
  *
@@ -26,7 +18,7 @@ const ESCAPES: Readonly<Record<string, string>> = {
 export const escapeXml = (text: string): string =>
   text
     .replace(/[\u0000-\u0008\u000b\u000c\u000e-\u001f\ufffe\uffff]/g, '')
-    .replace(/[&<>"']/g, (sign) => ESCAPES[sign] ?? sign)
+    .replace(/[&<>"']/g, (sign) => `&#${sign.charCodeAt(0)};`)
 
 /** PDF/A wants a schema of its own for each property that it does not know; `pdfuaid:part` is one (ISO 19005-3, 6.6.2.3). */
 const EXTENSION = `<rdf:Description rdf:about="" xmlns:pdfaExtension="http://www.aiim.org/pdfa/ns/extension/" xmlns:pdfaSchema="http://www.aiim.org/pdfa/ns/schema#" xmlns:pdfaProperty="http://www.aiim.org/pdfa/ns/property#">

@@ -16,8 +16,7 @@ export function heldBackEnergy({ into, usable }: Battery, { install }: Scene): n
 
 /** Whether a battery can feed the island: its inverter lies on the backed-up side. */
 export function feedsIsland({ into }: Battery, { topology }: Scene): boolean {
-  const { island, following } = topology.inverters
-  return island.includes(into) || following.includes(into)
+  return topology.live(into, 'island')
 }
 
 /**

@@ -3,7 +3,7 @@ import type { Battery } from '#core/install.ts'
 /** cm² of opening for each m³/h. */
 const OPENING = 28
 
-const gives = (chemistry: Battery['chemistry']): boolean => chemistry.startsWith('lead-acid')
+const gases = (chemistry: Battery['chemistry']): boolean => chemistry.startsWith('lead-acid')
 
 /**
  * Air in m³/h that keeps hydrogen below 4 %: factor · n · Igas · C · 10⁻³. Lead-acid only: lithium and sodium cells are
@@ -15,7 +15,7 @@ const gives = (chemistry: Battery['chemistry']): boolean => chemistry.startsWith
  */
 export function ventilation(battery: Battery, factor: number): number | undefined {
   const { chemistry, cells, capacity, gas_current } = battery
-  if (!gives(chemistry) || cells === undefined || capacity === undefined || gas_current === undefined) return undefined
+  if (!gases(chemistry) || cells === undefined || capacity === undefined || gas_current === undefined) return undefined
   return (factor * cells * gas_current * capacity) / 1000
 }
 

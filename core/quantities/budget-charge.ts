@@ -12,7 +12,7 @@ export interface Store {
 export interface Course {
   /** Wh at the start of each hour and at the end of the last: one more than there are hours */
   readonly charge: readonly number[]
-  /** h until it is empty and cannot serve the load for the first time, with the fraction of the hour; undefined where that never comes */
+  /** h until it first runs empty and no longer serves the load, with the fraction of the hour; undefined if never */
   readonly lasts: number | undefined
 }
 

@@ -108,7 +108,7 @@ class Builder {
   #scalar(event: ScalarEvent): void {
     this.#properties(event)
     const text = getScalarValue(this.#text, event)
-    if (text.length > MAX_SCALAR) this.#reportAt(refusals.tooLong(text.length), event)
+    if (text.length > MAX_SCALAR) this.#reportAt(refusals.TEXT_TOO_LONG, event)
     if (event.style === SCALAR_STYLE.DOUBLE_QUOTED && !event.fast) this.#escapes(text, event)
     if (event.valueEnd !== NOWHERE) this.#last = event.valueEnd
     const top = this.#top

@@ -63,7 +63,7 @@ function scalarStretch(text: string, { valueStart: start, valueEnd: end, style }
 /** The `|` or `>` of a block scalar: in the line before its text. */
 function headerOf(text: string, start: number, floor: number): number {
   const line = Math.max(floor, text.lastIndexOf('\n', start - 2) + 1)
-  return line + text.slice(line, start).search(/[|>][-+0-9]*[ \t]*(?:#.*)?\r?\n?$/)
+  return line + text.slice(line, start).search(/[|>]/)
 }
 
 function collectionStretch(parsed: Parsed, index: number, start: number): Stretch {

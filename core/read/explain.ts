@@ -1,4 +1,4 @@
-import { type Document, Lexer, parseDocument, type YAMLError } from 'yaml'
+import { type Document, isScalar, Lexer, parseDocument, visit, type YAMLError, YAMLParseError } from 'yaml'
 import { type ProblemCode, problem } from '../errors.ts'
 import type { Problem } from '../glossary.ts'
 import { rangeOf, restOfLine } from './positions.ts'
@@ -19,7 +19,8 @@ const OPTIONS = {
   schema: 'core',
   merge: false,
   stringKeys: true,
-  uniqueKeys: true,
+  // The parser compares each key with every other one of its block; `repeatedKeys` looks each up once.
+  uniqueKeys: false,
   prettyErrors: false,
   strict: true,
 } as const
@@ -29,6 +30,7 @@ const EXCESS = {
   keys: refusals.TOO_MANY_KEYS,
   items: refusals.TOO_MANY_ITEMS,
   tokens: refusals.TOO_MANY_TOKENS,
+  length: refusals.TEXT_TOO_LONG,
 } as const satisfies Readonly<Record<Excess['limit'], unknown>>
 
 /**
@@ -75,8 +77,25 @@ function compose(text: string): Composed {
     return { ok: false, problems: [problem(code, [], message, rangeOf(text, excess.offset, excess.offset + 1))] }
   }
   const document = parseDocument(text.replace(/^\ufeff/, '\n'), OPTIONS)
-  const problems = inWords(text, [...document.errors, ...document.warnings])
+  const problems = inWords(text, [...document.errors, ...document.warnings, ...repeatedKeys(document)])
   return problems.length === 0 ? { ok: true, document } : { ok: false, problems }
+}
+
+/** Keys that stand twice in their block, as the parser would tell them. */
+function repeatedKeys(document: Document): YAMLError[] {
+  const found: YAMLError[] = []
+  visit(document, {
+    Map(_, { items }) {
+      const seen = new Set<unknown>()
+      for (const { key } of items) {
+        if (!isScalar(key) || !key.range) continue
+        if (seen.has(key.value))
+          found.push(new YAMLParseError([key.range[0], key.range[1]], 'DUPLICATE_KEY', 'repeated'))
+        seen.add(key.value)
+      }
+    },
+  })
+  return found
 }
 
 function inWords(text: string, errors: readonly YAMLError[]): readonly Problem[] {
@@ -97,7 +116,7 @@ function problemOf(text: string, error: YAMLError): Problem {
   const opened = openedBefore(text, error)
   if (opened !== undefined) return placed(text, opened.code, opened.message, opened.offset, opened.offset + 1)
   const scene = sceneOf(text, error)
-  const refused = refusalOf(error.code, error.code === 'DUPLICATE_KEY' ? keyIn(scene.rest) : text.slice(start, end))
+  const refused = refusalOf(error.code, text.slice(start, end))
   if (refused !== undefined) return placed(text, refused.code, refused.message, start, end)
   const { code, message } = wordsFor(scene)
   return placed(text, code, message, start, end)
@@ -129,11 +148,6 @@ function refusalOf(code: YAMLError['code'], found: string): { code: ProblemCode;
     default:
       return undefined
   }
-}
-
-/** The parser marks only the first character of a key. */
-function keyIn(rest: string): string {
-  return rest.replace(/[\s:].*$/, '')
 }
 
 function sceneOf(text: string, { code, message, pos: [start] }: YAMLError): Scene {

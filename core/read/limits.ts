@@ -7,8 +7,8 @@ export const MAX_BYTES = 1024 * 1024
 export const MAX_DEPTH = 32
 export const MAX_KEYS = 40_000
 export const MAX_ITEMS = 20_000
-/** Words and marks that the slow reader looks at; a sound file within the other limits stays below. */
-export const MAX_TOKENS = 120_000
+/** Words and marks that the slow reader looks at: it needs a second for some hundred thousand. */
+export const MAX_TOKENS = 200_000
 /** Characters (UTF-16 code units) of one value. */
 export const MAX_SCALAR = 64 * 1024
 /** Problems of one file that are told; the rest is counted. */

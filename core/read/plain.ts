@@ -1,6 +1,6 @@
 import type { Fault } from '../errors.ts'
 import { MAX_DIGITS } from './limits.ts'
-import { quote } from './words.ts'
+import { cut, quote } from './words.ts'
 
 export type PlainValue = string | number | boolean | null
 
@@ -27,6 +27,9 @@ const SEXAGESIMAL = /^[-+]?[0-9]+(?::[0-5]?[0-9])+(?:\.[0-9]*)?$/
 const LEADING_ZERO = /^([-+]?)0+(?=[0-9])/
 const SMALLEST_NORMAL = 2.3e-308
 
+/** No number is longer, however it is written. */
+const LONGEST = 64
+
 /** First characters of anything that is not simply text: signs, digits, the dot, and the letters of the words above. */
 const MAY_BE_SPECIAL = /^[-+.0-9~nNtTfF]/
 
@@ -43,12 +46,13 @@ export function resolvePlain(source: string): { value: PlainValue } | { fault: F
   const word = WORDS.get(source)
   if (word !== undefined) return { value: word }
   if (NUMBER.test(source)) return resolveNumber(source)
+  if (source.length > LONGEST) return { value: source }
   const fault = strangeNumber(source)
   return fault === undefined ? { value: source } : { fault }
 }
 
 function resolveNumber(source: string): { value: number } | { fault: Fault } {
-  const fault = numberFault(source, `, or put it in quotes ("${source}") if it is a name`)
+  const fault = numberFault(source, `, or put it in quotes ("${cut(source)}") if it is a name`)
   if (fault !== undefined) return { fault }
   const value = Number(source)
   return { value: value === 0 ? 0 : value }
@@ -63,7 +67,7 @@ function resolveNumber(source: string): { value: number } | { fault: Fault } {
  */
 export function numberFault(source: string, otherwise: string): Fault | undefined {
   if (LEADING_ZERO.test(source)) {
-    const mended = source.replace(LEADING_ZERO, '$1')
+    const mended = cut(source.replace(LEADING_ZERO, '$1'))
     return {
       code: 'number-leading-zero',
       message: `${quote(source)} begins with a zero: write ${mended}${otherwise}.`,
@@ -88,10 +92,15 @@ export function numberFault(source: string, otherwise: string): Fault | undefine
 
 /** Digits from the first to the last that is not zero, without the exponent. */
 function significantDigits(source: string): string {
-  return source
-    .replace(/[eE].*$/, '')
+  const digits = source
+    .split(/[eE]/, 1)
+    .join('')
     .replace(/[^0-9]/g, '')
-    .replace(/^0+|0+$/g, '')
+  let start = 0
+  while (digits[start] === '0') start++
+  let end = digits.length
+  while (end > start && digits[end - 1] === '0') end--
+  return digits.slice(start, end)
 }
 
 function rounded(source: string): string {

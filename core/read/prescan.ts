@@ -1,8 +1,8 @@
-import { MAX_DEPTH, MAX_ITEMS, MAX_KEYS, MAX_TOKENS } from './limits.ts'
+import { MAX_DEPTH, MAX_ITEMS, MAX_KEYS, MAX_SCALAR, MAX_TOKENS } from './limits.ts'
 
 /** Which limit a text breaks, and where. */
 export interface Excess {
-  readonly limit: 'depth' | 'keys' | 'items' | 'tokens'
+  readonly limit: 'depth' | 'keys' | 'items' | 'tokens' | 'length'
   readonly offset: number
 }
 
@@ -94,8 +94,9 @@ class Scan {
   }
 
   #token(token: string): Excess['limit'] | undefined {
-    if (token.trim() !== '') this.#tokens++
-    return this.#tokens > MAX_TOKENS ? 'tokens' : undefined
+    if (token.trim() === '') return undefined
+    if (token.length > MAX_SCALAR) return 'length'
+    return ++this.#tokens > MAX_TOKENS ? 'tokens' : undefined
   }
 
   #advance(token: string): void {

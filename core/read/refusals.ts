@@ -1,6 +1,6 @@
 import type { Fault } from '../errors.ts'
 import { MAX_DEPTH, MAX_ITEMS, MAX_KEYS, MAX_SCALAR, MAX_TOKENS } from './limits.ts'
-import { quote } from './words.ts'
+import { cut, quote } from './words.ts'
 
 /** What both readers say about YAML that is well formed and still not part of the format. */
 
@@ -46,11 +46,9 @@ export const EMPTY_FILE: Fault = {
   message: 'There is nothing in this file: begin with “skerry: 1”, or let “skerry new” write a file to fill in.',
 }
 
-export function tooLong(length: number): Fault {
-  return {
-    code: 'text-too-long',
-    message: `This text has ${length} characters, and ${MAX_SCALAR} are read at most: shorten it.`,
-  }
+export const TEXT_TOO_LONG: Fault = {
+  code: 'text-too-long',
+  message: `This text has more than ${MAX_SCALAR} characters, and no more are read: shorten it.`,
 }
 
 export function duplicateKey(key: string): Fault {
@@ -71,9 +69,9 @@ export function anchorRefused(mark: string): Fault {
 
 /** `>9` alone is the header of an empty block of text to YAML; it was meant as a reading. */
 export function unquotedBound(header: string, text: string): Fault | undefined {
-  const bound = />[0-9]+$/.exec(header.trimEnd())?.[0]
+  const bound = />[0-9]{1,15}$/.exec(header.trimEnd())?.[0]
   if (text !== '' || bound === undefined) return undefined
-  return { code: 'needs-quotes', message: `A value that starts with “>” needs quotes: write "${bound}".` }
+  return { code: 'needs-quotes', message: `A value that starts with “>” needs quotes: write "${cut(bound)}".` }
 }
 
 /**
@@ -85,10 +83,10 @@ export function unquotedBound(header: string, text: string): Fault | undefined {
  */
 export function lostComma(key: string, before: string): { fault: Fault; length: number } | undefined {
   if (!/^[0-9]/.test(key)) return undefined
-  const number = /[0-9]+,$/.exec(before)?.[0]
+  const number = /[0-9]{1,15},$/.exec(before)?.[0]
   if (number === undefined) return undefined
   const mended = `${number.slice(0, -1)}.${key}`
-  const message = `${quote(number + key)} has a decimal comma, which separates entries here: write ${mended}.`
+  const message = `${quote(number + key)} has a decimal comma, which separates entries here: write ${cut(mended)}.`
   return { fault: { code: 'decimal-comma', message }, length: number.length }
 }
 
@@ -101,7 +99,7 @@ export function lostComma(key: string, before: string): { fault: Fault; length: 
 export function gluedValue(key: string, after: string): Fault | undefined {
   if (!/^[^:]+:[^:]/.test(key) || !/^\s*[,}]/.test(after)) return undefined
   const mended = key.replace(':', ': ')
-  return { code: 'missing-space', message: `${quote(key)} has no space after the colon: write ${mended}.` }
+  return { code: 'missing-space', message: `${quote(key)} has no space after the colon: write ${cut(mended)}.` }
 }
 
 /** `\U` with a code point beyond Unicode; a pair of backslashes before it is text. */

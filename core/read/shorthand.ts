@@ -2,7 +2,7 @@ import type { Fault } from '../errors.ts'
 import type { Cable, Device } from '../install.ts'
 import { type Block, isBlock, quantityUnder, together, unknownKey, wordUnder } from './block.ts'
 import type { Parsed } from './quantity.ts'
-import { either, quote } from './words.ts'
+import { cut, either, quote } from './words.ts'
 
 const BREAKER = /^([BCD]) ?([0-9]{1,4}(?:\.[0-9])?)(?: ?A)?$/
 const FUSE = /^gG ?([0-9]{1,4}(?:\.[0-9])?)(?: ?A)?$/
@@ -41,7 +41,7 @@ function rated(text: string, device: Device): Parsed<Device> {
 /** A spelling that comes near: other capitals, the rating in front, the older name gL. */
 function mendedDevice(text: string): string {
   const letters = /[a-z]+/i.exec(text)?.[0] ?? ''
-  const rating = /[0-9]+/.exec(text)?.[0]
+  const rating = /[0-9]{1,4}/.exec(text)?.[0]
   if (rating === undefined) return DEVICES
   if (/^[bcd]$/i.test(letters)) return `write ${letters.toUpperCase()}${rating}`
   return /^g[gl]$/i.test(letters) ? `write gG ${rating}` : DEVICES
@@ -125,7 +125,7 @@ function cores(value: unknown): Parsed<Pick<Cable, 'line' | 'neutral' | 'protect
 }
 
 function mendedCable(text: string): string {
-  if (text.includes(',')) return `write ${text.replace(',', '.')}, with a decimal point`
+  if (text.includes(',')) return `write ${cut(text.replace(',', '.'))}, with a decimal point`
   return CABLES
 }
 

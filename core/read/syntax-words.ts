@@ -1,6 +1,6 @@
 import type { ErrorCode } from 'yaml'
 import type { ProblemCode } from '../errors.ts'
-import { quote } from './words.ts'
+import { cut, quote } from './words.ts'
 
 /** A syntax error, and what stands around it. */
 export interface Scene {
@@ -23,7 +23,7 @@ interface Wording {
 }
 
 /** `>` or `|` where a value begins, with more than the header of a block of text behind it. */
-const BOUND = /(?<=[:-] )[|>].*$/
+const BOUND = /(?<=[:-] )[|>]/
 
 const NO_DASHES = 'Items inside brackets have no dashes: delete the dash, and separate the items by commas.'
 
@@ -52,7 +52,7 @@ const WORDINGS: readonly Wording[] = [
     code: 'MULTILINE_IMPLICIT_KEY',
     when: ({ line }) => /^\s*[^\s:#]+:[^\s:]/.test(line),
     problem: 'missing-space',
-    say: ({ line }) => `A space is missing after the colon: write “${line.trim().replace(':', ': ')}”.`,
+    say: ({ line }) => `A space is missing after the colon: write ${quote(line.trim().replace(':', ': '))}.`,
   },
   {
     code: 'MULTILINE_IMPLICIT_KEY',
@@ -192,8 +192,10 @@ export function isEcho(scene: Scene): boolean {
 
 /** The value that begins here, up to what ends it inside brackets or before a comment. */
 function quotesNeeded(rest: string): string {
-  const value = rest.replace(/(?:\s#|[,\]}]\s*$|[,\]}] ).*$/, '').trim()
-  return `A value that starts with “${value.charAt(0)}” needs quotes: write ${JSON.stringify(value)}.`
+  const line = rest.trimEnd()
+  const end = line.search(/\s#|[,\]}](?:\s|$)/)
+  const value = (end === -1 ? line : line.slice(0, end)).trim()
+  return `A value that starts with “${value.charAt(0)}” needs quotes: write ${JSON.stringify(cut(value))}.`
 }
 
 function misaligned(line: string): string {

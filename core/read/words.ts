@@ -1,4 +1,4 @@
-const SHOWN = 40
+const SHOWN = 60
 
 /**
  * A piece of the file between quotation marks, cut where it would fill the line; characters that cannot be seen are
@@ -7,8 +7,13 @@ const SHOWN = 40
  * @param text what was found
  */
 export function quote(text: string): string {
-  const cut = text.length > SHOWN ? `${text.slice(0, SHOWN).trimEnd()}…` : text
-  return `“${cut.replace(/[\p{Cc}\p{Cf}\p{Cs}]/gu, named)}”`
+  return `“${cut(text)}”`
+}
+
+/** As `quote`, without the quotation marks: for what is to be written instead. */
+export function cut(text: string): string {
+  const short = text.length > SHOWN ? `${text.slice(0, SHOWN).trimEnd()}…` : text
+  return short.replace(/[\p{Cc}\p{Cf}\p{Cs}]/gu, named)
 }
 
 /** `U+202E`: how a character is named in Unicode. */

@@ -1,9 +1,11 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
+import { PaperDocument } from '#core/paper/document.ts'
 import { breakLines } from '#core/paper/lines.ts'
 import type { Word } from '#core/paper/shape.ts'
 import { page } from './page.ts'
 import { flat, Objects, structureOf } from './pdf-objects.ts'
+import { greyJpeg } from './sample.ts'
 import { run, withFile, wordsOf } from './tools.ts'
 
 interface Spot {
@@ -158,6 +160,82 @@ describe('text', () => {
   })
 })
 
+describe('pictures', () => {
+  /** The grey picture with an EXIF block that says how the camera was held (TIFF 6, tag 274). */
+  const held = (orientation: number): Uint8Array => {
+    const exif = [0xff, 0xe1, 0, 34, 0x45, 0x78, 0x69, 0x66, 0, 0, 0x4d, 0x4d, 0, 42, 0, 0, 0, 8, 0, 1]
+    const entry = [1, 0x12, 0, 3, 0, 0, 0, 1, 0, orientation, 0, 0, 0, 0, 0, 0]
+    const bytes = [...greyJpeg.subarray(0, 2), ...exif, ...entry, ...greyJpeg.subarray(2)]
+    const high = bytes.findIndex((byte, at) => byte === 0xff && bytes[at + 1] === 0xc0) + 6
+    return new Uint8Array(bytes.map((byte, at) => (at === high ? 16 : byte)))
+  }
+
+  const boxOf = (jpeg: Uint8Array) => {
+    const objects = new Objects(page('<figure><img src="a" alt="a board"></figure>', { pictures: { a: jpeg } }))
+    const [figure] = flat(structureOf(objects)).filter(({ type }) => type === '/Figure')
+    const [left = 0, bottom = 0, right = 0, top = 0] = objects
+      .list(objects.dictionary(figure?.entries['/A'])['/BBox'])
+      .map(Number)
+    return { width: right - left, height: top - bottom }
+  }
+
+  test('a photo is no larger than its dots allow, and stands upright as the camera was held', () => {
+    const upright = boxOf(held(1))
+    expect(upright.width).toBeCloseTo((8 * 72) / 150, 1)
+    expect(upright.height).toBeCloseTo((16 * 72) / 150, 1)
+    const turned = boxOf(held(6))
+    expect([turned.width, turned.height]).toEqual(
+      [upright.height, upright.width].map((side) => expect.closeTo(side, 1)),
+    )
+  })
+})
+
+describe('small things', () => {
+  test('a verdict in a column that is too narrow for it keeps its letters', () => {
+    const html = `<table><colgroup><col width="4%"><col width="96%"></colgroup><tbody>${row('<span class="verdict-limited">limited</span>', '')}</tbody></table>`
+    expect(wordsOf(page(html)).replaceAll(' ', '')).toBe('limited')
+  })
+
+  test('an empty side of the running head prints nothing', () => {
+    expect(
+      wordsOf(page('<p>a</p>', { header: { left: '', right: 'only\u00a0{page}' } }))
+        .trim()
+        .split(' '),
+    ).toEqual(expect.arrayContaining(['a', 'only', '1']))
+  })
+
+  test('a heading of two lines is one entry of the outline', () => {
+    const objects = new Objects(page('<h1>one<br>two</h1><h2 class="right">three</h2><p class="right">four</p>'))
+    const first = objects.dictionary(objects.dictionary(objects.catalog['/Outlines'])['/First'])
+    expect(first['/Title']).toBe('u:one two')
+  })
+
+  test('more different words than are remembered between pages', () => {
+    const words = Array.from({ length: 20_050 }, (_, i) => i.toString(36))
+    expect(
+      wordsOf(page(`<p>${words.join(' ')}</p>`))
+        .trim()
+        .split(' '),
+    ).toHaveLength(words.length)
+  })
+
+  test('an object that is opened and not ended does not go unnoticed', () => {
+    const about = {
+      title: '',
+      author: '',
+      subject: undefined,
+      language: 'en',
+      producer: '',
+      part: 3,
+      conformance: 'A',
+    } as const
+    const doc = new PaperDocument({ ...about, created: new Date(0) })
+    doc.addPage()
+    doc.ref()
+    expect(() => doc.finish()).toThrow('A PDF object was opened and not ended.')
+  })
+})
+
 describe('setting lines', () => {
   const word = (width: number): Word => ({
     pieces: [
@@ -168,7 +246,7 @@ describe('setting lines', () => {
         colour: '#000000',
         spacing: 0,
         width,
-        run: { glyphs: [{ id: 1, codePoint: 97, width: width * 100 }], kerns: [0], width: width * 100 },
+        run: { glyphs: [{ id: 1, codePoint: 97, width: width * 100, kern: 0 }], width: width * 100 },
       },
     ],
     width,

@@ -26,8 +26,8 @@ describe('what PDF/A-3a and PDF/UA-1 ask of the catalog', () => {
     expect(xmp).toContain('<pdfaid:part>3</pdfaid:part><pdfaid:conformance>A</pdfaid:conformance>')
     expect(xmp).toContain('<pdfuaid:part>1</pdfuaid:part>')
     expect(xmp).toContain('<pdfaSchema:prefix>pdfuaid</pdfaSchema:prefix>')
-    expect(xmp).toContain('Alder Mill Bakery &amp; Sons: report &lt;FM-2026-031&gt;')
-    expect(xmp).toContain('Fenn &quot;Electric&quot; Ltd')
+    expect(xmp).toContain('Alder Mill Bakery &#38; Sons: report &#60;FM-2026-031&#62;')
+    expect(xmp).toContain('Fenn &#34;Electric&#34; Ltd')
     expect(unbalanced(xmp)).toEqual([])
   })
 

@@ -1,9 +1,11 @@
 import { describe, expect, test } from 'vitest'
 import { onPaper } from '#core/paper/operators.ts'
-import { readPath } from '#core/paper/svg-path.ts'
+import { readPath as read } from '#core/paper/svg-path.ts'
 import { rectangle } from '#core/paper/svg-shapes.ts'
 import { page } from './page.ts'
 import { Objects } from './pdf-objects.ts'
+
+const readPath = (data: string) => read(data, (sentence) => new Error(sentence))
 
 const rounded = (segments: readonly (readonly (string | number)[])[]) =>
   segments.map((segment) =>
@@ -110,9 +112,9 @@ describe('what is drawn', () => {
     expect(drawn(half)).toMatch(/Gs\d gs/)
     expect(drawn(half, { flavour: 'PDF/A-1b' })).not.toContain(' gs')
     expect(drawn(half, { flavour: 'PDF/A-1b' })).toContain('0.502 0.502 0.502 rg')
-    expect(drawn('<rect width="1" height="1" class="faint"/>', { svgStyles: { faint: { opacity: 0.25 } } })).toMatch(
-      /Gs\d gs/,
-    )
+    expect(
+      drawn('<rect width="1" height="1" class="faint unknown"/>', { svgStyles: { faint: { opacity: 0.25 } } }),
+    ).toMatch(/Gs\d gs/)
     expect(onPaper('#000000', 0.25)).toBe('#bfbfbf')
   })
 

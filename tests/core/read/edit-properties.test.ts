@@ -84,7 +84,7 @@ describe('whatever is written', () => {
         const { offset, endOffset } = sound(file).locate(edit.path)
         const value = file.slice(offset, endOffset)
         const kept = commentsIn(file).filter((comment) => !value.includes(comment.trim()))
-        expect(commentsIn(result.text)).toEqual(expect.arrayContaining(kept))
+        for (const comment of kept) expect(result.text).toContain(comment)
         expect(result.text.includes('\r\n')).toBe(file.includes('\r\n'))
         expect(value).toContain(removed(file, result.text))
       }),

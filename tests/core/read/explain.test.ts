@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { explain, readWithComments } from '#core/read/explain.ts'
-import { MAX_ITEMS, MAX_KEYS, MAX_PROBLEMS, MAX_TOKENS } from '#core/read/limits.ts'
+import { MAX_ITEMS, MAX_KEYS, MAX_PROBLEMS, MAX_SCALAR, MAX_TOKENS } from '#core/read/limits.ts'
 import { read } from '#core/read/read.ts'
 import { wordsFor } from '#core/read/syntax-words.ts'
 
@@ -110,6 +110,7 @@ describe('syntax errors in plain words', () => {
   it.each([
     ['keys', `x: "\\d"\n${'? a\n'.repeat(MAX_KEYS + 1)}`, 'too-many-keys'],
     ['items', `x: "\\d"\ny: [${'1,'.repeat(MAX_ITEMS + MAX_KEYS + 1)}]`, 'too-many-items'],
+    ['characters in a text', `a: "${'\\d'.repeat(MAX_SCALAR)}"`, 'text-too-long'],
     ['words', '{}'.repeat(MAX_TOKENS / 2 + 1), 'too-large'],
   ])('a broken file with too many %s is not parsed by the slow reader', (_, text, code) => {
     expect(read(text, explain)).toMatchObject({ ok: false, problems: [{ code }] })

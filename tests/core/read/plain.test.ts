@@ -78,6 +78,7 @@ describe('values without quotes, YAML 1.2 core schema (clause 10.3.2)', () => {
     ['.inf', 'number-not-finite', '">999 MΩ"'],
     ['-.INF', 'number-not-finite', '">999 MΩ"'],
     ['.nan', 'number-not-finite', '">999 MΩ"'],
+    [`5${'0'.repeat(300_000)}1`, 'number-too-precise', 'has 300002 digits'],
     ['1_000', 'number-separator', 'write 1000.'],
     ['-1_000.5', 'number-separator', 'write -1000.5.'],
     ['1:30', 'number-sexagesimal', 'read as 90 by some programs: write 90,'],
@@ -86,6 +87,14 @@ describe('values without quotes, YAML 1.2 core schema (clause 10.3.2)', () => {
     ['-0o17', 'number-radix', 'write -15.'],
   ])('%s is refused, and the mended text is shown', (source, code, words) => {
     expect(resolvePlain(source)).toEqual({ fault: { code, message: expect.stringContaining(words) } })
+  })
+
+  it('a long text that looks like a number is text, and is read at once', () => {
+    const start = performance.now()
+    for (const source of [`${'1_'.repeat(250_000)}x`, '1_'.repeat(250_000), `1${':1'.repeat(250_000)}`]) {
+      expect(resolvePlain(source)).toEqual({ value: source })
+    }
+    expect(performance.now() - start).toBeLessThan(500)
   })
 
   it('keeps every number of up to fifteen digits', () => {

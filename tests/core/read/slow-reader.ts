@@ -17,8 +17,8 @@ const OPTIONS = {
  */
 export function slowTree(text: string): { readonly tree: unknown } | undefined {
   if (guard(text).length > 0 || hasTagOrAnchor(text)) return undefined
-  // The parser stumbles over a list behind a byte order mark.
-  const document = parseDocument(text.replace(/^\ufeff/, '\n'), OPTIONS)
+  // The parser stumbles over a list behind a byte order mark, and over blanks before CRLF in a block of text.
+  const document = parseDocument(text.replace(/^\ufeff/, '\n').replaceAll('\r\n', '\n'), OPTIONS)
   if (document.errors.length > 0 || document.warnings.length > 0) return undefined
   let refused = false
   visit(document, (key, node) => {
