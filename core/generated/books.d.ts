@@ -1,3 +1,3 @@
-import type { ShippedRule, StoredBook, StoredRule } from '#core/judge/shipped.ts'
-export declare const RULES: () => readonly (StoredRule & Pick<ShippedRule, 'key'>)[]
+import type { StoredBook, StoredRule } from '#core/judge/shipped.ts'
+export declare const RULES: () => readonly StoredRule[]
 export declare const BOOKS: Readonly<Record<string, () => StoredBook>>

@@ -1,7 +1,4 @@
-import type { PlacedRule, ResolvedBook } from '#core/judge/book.ts'
+import type { BookPage, RulePage } from '#core/judge/pages.ts'
 /** Every rule in full, and every book with its rules by key. */
-declare const pages: () => {
-  readonly books: readonly (Omit<ResolvedBook, 'rules'> & { readonly keys: readonly string[] })[]
-  readonly rules: readonly (PlacedRule & { readonly key: string })[]
-}
+declare const pages: () => { readonly books: readonly BookPage[]; readonly rules: readonly RulePage[] }
 export default pages

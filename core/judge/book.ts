@@ -105,7 +105,8 @@ function overlayProblems({ book, chapters }: BookFolder, base: ResolvedBook): st
   ]
 }
 
-function overlayOn(folder: BookFolder, base: ResolvedBook): Resolution {
+/** Puts an overlay on a resolved book: its parameters, what it switches off, replaces and adds. */
+export function overlayOn(folder: BookFolder, base: ResolvedBook): Resolution {
   const messages = overlayProblems(folder, base)
   if (messages.length > 0)
     return { ok: false, problems: messages.map((message) => ({ book: folder.book.id, message })) }

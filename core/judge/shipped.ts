@@ -4,6 +4,7 @@ import type { Check, Rule, RuleBook } from './rule.ts'
 
 /** A rule in the generated list: its record without words, its schemas by the names of the compiled checks. */
 export interface StoredRule extends Omit<Rule, 'when' | 'must'> {
+  readonly key: string
   readonly when: string | null
   readonly must: string
 }

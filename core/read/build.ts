@@ -114,7 +114,7 @@ class Builder {
     const top = this.#top
     if (top?.kind === 'block' && top.awaitsKey) return this.#key(top, text, event)
     if (event.style === SCALAR_STYLE.PLAIN) return this.#plain(text, event)
-    if (event.style === SCALAR_STYLE.FOLDED_BLOCK) this.#folded(text, event)
+    if (event.style >= SCALAR_STYLE.LITERAL_BLOCK && text.trim() === '') this.#blankBlock(event)
     this.#put(text, event.valueStart)
   }
 
@@ -173,9 +173,9 @@ class Builder {
     if (refusals.escapesBeyondUnicode(raw) || holdsForbidden(text)) this.#reportAt(refusals.FORBIDDEN_ESCAPE, event)
   }
 
-  #folded(text: string, event: ScalarEvent): void {
+  #blankBlock(event: ScalarEvent): void {
     const start = this.#text.lastIndexOf('\n', event.valueStart - 2) + 1
-    const fault = refusals.unquotedBound(this.#text.slice(start, event.valueStart), text)
+    const fault = refusals.unquotedBound(this.#text.slice(start, event.valueStart))
     if (fault !== undefined) this.#report(fault, start, event.valueStart - 1)
   }
 

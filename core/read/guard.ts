@@ -35,7 +35,7 @@ export function guard(text: string): Problem[] {
   }
   if (FORBIDDEN.test(text.startsWith('\ufeff') ? text.slice(1) : text)) return forbiddenCharacters(text)
   const tabs = text.includes('\t') ? tabsInFront(text) : []
-  return tabs.length === 0 && MAYBE_MARK.test(text) ? marksInFront(text) : tabs
+  return tabs.length === 0 && MAYBE_MARK.test(text) ? marks(text) : tabs
 }
 
 /** Whether a decoded value holds a character that no file may hold; escapes in double quotes can bring one in. */
@@ -73,6 +73,14 @@ function tabsInFront(text: string): Problem[] {
     found.add(() => problem('tab', [], message, rangeOf(text, start, end)))
   }
   return found.all()
+}
+
+function marks(text: string): Problem[] {
+  const front = marksInFront(text)
+  const [, second] = text.matchAll(/^\.\.\.(?=\s|$)/gm)
+  if (front.length > 0 || second === undefined) return front
+  const message = '“...” ends the YAML document a second time: delete the line.'
+  return [problem('several-documents', [], message, rangeOf(text, second.index, second.index + 3))]
 }
 
 function marksInFront(text: string): Problem[] {

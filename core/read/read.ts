@@ -7,7 +7,7 @@ import { guard } from './guard.ts'
 import { MAX_DEPTH } from './limits.ts'
 import { locate } from './locate.ts'
 import { rangeOf, restOfLine } from './positions.ts'
-import { EMPTY_FILE, TOO_DEEP } from './refusals.ts'
+import { EMPTY_FILE, ONLY_TEXT, TOO_DEEP } from './refusals.ts'
 
 /** Where a value, or the key it stands under, is in the text. */
 export type Locate = (path: Path, part?: 'key' | 'value') => Range
@@ -53,6 +53,7 @@ export function read(text: string, explain?: Explain): ReadResult {
   const { tree, problems } = build(parsed)
   if (problems.length > 0) return { ok: false, problems }
   if (tree === null) return { ok: false, problems: [faultAt(EMPTY_FILE, [])] }
+  if (typeof tree !== 'object') return { ok: false, problems: [faultAt(ONLY_TEXT, [])] }
   return { ok: true, tree, parsed, locate: (path, part) => locate(parsed, path, part) }
 }
 

@@ -46,6 +46,11 @@ export const EMPTY_FILE: Fault = {
   message: 'There is nothing in this file: begin with “skerry: 1”, or let “skerry new” write a file to fill in.',
 }
 
+export const ONLY_TEXT: Fault = {
+  code: 'wrong-type',
+  message: 'This file holds a text or a number and no keys: begin with “skerry: 1”, each key on a line of its own.',
+}
+
 export const TEXT_TOO_LONG: Fault = {
   code: 'text-too-long',
   message: `This text has more than ${MAX_SCALAR} characters, and no more are read: shorten it.`,
@@ -67,11 +72,18 @@ export function anchorRefused(mark: string): Fault {
   return { code: 'anchor', message }
 }
 
-/** `>9` alone is the header of an empty block of text to YAML; it was meant as a reading. */
-export function unquotedBound(header: string, text: string): Fault | undefined {
-  const bound = />[0-9]{1,15}$/.exec(header.trimEnd())?.[0]
-  if (text !== '' || bound === undefined) return undefined
-  return { code: 'needs-quotes', message: `A value that starts with “>” needs quotes: write "${cut(bound)}".` }
+/**
+ * `>9` alone is the header of a block of text to YAML; where there is no text, it was meant as a reading.
+ *
+ * @param header the line in which the block of text begins
+ */
+export function unquotedBound(header: string): Fault | undefined {
+  const bound = /[|>][-+]?[0-9][-+]?(?=\s*$|\s+#)/.exec(header)?.[0]
+  if (bound === undefined) return undefined
+  return {
+    code: 'needs-quotes',
+    message: `A value that starts with “${bound.charAt(0)}” needs quotes: write "${bound}".`,
+  }
 }
 
 /**

@@ -9,7 +9,8 @@ export interface FindingWords {
   readonly do: string
 }
 
-type Printer = (scene: WordScene) => string
+/** Fills one part of a rule's words. */
+export type Printer = (scene: WordScene) => string
 
 /** The package declares no types for its runtime: it is the full engine without the compiler. */
 const engine = (runtime as unknown as typeof Handlebars).create()
@@ -30,4 +31,10 @@ function printer(key: string, part: 'says' | 'do'): Printer {
 /** Fills the words of a shipped rule from a sheet. */
 export function ruleWordsFor(key: string, scene: WordScene): FindingWords {
   return { says: printer(key, 'says')(scene), do: printer(key, 'do')(scene) }
+}
+
+/** Adds the words of a rule of one's own, compiled when its book was read. */
+export function learnWords(key: string, { says, do: what }: { readonly says: Printer; readonly do: Printer }): void {
+  printers.set(`${key} says`, says)
+  printers.set(`${key} do`, what)
 }

@@ -1,13 +1,11 @@
 import { mkdir, writeFile } from 'node:fs/promises'
 import { dirname } from 'node:path'
 import { pathToFileURL } from 'node:url'
-import { type PlacedRule, type ResolvedBook, resolveBook } from '#core/judge/book.ts'
-import { hashOf } from '#core/judge/canonical.ts'
-import { needsOf, readsOf, whenSchema } from '#core/judge/needs.ts'
+import { type ResolvedBook, resolveBook } from '#core/judge/book.ts'
 import type { SheetSchema } from '#core/judge/rule.ts'
-import type { StoredBook, StoredRule } from '#core/judge/shipped.ts'
+import { keyOf, storedBook, storedRule } from '#core/judge/stored.ts'
 import { compileChecks } from './compile-checks.ts'
-import { keyOf, precompileWords } from './precompile-words.ts'
+import { precompileWords } from './precompile-words.ts'
 import { readBooks } from './read-books.ts'
 
 const PROJECT = new URL('../../', import.meta.url).pathname
@@ -39,37 +37,6 @@ function namer(): { readonly nameOf: (schema: SheetSchema) => string; readonly n
   }
 }
 
-function stored(
-  { record, ...rule }: PlacedRule,
-  nameOf: (schema: SheetSchema) => string,
-): StoredRule & { readonly key: string } {
-  return {
-    key: keyOf({ record, ...rule }),
-    id: record.id,
-    subject: record.subject,
-    state: record.state,
-    severity: record.severity,
-    needs: needsOf(record),
-    reads: readsOf(record),
-    at: record.at ?? readsOf(record),
-    when: record.when ? nameOf(whenSchema(record.when)) : null,
-    must: nameOf(record.must),
-  }
-}
-
-function storedBook(book: ResolvedBook, places: ReadonlyMap<string, number>): StoredBook {
-  const values = Object.entries(book.parameters).map(([name, { value }]) => [name, value])
-  return {
-    id: book.id,
-    title: book.title,
-    version: book.version,
-    hash: hashOf(book),
-    parameters: Object.fromEntries(values),
-    units: Object.fromEntries(Object.entries(book.parameters).map(([name, { unit }]) => [name, unit ?? ''])),
-    rules: book.rules.map((rule) => places.get(keyOf(rule)) ?? -1),
-  }
-}
-
 const lazyJson = (value: unknown): string => `() => JSON.parse(${JSON.stringify(JSON.stringify(value))})`
 
 /** Everything that is generated from the rule books: path in the project, and content. Writes nothing. */
@@ -77,9 +44,11 @@ export async function generateRules(root = ROOT): Promise<Record<string, string>
   const books = await resolvedBooks(root)
   const rules = [...new Map(books.flatMap((book) => book.rules).map((rule) => [keyOf(rule), rule])).values()]
   const { nameOf, named } = namer()
-  const list = rules.map((rule) => stored(rule, nameOf))
+  const list = rules.map((rule) => storedRule(rule, nameOf))
   const places = new Map(rules.map((rule, place) => [keyOf(rule), place]))
-  const shelves = books.map((book) => `  ${JSON.stringify(book.id)}: ${lazyJson(storedBook(book, places))},`)
+  const shelves = books.map(
+    (book) => `  ${JSON.stringify(book.id)}: ${lazyJson(storedBook(book, (key) => places.get(key) ?? -1))},`,
+  )
   const pages = { books, rules: rules.map((rule) => ({ key: keyOf(rule), ...rule })) }
   return {
     'core/generated/books.js': `export const RULES = ${lazyJson(list)}\nexport const BOOKS = {\n${shelves.join('\n')}\n}\n`,
@@ -97,8 +66,8 @@ function checkTypes(names: Iterable<string>): string {
   return [...names].map((name) => `export declare const ${name}: (values: object) => boolean\n`).join('')
 }
 
-const BOOK_TYPES = `import type { ShippedRule, StoredBook, StoredRule } from '#core/judge/shipped.ts'
-export declare const RULES: () => readonly (StoredRule & Pick<ShippedRule, 'key'>)[]
+const BOOK_TYPES = `import type { StoredBook, StoredRule } from '#core/judge/shipped.ts'
+export declare const RULES: () => readonly StoredRule[]
 export declare const BOOKS: Readonly<Record<string, () => StoredBook>>
 `
 
@@ -107,12 +76,9 @@ declare const words: Readonly<Record<string, { readonly says: () => TemplateSpec
 export default words
 `
 
-const PAGE_TYPES = `import type { PlacedRule, ResolvedBook } from '#core/judge/book.ts'
+const PAGE_TYPES = `import type { BookPage, RulePage } from '#core/judge/pages.ts'
 /** Every rule in full, and every book with its rules by key. */
-declare const pages: () => {
-  readonly books: readonly (Omit<ResolvedBook, 'rules'> & { readonly keys: readonly string[] })[]
-  readonly rules: readonly (PlacedRule & { readonly key: string })[]
-}
+declare const pages: () => { readonly books: readonly BookPage[]; readonly rules: readonly RulePage[] }
 export default pages
 `
 

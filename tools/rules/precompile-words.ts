@@ -1,8 +1,6 @@
 import Handlebars from 'handlebars'
 import type { PlacedRule } from '#core/judge/book.ts'
-
-/** The name under which a rule's words are kept: two books may hold different rules of one name. */
-export const keyOf = ({ from, record }: PlacedRule): string => `${from}/${record.id}`
+import { keyOf } from '#core/judge/stored.ts'
 
 /** JavaScript of the rules' words, precompiled: an object of functions by rule key. */
 export function precompileWords(rules: readonly PlacedRule[]): string {

@@ -38,6 +38,8 @@ describe('well-formed YAML that is not part of the format', () => {
     ['a code point beyond Unicode', 'a: "\\U0FFFFFFF"', 'forbidden-character', 1, 5, ['a']],
     ['a number with a leading zero', 'a: [ 1, 012 ]', 'number-leading-zero', 1, 9, ['a', 1]],
     ['a bound that YAML takes for a block of text', 'b:\n  a: >9\n', 'needs-quotes', 2, 1, ['b', 'a']],
+    ['the same with blanks behind it', 'a: |2 # why\n     \nb: 1\n', 'needs-quotes', 1, 1, ['a']],
+    ['the end of a document, twice', 'a: 1\n...\n# x\n...\n', 'several-documents', 4, 1, []],
     ['a decimal comma inside brackets', '{ loop: 1,5 ohm }', 'decimal-comma', 1, 9, ['5 ohm']],
     ['a colon without a space inside brackets', '{ a: 1, b:2 }', 'missing-space', 1, 9, ['b:2']],
   ])('%s', (_, text, code, line, column, path) => {
@@ -67,6 +69,13 @@ describe('well-formed YAML that is not part of the format', () => {
   ])('an empty file: %s', (_, text) => {
     expect(problemsOf(text)).toMatchObject([{ code: 'empty-file' }])
   })
+
+  it.each(['Dear colleague, please find enclosed', '42', '"quoted"', 'true', '|1-\n- a\n'])(
+    'a file without keys: %j',
+    (text) => {
+      expect(problemsOf(text)).toMatchObject([{ code: 'wrong-type', path: [] }])
+    },
+  )
 
   it.each([
     ['1: a', { 1: 'a' }],

@@ -28,7 +28,7 @@ export function slowTree(text: string): { readonly tree: unknown } | undefined {
   })
   // JSON knows no minus nothing; neither does the format.
   const tree: unknown = refused ? null : JSON.parse(JSON.stringify(document.toJS()))
-  return tree === null ? undefined : { tree }
+  return tree === null || typeof tree !== 'object' ? undefined : { tree }
 }
 
 function refusedKey(key: unknown): boolean {
