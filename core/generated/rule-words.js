@@ -1,5 +1,19 @@
 export default {
-"iec/loop-lets-the-device-operate":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/operator-states-the-poles":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The operator's demand on the poles is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"separation_required",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":38},"end":{"line":1,"column":68}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Ask the operator whether all poles or only the line poles are to be opened, and write the answer under separation.";
+},"useData":true})},
+"iec/operators-demand-has-a-source":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -7,18 +21,1578 @@ export default {
         return undefined
     };
 
-  return "The loop of "
-    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":12},"end":{"line":1,"column":20}}})) != null ? stack1 : "")
-    + " reads "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
-    + " "
-    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":43},"end":{"line":1,"column":52}}})) != null ? stack1 : "")
-    + "; "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop_limit_measured",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":54},"end":{"line":1,"column":84}}})) != null ? stack1 : "")
-    + " is the most ("
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.loop_reading_factor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":98},"end":{"line":1,"column":133}}})) != null ? stack1 : "")
-    + ").";
+  return "The operator is said to want "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"separation_required",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":29},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
+    + " opened; where it says so reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"separation_stated_in",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":91},"end":{"line":1,"column":122}}})) != null ? stack1 : "")
+    + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Shorten it";
+    return "Name the document, sheet and date under stated_in, so that the next person can check it.";
+},"useData":true})},
+"iec/changeover-opens-the-poles-demanded":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The changeover opens "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"switched_poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + " with its "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":56},"end":{"line":1,"column":72}}})) != null ? stack1 : "")
+    + " poles; the operator demands "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"separation_required",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":101},"end":{"line":1,"column":131}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a device with the poles that the operator demands, or get the operator's consent in writing.";
+},"useData":true})},
+"iec/changeover-breaks-the-neutral-where-the-book-says-so":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The changeover opens "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"switched_poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + "; this rule book asks for all poles, the neutral included.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a two-pole device on single-phase, a four-pole device on three-phase supply.";
+},"useData":true})},
+"iec/changeover-keeps-the-neutral-where-the-book-says-so":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The changeover opens "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"switched_poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + "; this rule book asks for a neutral that is never opened.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a device that opens the line poles only, and keep the neutral through.";
+},"useData":true})},
+"iec/changeover-opens-every-line":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "A changeover with "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":34}}})) != null ? stack1 : "")
+    + " poles cannot open the "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"phases",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":57},"end":{"line":1,"column":74}}})) != null ? stack1 : "")
+    + " lines of this supply.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a device with a pole for each line conductor.";
+},"useData":true})},
+"iec/changeover-carries-its-upstream-protection":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The changeover carries "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":23},"end":{"line":1,"column":47}}})) != null ? stack1 : "")
+    + "; the device upstream of it lets "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"upstream_rating",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":80},"end":{"line":1,"column":106}}})) != null ? stack1 : "")
+    + " through.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit upstream protection no larger than the changeover, a larger changeover, or lead further loads past it on the grid side.";
+},"useData":true})},
+"iec/changeover-carries-the-backed-up-load":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The backed-up loads draw "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"through_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":51}}})) != null ? stack1 : "")
+    + " on the most loaded line; the changeover carries "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":100},"end":{"line":1,"column":124}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Lead loads past the changeover on the grid side, spread them over the lines, or fit a larger device.";
+},"useData":true})},
+"iec/changeover-carries-the-inverter":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The inverter feeds "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"inverter_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + " a line through the changeover; it carries "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":89},"end":{"line":1,"column":113}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a larger changeover, or limit the inverter's feed.";
+},"useData":true})},
+"iec/changeover-withstands-the-fault-current":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The changeover withstands "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"short_circuit_rating",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":57}}})) != null ? stack1 : "")
+    + " with its upstream device; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fault_current_at_device",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":84},"end":{"line":1,"column":118}}})) != null ? stack1 : "")
+    + " can flow.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit the upstream device that the datasheet names for this fault current, or a changeover with a higher rating.";
+},"useData":true})},
+"iec/changeover-states-its-fault-rating":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The conditional short-circuit current of the changeover is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"short_circuit_rating",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":59},"end":{"line":1,"column":90}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take it from the datasheet, with the upstream device that it holds for.";
+},"useData":true})},
+"iec/neutral-is-earthed-in-each-state":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "Nothing links the neutral to earth "
+    + ((stack1 = lookupProperty(helpers,"state").call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":35},"end":{"line":1,"column":44}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Let the changeover or the inverter close a link between neutral and earth in the island, and prove it by measurement.";
+},"useData":true})},
+"iec/neutral-is-earthed-once":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The neutral is linked to earth in "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_earth_links",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":34},"end":{"line":1,"column":64}}})) != null ? stack1 : "")
+    + " places "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":72},"end":{"line":1,"column":81}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Open all but one link. A link that closes in the island must open before the grid returns.";
+},"useData":true})},
+"iec/neutral-opens-no-sooner-than-the-lines":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The neutral contact opens "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_opens",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
+    + ". On these loads a lost neutral puts up to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lost_neutral_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":93},"end":{"line":1,"column":124}}})) != null ? stack1 : "")
+    + " on one line.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take the sequence from the datasheet. Fit a device whose neutral opens last and closes first, or with the lines.";
+},"useData":true})},
+"iec/changeover-is-interlocked":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The changeover has no interlock on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit and prove a mechanical or electrical interlock, and write it under interlock.";
+},"useData":true})},
+"iec/nothing-joins-island-and-grid":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"island_joins",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":23}}})) != null ? stack1 : "")
+    + " would join the island to the grid while the changeover is open.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take the second way of supply out, or interlock it so that it cannot be closed in the island.";
+},"useData":true})},
+"iec/island-has-a-source":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "No inverter feeds the backed-up side of the changeover.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Connect the inverter that forms the island to the backed-up side, and write that under its fed_from.";
+},"useData":true})},
+"iec/signals-are-all-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These signals between changeover and inverter are not on record: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"signals_missing",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":65},"end":{"line":1,"column":91}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Wire and test each signal, and write its terminal under signals.";
+},"useData":true})},
+"iec/signals-sit-where-they-are-configured":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These signals are wired to one terminal and configured to another: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"signals_swapped",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":67},"end":{"line":1,"column":93}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Set the inverter to the terminals as labelled, keep the defaults where they equal the labels, and test both states of each signal.";
+},"useData":true})},
+"iec/signals-have-terminals-of-their-own":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These terminals are used for more than one signal: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"terminals_shared",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":51},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Give each signal a terminal of its own.";
+},"useData":true})},
+"iec/island-has-its-own-electrode":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The building has no electrode of its own on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Install or find an electrode, measure it, and write it under earthing.";
+},"useData":true})},
+"iec/electrode-is-measured":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The electrode's resistance is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"electrode_resistance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":30},"end":{"line":1,"column":61}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Measure the electrode while it is disconnected from the supply's earth.";
+},"useData":true})},
+"iec/earthing-conductor-is-large-enough":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The earthing conductor has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"earthing_conductor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":56}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"earthing_conductor_minimum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":58},"end":{"line":1,"column":95}}})) != null ? stack1 : "")
+    + " is the least.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Run a larger earthing conductor.";
+},"useData":true})},
+"iec/main-bonding-is-large-enough":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The smallest main bonding conductor has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"bonding_smallest",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":40},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"bonding_minimum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":69},"end":{"line":1,"column":95}}})) != null ? stack1 : "")
+    + " is the least.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Run larger main bonding conductors.";
+},"useData":true})},
+"iec/transfer-to-the-island-was-tried":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "No transfer to the island is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Open the supply upstream of the changeover with the loads on, and write down what happens under transfers.";
+},"useData":true})},
+"iec/transfer-back-to-the-grid-was-tried":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "No transfer back to the grid is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Close the supply again, watch the waiting time and the gap, and write them under transfers.";
+},"useData":true})},
+"iec/outage-is-made-upstream":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The outage was made like this: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"cause",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":47}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Repeat it by opening the supply upstream of the changeover, and say so in the cause.";
+},"useData":true})},
+"iec/every-grid-pole-was-read":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "With the island running, these grid terminals were not read: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"poles_not_read",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":61},"end":{"line":1,"column":86}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read every line and the neutral of the grid side to earth while the island runs.";
+},"useData":true})},
+"iec/grid-terminals-are-dead":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "With the island running, the grid terminals read L1 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"grid_L1",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":70}}})) != null ? stack1 : "")
+    + ", L2 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"grid_L2",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":75},"end":{"line":1,"column":93}}})) != null ? stack1 : "")
+    + ", L3 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"grid_L3",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":98},"end":{"line":1,"column":116}}})) != null ? stack1 : "")
+    + ", N "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"grid_N",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":120},"end":{"line":1,"column":137}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.touch_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":139},"end":{"line":1,"column":168}}})) != null ? stack1 : "")
+    + " is the most that may stand.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Find what feeds back through the changeover before anything else. Lock the island off until it is found.";
+},"useData":true})},
+"iec/grid-terminals-carry-next-to-nothing":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "With the island running, the grid terminals read L1 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"grid_L1",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":70}}})) != null ? stack1 : "")
+    + ", L2 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"grid_L2",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":75},"end":{"line":1,"column":93}}})) != null ? stack1 : "")
+    + ", L3 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"grid_L3",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":98},"end":{"line":1,"column":116}}})) != null ? stack1 : "")
+    + ", N "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"grid_N",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":120},"end":{"line":1,"column":137}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Find out where the voltage comes from; a loaded tester tells coupling from feedback.";
+},"useData":true})},
+"iec/transfer-times-were-taken":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The supply was dark after "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"dark_after",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":47}}})) != null ? stack1 : "")
+    + " and restored after "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"restored_after",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":67},"end":{"line":1,"column":92}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take both times, and write them under the transfer.";
+},"useData":true})},
+"iec/supply-is-restored-after-it-went-dark":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The supply is said to be restored after "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"restored_after",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":40},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
+    + " and dark only after "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"dark_after",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":86},"end":{"line":1,"column":107}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check which of the two times was written where.";
+},"useData":true})},
+"iec/return-waits-as-set":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The building returned to the grid after "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"observed",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":40},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
+    + "; the inverter is set to watch it for "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"reconnect_after",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":97},"end":{"line":1,"column":123}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read the setting back, check the country profile, and repeat the test.";
+},"useData":true})},
+"iec/gap-on-return-was-taken":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The interruption on return is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"gap",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":30},"end":{"line":1,"column":44}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Watch the loads while the grid returns, and write the gap; 0 s where there is none.";
+},"useData":true})},
+"iec/each-line-fits-the-inverter":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The most loaded line draws "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"largest_phase_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":56}}})) != null ? stack1 : "")
+    + "; the inverter gives "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"phase_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":99}}})) != null ? stack1 : "")
+    + " a line.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move loads to another line or to the grid side.";
+},"useData":true})},
+"iec/whole-load-fits-the-inverter":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The backed-up loads draw "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"total_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + " together; the inverter gives "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_continuous",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":76},"end":{"line":1,"column":104}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move loads to the grid side, or fit a larger inverter.";
+},"useData":true})},
+"iec/starts-fit-the-peak":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "Starting the largest load takes "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"starting_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
+    + " on its line; the inverter's peak gives "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"phase_peak_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":99},"end":{"line":1,"column":126}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a soft starter, move the load to another line, or keep it on the grid side.";
+},"useData":true})},
+"iec/peak-is-on-record":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The inverter's peak power in the island is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"island_peak",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":43},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take peak and peak time from the datasheet.";
+},"useData":true})},
+"iec/fault-current-in-the-island-is-on-record":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The fault current of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":29}}})) != null ? stack1 : "")
+    + " in the island is "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_fault_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":47},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take it from the datasheet or measure it; there is no figure that holds for all.";
+},"useData":true})},
+"iec/battery-can-give-the-load":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The backed-up loads draw "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"backed_up_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
+    + " together; the battery and its inverter give "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"discharge_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":95},"end":{"line":1,"column":121}}})) != null ? stack1 : "")
+    + " without sun.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Tell the customer which loads may run together at night, or move some to the grid side.";
+},"useData":true})},
+"iec/charge-is-held-back":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"held_back_charge",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":27}}})) != null ? stack1 : "")
+    + " of the charge is held back for the island.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Set the charge that the customer wants to have left when the grid fails.";
+},"useData":true})},
+"iec/alarm-comes-before-the-end":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The alarm is set to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"low_charge_alarm",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":47}}})) != null ? stack1 : "")
+    + ", and "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"held_back_charge",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":53},"end":{"line":1,"column":80}}})) != null ? stack1 : "")
+    + " is held back.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Set the alarm below the charge that is held back, and above the end of discharge.";
+},"useData":true})},
+"iec/island-voltage-is-set-to-nominal":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The island voltage is set to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":29},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "; the building runs at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"nominal_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":103}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Set it with the installer's account, and read it back.";
+},"useData":true})},
+"iec/settings-were-read-back":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "Settings read back from "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":24},"end":{"line":1,"column":32}}})) != null ? stack1 : "")
+    + ": "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"read_back",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":34},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read every setting back from the device, and write read_back true.";
+},"useData":true})},
+"iec/voltages-are-within-the-yardstick":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The lines read L1 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L1",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":39}}})) != null ? stack1 : "")
+    + ", L2 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L2",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":44},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
+    + " and L3 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L3",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":73},"end":{"line":1,"column":94}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":95},"end":{"line":1,"column":104}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":106},"end":{"line":1,"column":130}}})) != null ? stack1 : "")
+    + " to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_ceiling",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":134},"end":{"line":1,"column":160}}})) != null ? stack1 : "")
+    + " are usual.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "On the grid ask the operator; in the island check the setting, the load of each line and the neutral.";
+},"useData":true})},
+"iec/voltage-is-within-the-yardstick":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The line reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L1",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":36}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":37},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":48},"end":{"line":1,"column":72}}})) != null ? stack1 : "")
+    + " to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_ceiling",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":76},"end":{"line":1,"column":102}}})) != null ? stack1 : "")
+    + " are usual.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "On the grid ask the operator; in the island check the setting and the load.";
+},"useData":true})},
+"iec/frequency-is-within-the-yardstick":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The frequency reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":40}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
+    + " to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency_ceiling",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":82},"end":{"line":1,"column":110}}})) != null ? stack1 : "")
+    + " are usual.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "In the island, look whether the inverter throttles an array by its frequency, and whether the loads bear it.";
+},"useData":true})},
+"iec/neutral-stays-near-earth":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The neutral stands at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_to_earth",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":22},"end":{"line":1,"column":49}}})) != null ? stack1 : "")
+    + " to earth "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":59},"end":{"line":1,"column":68}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Prove the link between neutral and earth, and look for a lost neutral.";
+},"useData":true})},
+"iec/link-in-the-island-was-measured":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The link between neutral and earth reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"link_resistance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
+    + " in the island.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Measure from the neutral bar to the earth bar with the island formed, and find the loose terminal.";
+},"useData":true})},
+"iec/rotation-stays-the-same":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The direction of rotation changes between the grid and the island.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Swap two lines of the inverter, and measure again in both states.";
+},"useData":true})},
+"iec/load-steps-were-tried":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "No load step in the island is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Start the largest motor and the largest heater in the island, and write the lowest voltage and frequency under load_steps.";
+},"useData":true})},
+"iec/load-step-does-not-trip-the-island":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The island tripped at this step: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"step",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":33},"end":{"line":1,"column":48}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move the load to the grid side, or start it softly.";
+},"useData":true})},
+"iec/load-step-keeps-the-voltage-up":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The voltage fell to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lowest_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":45}}})) != null ? stack1 : "")
+    + " during this step: "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"step",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":64},"end":{"line":1,"column":79}}})) != null ? stack1 : "")
+    + ". "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":81},"end":{"line":1,"column":105}}})) != null ? stack1 : "")
+    + " is the usual floor.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Start the load softly, or share the lines out differently.";
+},"useData":true})},
+"iec/load-step-keeps-the-frequency-up":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The frequency fell to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lowest_frequency",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":22},"end":{"line":1,"column":49}}})) != null ? stack1 : "")
+    + " during this step: "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"step",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":68},"end":{"line":1,"column":83}}})) != null ? stack1 : "")
+    + ". "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":85},"end":{"line":1,"column":111}}})) != null ? stack1 : "")
+    + " is the usual floor.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Ask the inverter's datasheet what it does at this step, and start the load softly.";
+},"useData":true})},
+"iec/notices-warn-of-two-sources":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “dual-supply notices” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fix a notice at every board that two sources feed, and at the meter. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+},"useData":true})},
+"iec/backed-up-circuits-are-labelled":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “backed-up circuits labelled” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Label each backed-up circuit at its board. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+},"useData":true})},
+"iec/diagram-hangs-at-the-board":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “single-line diagram at the board” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Put a single-line diagram with both states at the board. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+},"useData":true})},
+"iec/fire-sealing-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “fire sealing” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look at every passage of a cable through a wall or into a board. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+},"useData":true})},
+"iec/conductors-are-identified":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “conductor identification” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look at colours and marks at every termination. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+},"useData":true})},
+"iec/terminals-are-tight":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “terminals tight” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Tighten to the torque of the datasheet, and mark what was tightened. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+},"useData":true})},
+"iec/barriers-were-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “barriers and enclosures” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look for missing blanks, covers and cable glands. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+},"useData":true})},
+"iec/isolation-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “isolation and switching” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Try every isolator, and see that it can be locked and reached. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+},"useData":true})},
+"iec/array-wiring-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “array cables and connectors” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look at every connector pair, and lift every cable off the roof. Then add the item with its result.";
+},"useData":true})},
+"iec/battery-mounting-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The item “battery mounting and clearances” is not on the list of what was inspected.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look at wall, fixings, clearances and the way to it. Then add the item with its result.";
+},"useData":true})},
+"iec/notices-are-photographed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The notices were inspected, and no photo of them is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take a photo of each notice in its place.";
+},"useData":true})},
+"iec/labels-are-photographed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The labels of the backed-up circuits were inspected, and no photo of them is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take a photo of the labelled board.";
+},"useData":true})},
+"iec/no-defect-is-left":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These items have a defect: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"items_with_defect",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":55}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Mend the defect, inspect again, and change the result.";
+},"useData":true})},
+"iec/defects-are-described":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These defects have no note: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"defects_without_note",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Say what is wrong and where, so that somebody else can mend it.";
+},"useData":true})},
+"iec/everything-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These items were not inspected: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"items_not_inspected",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":62}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Inspect them, or say in the extent of the report that they are left out, and why.";
+},"useData":true})},
+"iec/tester-is-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Nobody is named who tested.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Name the person who took the readings under tested_by.";
+},"useData":true})},
+"iec/installer-is-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Nobody is named who installed.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Name the person who is responsible for the construction under installed_by.";
+},"useData":true})},
+"iec/licence-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " has no licence on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write the number of the licence or registration, or say under remarks why none is needed.";
+},"useData":true})},
+"iec/days-of-the-inspection-are-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The days of the inspection are "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"inspected_from",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":56}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write the first and the last day under inspected.";
+},"useData":true})},
+"iec/next-verification-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The next verification is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"next_due",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":44}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write the date that the kind of premises and local rules ask for under next_due.";
+},"useData":true})},
+"iec/extent-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "What the report covers is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"extent",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":43}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write in a sentence what was verified and what was left out under extent.";
+},"useData":true})},
+"iec/instruments-are-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "No instrument is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write kind, serial number and calibration of each instrument under instruments.";
+},"useData":true})},
+"iec/customer-was-instructed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "It is not on record that the installation was explained to anybody.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Show the customer what lives on, for how long, and how to restart after an empty battery; write to whom under handover.";
+},"useData":true})},
+"iec/diagram-was-handed-over":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These documents were handed over: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"documents",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":34},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "; a single-line diagram is not among them.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Hand over the diagram, the datasheets, the operating instructions and the list of settings.";
+},"useData":true})},
+"iec/second-person-looks-at-own-work":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The person who installed also tested.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Nothing, where local rules allow it. A second competent person reviews the report in any case.";
+},"useData":true})},
+"iec/array-voltage-stays-below-the-input-limit":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "At "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lowest_temperature",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":3},"end":{"line":1,"column":32}}})) != null ? stack1 : "")
+    + " the array reaches "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voc_maximum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":51},"end":{"line":1,"column":73}}})) != null ? stack1 : "")
+    + "; the inverter takes "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"max_input_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":94},"end":{"line":1,"column":122}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take modules out of the string, or fit an inverter with a higher input voltage.";
+},"useData":true})},
+"iec/lowest-temperature-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The lowest temperature at the site is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"lowest_temperature",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":38},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take it from the local weather record, and write it under site.";
+},"useData":true})},
+"iec/voltage-coefficient-comes-from-the-datasheet":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The temperature coefficient of the open-circuit voltage is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"voc_coefficient",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":59},"end":{"line":1,"column":85}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take it from the module's datasheet, in %/K and negative. A value in V/K or mV/K must be divided by the open-circuit voltage.";
+},"useData":true})},
+"iec/array-voltage-stays-in-the-tracking-window":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "On the hottest day the array falls to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"vmp_minimum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":38},"end":{"line":1,"column":60}}})) != null ? stack1 : "")
+    + "; the inverter tracks from "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"mpp_minimum_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":87},"end":{"line":1,"column":117}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Put more modules in series, or fit an inverter that tracks from a lower voltage.";
+},"useData":true})},
+"iec/string-fuses-are-fitted-where-needed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"show").call(alias1,"strings",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":18}}})) != null ? stack1 : "")
+    + " strings in parallel can feed back more than the "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"module_max_fuse",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":67},"end":{"line":1,"column":93}}})) != null ? stack1 : "")
+    + " that a module takes, and no string fuse is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit string fuses within the range that the module allows.";
+},"useData":true})},
+"iec/string-fuse-does-not-trip-in-sunshine":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The string fuse has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"string_fuse",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fuse_minimum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":44},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
+    + " is the least.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a larger string fuse, within what the module allows.";
+},"useData":true})},
+"iec/string-fuse-protects-the-module":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The string fuse has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"string_fuse",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fuse_maximum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":44},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
+    + " is the most.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a string fuse within what the module's datasheet allows.";
+},"useData":true})},
+"iec/module-figures-agree":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "Voltage times current at maximum power differs by "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated_power_deviation",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":50},"end":{"line":1,"column":82}}})) != null ? stack1 : "")
+    + " from the module's "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"module_pmax",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":101},"end":{"line":1,"column":123}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check the module's figures against its datasheet.";
+},"useData":true})},
+"iec/every-string-was-read":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"show").call(alias1,"strings_read",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":23}}})) != null ? stack1 : "")
+    + " of "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"strings",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":45}}})) != null ? stack1 : "")
+    + " strings have readings.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read each string on its own before it is joined to the others.";
+},"useData":true})},
+"iec/string-polarity-is-correct":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The polarity of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":16},"end":{"line":1,"column":24}}})) != null ? stack1 : "")
+    + " is "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"polarity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":47}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Correct the polarity before the string is connected to anything.";
+},"useData":true})},
+"iec/string-voltage-is-read":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voc",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":29}}})) != null ? stack1 : "")
+    + ", "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voc_from_expected",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
+    + " from the "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voc_expected",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":69},"end":{"line":1,"column":92}}})) != null ? stack1 : "")
+    + " that its modules give at this temperature.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Count the modules, look for a bypassed one, and check the datasheet's figures and the cell temperature.";
+},"useData":true})},
+"iec/string-has-all-its-modules":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voc_from_expected",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":43}}})) != null ? stack1 : "")
+    + " from what is expected; one module short would be −"
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"missing_module_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":94},"end":{"line":1,"column":127}}})) != null ? stack1 : "")
+    + ". That fits "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"modules_missing_estimate",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":139},"end":{"line":1,"column":174}}})) != null ? stack1 : "")
+    + " missing or bypassed.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Count the modules of the string on the roof and in the layout plan.";
+},"useData":true})},
+"iec/string-voltages-agree":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voc",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":29}}})) != null ? stack1 : "")
+    + ", "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voc_deviation",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":55}}})) != null ? stack1 : "")
+    + " from the median of its array.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Compare count, type and direction of the modules; read the strings again under steady light.";
+},"useData":true})},
+"iec/string-current-is-as-expected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"isc",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":29}}})) != null ? stack1 : "")
+    + ", "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"isc_from_expected",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
+    + " from the "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"isc_expected",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":69},"end":{"line":1,"column":92}}})) != null ? stack1 : "")
+    + " that its modules give under this light.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look for shade and dirt, and measure irradiance in the plane of the modules at the same moment.";
+},"useData":true})},
+"iec/string-currents-agree":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"isc",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":29}}})) != null ? stack1 : "")
+    + ", "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"isc_deviation",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":55}}})) != null ? stack1 : "")
+    + " from the median of its array.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look for shade on this string, and read all strings again under steady light.";
+},"useData":true})},
+"iec/string-insulation-is-high-enough":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The insulation of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":26}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"insulation",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":33},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"insulation_minimum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":56},"end":{"line":1,"column":85}}})) != null ? stack1 : "")
+    + " is the least.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Find the damp connector or the pinched cable before the array is connected.";
+},"useData":true})},
+"iec/string-insulation-is-tested-at-the-right-voltage":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The insulation of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":26}}})) != null ? stack1 : "")
+    + " was tested at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"insulation_tested_at",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":72}}})) != null ? stack1 : "")
+    + "; its system voltage of "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"system_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":96},"end":{"line":1,"column":121}}})) != null ? stack1 : "")
+    + " asks for "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"insulation_test_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":131},"end":{"line":1,"column":165}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Repeat the test at the right voltage, with the inverter and surge protection disconnected.";
+},"useData":true})},
+"iec/light-was-strong-enough":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " was read at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"irradiance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read the currents again at 400 W/m² or more, or state why not.";
+},"useData":true})},
+"iec/interface-protection-is-on-record":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The interface protection is on record as: overvoltage "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"u_high",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":54},"end":{"line":1,"column":71}}})) != null ? stack1 : "")
+    + ", undervoltage "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"u_low",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":86},"end":{"line":1,"column":102}}})) != null ? stack1 : "")
+    + ", overfrequency "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"f_high",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":118},"end":{"line":1,"column":135}}})) != null ? stack1 : "")
+    + ", underfrequency "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"f_low",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":152},"end":{"line":1,"column":168}}})) != null ? stack1 : "")
+    + ", waiting time "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"reconnect_after",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":183},"end":{"line":1,"column":209}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read all five settings back from the inverter, and write them under interface_protection.";
+},"useData":true})},
+"iec/overvoltage-setting-follows-the-book":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The overvoltage protection is set to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"u_high",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":37},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "; the rule book states "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.interface_u_high",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":109}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check the country profile with the operator, and set it.";
+},"useData":true})},
+"iec/undervoltage-setting-follows-the-book":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The undervoltage protection is set to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"u_low",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":38},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "; the rule book states "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.interface_u_low",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":108}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check the country profile with the operator, and set it.";
+},"useData":true})},
+"iec/frequency-settings-follow-the-book":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The frequency protection is set to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"f_high",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":35},"end":{"line":1,"column":52}}})) != null ? stack1 : "")
+    + " and "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"f_low",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":57},"end":{"line":1,"column":73}}})) != null ? stack1 : "")
+    + "; the rule book states "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.interface_f_high",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":96},"end":{"line":1,"column":128}}})) != null ? stack1 : "")
+    + " and "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.interface_f_low",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":133},"end":{"line":1,"column":164}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check the country profile with the operator, and set it.";
+},"useData":true})},
+"iec/reconnection-waits-long-enough":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The inverter waits "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"reconnect_after",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":45}}})) != null ? stack1 : "")
+    + "; the rule book asks for "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.reconnect_after",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":70},"end":{"line":1,"column":101}}})) != null ? stack1 : "")
+    + " or more.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Set the waiting time of the operator's conditions.";
+},"useData":true})},
+"iec/unbalance-stays-within-the-book":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The lines differ by "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"unbalance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":40}}})) != null ? stack1 : "")
+    + " of load and "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"feed_in_unbalance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":53},"end":{"line":1,"column":81}}})) != null ? stack1 : "")
+    + " of feed; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.unbalance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":91},"end":{"line":1,"column":116}}})) != null ? stack1 : "")
+    + " is the most.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Spread the loads over the lines, or use an inverter that feeds all three.";
+},"useData":true})},
+"iec/inverter-monitors-residual-current":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The residual-current monitoring of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":35},"end":{"line":1,"column":43}}})) != null ? stack1 : "")
+    + " is "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"residual_monitoring",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":47},"end":{"line":1,"column":77}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Use an inverter with a residual-current monitor, or fit one.";
+},"useData":true})},
+"iec/battery-keeps-out-of-forbidden-places":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The battery stands in a place called “"
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"place",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":38},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "”.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move it out of sleeping rooms, escape routes, lofts and voids, or show that local rules allow the place.";
+},"useData":true})},
+"iec/battery-keeps-clear-of-openings":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The battery stands "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"distance_to_opening",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":49}}})) != null ? stack1 : "")
+    + " from the nearest opening.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Keep 1 m from doors, windows and vents.";
+},"useData":true})},
+"iec/lead-battery-ventilation-is-known":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The ventilation of this "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"chemistry",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":24},"end":{"line":1,"column":44}}})) != null ? stack1 : "")
+    + " battery cannot be computed.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Give cells, capacity and gas_current from the datasheet.";
+},"useData":true})},
+"iec/meter-sits-at-the-connection-point":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The meter sits at "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"place",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":34}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move it to the connection point, where everything that the building draws and feeds passes.";
+},"useData":true})},
+"iec/meter-counts-the-right-way":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The meter's direction is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"direction",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":45}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Switch a load and watch the sign follow; turn the meter or its transformers round if it does not.";
+},"useData":true})},
+"iec/meter-carries-the-main-protection":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The meter carries "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
+    + "; the main protection lets "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"main_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":69},"end":{"line":1,"column":90}}})) != null ? stack1 : "")
+    + " through.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Use a meter with current transformers, or smaller main protection.";
+},"useData":true})},
+"iec/bus-is-terminated-at-both-ends":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The bus has "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"terminators",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":12},"end":{"line":1,"column":34}}})) != null ? stack1 : "")
+    + " terminating resistors.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit one resistor of 120 Ω at each end of the line, and take all others out.";
+},"useData":true})},
+"iec/bus-resistance-fits-its-terminators":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "With the power off, the pair reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"measured_across",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":35},"end":{"line":1,"column":61}}})) != null ? stack1 : "")
+    + "; two resistors of 120 Ω give 60 Ω.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Near 120 Ω one terminator is missing, near 40 Ω there is one too many. Find it.";
+},"useData":true})},
+"iec/bus-address-is-valid":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The address is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"address",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":33}}})) != null ? stack1 : "")
+    + "; 1 to 247 are valid.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Give the device an address from 1 to 247.";
+},"useData":true})},
+"iec/bus-address-is-its-own":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The address "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"address",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":12},"end":{"line":1,"column":30}}})) != null ? stack1 : "")
+    + " is used by another device on the bus.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Give each device an address of its own.";
+},"useData":true})},
+"iec/bus-is-short-enough":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The bus is "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"length",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":11},"end":{"line":1,"column":28}}})) != null ? stack1 : "")
+    + " long; its devices allow "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"length_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":53},"end":{"line":1,"column":76}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Shorten it, or use a repeater.";
+},"useData":true})},
+"iec/bus-idles-at-a-defined-level":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The idle bus is biased to "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"bias_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":49}}})) != null ? stack1 : "")
+    + "; receivers need 200 mV to be sure.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Use smaller bias resistors, in one place only.";
+},"useData":true})},
+"de/diagram-hangs-at-the-board":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "A single-line diagram is neither at the board nor among what was handed over.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Put one at the board, or hand it over and name it under documents.";
+},"useData":true})},
+"de/neutral-is-opened-in-tn-s-and-tt":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The changeover opens "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"switched_poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + " in a "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"earthing_system",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
+    + " system.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a device that opens the neutral too.";
 },"useData":true})}
 }

@@ -71,6 +71,7 @@ export const installationPlan: SheetPlan<Install> = {
           ? undefined
           : report.next_due <= report.inspected.from,
     ),
+    entered('extent', '', 'What the report covers', ['report', 'extent'], ({ report }) => report.extent),
     entered('premises', '', 'Kind of premises', ['site', 'premises'], ({ site }) => site.premises),
     entered('customer', '', 'Customer', ['site', 'customer'], ({ site }) => site.customer),
     entered(
@@ -95,6 +96,34 @@ export const installationPlan: SheetPlan<Install> = {
       ({ supply }) => supply.nominal.frequency,
     ),
     entered('earthing_system', '', 'Earthing system', ['supply', 'earthing'], ({ supply }) => supply.earthing),
+    entered(
+      'voltage_floor',
+      'V',
+      'Nominal voltage less 15 %',
+      ['supply', 'nominal', 'voltage'],
+      ({ supply }) => supply.nominal.voltage * 0.85,
+    ),
+    entered(
+      'voltage_ceiling',
+      'V',
+      'Nominal voltage and 10 %',
+      ['supply', 'nominal', 'voltage'],
+      ({ supply }) => supply.nominal.voltage * 1.1,
+    ),
+    entered(
+      'frequency_floor',
+      'Hz',
+      'Nominal frequency less 2 %',
+      ['supply', 'nominal', 'frequency'],
+      ({ supply }) => supply.nominal.frequency * 0.98,
+    ),
+    entered(
+      'frequency_ceiling',
+      'Hz',
+      'Nominal frequency and 2 %',
+      ['supply', 'nominal', 'frequency'],
+      ({ supply }) => supply.nominal.frequency * 1.02,
+    ),
     entered(
       'found',
       '',

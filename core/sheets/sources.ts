@@ -257,6 +257,18 @@ export const arrayPlan: SheetPlan<ArrayItem> = {
       ({ array }) => array.module.max_fuse,
     ),
     entered(
+      'rated_power_deviation',
+      '%',
+      'Voltage times current at maximum power, from the stated power',
+      ['module', 'pmax'],
+      ({ array: { module } }) => {
+        const { vmp, imp, pmax } = module
+        return vmp === undefined || imp === undefined || pmax === undefined
+          ? undefined
+          : ((vmp * imp - pmax) / pmax) * 100
+      },
+    ),
+    entered(
       'max_input_voltage',
       'V',
       'Highest input voltage of the inverter',

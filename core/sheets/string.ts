@@ -75,6 +75,13 @@ export const stringPlan: SheetPlan<StringItem> = {
       const insulation = readings?.insulation
       return insulation && 'value' in insulation ? insulation.at : undefined
     }),
+    entered(
+      'string_spread_floor',
+      '%',
+      'How far below a string may lie',
+      [],
+      (_, { parameters }) => -parameters.string_spread,
+    ),
     entered('read', '', 'Has readings', [], ({ readings }) => readings !== undefined),
   ],
   measured: [

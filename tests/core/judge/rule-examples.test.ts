@@ -4,13 +4,16 @@ import pages from '#core/generated/rule-pages.js'
 import { SHIPPED_BOOKS, shippedBook } from '#core/judge/shipped.ts'
 import { patched } from './patch.ts'
 
-const { books, rules } = pages()
+const { rules } = pages()
 
-/** The first book that holds the rule under this key. */
-const bookWith = (key: string): string => books.find(({ keys }) => keys.includes(key))?.id ?? ''
+/** A rule is tried by the book that it was written for. */
+const bookWith = (key: string): string => key.split('/')[0] ?? ''
 
 function judged(text: string, book: string): Judged {
-  const result = check(text, { find: () => shippedBook(book), names: SHIPPED_BOOKS })
+  const result = check(text, {
+    find: (asked) => shippedBook(asked === 'iec' ? book : asked),
+    names: SHIPPED_BOOKS,
+  })
   if (result.kind !== 'judged')
     throw new Error(result.problems.map(({ path, message }) => `${path.join('.')}: ${message}`).join('\n'))
   return result
