@@ -1,4 +1,144 @@
 export default {
+"iec/inspection-ends-after-it-began":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The inspection is said to run from "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"inspected_from",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":35},"end":{"line":1,"column":60}}})) != null ? stack1 : "")
+    + " to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"inspected_to",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":64},"end":{"line":1,"column":87}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Correct the dates.";
+},"useData":true})},
+"iec/next-verification-lies-ahead":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The next verification is due on "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"next_due",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":51}}})) != null ? stack1 : "")
+    + ", and this one began on "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"inspected_from",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":75},"end":{"line":1,"column":100}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Correct the date of the next verification.";
+},"useData":true})},
+"iec/instrument-is-in-calibration":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The calibration of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":27}}})) != null ? stack1 : "")
+    + " was due on "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"due",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":39},"end":{"line":1,"column":53}}})) != null ? stack1 : "")
+    + ", before the inspection ended.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Repeat the readings with an instrument in calibration, or have this one calibrated as found and state the result.";
+},"useData":true})},
+"iec/instrument-was-calibrated-before":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " was calibrated on "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"calibrated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":48}}})) != null ? stack1 : "")
+    + ", after the inspection began.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Give the calibration that was in force on the day.";
+},"useData":true})},
+"iec/calibration-runs-forward":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " was calibrated on "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"calibrated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":48}}})) != null ? stack1 : "")
+    + " and due on "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"due",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":60},"end":{"line":1,"column":74}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check which of the two dates was written where.";
+},"useData":true})},
+"iec/every-circuit-was-tested":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These circuits have no readings: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"circuits_untested",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":33},"end":{"line":1,"column":61}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Test them, or write not_tested with the reason.";
+},"useData":true})},
+"iec/every-residual-current-device-was-tested":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These residual-current devices have no readings: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"residual_untested",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":49},"end":{"line":1,"column":77}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Test them in each state in which they are live.";
+},"useData":true})},
+"iec/every-array-was-tested":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These arrays have no readings: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"arrays_untested",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":57}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Test them in daylight, or write not_tested with the reason and the date when it will be done.";
+},"useData":true})},
+"iec/fault-current-agrees-with-the-loop":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The supply's fault current reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fault_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":33},"end":{"line":1,"column":57}}})) != null ? stack1 : "")
+    + ", and its loop of "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop_impedance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":75},"end":{"line":1,"column":100}}})) != null ? stack1 : "")
+    + " alone gives "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"earth_fault_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":113},"end":{"line":1,"column":143}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write the larger of the line-neutral and the line-earth reading.";
+},"useData":true})},
 "iec/operator-states-the-poles":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -28,24 +168,6 @@ export default {
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Name the document, sheet and date under stated_in, so that the next person can check it.";
-},"useData":true})},
-"iec/changeover-opens-the-poles-demanded":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "The changeover opens "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"switched_poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
-    + " with its "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":56},"end":{"line":1,"column":72}}})) != null ? stack1 : "")
-    + " poles; the operator demands "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"separation_required",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":101},"end":{"line":1,"column":131}}})) != null ? stack1 : "")
-    + ".";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Fit a device with the poles that the operator demands, or get the operator's consent in writing.";
 },"useData":true})},
 "iec/changeover-breaks-the-neutral-where-the-book-says-so":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -198,22 +320,6 @@ export default {
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Open all but one link. A link that closes in the island must open before the grid returns.";
-},"useData":true})},
-"iec/neutral-opens-no-sooner-than-the-lines":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "The neutral contact opens "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_opens",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
-    + ". On these loads a lost neutral puts up to "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lost_neutral_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":93},"end":{"line":1,"column":124}}})) != null ? stack1 : "")
-    + " on one line.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Take the sequence from the datasheet. Fit a device whose neutral opens last and closes first, or with the lines.";
 },"useData":true})},
 "iec/changeover-is-interlocked":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "The changeover has no interlock on record.";
@@ -473,7 +579,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Watch the loads while the grid returns, and write the gap; 0 s where there is none.";
 },"useData":true})},
-"iec/each-line-fits-the-inverter":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/load-stays-within-the-device":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -481,31 +587,17 @@ export default {
         return undefined
     };
 
-  return "The most loaded line draws "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"largest_phase_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":56}}})) != null ? stack1 : "")
-    + "; the inverter gives "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"phase_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":99}}})) != null ? stack1 : "")
-    + " a line.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Move loads to another line or to the grid side.";
-},"useData":true})},
-"iec/whole-load-fits-the-inverter":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "The backed-up loads draw "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"total_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
-    + " together; the inverter gives "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_continuous",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":76},"end":{"line":1,"column":104}}})) != null ? stack1 : "")
+  return "The load of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":12},"end":{"line":1,"column":20}}})) != null ? stack1 : "")
+    + " draws "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"design_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":52}}})) != null ? stack1 : "")
+    + "; its device is rated "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"device_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":74},"end":{"line":1,"column":97}}})) != null ? stack1 : "")
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Move loads to the grid side, or fit a larger inverter.";
+    return "Split the load, or fit a larger device if the cable bears it.";
 },"useData":true})},
-"iec/starts-fit-the-peak":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/device-stays-within-the-cable":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -513,15 +605,53 @@ export default {
         return undefined
     };
 
-  return "Starting the largest load takes "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"starting_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
-    + " on its line; the inverter's peak gives "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"phase_peak_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":99},"end":{"line":1,"column":126}}})) != null ? stack1 : "")
+  return "The device of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":22}}})) != null ? stack1 : "")
+    + " is rated "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"device_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":55}}})) != null ? stack1 : "")
+    + "; its cable as installed carries "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"capacity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":88},"end":{"line":1,"column":107}}})) != null ? stack1 : "")
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Fit a soft starter, move the load to another line, or keep it on the grid side.";
+    return "Fit a smaller device, a larger cable, or install it so that it sheds more heat.";
 },"useData":true})},
-"iec/peak-is-on-record":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/overload-stays-within-the-cable":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The device of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":22}}})) != null ? stack1 : "")
+    + " is sure to trip only from "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"conventional_operating_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":49},"end":{"line":1,"column":90}}})) != null ? stack1 : "")
+    + "; its cable bears "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"overload_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":108},"end":{"line":1,"column":133}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a smaller device or a larger cable. A fuse asks for more cable than a breaker of the same rating.";
+},"useData":true})},
+"iec/device-breaks-the-fault-current":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The device of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":22}}})) != null ? stack1 : "")
+    + " breaks "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"breaking_capacity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":30},"end":{"line":1,"column":58}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fault_current_at_device",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":60},"end":{"line":1,"column":94}}})) != null ? stack1 : "")
+    + " can flow where it sits.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a device with a higher breaking capacity, or show that a device upstream backs it up.";
+},"useData":true})},
+"iec/protective-conductor-is-run":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -529,13 +659,13 @@ export default {
         return undefined
     };
 
-  return "The inverter's peak power in the island is "
-    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"island_peak",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":43},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
-    + ".";
+  return "The cable of "
+    + ((stack1 = lookupProperty(helpers,"name").call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":13},"end":{"line":1,"column":21}}})) != null ? stack1 : "")
+    + " has no protective conductor.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Take peak and peak time from the datasheet.";
+    return "Run one, or state in the long form of the cable where it is.";
 },"useData":true})},
-"iec/fault-current-in-the-island-is-on-record":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/protective-conductor-bears-the-fault":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -543,15 +673,21 @@ export default {
         return undefined
     };
 
-  return "The fault current of "
-    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":29}}})) != null ? stack1 : "")
-    + " in the island is "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_fault_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":47},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
+  return "The protective conductor of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":36}}})) != null ? stack1 : "")
+    + " has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"protective_size",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"protective_conductor_minimum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":69},"end":{"line":1,"column":108}}})) != null ? stack1 : "")
+    + " is the least for "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fault_current_grid",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":126},"end":{"line":1,"column":155}}})) != null ? stack1 : "")
+    + " during "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"disconnection_time",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":163},"end":{"line":1,"column":192}}})) != null ? stack1 : "")
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Take it from the datasheet or measure it; there is no figure that holds for all.";
+    return "Run a larger protective conductor, or take the device's let-through energy from its datasheet.";
 },"useData":true})},
-"iec/battery-can-give-the-load":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/protective-conductor-follows-the-table":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -559,15 +695,88 @@ export default {
         return undefined
     };
 
-  return "The backed-up loads draw "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"backed_up_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
-    + " together; the battery and its inverter give "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"discharge_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":95},"end":{"line":1,"column":121}}})) != null ? stack1 : "")
-    + " without sun.";
+  return "The protective conductor of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":36}}})) != null ? stack1 : "")
+    + " has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"protective_size",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
+    + "; the table gives "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"protective_conductor_table",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":85},"end":{"line":1,"column":122}}})) != null ? stack1 : "")
+    + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Tell the customer which loads may run together at night, or move some to the grid side.";
+    return "Nothing where the calculation shows that it is enough; keep the calculation.";
 },"useData":true})},
-"iec/charge-is-held-back":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/lighting-keeps-its-voltage":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The voltage falls by "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_drop_total_percent",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":58}}})) != null ? stack1 : "")
+    + " on the way to "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":73},"end":{"line":1,"column":81}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.voltage_drop_lighting",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":83},"end":{"line":1,"column":120}}})) != null ? stack1 : "")
+    + " is the most for lighting.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Run a larger cable, or shorten it.";
+},"useData":true})},
+"iec/loads-keep-their-voltage":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The voltage falls by "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_drop_total_percent",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":58}}})) != null ? stack1 : "")
+    + " on the way to "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":73},"end":{"line":1,"column":81}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.voltage_drop_other",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":83},"end":{"line":1,"column":117}}})) != null ? stack1 : "")
+    + " is the most.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Run a larger cable, or shorten it.";
+},"useData":true})},
+"iec/cable-has-enough-cores":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The cable of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":13},"end":{"line":1,"column":21}}})) != null ? stack1 : "")
+    + " has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"cable_cores",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":48}}})) != null ? stack1 : "")
+    + " cores; its lines, a neutral and a protective conductor need "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"cores_needed",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":109},"end":{"line":1,"column":132}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check phases and type of the cable. A three-phase load without neutral is right with one core less.";
+},"useData":true})},
+"iec/circuit-uses-lines-of-the-supply":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " uses "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lines",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":30}}})) != null ? stack1 : "")
+    + "; the supply has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"supply_phases",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":47},"end":{"line":1,"column":71}}})) != null ? stack1 : "")
+    + " line.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Correct the phases of the circuit, or of the supply.";
+},"useData":true})},
+"iec/backed-up-load-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -575,12 +784,13 @@ export default {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"held_back_charge",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":27}}})) != null ? stack1 : "")
-    + " of the charge is held back for the island.";
+  return "The load of "
+    + ((stack1 = lookupProperty(helpers,"name").call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":12},"end":{"line":1,"column":20}}})) != null ? stack1 : "")
+    + " is not stated, so the island's budget leaves it out.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Set the charge that the customer wants to have left when the grid fails.";
+    return "State power, or current, and the energy of a day.";
 },"useData":true})},
-"iec/alarm-comes-before-the-end":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/conductors-are-not-too-thin":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -588,15 +798,35 @@ export default {
         return undefined
     };
 
-  return "The alarm is set to "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"low_charge_alarm",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":47}}})) != null ? stack1 : "")
+  return "The line conductor of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":22},"end":{"line":1,"column":30}}})) != null ? stack1 : "")
+    + " has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"line_size",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":35},"end":{"line":1,"column":55}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Run at least 1.5 mm².";
+},"useData":true})},
+"iec/protective-conductor-is-continuous":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The conductors of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":26}}})) != null ? stack1 : "")
+    + " read "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"continuity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":53}}})) != null ? stack1 : "")
+    + "; their length and size give "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"continuity_expected",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":82},"end":{"line":1,"column":112}}})) != null ? stack1 : "")
     + ", and "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"held_back_charge",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":53},"end":{"line":1,"column":80}}})) != null ? stack1 : "")
-    + " is held back.";
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"continuity_highest",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":118},"end":{"line":1,"column":147}}})) != null ? stack1 : "")
+    + " with terminals.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Set the alarm below the charge that is held back, and above the end of discharge.";
+    return "Look for a loose terminal, a wrong length or a thinner conductor.";
 },"useData":true})},
-"iec/island-voltage-is-set-to-nominal":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/continuity-is-not-too-good":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -604,15 +834,17 @@ export default {
         return undefined
     };
 
-  return "The island voltage is set to "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":29},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
-    + "; the building runs at "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"nominal_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":103}}})) != null ? stack1 : "")
+  return "The conductors of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":26}}})) != null ? stack1 : "")
+    + " read "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"continuity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":53}}})) != null ? stack1 : "")
+    + "; their length and size give "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"continuity_expected",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":82},"end":{"line":1,"column":112}}})) != null ? stack1 : "")
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Set it with the installer's account, and read it back.";
+    return "Check the length, whether the leads were nulled, and whether a parallel path was measured.";
 },"useData":true})},
-"iec/settings-were-read-back":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/insulation-is-high-enough":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -620,15 +852,44 @@ export default {
         return undefined
     };
 
-  return "Settings read back from "
-    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":24},"end":{"line":1,"column":32}}})) != null ? stack1 : "")
-    + ": "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"read_back",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":34},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+  return "The insulation of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":26}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"insulation",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":33},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"insulation_minimum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":56},"end":{"line":1,"column":85}}})) != null ? stack1 : "")
+    + " is the least.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Disconnect loads, surge protection and electronics, and find the damp or damaged part.";
+},"useData":true})},
+"iec/insulation-is-tested-at-the-right-voltage":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The insulation of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":26}}})) != null ? stack1 : "")
+    + " was tested at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"insulation_tested_at",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":72}}})) != null ? stack1 : "")
+    + "; the circuit asks for "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"insulation_test_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":95},"end":{"line":1,"column":129}}})) != null ? stack1 : "")
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Read every setting back from the device, and write read_back true.";
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "Repeat the test at "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"insulation_test_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":53}}})) != null ? stack1 : "")
+    + ". Where equipment cannot be disconnected, 250 V is allowed; state the reason as a departure.";
 },"useData":true})},
-"iec/voltages-are-within-the-yardstick":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/polarity-is-correct":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -636,23 +897,15 @@ export default {
         return undefined
     };
 
-  return "The lines read L1 "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L1",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":39}}})) != null ? stack1 : "")
-    + ", L2 "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L2",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":44},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
-    + " and L3 "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L3",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":73},"end":{"line":1,"column":94}}})) != null ? stack1 : "")
-    + " "
-    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":95},"end":{"line":1,"column":104}}})) != null ? stack1 : "")
-    + "; "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":106},"end":{"line":1,"column":130}}})) != null ? stack1 : "")
-    + " to "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_ceiling",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":134},"end":{"line":1,"column":160}}})) != null ? stack1 : "")
-    + " are usual.";
+  return "The polarity of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":16},"end":{"line":1,"column":24}}})) != null ? stack1 : "")
+    + " is "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"polarity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":47}}})) != null ? stack1 : "")
+    + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "On the grid ask the operator; in the island check the setting, the load of each line and the neutral.";
+    return "Correct it, and repeat the tests that it may have spoilt.";
 },"useData":true})},
-"iec/voltage-is-within-the-yardstick":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/upstream-device-stays-within-its-cables":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -660,19 +913,16 @@ export default {
         return undefined
     };
 
-  return "The line reads "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L1",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":36}}})) != null ? stack1 : "")
-    + " "
-    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":37},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
-    + "; "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":48},"end":{"line":1,"column":72}}})) != null ? stack1 : "")
-    + " to "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_ceiling",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":76},"end":{"line":1,"column":102}}})) != null ? stack1 : "")
-    + " are usual.";
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " is rated "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":34}}})) != null ? stack1 : "")
+    + "; the weakest cable behind it carries "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"smallest_cable_capacity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":72},"end":{"line":1,"column":106}}})) != null ? stack1 : "")
+    + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "On the grid ask the operator; in the island check the setting and the load.";
+    return "Fit a smaller device or a larger cable.";
 },"useData":true})},
-"iec/frequency-is-within-the-yardstick":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/upstream-device-carries-its-load":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -680,19 +930,408 @@ export default {
         return undefined
     };
 
-  return "The frequency reads "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":40}}})) != null ? stack1 : "")
+  return "The loads behind "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":17},"end":{"line":1,"column":25}}})) != null ? stack1 : "")
+    + " draw "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"through_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":57}}})) != null ? stack1 : "")
+    + " on the most loaded line; it is rated "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":95},"end":{"line":1,"column":111}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Spread the loads over the lines, or share them out.";
+},"useData":true})},
+"iec/upstream-device-breaks-the-fault-current":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " breaks "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"breaking_capacity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":16},"end":{"line":1,"column":44}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fault_current_at_device",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":46},"end":{"line":1,"column":80}}})) != null ? stack1 : "")
+    + " can flow where it sits.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a device with a higher breaking capacity.";
+},"useData":true})},
+"iec/upstream-device-is-smaller-than-the-one-above":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " is rated "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":34}}})) != null ? stack1 : "")
+    + ", and the device above it "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"upstream_rating",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":60},"end":{"line":1,"column":86}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Step the ratings so that a fault is cut off near itself.";
+},"useData":true})},
+"iec/main-protection-breaks-the-fault-current":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The supply delivers "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fault_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":44}}})) != null ? stack1 : "")
+    + "; the main protection breaks "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"main_breaking",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":73},"end":{"line":1,"column":97}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Ask the operator for the fault current, and fit protection for it.";
+},"useData":true})},
+"iec/supply-is-measured":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The supply reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop_impedance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":17},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
+    + " and "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fault_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":47},"end":{"line":1,"column":71}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Measure both at the origin, and write them under supply.";
+},"useData":true})},
+"iec/fault-is-cut-off-on-the-grid":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "On the grid nothing would cut off a fault in "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":45},"end":{"line":1,"column":53}}})) != null ? stack1 : "")
+    + " within "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"disconnection_time",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":61},"end":{"line":1,"column":90}}})) != null ? stack1 : "")
+    + "; supply and cables give a loop of "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop_expected",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":125},"end":{"line":1,"column":149}}})) != null ? stack1 : "")
+    + ", and the device needs "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop_limit_measured",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":172},"end":{"line":1,"column":202}}})) != null ? stack1 : "")
+    + " or less.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Lower the loop, fit another characteristic, or add residual-current protection.";
+},"useData":true})},
+"iec/loop-was-read-on-the-grid":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The loop of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":12},"end":{"line":1,"column":20}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
+    + " on the grid; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop_limit_measured",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":56},"end":{"line":1,"column":86}}})) != null ? stack1 : "")
+    + " is the most for a cold reading.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read the loop at the far end of the circuit; if it is too high, lower it or fit another device.";
+},"useData":true})},
+"iec/loop-suits-the-device-even-with-residual-protection":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The loop of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":12},"end":{"line":1,"column":20}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
+    + "; its overcurrent device would need "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop_limit_measured",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":78},"end":{"line":1,"column":108}}})) != null ? stack1 : "")
+    + " or less. Residual-current protection alone cuts off a fault.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look for a bad joint. Accept it only where the length of the circuit explains the reading.";
+},"useData":true})},
+"iec/loop-agrees-with-the-cable":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The loop of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":12},"end":{"line":1,"column":20}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
+    + "; supply and cables give "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop_expected",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":67},"end":{"line":1,"column":91}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check the length, the supply's loop impedance, and whether the reading was taken at the far end.";
+},"useData":true})},
+"iec/fault-is-cut-off-in-the-island":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "In the island nothing cuts off a fault in "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":42},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
+    + "; the inverter feeds "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"fault_current_island",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":71},"end":{"line":1,"column":102}}})) != null ? stack1 : "")
+    + ", and the device needs "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"operating_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":125},"end":{"line":1,"column":153}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Place residual-current protection downstream of the changeover, or show that the inverter shuts down in time.";
+},"useData":true})},
+"iec/loop-of-the-grid-does-not-count-in-the-island":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The loop of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":12},"end":{"line":1,"column":20}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":42}}})) != null ? stack1 : "")
+    + " in the island; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"loop_limit_measured",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":58},"end":{"line":1,"column":88}}})) != null ? stack1 : "")
+    + " is the most.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read the loop while the island is running, with an instrument that the inverter bears, or rely on residual-current protection.";
+},"useData":true})},
+"iec/residual-protection-needs-an-earthed-island":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The residual-current protection of "
+    + ((stack1 = lookupProperty(helpers,"name").call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":35},"end":{"line":1,"column":43}}})) != null ? stack1 : "")
+    + " cannot work in the island, since nothing links its neutral to earth.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Close a link between neutral and earth on the source's side of the device while the island runs.";
+},"useData":true})},
+"iec/electrode-suits-the-residual-protection":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The electrode reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"electrode_resistance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":51}}})) != null ? stack1 : "")
+    + "; with a residual current of "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"largest_residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":80},"end":{"line":1,"column":107}}})) != null ? stack1 : "")
+    + " it may have "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"electrode_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":120},"end":{"line":1,"column":146}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Improve the electrode, or fit a more sensitive device.";
+},"useData":true})},
+"iec/electrode-is-stable":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The electrode reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"electrode_resistance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":51}}})) != null ? stack1 : "")
+    + "; above "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.electrode_stable",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":59},"end":{"line":1,"column":91}}})) != null ? stack1 : "")
+    + " it may not be stable.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Drive it deeper, add a second one, or measure again in a dry month.";
+},"useData":true})},
+"iec/tt-circuits-have-residual-protection":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " has no residual-current protection "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":44},"end":{"line":1,"column":53}}})) != null ? stack1 : "")
+    + ", and the system is TT.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Feed it through a residual-current device that works in this state.";
+},"useData":true})},
+"iec/half-the-residual-current-does-not-trip":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " tripped at half its rated residual current "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":61}}})) != null ? stack1 : "")
+    + ", after "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"half",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":69},"end":{"line":1,"column":84}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Measure what leaks already, take loads off, and test again; replace the device if it still trips.";
+},"useData":true})},
+"iec/rated-residual-current-trips-in-time":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " took "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":30}}})) != null ? stack1 : "")
+    + " at its rated residual current "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":61},"end":{"line":1,"column":70}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":72},"end":{"line":1,"column":99}}})) != null ? stack1 : "")
+    + " is the most.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Replace the device. In the island, prove the link between neutral and earth first.";
+},"useData":true})},
+"iec/delayed-device-waits-at-its-rated-residual-current":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " took only "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":35}}})) != null ? stack1 : "")
+    + " at its rated residual current "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":66},"end":{"line":1,"column":75}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_minimum_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":106}}})) != null ? stack1 : "")
+    + " is the least for a time-delayed device.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check that the device is time-delayed; replace it if it is.";
+},"useData":true})},
+"iec/double-residual-current-trips-in-time":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " took "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"double",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":31}}})) != null ? stack1 : "")
+    + " at twice its rated residual current "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":68},"end":{"line":1,"column":77}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_double",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":79},"end":{"line":1,"column":107}}})) != null ? stack1 : "")
+    + " is the most.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Replace the device.";
+},"useData":true})},
+"iec/delayed-device-waits-at-double-residual-current":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " took only "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"double",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":36}}})) != null ? stack1 : "")
+    + " at twice its rated residual current "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":73},"end":{"line":1,"column":82}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_minimum_double",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":84},"end":{"line":1,"column":114}}})) != null ? stack1 : "")
+    + " is the least.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check that the device is time-delayed.";
+},"useData":true})},
+"iec/five-times-the-residual-current-trips-at-once":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " took "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":35}}})) != null ? stack1 : "")
+    + " at five times its rated residual current "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":86}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":88},"end":{"line":1,"column":120}}})) != null ? stack1 : "")
+    + " is the most.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Replace the device.";
+},"useData":true})},
+"iec/delayed-device-waits-at-five-times":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " took only "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":40}}})) != null ? stack1 : "")
+    + " at five times its rated residual current "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":82},"end":{"line":1,"column":91}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_minimum_five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":93},"end":{"line":1,"column":127}}})) != null ? stack1 : "")
+    + " is the least.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check that the device is time-delayed.";
+},"useData":true})},
+"iec/rising-residual-current-trips-soon-enough":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " tripped only at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"ramp",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":40}}})) != null ? stack1 : "")
     + " "
     + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
     + "; "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
-    + " to "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency_ceiling",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":82},"end":{"line":1,"column":110}}})) != null ? stack1 : "")
-    + " are usual.";
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"ramp_maximum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":75}}})) != null ? stack1 : "")
+    + " is the most for type "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"type",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":97},"end":{"line":1,"column":112}}})) != null ? stack1 : "")
+    + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "In the island, look whether the inverter throttles an array by its frequency, and whether the loads bear it.";
+    return "Replace the device.";
 },"useData":true})},
-"iec/neutral-stays-near-earth":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/rising-residual-current-does-not-trip-too-soon":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -700,53 +1339,20 @@ export default {
         return undefined
     };
 
-  return "The neutral stands at "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_to_earth",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":22},"end":{"line":1,"column":49}}})) != null ? stack1 : "")
-    + " to earth "
-    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":59},"end":{"line":1,"column":68}}})) != null ? stack1 : "")
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " tripped already at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"ramp",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":43}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":44},"end":{"line":1,"column":53}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"ramp_minimum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":55},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
+    + " is the least for type "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"type",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":101},"end":{"line":1,"column":116}}})) != null ? stack1 : "")
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Prove the link between neutral and earth, and look for a lost neutral.";
+    return "Measure what leaks already, take loads off, and test again.";
 },"useData":true})},
-"iec/link-in-the-island-was-measured":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "The link between neutral and earth reads "
-    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"link_resistance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
-    + " in the island.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Measure from the neutral bar to the earth bar with the island formed, and find the loose terminal.";
-},"useData":true})},
-"iec/rotation-stays-the-same":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The direction of rotation changes between the grid and the island.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Swap two lines of the inverter, and measure again in both states.";
-},"useData":true})},
-"iec/load-steps-were-tried":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "No load step in the island is on record.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Start the largest motor and the largest heater in the island, and write the lowest voltage and frequency under load_steps.";
-},"useData":true})},
-"iec/load-step-does-not-trip-the-island":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "The island tripped at this step: "
-    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"step",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":33},"end":{"line":1,"column":48}}})) != null ? stack1 : "")
-    + ".";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Move the load to the grid side, or start it softly.";
-},"useData":true})},
-"iec/load-step-keeps-the-voltage-up":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/device-has-the-type-that-the-inverter-asks-for":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -754,17 +1360,16 @@ export default {
         return undefined
     };
 
-  return "The voltage fell to "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lowest_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":45}}})) != null ? stack1 : "")
-    + " during this step: "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"step",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":64},"end":{"line":1,"column":79}}})) != null ? stack1 : "")
-    + ". "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":81},"end":{"line":1,"column":105}}})) != null ? stack1 : "")
-    + " is the usual floor.";
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " is of type "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"type",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":35}}})) != null ? stack1 : "")
+    + "; the inverter's datasheet asks for "
+    + ((stack1 = lookupProperty(helpers,"list").call(alias1,"types_needed",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":71},"end":{"line":1,"column":94}}})) != null ? stack1 : "")
+    + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Start the load softly, or share the lines out differently.";
+    return "Fit the type that the datasheet asks for at the backed-up output.";
 },"useData":true})},
-"iec/load-step-keeps-the-frequency-up":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/inverter-without-separation-asks-for-type-b":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -772,77 +1377,63 @@ export default {
         return undefined
     };
 
-  return "The frequency fell to "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lowest_frequency",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":22},"end":{"line":1,"column":49}}})) != null ? stack1 : "")
-    + " during this step: "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"step",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":68},"end":{"line":1,"column":83}}})) != null ? stack1 : "")
-    + ". "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":85},"end":{"line":1,"column":111}}})) != null ? stack1 : "")
-    + " is the usual floor.";
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " is of type "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"type",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":35}}})) != null ? stack1 : "")
+    + "; the inverter has no separation, and its datasheet's demand is not on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Ask the inverter's datasheet what it does at this step, and start the load softly.";
+    return "Look in the datasheet whether type A is enough, and write it under residual_type_needed.";
 },"useData":true})},
-"iec/notices-warn-of-two-sources":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “dual-supply notices” is not on the list of what was inspected.";
+"iec/device-is-more-than-type-ac":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " is of type "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"type",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":35}}})) != null ? stack1 : "")
+    + ", which knows sinusoidal current only.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Fix a notice at every board that two sources feed, and at the meter. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+    return "Fit type A or better where anything with electronics is connected.";
 },"useData":true})},
-"iec/backed-up-circuits-are-labelled":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “backed-up circuits labelled” is not on the list of what was inspected.";
+"iec/device-carries-its-upstream-protection":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " carries "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":17},"end":{"line":1,"column":41}}})) != null ? stack1 : "")
+    + "; the overcurrent device upstream lets "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"upstream_rating",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":80},"end":{"line":1,"column":106}}})) != null ? stack1 : "")
+    + " through.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Label each backed-up circuit at its board. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
+    return "Fit a device with a higher rated current, or smaller protection upstream.";
 },"useData":true})},
-"iec/diagram-hangs-at-the-board":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “single-line diagram at the board” is not on the list of what was inspected.";
+"iec/sockets-have-additional-protection":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The sockets of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":23}}})) != null ? stack1 : "")
+    + " have a lowest residual current of "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"smallest_residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":58},"end":{"line":1,"column":86}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":87},"end":{"line":1,"column":96}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.additional_residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":98},"end":{"line":1,"column":133}}})) != null ? stack1 : "")
+    + " is the most.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Put a single-line diagram with both states at the board. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
-},"useData":true})},
-"iec/fire-sealing-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “fire sealing” is not on the list of what was inspected.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Look at every passage of a cable through a wall or into a board. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
-},"useData":true})},
-"iec/conductors-are-identified":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “conductor identification” is not on the list of what was inspected.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Look at colours and marks at every termination. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
-},"useData":true})},
-"iec/terminals-are-tight":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “terminals tight” is not on the list of what was inspected.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Tighten to the torque of the datasheet, and mark what was tightened. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
-},"useData":true})},
-"iec/barriers-were-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “barriers and enclosures” is not on the list of what was inspected.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Look for missing blanks, covers and cable glands. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
-},"useData":true})},
-"iec/isolation-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “isolation and switching” is not on the list of what was inspected.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Try every isolator, and see that it can be locked and reached. Then add the item with its result; “not applicable” or “not inspected” with a note are results too.";
-},"useData":true})},
-"iec/array-wiring-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “array cables and connectors” is not on the list of what was inspected.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Look at every connector pair, and lift every cable off the roof. Then add the item with its result.";
-},"useData":true})},
-"iec/battery-mounting-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The item “battery mounting and clearances” is not on the list of what was inspected.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Look at wall, fixings, clearances and the way to it. Then add the item with its result.";
-},"useData":true})},
-"iec/notices-are-photographed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The notices were inspected, and no photo of them is on record.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Take a photo of each notice in its place.";
-},"useData":true})},
-"iec/labels-are-photographed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The labels of the backed-up circuits were inspected, and no photo of them is on record.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Take a photo of the labelled board.";
-},"useData":true})},
-"iec/no-defect-is-left":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -850,13 +1441,26 @@ export default {
         return undefined
     };
 
-  return "These items have a defect: "
-    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"items_with_defect",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":55}}})) != null ? stack1 : "")
+  return "Feed them through a device of "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"book.additional_residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":30},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
+    + " that works in this state.";
+},"useData":true})},
+"iec/lighting-in-dwellings-has-additional-protection":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The lights of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":22}}})) != null ? stack1 : "")
+    + " have a lowest residual current of "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"smallest_residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":57},"end":{"line":1,"column":85}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":86},"end":{"line":1,"column":95}}})) != null ? stack1 : "")
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Mend the defect, inspect again, and change the result.";
-},"useData":true})},
-"iec/defects-are-described":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -864,37 +1468,11 @@ export default {
         return undefined
     };
 
-  return "These defects have no note: "
-    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"defects_without_note",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
-    + ".";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Say what is wrong and where, so that somebody else can mend it.";
+  return "Feed them through a device of "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"book.additional_residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":30},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
+    + " that works in this state.";
 },"useData":true})},
-"iec/everything-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "These items were not inspected: "
-    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"items_not_inspected",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":62}}})) != null ? stack1 : "")
-    + ".";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Inspect them, or say in the extent of the report that they are left out, and why.";
-},"useData":true})},
-"iec/tester-is-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Nobody is named who tested.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Name the person who took the readings under tested_by.";
-},"useData":true})},
-"iec/installer-is-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Nobody is named who installed.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Name the person who is responsible for the construction under installed_by.";
-},"useData":true})},
-"iec/licence-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/protection-of-the-grid-goes-on-in-the-island":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -903,11 +1481,11 @@ export default {
     };
 
   return ((stack1 = lookupProperty(helpers,"name").call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
-    + " has no licence on record.";
+    + " has residual-current protection on the grid, and none in the island.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Write the number of the licence or registration, or say under remarks why none is needed.";
+    return "Place the device downstream of the changeover and of the link between neutral and earth.";
 },"useData":true})},
-"iec/days-of-the-inspection-are-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/device-does-not-stand-before-the-changeover-alone":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -915,68 +1493,31 @@ export default {
         return undefined
     };
 
-  return "The days of the inspection are "
-    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"inspected_from",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":56}}})) != null ? stack1 : "")
-    + ".";
+  return ((stack1 = lookupProperty(helpers,"name").call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " stands upstream of the changeover: in the island it protects nothing.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Write the first and the last day under inspected.";
+    return "Keep it only where another device stands downstream of the changeover.";
 },"useData":true})},
-"iec/next-verification-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+"iec/devices-in-series-are-selective":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "The next verification is "
-    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"next_due",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":44}}})) != null ? stack1 : "")
-    + ".";
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":13},"end":{"line":1,"column":32}}})) != null ? stack1 : "")
+    + " behind a device of "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"upstream_residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":80}}})) != null ? stack1 : "")
+    + " (time-delayed: "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"upstream_delayed",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":96},"end":{"line":1,"column":123}}})) != null ? stack1 : "")
+    + "); at least "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"upstream_residual_needed",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":135},"end":{"line":1,"column":170}}})) != null ? stack1 : "")
+    + " and a time delay make them selective.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Write the date that the kind of premises and local rules ask for under next_due.";
-},"useData":true})},
-"iec/extent-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "What the report covers is "
-    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"extent",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":43}}})) != null ? stack1 : "")
-    + ".";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Write in a sentence what was verified and what was left out under extent.";
-},"useData":true})},
-"iec/instruments-are-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "No instrument is on record.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Write kind, serial number and calibration of each instrument under instruments.";
-},"useData":true})},
-"iec/customer-was-instructed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "It is not on record that the installation was explained to anybody.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Show the customer what lives on, for how long, and how to restart after an empty battery; write to whom under handover.";
-},"useData":true})},
-"iec/diagram-was-handed-over":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "These documents were handed over: "
-    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"documents",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":34},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
-    + "; a single-line diagram is not among them.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Hand over the diagram, the datasheets, the operating instructions and the list of settings.";
-},"useData":true})},
-"iec/second-person-looks-at-own-work":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "The person who installed also tested.";
-},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
-    return "Nothing, where local rules allow it. A second competent person reviews the report in any case.";
+    return "Fit a time-delayed device with at least three times the residual current upstream.";
 },"useData":true})},
 "iec/array-voltage-stays-below-the-input-limit":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -1574,6 +2115,649 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Use smaller bias resistors, in one place only.";
 },"useData":true})},
+"iec/each-line-fits-the-inverter":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The most loaded line draws "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"largest_phase_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":56}}})) != null ? stack1 : "")
+    + "; the inverter gives "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"phase_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":99}}})) != null ? stack1 : "")
+    + " a line.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move loads to another line or to the grid side.";
+},"useData":true})},
+"iec/whole-load-fits-the-inverter":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The backed-up loads draw "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"total_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + " together; the inverter gives "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_continuous",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":76},"end":{"line":1,"column":104}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move loads to the grid side, or fit a larger inverter.";
+},"useData":true})},
+"iec/starts-fit-the-peak":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "Starting the largest load takes "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"starting_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
+    + " on its line; the inverter's peak gives "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"phase_peak_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":99},"end":{"line":1,"column":126}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a soft starter, move the load to another line, or keep it on the grid side.";
+},"useData":true})},
+"iec/peak-is-on-record":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The inverter's peak power in the island is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"island_peak",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":43},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take peak and peak time from the datasheet.";
+},"useData":true})},
+"iec/fault-current-in-the-island-is-on-record":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The fault current of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":29}}})) != null ? stack1 : "")
+    + " in the island is "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_fault_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":47},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take it from the datasheet or measure it; there is no figure that holds for all.";
+},"useData":true})},
+"iec/battery-can-give-the-load":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The backed-up loads draw "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"backed_up_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
+    + " together; the battery and its inverter give "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"discharge_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":95},"end":{"line":1,"column":121}}})) != null ? stack1 : "")
+    + " without sun.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Tell the customer which loads may run together at night, or move some to the grid side.";
+},"useData":true})},
+"iec/charge-is-held-back":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"held_back_charge",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":27}}})) != null ? stack1 : "")
+    + " of the charge is held back for the island.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Set the charge that the customer wants to have left when the grid fails.";
+},"useData":true})},
+"iec/alarm-comes-before-the-end":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The alarm is set to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"low_charge_alarm",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":47}}})) != null ? stack1 : "")
+    + ", and "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"held_back_charge",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":53},"end":{"line":1,"column":80}}})) != null ? stack1 : "")
+    + " is held back.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Set the alarm below the charge that is held back, and above the end of discharge.";
+},"useData":true})},
+"iec/island-voltage-is-set-to-nominal":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The island voltage is set to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":29},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "; the building runs at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"nominal_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":103}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Set it with the installer's account, and read it back.";
+},"useData":true})},
+"iec/settings-were-read-back":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "Settings read back from "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":24},"end":{"line":1,"column":32}}})) != null ? stack1 : "")
+    + ": "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"read_back",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":34},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read every setting back from the device, and write read_back true.";
+},"useData":true})},
+"iec/voltages-are-within-the-yardstick":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The lines read L1 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L1",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":18},"end":{"line":1,"column":39}}})) != null ? stack1 : "")
+    + ", L2 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L2",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":44},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
+    + " and L3 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L3",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":73},"end":{"line":1,"column":94}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":95},"end":{"line":1,"column":104}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":106},"end":{"line":1,"column":130}}})) != null ? stack1 : "")
+    + " to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_ceiling",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":134},"end":{"line":1,"column":160}}})) != null ? stack1 : "")
+    + " are usual.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "On the grid ask the operator; in the island check the setting, the load of each line and the neutral.";
+},"useData":true})},
+"iec/voltage-is-within-the-yardstick":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The line reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L1",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":36}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":37},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":48},"end":{"line":1,"column":72}}})) != null ? stack1 : "")
+    + " to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_ceiling",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":76},"end":{"line":1,"column":102}}})) != null ? stack1 : "")
+    + " are usual.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "On the grid ask the operator; in the island check the setting and the load.";
+},"useData":true})},
+"iec/frequency-is-within-the-yardstick":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The frequency reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":40}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
+    + " to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency_ceiling",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":82},"end":{"line":1,"column":110}}})) != null ? stack1 : "")
+    + " are usual.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "In the island, look whether the inverter throttles an array by its frequency, and whether the loads bear it.";
+},"useData":true})},
+"iec/neutral-stays-near-earth":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The neutral stands at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_to_earth",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":22},"end":{"line":1,"column":49}}})) != null ? stack1 : "")
+    + " to earth "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":59},"end":{"line":1,"column":68}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Prove the link between neutral and earth, and look for a lost neutral.";
+},"useData":true})},
+"iec/link-in-the-island-was-measured":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The link between neutral and earth reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"link_resistance",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":41},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
+    + " in the island.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Measure from the neutral bar to the earth bar with the island formed, and find the loose terminal.";
+},"useData":true})},
+"iec/rotation-stays-the-same":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The direction of rotation changes between the grid and the island.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Swap two lines of the inverter, and measure again in both states.";
+},"useData":true})},
+"iec/load-steps-were-tried":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "No load step in the island is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Start the largest motor and the largest heater in the island, and write the lowest voltage and frequency under load_steps.";
+},"useData":true})},
+"iec/load-step-does-not-trip-the-island":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The island tripped at this step: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"step",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":33},"end":{"line":1,"column":48}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move the load to the grid side, or start it softly.";
+},"useData":true})},
+"iec/load-step-keeps-the-voltage-up":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The voltage fell to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lowest_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":45}}})) != null ? stack1 : "")
+    + " during this step: "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"step",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":64},"end":{"line":1,"column":79}}})) != null ? stack1 : "")
+    + ". "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":81},"end":{"line":1,"column":105}}})) != null ? stack1 : "")
+    + " is the usual floor.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Start the load softly, or share the lines out differently.";
+},"useData":true})},
+"iec/load-step-keeps-the-frequency-up":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The frequency fell to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lowest_frequency",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":22},"end":{"line":1,"column":49}}})) != null ? stack1 : "")
+    + " during this step: "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"step",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":68},"end":{"line":1,"column":83}}})) != null ? stack1 : "")
+    + ". "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"frequency_floor",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":85},"end":{"line":1,"column":111}}})) != null ? stack1 : "")
+    + " is the usual floor.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Ask the inverter's datasheet what it does at this step, and start the load softly.";
+},"useData":true})},
+"iec/notices-warn-of-two-sources":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “dual-supply notices” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_dual_supply_notices",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":42},"end":{"line":1,"column":77}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fix a notice at every board that two sources feed, and at the meter. Then add the item with its result.";
+},"useData":true})},
+"iec/backed-up-circuits-are-labelled":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “backed-up circuits labelled” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_backed_up_circuits_labelled",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":50},"end":{"line":1,"column":93}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Label each backed-up circuit at its board. Then add the item with its result.";
+},"useData":true})},
+"iec/diagram-hangs-at-the-board":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “single-line diagram at the board” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_single_line_diagram_at_the_board",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":55},"end":{"line":1,"column":103}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Put a single-line diagram with both states at the board. Then add the item with its result.";
+},"useData":true})},
+"iec/fire-sealing-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “fire sealing” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_fire_sealing",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":35},"end":{"line":1,"column":63}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look at every passage of a cable through a wall or into a board. Then add the item with its result.";
+},"useData":true})},
+"iec/conductors-are-identified":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “conductor identification” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_conductor_identification",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":47},"end":{"line":1,"column":87}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look at colours and marks at every termination. Then add the item with its result.";
+},"useData":true})},
+"iec/terminals-are-tight":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “terminals tight” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_terminals_tight",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":38},"end":{"line":1,"column":69}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Tighten to the torque of the datasheet, and mark what was tightened. Then add the item with its result.";
+},"useData":true})},
+"iec/barriers-were-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “barriers and enclosures” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_barriers_and_enclosures",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":46},"end":{"line":1,"column":85}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look for missing blanks, covers and cable glands. Then add the item with its result.";
+},"useData":true})},
+"iec/isolation-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “isolation and switching” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_isolation_and_switching",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":46},"end":{"line":1,"column":85}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Try every isolator, and see that it can be locked and reached. Then add the item with its result.";
+},"useData":true})},
+"iec/array-wiring-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “array cables and connectors” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_array_cables_and_connectors",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":50},"end":{"line":1,"column":93}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look at every connector pair, and lift every cable off the roof. Then add the item with its result.";
+},"useData":true})},
+"iec/battery-mounting-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The item “battery mounting and clearances” stands as: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"item_battery_mounting_and_clearances",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":54},"end":{"line":1,"column":101}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Look at wall, fixings, clearances and the way to it. Then add the item with its result.";
+},"useData":true})},
+"iec/notices-are-photographed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The notices were inspected, and no photo of them is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take a photo of each notice in its place.";
+},"useData":true})},
+"iec/labels-are-photographed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The labels of the backed-up circuits were inspected, and no photo of them is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take a photo of the labelled board.";
+},"useData":true})},
+"iec/no-defect-is-left":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These items have a defect: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"items_with_defect",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":27},"end":{"line":1,"column":55}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Mend the defect, inspect again, and change the result.";
+},"useData":true})},
+"iec/defects-are-described":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These defects have no note: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"defects_without_note",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Say what is wrong and where, so that somebody else can mend it.";
+},"useData":true})},
+"iec/everything-was-inspected":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These items were not inspected: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"items_not_inspected",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":62}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Inspect them, or say in the extent of the report that they are left out, and why.";
+},"useData":true})},
+"iec/tester-is-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Nobody is named who tested.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Name the person who took the readings under tested_by.";
+},"useData":true})},
+"iec/installer-is-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Nobody is named who installed.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Name the person who is responsible for the construction under installed_by.";
+},"useData":true})},
+"iec/licence-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(depth0 != null ? depth0 : (container.nullContext || {}),{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " has no licence on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write the number of the licence or registration, or say under remarks why none is needed.";
+},"useData":true})},
+"iec/days-of-the-inspection-are-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The days of the inspection are "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"inspected_from",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":56}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write the first and the last day under inspected.";
+},"useData":true})},
+"iec/next-verification-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The next verification is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"next_due",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":44}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write the date that the kind of premises and local rules ask for under next_due.";
+},"useData":true})},
+"iec/extent-is-stated":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "What the report covers is "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"extent",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":43}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write in a sentence what was verified and what was left out under extent.";
+},"useData":true})},
+"iec/instruments-are-named":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "No instrument is on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Write kind, serial number and calibration of each instrument under instruments.";
+},"useData":true})},
+"iec/customer-was-instructed":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "It is not on record that the installation was explained to anybody.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Show the customer what lives on, for how long, and how to restart after an empty battery; write to whom under handover.";
+},"useData":true})},
+"iec/diagram-was-handed-over":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These documents were handed over: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"documents",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":34},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "; a single-line diagram is not among them.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Hand over the diagram, the datasheets, the operating instructions and the list of settings.";
+},"useData":true})},
+"iec/second-person-looks-at-own-work":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The person who installed also tested.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Nothing, where local rules allow it. A second competent person reviews the report in any case.";
+},"useData":true})},
+"au/no-link-closes-beside-the-main-one":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The changeover's link between neutral and earth is: "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"neutral_link",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":52},"end":{"line":1,"column":75}}})) != null ? stack1 : "")
+    + "; the link at the main switchboard stays closed.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take the changeover's link out of service.";
+},"useData":true})},
+"iec/changeover-opens-the-poles-demanded":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The changeover opens "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"switched_poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":21},"end":{"line":1,"column":46}}})) != null ? stack1 : "")
+    + " with its "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"poles",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":56},"end":{"line":1,"column":72}}})) != null ? stack1 : "")
+    + " poles; the operator demands "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"separation_required",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":101},"end":{"line":1,"column":131}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a device with the poles that the operator demands, or get the operator's consent in writing.";
+},"useData":true})},
+"iec/neutral-opens-no-sooner-than-the-lines":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The neutral contact opens "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_opens",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
+    + ". On these loads a lost neutral puts up to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"lost_neutral_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":93},"end":{"line":1,"column":124}}})) != null ? stack1 : "")
+    + " on one line.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Take the sequence from the datasheet. Fit a device whose neutral opens last and closes first, or with the lines.";
+},"useData":true})},
 "de/diagram-hangs-at-the-board":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "A single-line diagram is neither at the board nor among what was handed over.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
@@ -1594,5 +2778,35 @@ export default {
     + " system.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a device that opens the neutral too.";
+},"useData":true})},
+"gb/battery-keeps-out-of-forbidden-places":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The battery stands in a place called “"
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"place",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":38},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "”.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move it out of sleeping rooms, escape routes, lofts and voids.";
+},"useData":true})},
+"gb/bonding-suits-a-combined-supply":{says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The smallest main bonding conductor has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"bonding_smallest",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":40},"end":{"line":1,"column":67}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"book.bonding_minimum_combined",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":69},"end":{"line":1,"column":109}}})) != null ? stack1 : "")
+    + " is the least with a combined neutral and earth.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Run larger main bonding conductors.";
 },"useData":true})}
 }

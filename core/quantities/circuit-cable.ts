@@ -80,4 +80,25 @@ export const circuitCableQuantities: readonly Quantity<CircuitItem>[] = [
     from: ['device'],
     compute: ({ circuit }) => conventionalOperatingCurrent(circuit.device),
   },
+  {
+    name: 'overload_limit',
+    unit: 'A',
+    title: 'Highest conventional operating current that the cable bears',
+    formula: '1.45 × Iz',
+    source: 'IEC 60364-4-43, 433.1',
+    from: ['capacity'],
+    compute: (_item, _scene, known) => {
+      const iz = knownNumber(known, 'capacity')
+      return iz === undefined ? undefined : 1.45 * iz
+    },
+  },
+  {
+    name: 'cores_needed',
+    unit: '',
+    title: 'Cores that lines, neutral and protective conductor need',
+    formula: 'count of lines + 2',
+    source: 'count',
+    from: ['phases'],
+    compute: ({ circuit }) => circuit.phases.length + 2,
+  },
 ]

@@ -71,6 +71,30 @@ export const circuitLoopQuantities: readonly Quantity<CircuitItem>[] = [
     compute: ({ circuit }) => lineAndReturn(circuit.cable, 'protective'),
   },
   {
+    name: 'continuity_highest',
+    unit: 'Ω',
+    title: 'Highest continuity reading that length and size explain',
+    formula: '1.5 × continuity expected + 0.1 Ω for terminals and the way inside boards',
+    source: 'common practice: own band, no standard gives one',
+    from: ['continuity_expected'],
+    compute: (_item, _scene, known) => {
+      const expected = knownNumber(known, 'continuity_expected')
+      return expected === undefined ? undefined : 1.5 * expected + 0.1
+    },
+  },
+  {
+    name: 'continuity_lowest',
+    unit: 'Ω',
+    title: 'Lowest continuity reading that length and size explain',
+    formula: '0.5 × continuity expected',
+    source: 'common practice: own band, no standard gives one',
+    from: ['continuity_expected'],
+    compute: (_item, _scene, known) => {
+      const expected = knownNumber(known, 'continuity_expected')
+      return expected === undefined ? undefined : 0.5 * expected
+    },
+  },
+  {
     name: 'loop_expected',
     unit: 'Ω',
     title: 'Expected fault-loop impedance on the grid, cold',
@@ -78,6 +102,30 @@ export const circuitLoopQuantities: readonly Quantity<CircuitItem>[] = [
     source: 'Zs = Ze + (R1 + R2): guidance on verification, as quoted in three trade texts',
     from: ['supply.loop_impedance', 'continuity_expected', 'fed_from'],
     compute: ({ id }, scene) => loopExpected(id, scene),
+  },
+  {
+    name: 'loop_highest',
+    unit: 'Ω',
+    title: 'Highest loop reading that supply and cables explain',
+    formula: '1.5 × loop expected + 0.1 Ω',
+    source: 'common practice: own band, no standard gives one',
+    from: ['loop_expected'],
+    compute: (_item, _scene, known) => {
+      const expected = knownNumber(known, 'loop_expected')
+      return expected === undefined ? undefined : 1.5 * expected + 0.1
+    },
+  },
+  {
+    name: 'loop_lowest',
+    unit: 'Ω',
+    title: 'Lowest loop reading that supply and cables explain',
+    formula: '0.5 × loop expected',
+    source: 'common practice: own band, no standard gives one',
+    from: ['loop_expected'],
+    compute: (_item, _scene, known) => {
+      const expected = knownNumber(known, 'loop_expected')
+      return expected === undefined ? undefined : 0.5 * expected
+    },
   },
   {
     name: 'fault_current_grid',

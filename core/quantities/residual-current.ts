@@ -101,6 +101,15 @@ export const residualCurrentFamily: Family<Item> = {
       },
     },
     {
+      name: 'upstream_residual_needed',
+      unit: 'mA',
+      title: 'Rated residual current that a selective device upstream needs',
+      formula: '3 × IΔn',
+      source: 'IEC 61008-1 practice as printed in a switchgear catalogue, p. 119',
+      from: ['residual'],
+      compute: ({ device }) => 3 * device.residual,
+    },
+    {
       name: 'load_current',
       unit: 'A',
       title: 'Load below it on the most loaded line',

@@ -61,6 +61,18 @@ export const supplyFamily: Family<Supply> = {
       compute: earthFaultCurrent,
     },
     {
+      name: 'earth_fault_current_floor',
+      unit: 'A',
+      title: 'Lowest fault current that agrees with the loop impedance',
+      formula: '0.9 × U0 / Ze',
+      source: 'common practice: own band',
+      from: ['earth_fault_current'],
+      compute: (supply) => {
+        const current = earthFaultCurrent(supply)
+        return current === undefined ? undefined : 0.9 * current
+      },
+    },
+    {
       name: 'fault_current_highest',
       unit: 'A',
       title: 'Highest known prospective fault current at the origin',

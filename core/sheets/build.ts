@@ -42,7 +42,11 @@ function fillState<Item>(
   instrument: Parameters<typeof spanOf>[2],
 ): Columns {
   const into = columns()
-  for (const field of plan.inState ?? []) put(into, field.name, field.value(item, scene, state))
+  for (const field of plan.inState ?? []) {
+    into.at[field.name] =
+      typeof field.at === 'function' ? field.at(item, state) : [...plan.path(item, scene), ...field.at]
+    put(into, field.name, field.value(item, scene, state))
+  }
   for (const field of plan.measuredInState ?? [])
     measure(into, field, field.path(item, state), field.reading(item, scene, state), instrument)
   return into
@@ -60,7 +64,7 @@ function sheetOf<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene): Sheet {
   const path = plan.path(item, scene)
   const common = columns()
   for (const field of plan.entered) {
-    common.at[field.name] = [...path, ...field.at]
+    common.at[field.name] = typeof field.at === 'function' ? field.at(item) : [...path, ...field.at]
     put(common, field.name, field.value(item, scene))
   }
   for (const field of plan.measured ?? [])

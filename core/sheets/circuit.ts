@@ -87,11 +87,23 @@ export const circuitPlan: SheetPlan<CircuitItem> = {
       ['load', 'daily_energy'],
       ({ circuit }) => circuit.load?.daily_energy,
     ),
-    entered('polarity', '', 'Polarity', [], (item, scene) => readingsOf(item, scene)?.polarity),
-    entered('insulation_tested_at', 'V', 'Test voltage used', [], (item, scene) => {
-      const reading = readingsOf(item, scene)?.insulation
-      return reading && 'value' in reading ? reading.at : undefined
-    }),
+    entered(
+      'polarity',
+      '',
+      'Polarity',
+      (item) => readingPath(item, 'polarity'),
+      (item, scene) => readingsOf(item, scene)?.polarity,
+    ),
+    entered(
+      'insulation_tested_at',
+      'V',
+      'Test voltage used',
+      (item) => readingPath(item, 'insulation'),
+      (item, scene) => {
+        const reading = readingsOf(item, scene)?.insulation
+        return reading && 'value' in reading ? reading.at : undefined
+      },
+    ),
     entered(
       'additional_protection',
       'mA',

@@ -87,7 +87,7 @@ export const residualCurrentPlan: SheetPlan<ResidualItem> = {
       name: 'half_tripped',
       unit: '',
       title: 'Operated at half its rated residual current',
-      at: [],
+      at: ({ id }, state) => ['readings', 'residual_current', id, state, 'half'],
       value: (item, scene, state) => {
         const half = testOf(item, scene, state)?.half
         return half && 'value' in half ? half.noTrip !== true : undefined
@@ -97,7 +97,7 @@ export const residualCurrentPlan: SheetPlan<ResidualItem> = {
       name: 'rated_tripped',
       unit: '',
       title: 'Operated at its rated residual current',
-      at: [],
+      at: ({ id }, state) => ['readings', 'residual_current', id, state, 'rated'],
       value: (item, scene, state) => {
         const rated = testOf(item, scene, state)?.rated
         return rated && 'value' in rated ? rated.noTrip !== true : undefined

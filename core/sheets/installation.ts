@@ -2,6 +2,7 @@ import { LINES, type Line, type State } from '#core/glossary.ts'
 import type { Install, StateReadings } from '#core/install.ts'
 import { installationFamily } from '#core/quantities/installation.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
+import { inspectionFields } from './inspection.ts'
 import { entered, type SheetPlan, type StateMeasuredField } from './plan.ts'
 
 function stateOf({ install }: Scene, state: State): StateReadings | undefined {
@@ -37,6 +38,7 @@ export const installationPlan: SheetPlan<Install> = {
   path: () => [],
   quantities: installationFamily.quantities,
   entered: [
+    ...inspectionFields,
     entered('reference', '', 'Reference of the report', ['report', 'reference'], ({ report }) => report.reference),
     entered('purpose', '', 'Purpose', ['report', 'purpose'], ({ report }) => report.purpose),
     entered(

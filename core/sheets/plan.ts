@@ -14,14 +14,15 @@ export interface FieldWords {
 
 /** A value from the file, or one that follows from names and tree alone. */
 export interface EnteredField<Item> extends FieldWords {
-  /** Where it stands, relative to the subject's own place. */
-  readonly at: Path
+  /** Where it stands, relative to the subject's own place; or from the top of the file, for what stands apart from it. */
+  readonly at: Path | ((item: Item) => Path)
   readonly value: (item: Item, scene: Scene) => SheetValue | undefined
 }
 
 /** A value that holds in one state, under the same name for both. */
 export interface StateField<Item> extends FieldWords {
-  readonly at: Path
+  /** Where it stands, relative to the subject's own place; or from the top of the file. */
+  readonly at: Path | ((item: Item, state: State) => Path)
   readonly value: (item: Item, scene: Scene, state: State) => SheetValue | undefined
 }
 
@@ -59,7 +60,7 @@ export function entered<Item>(
   name: string,
   unit: string,
   title: string,
-  at: Path,
+  at: EnteredField<Item>['at'],
   value: EnteredField<Item>['value'],
 ): EnteredField<Item> {
   return { name, unit, title, at, value }

@@ -69,12 +69,30 @@ export const stringPlan: SheetPlan<StringItem> = {
       ({ array }) => array.modules_in_series,
     ),
     entered('strings', '', 'Strings in the array', ['strings'], ({ array }) => array.strings),
-    entered('polarity', '', 'Polarity', [], ({ readings }) => readings?.polarity),
-    entered('taken', '', 'When it was read', [], ({ readings }) => readings?.taken),
-    entered('insulation_tested_at', 'V', 'Test voltage used', [], ({ readings }) => {
-      const insulation = readings?.insulation
-      return insulation && 'value' in insulation ? insulation.at : undefined
-    }),
+    entered(
+      'polarity',
+      '',
+      'Polarity',
+      (item) => readingPath(item, 'polarity'),
+      ({ readings }) => readings?.polarity,
+    ),
+    entered(
+      'taken',
+      '',
+      'When it was read',
+      (item) => readingPath(item, 'taken'),
+      ({ readings }) => readings?.taken,
+    ),
+    entered(
+      'insulation_tested_at',
+      'V',
+      'Test voltage used',
+      (item) => readingPath(item, 'insulation'),
+      ({ readings }) => {
+        const insulation = readings?.insulation
+        return insulation && 'value' in insulation ? insulation.at : undefined
+      },
+    ),
     entered(
       'string_spread_floor',
       '%',
