@@ -67,6 +67,7 @@ function teach(rules: readonly PlacedRule[]): void {
   }
   for (const rule of rules) {
     learnWords(keyOf(rule), {
+      title: rule.record.title,
       says: engine.compile(rule.record.says, settings),
       do: engine.compile(rule.record.do, settings),
     })

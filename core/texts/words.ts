@@ -16,6 +16,7 @@ export type Printer = (scene: WordScene) => string
 const engine = (runtime as unknown as typeof Handlebars).create()
 registerHelpers(engine)
 const printers = new Map<string, Printer>()
+const ownTitles = new Map<string, string>()
 
 function printer(key: string, part: 'says' | 'do'): Printer {
   const name = `${key} ${part}`
@@ -33,8 +34,19 @@ export function ruleWordsFor(key: string, scene: WordScene): FindingWords {
   return { says: printer(key, 'says')(scene), do: printer(key, 'do')(scene) }
 }
 
+/** What a rule says must hold. */
+export function ruleTitle(key: string): string {
+  const title = ownTitles.get(key) ?? ruleWords[key]?.title
+  if (title === undefined) throw new Error(`The words of the rule ${key} are missing: generate the rules again.`)
+  return title
+}
+
 /** Adds the words of a rule of one's own, compiled when its book was read. */
-export function learnWords(key: string, { says, do: what }: { readonly says: Printer; readonly do: Printer }): void {
+export function learnWords(
+  key: string,
+  { title, says, do: what }: { readonly title: string; readonly says: Printer; readonly do: Printer },
+): void {
+  ownTitles.set(key, title)
   printers.set(`${key} says`, says)
   printers.set(`${key} do`, what)
 }

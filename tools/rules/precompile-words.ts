@@ -5,8 +5,8 @@ import { keyOf } from '#core/judge/stored.ts'
 /** JavaScript of the rules' words, precompiled: an object of functions by rule key. */
 export function precompileWords(rules: readonly PlacedRule[]): string {
   const entries = rules.map((rule) => {
-    const { says, do: what } = rule.record
-    return `${JSON.stringify(keyOf(rule))}:{says:${spec(says)},do:${spec(what)}}`
+    const { title, says, do: what } = rule.record
+    return `${JSON.stringify(keyOf(rule))}:{title:${JSON.stringify(title)},says:${spec(says)},do:${spec(what)}}`
   })
   return `export default {\n${entries.join(',\n')}\n}\n`
 }

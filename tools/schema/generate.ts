@@ -21,7 +21,7 @@ export async function generateSchemas(): Promise<Record<string, string>> {
     [`schemas/parts/${QUANTITIES}.schema.json`]: printJson(quantities),
     'schemas/install.draft-07.schema.json': printJson(makeDraft07(bundled)),
     'core/generated/install-schema.json': printJson(bundled),
-    'core/generated/install-schema.js': `export default ${JSON.stringify(JSON.stringify(bundled))}\n`,
+    'core/generated/install-schema.js': `export default () => ${JSON.stringify(JSON.stringify(bundled))}\n`,
     'core/generated/install-schema.d.ts': TEXT_TYPES,
     'core/generated/install-validator.js': await compileValidator(bundled),
     'core/generated/install-validator.d.ts': VALIDATOR_TYPES,
@@ -30,7 +30,7 @@ export async function generateSchemas(): Promise<Record<string, string>> {
 }
 
 const TEXT_TYPES = `/** The bundled schema as JSON text: it is parsed only where a file has errors to explain. */
-declare const text: string
+declare const text: () => string
 export default text
 `
 

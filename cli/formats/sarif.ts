@@ -1,0 +1,116 @@
+import type { FileResult, ShownFinding } from '#cli/result.ts'
+import { PROBLEM_CODES } from '#core/errors.ts'
+import type { Citation } from '#core/glossary.ts'
+import { encodeUtf8 } from '#core/judge/canonical.ts'
+import { rulePage } from '#core/judge/pages.ts'
+import { sha256 } from '#core/paper/sha256.ts'
+import { atFailureLevel } from '#core/report/told.ts'
+import type { Format } from './format.ts'
+import { pointer } from './pointer.ts'
+
+const LEVELS = { failure: 'error', caution: 'warning', note: 'note' } as const
+
+const cited = ({ publication, clause, note }: Citation): string =>
+  [publication, clause, note].filter((part) => part !== undefined).join(', ')
+
+function ruleOf({ rule, key, severity }: ShownFinding): object {
+  const name = rule
+    .split('-')
+    .map((word) => word.charAt(0).toUpperCase() + word.slice(1))
+    .join('')
+  if (key === null) {
+    const meaning = (PROBLEM_CODES as Readonly<Record<string, string>>)[rule] ?? 'The file cannot be opened.'
+    return {
+      id: rule,
+      name,
+      shortDescription: { text: meaning },
+      fullDescription: { text: meaning },
+      help: { text: 'Mend the place that is shown. The message says what is allowed there.' },
+      defaultConfiguration: { level: 'error' },
+    }
+  }
+  const { record } = rulePage(key)
+  return {
+    id: rule,
+    name,
+    shortDescription: { text: `${record.title}.` },
+    fullDescription: { text: record.why },
+    help: { text: `${record.why}\nSources: ${record.cites.map(cited).join('; ')}.` },
+    defaultConfiguration: { level: LEVELS[severity] },
+    properties: { tags: [record.subject, `state ${record.state}`] },
+  }
+}
+
+const region = ({ line, column, endLine, endColumn }: ShownFinding['range']): object => ({
+  startLine: line,
+  startColumn: column,
+  endLine,
+  endColumn: endLine === line ? Math.max(endColumn, column + 1) : endColumn,
+})
+
+/** A path as a URI reference, relative to where the command ran. */
+const uriOf = (file: string): string =>
+  encodeURI(file.replaceAll('\\', '/')).replaceAll('#', '%23').replaceAll('?', '%3F')
+
+const location = (file: string, range: ShownFinding['range']): object => ({
+  physicalLocation: { artifactLocation: { uri: uriOf(file) }, region: region(range) },
+})
+
+function levelOf(finding: ShownFinding): 'error' | 'warning' | 'note' {
+  if (atFailureLevel(finding)) return 'error'
+  if (finding.verdict === 'not shown' || finding.verdict === 'limited') return 'note'
+  return finding.severity === 'note' ? 'note' : 'warning'
+}
+
+function fingerprint(file: string, { rule, subject, state }: ShownFinding): string {
+  const bytes = sha256(encodeUtf8([file, rule, subject, state ?? ''].join('\n')))
+  return Array.from(bytes.slice(0, 16), (byte) => byte.toString(16).padStart(2, '0')).join('')
+}
+
+function resultOf(file: string, finding: ShownFinding, places: ReadonlyMap<string, number>): object {
+  const { rule, message, remedy, range, related, departure, path, subject, state, verdict } = finding
+  return {
+    ruleId: rule,
+    ruleIndex: places.get(rule),
+    level: levelOf(finding),
+    message: { text: remedy === '' ? message : `${message} ${remedy}` },
+    locations: [location(file, range)],
+    ...(related.length > 0 && {
+      relatedLocations: related.map((place, id) => ({ id, ...location(file, place.range) })),
+    }),
+    partialFingerprints: { 'skerryFinding/v1': fingerprint(file, finding) },
+    ...(departure && {
+      suppressions: [
+        {
+          kind: 'inSource',
+          status: 'underReview',
+          justification: `${departure.reason} (agreed by ${departure.agreed_by} on ${departure.on})`,
+        },
+      ],
+    }),
+    properties: { subject, state, verdict, path: pointer(path) },
+  }
+}
+
+/** SARIF 2.1.0, for tools that collect findings. */
+export const sarif: Format = (results, { version }) => {
+  const all = results.flatMap((result) => result.findings.map((finding) => [result, finding] as const))
+  const rules = new Map(all.map(([, finding]) => [finding.rule, finding]))
+  const places = new Map([...rules.keys()].map((rule, index) => [rule, index]))
+  const unread: FileResult[] = results.filter(({ outcome }) => outcome === 'unreadable')
+  const run = {
+    tool: {
+      driver: {
+        name: 'Skerry',
+        version,
+        semanticVersion: version,
+        informationUri: 'https://skerry.invalid/',
+        rules: [...rules.values()].map(ruleOf),
+      },
+    },
+    columnKind: 'utf16CodeUnits',
+    invocations: [{ executionSuccessful: unread.length === 0 }],
+    results: all.map(([{ file }, finding]) => resultOf(file, finding, places)),
+  }
+  return `${JSON.stringify({ $schema: 'https://json.schemastore.org/sarif-2.1.0.json', version: '2.1.0', runs: [run] }, null, 2)}\n`
+}

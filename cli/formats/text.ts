@@ -1,0 +1,139 @@
+import type { FileResult, ShownFinding } from '#cli/result.ts'
+import type { Severity, Verdict } from '#core/glossary.ts'
+import { STATE_WORDS } from '#core/texts/label.ts'
+import type { Format, FormatScene } from './format.ts'
+import { type Ink, inks } from './ink.ts'
+import { wrapped } from './wrap.ts'
+
+const SHAPES: Readonly<Record<Verdict, string>> = {
+  fails: '✗',
+  'fails, inside the uncertainty': '✗',
+  'meets, inside the uncertainty': '≈',
+  'not shown': '○',
+  limited: '△',
+  meets: '✓',
+  'not applicable': '·',
+}
+
+const CAUTION =
+  'Verification is work for skilled persons. Local codes and licensed practice come before anything printed here.'
+
+/** How many findings without a reading are told one by one unless asked for all. */
+const FEW = 4
+
+function word({ verdict, severity, departure }: ShownFinding): string {
+  if (departure) return 'departs'
+  return verdict === 'fails' && severity !== 'failure' ? severity : verdict
+}
+
+function inkOf({ verdict, severity, departure }: ShownFinding, ink: Ink): (text: string) => string {
+  if (departure || verdict === 'limited' || verdict === 'not shown') return ink.water
+  if (!verdict.startsWith('fails')) return ink.lamp
+  const bySeverity: Record<Severity, (text: string) => string> = {
+    failure: ink.alarm,
+    caution: ink.lamp,
+    note: ink.water,
+  }
+  return bySeverity[severity]
+}
+
+/** The line that a finding points to, with a caret under the place; long lines are cut around it. */
+function excerpt({ line, range }: ShownFinding, width: number, ink: Ink): string[] {
+  if (line.trim() === '') return []
+  const room = Math.max(30, width - 10)
+  const from = range.column > room - 10 ? range.column - Math.floor(room / 2) : 0
+  const shown = line.slice(from, from + room)
+  const length = range.endLine === range.line ? Math.max(1, range.endColumn - range.column) : 1
+  const at = range.column - 1 - from
+  const marks = '‾'.repeat(Math.max(1, Math.min(length, shown.length - at)))
+  return [
+    `${ink.faint(`${String(range.line).padStart(5)} │`)} ${shown}`,
+    `${ink.faint('      │')} ${' '.repeat(at)}${ink.lamp(marks)}`,
+  ]
+}
+
+function told(finding: ShownFinding, file: string, { width, verbose }: FormatScene, ink: Ink): string {
+  const { rule, subject, state, message, remedy, range, departure } = finding
+  const paint = inkOf(finding, ink)
+  const about = [subject, ...(state === null ? [] : [STATE_WORDS[state]])].join(' ')
+  const head = `${paint(`${SHAPES[finding.verdict]} ${word(finding)}`)}  ${ink.strong(about)}  ${ink.faint(rule)}`
+  const related = verbose
+    ? finding.related.map(({ range: place }) => ink.faint(`    see also ${file}:${place.line}:${place.column}`))
+    : []
+  return [
+    `${head}  ${ink.faint(`${file}:${range.line}:${range.column}`)}`,
+    ...wrapped(message, width - 4).map((text) => `  ${text}`),
+    ...(remedy === '' ? [] : wrapped(remedy, width - 6).map((text, index) => `  ${index === 0 ? '→' : ' '} ${text}`)),
+    ...(departure
+      ? wrapped(
+          `Departs on purpose: ${departure.reason} (agreed by ${departure.agreed_by} on ${departure.on}).`,
+          width - 4,
+        ).map((text) => `  ${text}`)
+      : []),
+    ...excerpt(finding, width, ink),
+    ...related,
+    '',
+  ].join('\n')
+}
+
+/** Readings that are still to be taken, in one block. */
+function open(findings: readonly ShownFinding[], scene: FormatScene, ink: Ink): string {
+  if (findings.length === 0) return ''
+  const lines = findings.slice(0, scene.verbose ? findings.length : FEW).map(({ subject, state, message, range }) => {
+    const about = [subject, ...(state === null ? [] : [STATE_WORDS[state]])].join(' ')
+    return wrapped(`line ${range.line}, ${about}: ${message}`, scene.width - 4)
+      .map((text, index) => `  ${index === 0 ? '' : '  '}${text}`)
+      .join('\n')
+  })
+  const rest = findings.length - lines.length
+  const more =
+    rest > 0 ? [ink.faint(`  and ${rest} more; -v lists all, skerry fieldsheet prints them for the site`)] : []
+  return [ink.water(`○ not shown  ${findings.length} rules lack a reading or an entry`), ...lines, ...more, ''].join(
+    '\n',
+  )
+}
+
+function summary({ counts, outcome, book, findings }: FileResult, ink: Ink): string {
+  const parts = (Object.entries(counts) as [Verdict, number][])
+    .filter(([verdict, count]) => count > 0 && verdict !== 'not applicable')
+    .map(([verdict, count]) => `${count} ${verdict}`)
+  const by = book === null ? 'not judged: mend the file first' : `rule book ${book.id} ${book.version}`
+  const stop = findings.some(({ departure }) => departure) ? '; departures wait for the reviewer' : ''
+  const words = {
+    meets: 'Nothing fails.',
+    incomplete: 'Nothing fails; not everything is shown.',
+    fails: 'It cannot be issued as it stands.',
+    unreadable: 'It cannot be read.',
+  }
+  return `${ink.strong(words[outcome])} ${book === null ? by : `${parts.join(', ')} (${by}${stop})`}`
+}
+
+function fileBlock(result: FileResult, scene: FormatScene, ink: Ink): string {
+  const { file, findings } = result
+  const shown = findings.filter(({ verdict }) => verdict !== 'not shown')
+  if (scene.quiet) return `${file}: ${summary(result, ink)}\n`
+  if (findings.length === 0) return `${ink.sound('✓')} ${file}: ${summary(result, ink)}\n`
+  return [
+    ink.strong(file),
+    '',
+    ...shown.map((finding) => told(finding, file, scene, ink)),
+    open(
+      findings.filter(({ verdict }) => verdict === 'not shown'),
+      scene,
+      ink,
+    ),
+    `${file}: ${summary(result, ink)}`,
+    '',
+  ]
+    .filter((part, index) => part !== '' || index === 1)
+    .join('\n')
+}
+
+/** For people at a terminal: grouped by file, worst news with its place, its words and what to do. */
+export const text: Format = (results, scene) => {
+  const ink = inks(scene.colour)
+  const blocks = results.map((result) => fileBlock(result, scene, ink))
+  const bad = results.filter(({ stops, stopsStrictly }) => (scene.strict ? stopsStrictly : stops)).length
+  const many = results.length > 1 ? `${results.length} files, ${bad} with something at failure level.\n` : ''
+  return `${blocks.join(scene.quiet ? '' : '\n')}${many}${scene.quiet ? '' : `${ink.faint(CAUTION)}\n`}`
+}

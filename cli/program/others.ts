@@ -1,0 +1,82 @@
+import type { Command } from 'commander'
+
+/** Every other command; each is loaded when it is called. */
+export function addOthers(skerry: Command): void {
+  skerry
+    .command('facts')
+    .summary('print every computed quantity')
+    .argument('<file>', 'an install file, or -')
+    .option('-f, --format <name>', 'text or json', 'text')
+    .action(async (file: string, options: { format: string }) =>
+      (await import('#cli/commands/facts.ts')).facts(file, options),
+    )
+  skerry
+    .command('explain')
+    .summary("a rule's words, schema, source and examples; without a name, the list")
+    .argument('[rule]', 'the name of a rule')
+    .option('-f, --format <name>', 'text or json', 'text')
+    .option('-b, --book <id>', 'the rule book to list or to look in', 'iec')
+    .action(async (rule: string | undefined, options: { format: string; book: string }) =>
+      (await import('#cli/commands/explain.ts')).explain(rule, options),
+    )
+  skerry
+    .command('new')
+    .summary('a commented install file, from questions or flags')
+    .argument('[file]', 'where to write it; standard output when left out')
+    .option('--name <text>', 'name of the site')
+    .option('--operator <text>', 'grid operator')
+    .option('--earthing <system>', 'TN-S, TN-C-S or TT')
+    .option('--phases <count>', '1 or 3')
+    .option('--rating <ampere>', 'rated current of the changeover')
+    .option('--rulebook <id>', 'rule book')
+    .option('--force', 'write over a file that is there')
+    .option('--no-input', 'ask nothing')
+    .action(async (file: string | undefined, options: Record<string, string | boolean>) =>
+      (await import('#cli/commands/new.ts')).newFile(file, options),
+    )
+  skerry
+    .command('fill')
+    .summary('readings from a CSV file into an install file')
+    .description(
+      'Writes readings into an install file; everything else stays byte for byte. Columns: path,value (readings.circuits.K1.loop.grid,0.55 ohm) or subject,reading,state,value (K1,loop,grid,0.55 ohm).',
+    )
+    .argument('<file>', 'an install file')
+    .argument('<readings>', 'a CSV file with a head line')
+    .option('-n, --dry-run', 'show what would change')
+    .action(async (file: string, readings: string, options: { dryRun?: true }) =>
+      (await import('#cli/commands/fill.ts')).fill(file, readings, options),
+    )
+  skerry
+    .command('diff')
+    .summary('what changed between two files, by subject and value, and which verdicts flipped')
+    .argument('<before>', 'an install file')
+    .argument('<after>', 'an install file')
+    .option('-f, --format <name>', 'text or json', 'text')
+    .action(async (before: string, after: string, options: { format: string }) =>
+      (await import('#cli/commands/diff.ts')).diff(before, after, options),
+    )
+  for (const [name, summary] of [
+    ['render', 'the report as a draft PDF'],
+    ['fieldsheet', 'a sheet for the site: each test point, its limit, a box'],
+  ] as const) {
+    skerry
+      .command(name)
+      .summary(summary)
+      .argument('<file>', 'an install file')
+      .requiredOption('-o, --output <file>', 'the PDF to write')
+      .option('--rulebook <folder>', 'a rule book of your own')
+      .action(async (file: string, options: { output: string; rulebook?: string }) =>
+        (await import('#cli/commands/render.ts')).render(name, file, options),
+      )
+  }
+  skerry
+    .command('schema')
+    .summary('print the JSON Schema of the install file')
+    .option('--draft-07', 'the twin for editors')
+    .action(async (options: { draft07?: true }) => (await import('#cli/commands/schema.ts')).schema(options))
+  skerry
+    .command('completion')
+    .summary('print a script that completes commands in a shell')
+    .argument('<shell>', 'bash, zsh or fish')
+    .action(async (shell: string) => (await import('#cli/commands/completion.ts')).completion(shell, skerry))
+}

@@ -1,0 +1,53 @@
+import { exists, filesBelow, isFolder } from './io.ts'
+
+/** The files that the words on the command line mean, and the words that mean none. */
+export interface Selection {
+  readonly files: readonly string[]
+  readonly unmatched: readonly string[]
+}
+
+const MAGIC = /[*?[\]{}]/
+
+/** A glob as a regular expression: `**`, `*`, `?`, `[abc]` and `{a,b}`. */
+export function globPattern(glob: string): RegExp {
+  const source = glob.replace(/\*\*\/?|\*|\?|\{[^{}]*\}|[.+^$()|\\]/g, (part) => {
+    if (part === '**/') return '(?:[^/]+/)*'
+    if (part === '**') return '.*'
+    if (part === '*') return '[^/]*'
+    if (part === '?') return '[^/]'
+    if (part.startsWith('{'))
+      return `(?:${part
+        .slice(1, -1)
+        .split(',')
+        .map((choice) => choice.replace(/[.+^$()|\\*?]/g, '\\$&'))
+        .join('|')})`
+    return `\\${part}`
+  })
+  return new RegExp(`^${source}$`)
+}
+
+/** The folder above the first part of a glob that matches more than itself. */
+function rootOf(glob: string): string {
+  const parts = glob.split('/')
+  const first = parts.findIndex((part) => MAGIC.test(part))
+  return parts.slice(0, first).join('/') || (glob.startsWith('/') ? '/' : '.')
+}
+
+function expand(word: string): readonly string[] {
+  if (word === '-' || (exists(word) && !isFolder(word))) return [word]
+  if (isFolder(word)) return filesBelow(word)
+  if (!MAGIC.test(word)) return []
+  const root = rootOf(word)
+  if (!isFolder(root)) return []
+  const pattern = globPattern(word.replace(/^\.\//, ''))
+  return filesBelow(root, (path) => pattern.test(path))
+}
+
+/** Expands files, folders and globs, each file once and in the order of the words. */
+export function select(words: readonly string[]): Selection {
+  const found = words.map((word) => [word, expand(word)] as const)
+  return {
+    files: [...new Set(found.flatMap(([, files]) => files))],
+    unmatched: found.filter(([, files]) => files.length === 0).map(([word]) => word),
+  }
+}

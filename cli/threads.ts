@@ -1,0 +1,77 @@
+import { availableParallelism } from 'node:os'
+import { parentPort, Worker, workerData } from 'node:worker_threads'
+import { readText } from './io.ts'
+import { checkFile, type FileResult, unopened } from './result.ts'
+import { shippedShelf } from './shelf.ts'
+
+/** The word that tells the bundle to work in a thread. */
+export const THREAD = '--thread'
+
+interface Task {
+  readonly all: boolean
+}
+
+/** What a helper is handed at a time: enough to keep it busy, few enough that nobody waits for the last one. */
+const PORTION = 16
+const MOST_THREADS = 8
+
+interface Portion {
+  readonly start: number
+  readonly files: readonly string[]
+}
+interface Done {
+  readonly start: number
+  readonly results: readonly FileResult[]
+}
+
+/** The other end: checks what it is handed until nothing comes. */
+export function workInThread(): void {
+  const shelf = shippedShelf()
+  const { all } = workerData as Task
+  const checked = (file: string): FileResult | Promise<FileResult> => {
+    const text = readText(file)
+    return text.ok ? checkFile(file, text.text, { all, shelf }) : unopened(file, text.message)
+  }
+  parentPort?.on('message', ({ start, files }: Portion) => {
+    void Promise.all(files.map(checked)).then((results) => parentPort?.postMessage({ start, results } satisfies Done))
+  })
+}
+
+/** Checks many files in several threads, this one only handing out and collecting; results in the order of the files. */
+export function checkInThreads(
+  files: readonly string[],
+  task: Task,
+  tell: (done: number) => void,
+): Promise<readonly FileResult[]> {
+  const portions: Portion[] = []
+  for (let start = 0; start < files.length; start += PORTION)
+    portions.push({ start, files: files.slice(start, start + PORTION) })
+  const found = new Array<FileResult>(files.length)
+  const count = Math.min(MOST_THREADS, availableParallelism(), portions.length)
+  let [next, done] = [0, 0]
+  return new Promise((resolve, reject) => {
+    const workers = Array.from(
+      { length: count },
+      () => new Worker(process.argv[1] ?? '', { workerData: task, argv: [THREAD] }),
+    )
+    const hand = (worker: Worker): void => {
+      const portion = portions[next]
+      next += 1
+      if (portion) worker.postMessage(portion)
+      else void worker.terminate()
+    }
+    for (const worker of workers) {
+      worker.on('error', reject)
+      worker.on('message', ({ start, results }: Done) => {
+        results.forEach((result, index) => {
+          found[start + index] = result
+        })
+        done += results.length
+        tell(done)
+        if (done === files.length) resolve(found)
+        hand(worker)
+      })
+      hand(worker)
+    }
+  })
+}

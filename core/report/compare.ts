@@ -1,0 +1,85 @@
+import type { Judged } from '#core/engine.ts'
+import type { Sheet, SheetValue, State, Verdict } from '#core/glossary.ts'
+import { fieldsOf } from '#core/sheets/plans.ts'
+
+/** A value that differs between two files. */
+export interface ValueChange {
+  readonly subject: string
+  readonly state: State | null
+  readonly name: string
+  readonly unit: string
+  readonly before: SheetValue | undefined
+  readonly after: SheetValue | undefined
+}
+
+/** A verdict that differs between two files. */
+export interface VerdictChange {
+  readonly rule: string
+  readonly subject: string
+  readonly state: State | null
+  readonly before: Verdict | undefined
+  readonly after: Verdict | undefined
+}
+
+/** What differs between two files, by meaning: layout, order of keys and spelling of units do not count. */
+export interface Comparison {
+  readonly verdicts: readonly VerdictChange[]
+  readonly values: readonly ValueChange[]
+}
+
+const same = (a: unknown, b: unknown): boolean => JSON.stringify(a) === JSON.stringify(b)
+
+function changesIn(
+  subject: Sheet,
+  state: State | null,
+  before: Sheet['values'] = {},
+  after: Sheet['values'] = {},
+): ValueChange[] {
+  const fields = fieldsOf(subject.subject)
+  const names = [...new Set([...Object.keys(before), ...Object.keys(after)])]
+  return names
+    .filter((name) => !same(before[name], after[name]))
+    .map((name) => ({
+      subject: subject.id,
+      state,
+      name,
+      unit: fields.get(name)?.unit ?? '',
+      before: before[name],
+      after: after[name],
+    }))
+}
+
+function sheetChanges(before: Sheet | undefined, after: Sheet | undefined): ValueChange[] {
+  const either = after ?? before
+  if (!either) return []
+  return [
+    ...changesIn(either, null, before?.values, after?.values),
+    ...changesIn(either, 'grid', before?.inState.grid, after?.inState.grid),
+    ...changesIn(either, 'island', before?.inState.island, after?.inState.island),
+  ]
+}
+
+function verdictChanges(before: Judged, after: Judged): VerdictChange[] {
+  const key = ({ rule, subject, state }: Pick<VerdictChange, 'rule' | 'subject' | 'state'>): string =>
+    `${rule}\n${subject}\n${state ?? ''}`
+  const old = new Map(before.findings.map((finding) => [key(finding), finding]))
+  const made = new Map(after.findings.map((finding) => [key(finding), finding]))
+  return [...new Set([...old.keys(), ...made.keys()])].flatMap((name) => {
+    const [was, is] = [old.get(name), made.get(name)]
+    const either = is ?? was
+    if (!either || was?.verdict === is?.verdict) return []
+    return [
+      { rule: either.rule, subject: either.subject, state: either.state, before: was?.verdict, after: is?.verdict },
+    ]
+  })
+}
+
+/** Compares two judged files by subject, value and verdict. */
+export function compare(before: Judged, after: Judged): Comparison {
+  const [old, made] = [before, after].map(({ sheets }) => new Map(sheets.map((sheet) => [sheet.id, sheet])))
+  const ids = [...new Set([...(old?.keys() ?? []), ...(made?.keys() ?? [])])]
+  return {
+    verdicts: verdictChanges(before, after),
+    values: ids.flatMap((id) => sheetChanges(old?.get(id), made?.get(id))),
+  }
+}

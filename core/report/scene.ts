@@ -1,0 +1,55 @@
+import type { Judged } from '#core/engine.ts'
+import type { Sheet, SheetValue, State } from '#core/glossary.ts'
+import type { Install } from '#core/install.ts'
+import type { Scene } from '#core/quantities/quantity.ts'
+import type { Topology } from '#core/topology/topology.ts'
+import { Verdicts } from './verdicts.ts'
+
+/** What a report is told beside the judged file. */
+export interface ReportContext {
+  /** Name of the file, without folders. */
+  readonly file: string
+  /** SHA-256 of its text, in hex. */
+  readonly hash: string
+  /** Whether the report is not issued yet. */
+  readonly draft: boolean
+}
+
+/** Everything that the sections draw on. */
+export interface ReportScene {
+  readonly judged: Judged
+  readonly install: Install
+  readonly topology: Topology
+  readonly verdicts: Verdicts
+  readonly context: ReportContext
+  /** For quantities that are computed for the report alone. */
+  readonly quantities: Scene
+  readonly sheet: (id: string) => Sheet | undefined
+  /** A value of a sheet, of the state where it holds in one. */
+  readonly value: (id: string, name: string, state?: State) => SheetValue | undefined
+  readonly number: (id: string, name: string, state?: State) => number | undefined
+}
+
+/** Opens a judged file for a report. */
+export function reportScene(judged: Judged, context: ReportContext): ReportScene {
+  const { install, topology, sheets, book } = judged
+  const byId = new Map(sheets.map((sheet) => [sheet.id, sheet]))
+  const value: ReportScene['value'] = (id, name, state) => {
+    const sheet = byId.get(id)
+    return (state && sheet?.inState[state][name]) ?? sheet?.values[name]
+  }
+  return {
+    judged,
+    install,
+    topology,
+    verdicts: new Verdicts(judged),
+    context,
+    quantities: { install, topology, parameters: book.parameters },
+    sheet: (id) => byId.get(id),
+    value,
+    number: (id, name, state) => {
+      const found = value(id, name, state)
+      return typeof found === 'number' ? found : undefined
+    },
+  }
+}

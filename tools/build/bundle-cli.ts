@@ -1,0 +1,146 @@
+import { spawnSync } from 'node:child_process'
+import {
+  chmodSync,
+  copyFileSync,
+  existsSync,
+  mkdirSync,
+  readFileSync,
+  rmSync,
+  symlinkSync,
+  writeFileSync,
+} from 'node:fs'
+import { basename } from 'node:path'
+import { type BuildOptions, build, type Plugin } from 'esbuild'
+import schema from '#core/generated/install-schema.js'
+import pages from '#core/generated/rule-pages.js'
+import { copyFonts } from './fonts.ts'
+
+const PROJECT = new URL('../../', import.meta.url).pathname
+const DIST = `${PROJECT}dist`
+
+const SPREAD = '...DEFAULT_PARSER_OPTIONS,'
+/** The YAML parser builds its state by spreading two objects, so that no two of its states look alike to the engine. */
+const PLAIN_STATE = "filename: '', maxDepth: 100,"
+
+/** Swaps a spread in the YAML parser for plain properties, and stops the build when it is no longer there. */
+const plainParserState: Plugin = {
+  name: 'plain-parser-state',
+  setup(setup) {
+    setup.onLoad({ filter: /js-yaml[\\/]dist[\\/]js-yaml\.(mjs|cjs\.js)$/ }, ({ path }) => {
+      const contents = readFileSync(path, 'utf8')
+      if (!contents.includes(SPREAD))
+        throw new Error('js-yaml no longer spreads its parser options: take the replacement out of the build.')
+      return { contents: contents.replace(SPREAD, PLAIN_STATE), loader: 'js' }
+    })
+  },
+}
+
+const EAGER = "const childProcess = require('node:child_process');"
+const ON_CALL = "const childProcess = { spawn: (...given) => require('node:child_process').spawn(...given) };"
+
+/** The command parser loads what starts other programs, which Skerry never does, at every start. */
+const childProcessOnCall: Plugin = {
+  name: 'child-process-on-call',
+  setup(setup) {
+    setup.onLoad({ filter: /commander[\\/]lib[\\/]command\.js$/ }, ({ path }) => {
+      const contents = readFileSync(path, 'utf8')
+      if (!contents.includes(EAGER))
+        throw new Error('commander no longer loads child_process as it did: take the replacement out of the build.')
+      return { contents: contents.replace(EAGER, ON_CALL), loader: 'js' }
+    })
+  },
+}
+
+const SHARED = {
+  bundle: true,
+  platform: 'node',
+  target: 'node20',
+  format: 'cjs',
+  minify: true,
+  charset: 'ascii',
+  legalComments: 'none',
+  // Packages as CommonJS stay functions of their own, which cost nothing until they are called.
+  mainFields: ['main', 'module'],
+  define: { 'import.meta.url': '"file:///skerry.js"' },
+} as const satisfies BuildOptions
+
+const PAPER = 'skerry-paper.cjs'
+
+/** The typesetting engine stands beside the rest: it is half of the code, and serves two commands. */
+async function bundlePaper(): Promise<void> {
+  await build({
+    ...SHARED,
+    entryPoints: [`${PROJECT}core/paper/paper.ts`],
+    outfile: `${DIST}/${PAPER}`,
+    alias: { pdfkit: `${PROJECT}node_modules/pdfkit/js/pdfkit.browser.mjs` },
+  })
+}
+
+const paperBeside: Plugin = {
+  name: 'paper-beside',
+  setup(setup) {
+    setup.onResolve({ filter: /core\/paper\/paper\.ts$/ }, () => ({ path: `./${PAPER}`, external: true }))
+  },
+}
+
+/** Large texts that most runs never look at stand beside the bundle as files. */
+const TEXTS = {
+  'rule-pages.js': { file: 'rule-pages.json', text: () => JSON.stringify(pages()), read: 'JSON.parse(TEXT)' },
+  'install-schema.js': { file: 'install.schema.json', text: () => schema(), read: 'TEXT' },
+} as const
+
+const textsBeside: Plugin = {
+  name: 'texts-beside',
+  setup(setup) {
+    setup.onLoad({ filter: /core[\\/]generated[\\/](rule-pages|install-schema)\.js$/ }, ({ path }) => {
+      const { file, text, read } = TEXTS[basename(path) as keyof typeof TEXTS]
+      writeFileSync(`${DIST}/${file}`, text())
+      const call = `require('node:fs').readFileSync(__dirname + '/${file}', 'utf8')`
+      return { contents: `export default () => ${read.replace('TEXT', call)}`, loader: 'js' }
+    })
+  },
+}
+
+async function bundle(): Promise<void> {
+  await build({
+    ...SHARED,
+    entryPoints: [`${PROJECT}cli/launch.ts`],
+    outfile: `${DIST}/skerry-main.cjs`,
+    // The launcher calls the whole bundle as one function, so it need not copy it to put a head before it.
+    banner: { js: '(function (exports, require, module, __filename, __dirname) {' },
+    footer: { js: '})' },
+    plugins: [plainParserState, childProcessOnCall, paperBeside, textsBeside],
+  })
+}
+
+/** Runs a real check so that what V8 compiles for it is what the cache holds. */
+function warmCache(): void {
+  const run = spawnSync(
+    process.execPath,
+    [`${DIST}/skerry.cjs`, 'check', `${PROJECT}examples/alder-mill-bakery.skerry.yaml`],
+    {
+      env: { ...process.env, SKERRY_MAKE_CACHE: '1' },
+      encoding: 'utf8',
+    },
+  )
+  if (run.status !== 0 && run.status !== 1) throw new Error(`The bundle does not run:\n${run.stderr}`)
+}
+
+/** npx looks for commands here. */
+function link(): void {
+  const command = `${PROJECT}node_modules/.bin/skerry`
+  if (existsSync(command)) return
+  rmSync(command, { force: true })
+  symlinkSync('../../dist/skerry.cjs', command)
+}
+
+mkdirSync(DIST, { recursive: true })
+rmSync(`${DIST}/skerry-main.cache`, { force: true })
+await bundlePaper()
+await bundle()
+copyFileSync(`${PROJECT}tools/build/launcher.cjs`, `${DIST}/skerry.cjs`)
+copyFileSync(`${PROJECT}schemas/install.draft-07.schema.json`, `${DIST}/install.draft-07.schema.json`)
+chmodSync(`${DIST}/skerry.cjs`, 0o755)
+copyFonts(`${DIST}/fonts`)
+warmCache()
+link()
