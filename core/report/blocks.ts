@@ -147,5 +147,12 @@ export function table(
   caption?: string,
 ): TableBlock {
   const filled = groups.filter(({ rows }) => rows.length > 0)
-  return { kind: 'table', anchor, columns, groups: filled, span: columns.length, ...(caption !== undefined && { caption }) }
+  return {
+    kind: 'table',
+    anchor,
+    columns,
+    groups: filled,
+    span: columns.length,
+    ...(caption !== undefined && { caption }),
+  }
 }

@@ -1,7 +1,7 @@
+import type { SheetValue } from '#core/glossary.ts'
 import type { Measured } from '#core/install.ts'
 import { plainNumber } from '#core/texts/number.ts'
 import { shown } from '#core/texts/value.ts'
-import type { SheetValue } from '#core/glossary.ts'
 
 /** Holds a number and its unit on one line. */
 const JOIN = '\u00a0'

@@ -58,7 +58,8 @@ export function verdictCell(findings: readonly Finding[]): Cell {
   const words = cautions === 0 ? '' : cautions === 1 ? '1 caution' : `${cautions} cautions`
   if (binding.length === 0) return words === '' ? { text: '–' } : { text: words }
   const open = binding.filter(({ departure }) => !departure)
-  const mark = open.length < binding.length && !open.some(({ verdict }) => isFailing(verdict)) ? DEPARTS : markOf(worst(open))
+  const mark =
+    open.length < binding.length && !open.some(({ verdict }) => isFailing(verdict)) ? DEPARTS : markOf(worst(open))
   return words === '' ? { mark } : { mark, note: words }
 }
 

@@ -1,0 +1,100 @@
+import type { Citation, Finding } from '#core/glossary.ts'
+import { rulePage } from '#core/judge/pages.ts'
+import { fieldsOf } from '#core/sheets/plans.ts'
+import { labelOf, STATE_WORDS } from '#core/texts/label.ts'
+import { joined } from '#core/texts/value.ts'
+import { ruleTitle, ruleWordsFor } from '#core/texts/words.ts'
+import type { FindingBlock } from './blocks.ts'
+import { findingMark, isFailing } from './marks.ts'
+import { capital, dateText } from './print.ts'
+import type { ReportScene } from './scene.ts'
+
+/** A source as printed: `IEC 60364-4-41:2005+A1:2017, 411.4.4`. */
+export function citesText(cites: readonly Citation[]): string {
+  return cites
+    .map(({ publication, clause, note }) => {
+      const place = clause === undefined ? publication : `${publication}, ${clause}`
+      return note === undefined ? place : `${place} (${note})`
+    })
+    .join('; ')
+}
+
+/** The name under which a finding can be pointed at through all revisions. */
+export function findingAnchor({ rule, subject, state }: Pick<Finding, 'rule' | 'subject' | 'state'>): string {
+  return `rule/${rule}/${subject}/${state ?? 'always'}`
+}
+
+function missingWords({ sheet }: ReportScene, { subject, missing }: Finding): string {
+  const found = sheet(subject)
+  const fields = found ? fieldsOf(found.subject) : undefined
+  return joined(missing.map((name) => fields?.get(name)?.title ?? name))
+}
+
+function saysOf(scene: ReportScene, finding: Finding, key: string): { readonly says: string; readonly remedy: string } {
+  const sheet = scene.sheet(finding.subject)
+  const { parameters, units } = scene.judged.book
+  if (isFailing(finding.verdict) && sheet) {
+    const words = ruleWordsFor(key, { sheet, state: finding.state, parameters, units })
+    const inside = finding.verdict === 'fails' ? '' : ' The limit lies inside the uncertainty of the reading.'
+    return { says: `${words.says}${inside}`, remedy: words.do }
+  }
+  if (finding.verdict === 'not shown') return { says: `Missing: ${missingWords(scene, finding)}.`, remedy: '' }
+  if (finding.verdict === 'limited') return { says: `Not tested: ${finding.reason ?? ''}.`, remedy: '' }
+  return { says: 'It holds as read, but not over the whole uncertainty of the reading.', remedy: '' }
+}
+
+function about({ sheet }: ReportScene, { subject, state }: Finding): string {
+  const found = sheet(subject)
+  const name = capital(found ? labelOf(found) : subject)
+  return state === null ? name : `${name}, ${STATE_WORDS[state]}`
+}
+
+function departureText({ departure }: Finding): string | undefined {
+  return departure && `Departs on purpose: ${departure.reason} (agreed by ${departure.agreed_by}, ${dateText(departure.on)})`
+}
+
+function block(scene: ReportScene, finding: Finding): FindingBlock {
+  const key = scene.judged.book.rules.find(({ id }) => id === finding.rule)?.key ?? finding.rule
+  const departure = departureText(finding)
+  return {
+    anchor: findingAnchor(finding),
+    mark: findingMark(finding),
+    about: about(scene, finding),
+    subjects: [],
+    title: `${ruleTitle(key)}.`,
+    ...saysOf(scene, finding, key),
+    rule: finding.rule,
+    cites: citesText(rulePage(key).record.cites),
+    place: `line ${scene.judged.locate(finding.path).line}`,
+    ...(departure !== undefined && { departure }),
+  }
+}
+
+/** Findings one by one, in words. */
+export function findingBlocks(scene: ReportScene, findings: readonly Finding[]): FindingBlock[] {
+  return findings.map((finding) => block(scene, finding))
+}
+
+const sameWords = ({ rule, verdict, missing, reason = '' }: Finding): string => [rule, verdict, missing.join('+'), reason].join('\n')
+
+/** Findings that would say the same, once for all their subjects. */
+export function gatheredBlocks(scene: ReportScene, findings: readonly Finding[]): FindingBlock[] {
+  const groups = new Map<string, Finding[]>()
+  for (const finding of findings) {
+    const key = sameWords(finding)
+    const group = groups.get(key)
+    if (group) group.push(finding)
+    else groups.set(key, [finding])
+  }
+  return [...groups.values()].flatMap((group) => {
+    const [first] = group
+    if (!first) return []
+    if (group.length === 1) return [block(scene, first)]
+    const subjects = group.map((finding) => ({
+      anchor: findingAnchor(finding),
+      name: finding.state === null ? finding.subject : `${finding.subject} ${STATE_WORDS[finding.state]}`,
+    }))
+    const anchor = `rule/${first.rule}/${first.verdict.replaceAll(/[ ,]+/g, '-')}/${first.missing.join('+')}${first.reason ?? ''}`
+    return [{ ...block(scene, first), anchor, about: `${group.length} subjects`, subjects, place: '' }]
+  })
+}
