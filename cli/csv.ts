@@ -4,42 +4,35 @@ export interface Row {
   readonly cells: readonly string[]
 }
 
-/**
- * Reads CSV (RFC 4180): quotes around cells, doubled inside them, line ends within; a semicolon separates where the head
- * line has more of them than commas, as spreadsheets write it where the comma is the decimal sign.
- */
+/** A cell in quotes (doubled inside them), or one without, and what ends it. */
+const CELL = /(?:[ \t]*"((?:[^"]|"")*)"[ \t]*|([^,\n\r]*))(,|\r?\n|$)/y
+const CELL_BY_SEMICOLON = /(?:[ \t]*"((?:[^"]|"")*)"[ \t]*|([^;\n\r]*))(;|\r?\n|$)/y
+
+const linesIn = (text: string): number => text.split('\n').length - 1
+
+/** The pattern of a cell: semicolons separate where the head line has more of them than commas, as spreadsheets write it where the comma is the decimal sign. */
+function cellPattern(head: string): RegExp {
+  const pattern = head.split(';').length > head.split(',').length ? CELL_BY_SEMICOLON : CELL
+  return new RegExp(pattern.source, pattern.flags)
+}
+
+/** Reads CSV (RFC 4180): quotes around cells, doubled inside them, line ends within. Empty rows are left out. */
 export function parseCsv(text: string): Row[] {
   const body = text.replace(/^\uFEFF/, '')
-  const head = body.split('\n', 1)[0] ?? ''
-  const separator = head.split(';').length > head.split(',').length ? ';' : ','
+  const pattern = cellPattern(body.split('\n', 1)[0] ?? '')
   const rows: Row[] = []
-  let [cells, cell, quoted, line, began] = [[] as string[], '', false, 1, 1]
-  const endRow = (): void => {
-    cells.push(cell)
-    if (cells.some((value) => value.trim() !== ''))
-      rows.push({ line: began, cells: cells.map((value) => value.trim()) })
+  let cells: string[] = []
+  let [line, began] = [1, 1]
+  while (pattern.lastIndex < body.length) {
+    const match = pattern.exec(body)
+    if (!match) break
+    const [all, quoted, bare = '', end = ''] = match
+    cells.push((quoted === undefined ? bare : quoted.replaceAll('""', '"')).trim())
+    line += linesIn(all)
+    if (end === ',' || end === ';') continue
+    if (cells.some((cell) => cell !== '')) rows.push({ line: began, cells })
     cells = []
-    cell = ''
     began = line
   }
-  for (let at = 0; at < body.length; at += 1) {
-    const mark = body.charAt(at)
-    if (mark === '\n') line += 1
-    if (quoted) {
-      if (mark !== '"') cell += mark
-      else if (body.charAt(at + 1) === '"') {
-        cell += '"'
-        at += 1
-      } else quoted = false
-    } else if (mark === '"' && cell.trim() === '') {
-      cell = ''
-      quoted = true
-    } else if (mark === separator) {
-      cells.push(cell)
-      cell = ''
-    } else if (mark === '\n') endRow()
-    else if (mark !== '\r') cell += mark
-  }
-  if (cell !== '' || cells.length > 0) endRow()
   return rows
 }

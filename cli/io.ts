@@ -2,7 +2,6 @@
 import {
   existsSync,
   fstatSync,
-  mkdirSync,
   readdirSync,
   readFileSync,
   renameSync,
@@ -175,10 +174,6 @@ export function keepDetails(error: unknown): string {
 /** Files that the program brings along, beside its bundle. */
 export function ownFile(name: string): Uint8Array {
   return new Uint8Array(readFileSync(join(dirname(process.argv[1] ?? ''), name)))
-}
-
-export function makeFolder(path: string): void {
-  mkdirSync(path, { recursive: true })
 }
 
 /** Takes away what was being written, and ends at once. */

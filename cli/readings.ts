@@ -18,22 +18,39 @@ const mended = (value: string): string => value.replace(DECIMAL_COMMA, '$1.$2')
 
 const indexed = (part: string): string | number => (/^\d+$/.test(part) ? Number(part) : part)
 
-/** Where a subject's readings stand: circuits, residual-current devices, strings, the states themselves. */
-function placeOf(install: Install, subject: string, reading: string, state: string): Path | string {
-  const [array = '', string] = subject.split('/')
-  if (Object.hasOwn(install.circuits ?? {}, subject)) {
-    return ['readings', 'circuits', subject, reading, ...(state === '' ? [] : [state])]
-  }
-  if (Object.hasOwn(install.residual_current ?? {}, subject)) {
+/** Where the readings of one kind of subject stand, or why they cannot be placed; undefined for another kind. */
+type Placing = (install: Install, subject: string, reading: string, state: string) => Path | string | undefined
+
+const PLACINGS: readonly Placing[] = [
+  ({ circuits = {} }, subject, reading, state) =>
+    Object.hasOwn(circuits, subject)
+      ? ['readings', 'circuits', subject, reading, ...(state === '' ? [] : [state])]
+      : undefined,
+  ({ residual_current = {} }, subject, reading, state) => {
+    if (!Object.hasOwn(residual_current, subject)) return undefined
     return state === ''
       ? `${subject} is tested in each state: name grid or island.`
       : ['readings', 'residual_current', subject, state, reading]
+  },
+  ({ arrays = {} }, subject, reading) => {
+    const [array = '', string] = subject.split('/')
+    return string !== undefined && Object.hasOwn(arrays, array)
+      ? ['readings', 'arrays', array, 'strings', Number(string) - 1, reading]
+      : undefined
+  },
+  (_install, subject, reading) =>
+    subject === 'grid' || subject === 'island' ? ['readings', 'states', subject, ...reading.split('.')] : undefined,
+]
+
+function placeOf(install: Install, subject: string, reading: string, state: string): Path | string {
+  for (const placing of PLACINGS) {
+    const place = placing(install, subject, reading, state)
+    if (place !== undefined) return place
   }
-  if (string !== undefined && Object.hasOwn(install.arrays ?? {}, array))
-    return ['readings', 'arrays', array, 'strings', Number(string) - 1, reading]
-  if (subject === 'grid' || subject === 'island') return ['readings', 'states', subject, ...reading.split('.')]
-  const known = [...Object.keys(install.circuits ?? {}), ...Object.keys(install.residual_current ?? {})]
-  const hint = nearest(subject, known)
+  const hint = nearest(subject, [
+    ...Object.keys(install.circuits ?? {}),
+    ...Object.keys(install.residual_current ?? {}),
+  ])
   return `there is no circuit, residual-current device or string ${subject}${hint === undefined ? '.' : `: did you mean ${hint}?`}`
 }
 

@@ -28,7 +28,7 @@ interface Done {
 export function workInThread(): void {
   const shelf = shippedShelf()
   const { all } = workerData as Task
-  const checked = (file: string): FileResult | Promise<FileResult> => {
+  const checked = async (file: string): Promise<FileResult> => {
     const text = readText(file)
     return text.ok ? checkFile(file, text.text, { all, shelf }) : unopened(file, text.message)
   }

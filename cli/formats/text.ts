@@ -42,7 +42,7 @@ function excerpt({ line, range }: ShownFinding, width: number, ink: Ink): string
   if (line.trim() === '') return []
   const room = Math.max(30, width - 10)
   const from = range.column > room - 10 ? range.column - Math.floor(room / 2) : 0
-  const shown = line.slice(from, from + room)
+  const shown = `${from > 0 ? '…' : ''}${line.slice(from > 0 ? from + 1 : from, from + room)}${line.length > from + room ? '…' : ''}`
   const length = range.endLine === range.line ? Math.max(1, range.endColumn - range.column) : 1
   const at = range.column - 1 - from
   const marks = '‾'.repeat(Math.max(1, Math.min(length, shown.length - at)))
@@ -93,19 +93,37 @@ function open(findings: readonly ShownFinding[], scene: FormatScene, ink: Ink): 
   )
 }
 
-function summary({ counts, outcome, book, findings }: FileResult, ink: Ink): string {
-  const parts = (Object.entries(counts) as [Verdict, number][])
-    .filter(([verdict, count]) => count > 0 && verdict !== 'not applicable')
-    .map(([verdict, count]) => `${count} ${verdict}`)
-  const by = book === null ? 'not judged: mend the file first' : `rule book ${book.id} ${book.version}`
-  const stop = findings.some(({ departure }) => departure) ? '; departures wait for the reviewer' : ''
-  const words = {
-    meets: 'Nothing fails.',
-    incomplete: 'Nothing fails; not everything is shown.',
-    fails: 'It cannot be issued as it stands.',
-    unreadable: 'It cannot be read.',
-  }
-  return `${ink.strong(words[outcome])} ${book === null ? by : `${parts.join(', ')} (${by}${stop})`}`
+const counted = (count: number, one: string, many: string): string[] =>
+  count === 0 ? [] : [`${count} ${count === 1 ? one : many}`]
+
+/** What a file came to, in numbers: failures apart from cautions and notes. */
+function tally({ counts, findings }: FileResult): string {
+  const of = (severity: Severity): number =>
+    findings.filter(
+      (finding) => finding.verdict.startsWith('fails') && finding.severity === severity && !finding.departure,
+    ).length
+  return [
+    ...counted(of('failure'), 'failure', 'failures'),
+    ...counted(of('caution'), 'caution', 'cautions'),
+    ...counted(of('note'), 'note', 'notes'),
+    ...counted(counts['not shown'], 'not shown', 'not shown'),
+    ...counted(counts.limited, 'limited', 'limited'),
+    ...counted(counts.meets + counts['meets, inside the uncertainty'], 'met', 'met'),
+  ].join(', ')
+}
+
+const CONCLUSIONS = {
+  meets: 'Nothing fails.',
+  incomplete: 'Nothing fails; not everything is shown.',
+  fails: 'It cannot be issued as it stands.',
+  unreadable: 'It cannot be read.',
+} as const
+
+function summary(result: FileResult, ink: Ink): string {
+  const { outcome, book, findings } = result
+  const departing = findings.some(({ departure }) => departure) ? '; departures wait for the reviewer' : ''
+  const basis = book === null ? 'not judged: mend the file first' : `rule book ${book.id} ${book.version}${departing}`
+  return `${ink.strong(CONCLUSIONS[outcome])} ${tally(result)} (${basis})`
 }
 
 function fileBlock(result: FileResult, scene: FormatScene, ink: Ink): string {
@@ -122,8 +140,7 @@ function fileBlock(result: FileResult, scene: FormatScene, ink: Ink): string {
       scene,
       ink,
     ),
-    `${file}: ${summary(result, ink)}`,
-    '',
+    `${file}: ${summary(result, ink)}\n`,
   ]
     .filter((part, index) => part !== '' || index === 1)
     .join('\n')

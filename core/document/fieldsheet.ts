@@ -244,11 +244,19 @@ export function fieldsheetModel(judged: Judged): readonly Section[] {
           table: {
             caption: 'Who, when, with what',
             columns: [
-              { title: 'Tested by', width: '34%', look: '' },
-              { title: 'Date', width: '22%', look: '' },
-              { title: 'Instrument and serial number', width: '44%', look: '' },
+              { title: '', width: '13%', look: '' },
+              { title: 'Name', width: '27%', look: '' },
+              { title: 'Date', width: '20%', look: '' },
+              { title: 'Instrument and serial number', width: '40%', look: '' },
             ],
-            rows: [{ anchor: 'cautions/who/row', head: ' ', cells: [{ svg: BOX }, { svg: BOX }], look: '' }],
+            rows: [
+              {
+                anchor: 'cautions/who/row',
+                head: 'Tested by',
+                cells: [{ svg: BOX }, { svg: BOX }, { svg: BOX }],
+                look: '',
+              },
+            ],
           },
         },
       ],

@@ -1,6 +1,6 @@
 import type { Judged } from '#core/engine.ts'
 import type { Sheet, SheetValue, State, Subject, Verdict } from '#core/glossary.ts'
-import { atFailureLevel, type ToldFinding } from '#core/report/told.ts'
+import type { ToldFinding } from '#core/report/told.ts'
 import { fieldsOf } from '#core/sheets/plans.ts'
 import { shown } from '#core/texts/value.ts'
 
@@ -53,7 +53,3 @@ export function worstOf({ judged }: ReportScene, id: string, state?: State): Ver
   )
   return WORST.find((verdict) => own.some((finding) => finding.verdict === verdict)) ?? 'not applicable'
 }
-
-/** Whether anything on a subject stops the report. */
-export const stops = ({ told }: ReportScene, id: string): boolean =>
-  told.some((finding) => finding.subject === id && atFailureLevel(finding))

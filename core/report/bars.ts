@@ -1,5 +1,5 @@
 import { COLOUR } from '#core/paper/style.ts'
-import { group, line, rect, circle, drawing, polygon } from './draw/svg.ts'
+import { circle, drawing, group, line, polygon, rect } from './draw/svg.ts'
 
 /** A reading held against a limit that it may not exceed. */
 export interface LimitBar {

@@ -30,8 +30,12 @@ function grid({ hours, usable }: IslandBudget, { x, y }: Axes): string {
   return [
     ...marks.map((hour) => line(x(hour), TOP, x(hour), BOTTOM, { stroke: COLOUR.hairline, 'stroke-width': 0.4 })),
     ...marks.map((hour) => text(x(hour), BOTTOM + 12, `${hour} h`, { ...LABEL, 'text-anchor': 'middle' })),
-    ...levels.map((energy) => text(LEFT - 6, y(energy) + 3, rounded(energy / 1000, 1), { ...LABEL, 'text-anchor': 'end' })),
-    ...levels.map((energy) => line(LEFT, y(energy), RIGHT, y(energy), { stroke: COLOUR.hairline, 'stroke-width': 0.4 })),
+    ...levels.map((energy) =>
+      text(LEFT - 6, y(energy) + 3, rounded(energy / 1000, 1), { ...LABEL, 'text-anchor': 'end' }),
+    ),
+    ...levels.map((energy) =>
+      line(LEFT, y(energy), RIGHT, y(energy), { stroke: COLOUR.hairline, 'stroke-width': 0.4 }),
+    ),
     text(LEFT - 6, TOP - 10, 'kWh', { ...LABEL, 'text-anchor': 'end' }),
     line(LEFT, BOTTOM, RIGHT, BOTTOM, { stroke: COLOUR.rule, 'stroke-width': 0.9 }),
   ].join('')
@@ -43,11 +47,18 @@ function sunHill({ sun }: IslandBudget, { x }: Axes): string {
   if (most === 0) return ''
   const height = (power: number) => BOTTOM - (power / most) * ((BOTTOM - TOP) / 3)
   const points = sun.flatMap((power, hour) => [x(hour + 0.5), height(power)])
-  return polygon([x(0), BOTTOM, ...points, x(sun.length), BOTTOM], { fill: COLOUR.lampTint, stroke: COLOUR.lamp, 'stroke-width': 0.5 })
+  return polygon([x(0), BOTTOM, ...points, x(sun.length), BOTTOM], {
+    fill: COLOUR.lampTint,
+    stroke: COLOUR.lamp,
+    'stroke-width': 0.5,
+  })
 }
 
 const course = (charge: readonly number[], { x, y }: Axes, look: Readonly<Record<string, string | number>>): string =>
-  polyline(charge.flatMap((energy, hour) => [x(hour), y(energy)]), { fill: 'none', ...look })
+  polyline(
+    charge.flatMap((energy, hour) => [x(hour), y(energy)]),
+    { fill: 'none', ...look },
+  )
 
 function key(entries: readonly (readonly [string, Readonly<Record<string, string | number>>])[]): string {
   let at = LEFT
@@ -79,7 +90,13 @@ export function budgetCurve(budget: IslandBudget): string {
     ...(mustRun ? [course(mustRun.charge, axes, least)] : []),
     ...(withSun ? [course(withSun.charge, axes, lit)] : []),
     course(withoutSun.charge, axes, dark),
-    lasts === undefined ? '' : text(axes.x(lasts) + 5, axes.y(0) - 5, `empty after ${hoursText(lasts)}`, { 'font-size': 8.5, 'font-weight': 500, fill: COLOUR.ink }),
+    lasts === undefined
+      ? ''
+      : text(axes.x(lasts) + 5, axes.y(0) - 5, `empty after ${hoursText(lasts)}`, {
+          'font-size': 8.5,
+          'font-weight': 500,
+          fill: COLOUR.ink,
+        }),
     key([
       ['without sun', dark],
       ...(withSun ? [['clear sky', lit] as const] : []),

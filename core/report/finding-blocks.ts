@@ -50,7 +50,9 @@ function about({ sheet }: ReportScene, { subject, state }: Finding): string {
 }
 
 function departureText({ departure }: Finding): string | undefined {
-  return departure && `Departs on purpose: ${departure.reason} (agreed by ${departure.agreed_by}, ${dateText(departure.on)})`
+  return (
+    departure && `Departs on purpose: ${departure.reason} (agreed by ${departure.agreed_by}, ${dateText(departure.on)})`
+  )
 }
 
 function block(scene: ReportScene, finding: Finding): FindingBlock {
@@ -75,7 +77,8 @@ export function findingBlocks(scene: ReportScene, findings: readonly Finding[]):
   return findings.map((finding) => block(scene, finding))
 }
 
-const sameWords = ({ rule, verdict, missing, reason = '' }: Finding): string => [rule, verdict, missing.join('+'), reason].join('\n')
+const sameWords = ({ rule, verdict, missing, reason = '' }: Finding): string =>
+  [rule, verdict, missing.join('+'), reason].join('\n')
 
 /** Findings that would say the same, once for all their subjects. */
 export function gatheredBlocks(scene: ReportScene, findings: readonly Finding[]): FindingBlock[] {

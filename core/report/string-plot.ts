@@ -22,7 +22,13 @@ function row(scene: ReportScene, id: string, index: number): string {
   return [
     line(LEFT, y, RIGHT, y, { stroke: COLOUR.hairline, 'stroke-width': 0.4 }),
     text(LEFT - 6, y + 3, id, { 'text-anchor': 'end', 'font-size': 8.5, fill: COLOUR.ink }),
-    current === undefined ? '' : polygon([x, y - 3.6, x + 3.6, y, x, y + 3.6, x - 3.6, y], { fill: 'none', stroke: COLOUR.ink, 'stroke-width': 1 }),
+    current === undefined
+      ? ''
+      : polygon([x, y - 3.6, x + 3.6, y, x, y + 3.6, x - 3.6, y], {
+          fill: 'none',
+          stroke: COLOUR.ink,
+          'stroke-width': 1,
+        }),
     voltage === undefined ? '' : circle(place(voltage), y, 2.8, { fill: COLOUR.ink }),
   ].join('')
 }
@@ -38,11 +44,16 @@ export function stringPlot(scene: ReportScene, arrayId: string, count: number): 
   const band = scene.judged.book.parameters.string_spread
   const bottom = TOP + read.length * ROW
   const ticks = [-10, -5, 0, 5, 10].map((percent) =>
-    text(place(percent), bottom + 11, percent === 0 ? 'as the datasheet' : `${percent > 0 ? '+' : '−'}${Math.abs(percent)} %`, {
-      'text-anchor': 'middle',
-      'font-size': 8,
-      fill: COLOUR.muted,
-    }),
+    text(
+      place(percent),
+      bottom + 11,
+      percent === 0 ? 'as the datasheet' : `${percent > 0 ? '+' : '−'}${Math.abs(percent)} %`,
+      {
+        'text-anchor': 'middle',
+        'font-size': 8,
+        fill: COLOUR.muted,
+      },
+    ),
   )
   const label = `Strings of ${arrayId}: deviation of voltage and current from the datasheet in %`
   return drawing(520, bottom + 28, label, [
@@ -52,7 +63,11 @@ export function stringPlot(scene: ReportScene, arrayId: string, count: number): 
     ...ticks,
     circle(LEFT + 4, 8, 2.8, { fill: COLOUR.ink }),
     text(LEFT + 11, 11, 'voltage', { 'font-size': 8, fill: COLOUR.muted }),
-    polygon([LEFT + 54, 4.4, LEFT + 57.6, 8, LEFT + 54, 11.6, LEFT + 50.4, 8], { fill: 'none', stroke: COLOUR.ink, 'stroke-width': 1 }),
+    polygon([LEFT + 54, 4.4, LEFT + 57.6, 8, LEFT + 54, 11.6, LEFT + 50.4, 8], {
+      fill: 'none',
+      stroke: COLOUR.ink,
+      'stroke-width': 1,
+    }),
     text(LEFT + 62, 11, 'current', { 'font-size': 8, fill: COLOUR.muted }),
     text(RIGHT, 11, `band ± ${band} %`, { 'font-size': 8, fill: COLOUR.muted, 'text-anchor': 'end' }),
   ])

@@ -21,6 +21,12 @@ const voltageOf = (line: Line): StateMeasuredField<Install> => ({
   reading: (_, scene, state) => stateOf(scene, state)?.voltage?.[line],
 })
 
+/** Where the first defect of the inspection stands. */
+function firstWithDefect({ inspection = [] }: Install): (string | number)[] {
+  const index = inspection.findIndex(({ result }) => result === 'defect')
+  return index === -1 ? ['inspection'] : ['inspection', index, 'result']
+}
+
 function itemsWith(install: Install, result: string): string[] {
   return (install.inspection ?? []).filter((entry) => entry.result === result).map(({ item }) => item)
 }
@@ -172,7 +178,7 @@ export const installationPlan: SheetPlan<Install> = {
     entered('inspected_items', '', 'Inspection items', ['inspection'], ({ inspection }) =>
       inspection?.map(({ item }) => item),
     ),
-    entered('items_with_defect', '', 'Inspection items with a defect', ['inspection'], (install) =>
+    entered('items_with_defect', '', 'Inspection items with a defect', firstWithDefect, (install) =>
       itemsWith(install, 'defect'),
     ),
     entered('items_not_inspected', '', 'Inspection items not inspected', ['inspection'], (install) =>

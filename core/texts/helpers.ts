@@ -46,8 +46,3 @@ export function registerHelpers(engine: Templating): void {
     return show(this, String(field))
   })
 }
-
-/** Names that a template may use by themselves. */
-export const PLAIN_HELPERS: ReadonlySet<string> = new Set(['name', 'state'])
-/** Helpers that take the name of a field. */
-export const FIELD_HELPERS: ReadonlySet<string> = new Set(['show', 'list'])

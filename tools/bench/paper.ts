@@ -1,9 +1,9 @@
 // Pages a second: the example's report, against plain PDFKit text of as many pages.
 import { spawnSync } from 'node:child_process'
 import { readFileSync } from 'node:fs'
+import { renderReport } from '#core/document/render.ts'
 import { check } from '#core/engine.ts'
 import { SHIPPED_BOOKS, shippedBook } from '#core/judge/shipped.ts'
-import { renderReport } from '#core/document/render.ts'
 import { readFonts } from '#tools/build/fonts.ts'
 
 const FILE = 'examples/alder-mill-bakery.skerry.yaml'
@@ -25,12 +25,12 @@ function plain(pages: number): number {
 }
 
 const cold = performance.now()
-const first = await render()
+const first = render()
 const coldMilliseconds = performance.now() - cold
 const pages = (new TextDecoder('latin1').decode(first).match(/\/Type \/Page\b(?!s)/g) ?? []).length
 const cpu = process.cpuUsage()
 const start = performance.now()
-for (let round = 0; round < ROUNDS; round += 1) await render()
+for (let round = 0; round < ROUNDS; round += 1) render()
 const warm = (performance.now() - start) / ROUNDS
 const used = process.cpuUsage(cpu)
 const plainWarm = plain(pages)

@@ -1,4 +1,5 @@
 import { readFile } from 'node:fs/promises'
+import { generateTemplates } from '#tools/document/generate.ts'
 import { generateRules } from '#tools/rules/generate.ts'
 import { generateSchemas } from '#tools/schema/generate.ts'
 
@@ -12,7 +13,7 @@ async function present(path: string): Promise<string | undefined> {
   }
 }
 
-const wanted = { ...(await generateSchemas()), ...(await generateRules()) }
+const wanted = { ...(await generateSchemas()), ...(await generateRules()), ...(await generateTemplates()) }
 const stale: string[] = []
 for (const [path, content] of Object.entries(wanted)) {
   if ((await present(path)) !== content) stale.push(path)

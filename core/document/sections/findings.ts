@@ -76,7 +76,7 @@ export function findings({ told, file }: ReportScene): Section {
         ]
   const none: Block[] =
     blocks.length + rows.length === 0 ? [{ anchor: 'findings/none', paragraph: 'Every rule that applies is met.' }] : []
-  return { anchor: 'findings', title: 'Findings', newPage: true, blocks: [...none, ...blocks, ...table] }
+  return { anchor: 'findings', title: 'Findings', blocks: [...none, ...blocks, ...table] }
 }
 
 /** Departures: rules not met on purpose. */

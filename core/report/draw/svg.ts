@@ -59,6 +59,11 @@ export function group(look: Look, content: readonly string[]): string {
 
 /** A whole drawing; `label` says in words what it shows. `width` of the figure in % of what it stands in. */
 export function drawing(width: number, height: number, label: string, content: readonly string[], share = 100): string {
-  const head = { viewBox: `0 0 ${number(width)} ${number(height)}`, role: 'img', 'aria-label': label, width: `${share}%` }
+  const head = {
+    viewBox: `0 0 ${number(width)} ${number(height)}`,
+    role: 'img',
+    'aria-label': label,
+    width: `${share}%`,
+  }
   return `<svg${attributes(head)}>${content.join('')}</svg>`
 }

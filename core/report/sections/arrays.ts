@@ -68,17 +68,29 @@ function stringRow(scene: ReportScene, arrayId: string, index: number): Row {
   const reason = entry && 'not_tested' in entry ? entry.not_tested : undefined
   const { verdicts } = scene
   const insulation = read?.insulation
-  const at = insulation && 'value' in insulation && insulation.at !== undefined ? `at ${amount(insulation.at, 'V')}` : ''
+  const at =
+    insulation && 'value' in insulation && insulation.at !== undefined ? `at ${amount(insulation.at, 'V')}` : ''
   const cell = verdicts.cell(id, {}, `string/${id}/verdict`)
   return {
     anchor: `string/${id}`,
     ...(verdicts.fails(id, {}) && { look: 'row-fails' as const }),
     head: { text: id },
     cells: [
-      { text: readingText(read?.irradiance, 0), note: read?.cell_temperature ? `${readingText(read.cell_temperature, 0)}\u00a0°C` : '' },
-      { text: readingText(read?.voc, 0), note: `of ${rounded(scene.number(id, 'voc_expected'), 0)}`, anchor: `string/${id}/voc` },
+      {
+        text: readingText(read?.irradiance, 0),
+        note: read?.cell_temperature ? `${readingText(read.cell_temperature, 0)}\u00a0°C` : '',
+      },
+      {
+        text: readingText(read?.voc, 0),
+        note: `of ${rounded(scene.number(id, 'voc_expected'), 0)}`,
+        anchor: `string/${id}/voc`,
+      },
       { text: rounded(scene.number(id, 'voc_from_expected'), 1), anchor: `string/${id}/voc_from_expected` },
-      { text: readingText(read?.isc, 1), note: `of ${rounded(scene.number(id, 'isc_expected'), 2)}`, anchor: `string/${id}/isc` },
+      {
+        text: readingText(read?.isc, 1),
+        note: `of ${rounded(scene.number(id, 'isc_expected'), 2)}`,
+        anchor: `string/${id}/isc`,
+      },
       { text: rounded(scene.number(id, 'isc_from_expected'), 1), anchor: `string/${id}/isc_from_expected` },
       { text: readingText(insulation, 0), note: at, anchor: `string/${id}/insulation` },
       { text: read?.polarity ?? '–', anchor: `string/${id}/polarity` },
@@ -113,11 +125,25 @@ function arrayBlocks(scene: ReportScene, id: string, array: PvArray): Block[] {
       lists: [{ entries: moduleEntries(id, array) }, { entries: limitEntries(scene, id, array) }],
     },
     ...(read
-      ? [table(`array/${id}/strings`, COLUMNS, [{ rows }], `Strings of ${id}, read with ${instrument ?? 'an instrument that is not named'}`)]
+      ? [
+          table(
+            `array/${id}/strings`,
+            COLUMNS,
+            [{ rows }],
+            `Strings of ${id}, read with ${instrument ?? 'an instrument that is not named'}`,
+          ),
+        ]
       : []),
     ...(plot === undefined
       ? []
-      : [{ kind: 'figure' as const, anchor: `array/${id}/plot`, svg: plot, caption: `Strings of ${id} against the datasheet at the light and temperature of the reading.` }]),
+      : [
+          {
+            kind: 'figure' as const,
+            anchor: `array/${id}/plot`,
+            svg: plot,
+            caption: `Strings of ${id} against the datasheet at the light and temperature of the reading.`,
+          },
+        ]),
   ]
 }
 

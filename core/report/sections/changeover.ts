@@ -1,9 +1,9 @@
 import type { Block, Entry, Section } from '../blocks.ts'
 import { table } from '../blocks.ts'
 import { cableLaid, cableName } from '../devices.ts'
+import { verdictEntry } from '../entries.ts'
 import { amount, amountOr, printed } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
-import { verdictEntry } from '../entries.ts'
 
 const LINK_WORDS = {
   'closes in island': 'closes in the island',
@@ -106,7 +106,10 @@ export function changeover(scene: ReportScene): Section {
       beside: true,
       lists: [
         { title: 'Device', entries: device(scene) },
-        { title: 'Neutral and sides', entries: [...neutral(scene), verdictEntry(`changeover/${id}/verdict`, scene.verdicts.of(id))] },
+        {
+          title: 'Neutral and sides',
+          entries: [...neutral(scene), verdictEntry(`changeover/${id}/verdict`, scene.verdicts.of(id))],
+        },
       ],
     },
   ]

@@ -1,7 +1,7 @@
 import { STATES } from '#core/glossary.ts'
-import { capital } from '../print.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import type { Section } from '../blocks.ts'
+import { capital } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 import { singleLine } from '../single-line.ts'
 

@@ -4,10 +4,26 @@ import { type Section, table } from '../blocks.ts'
 import { amount, dateText } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 
-const KINDS = ['continuity', 'insulation', 'loop', 'electrode', 'residual_time', 'residual_current', 'voltage', 'frequency', 'current', 'irradiance', 'time', 'array_voltage', 'array_current'] as const satisfies readonly UncertaintyKind[]
+const KINDS = [
+  'continuity',
+  'insulation',
+  'loop',
+  'electrode',
+  'residual_time',
+  'residual_current',
+  'voltage',
+  'frequency',
+  'current',
+  'irradiance',
+  'time',
+  'array_voltage',
+  'array_current',
+] as const satisfies readonly UncertaintyKind[]
 
 function statedText({ uncertainty = {} }: Instrument): string {
-  const stated = Object.entries(uncertainty).map(([kind, percent]) => `${kind.replaceAll('_', ' ')} ±${amount(percent, '%')}`)
+  const stated = Object.entries(uncertainty).map(
+    ([kind, percent]) => `${kind.replaceAll('_', ' ')} ±${amount(percent, '%')}`,
+  )
   return stated.length === 0 ? 'none stated: the widest that the standard permits is used' : stated.join(', ')
 }
 

@@ -8,14 +8,24 @@ type Put = (name: string, term: string, detail: string, note?: string) => Entry
 
 const putter =
   (id: string): Put =>
-  (name, term, detail, note) => ({ anchor: `inverter/${id}/${name}`, term, detail, ...(note !== undefined && { note }) })
+  (name, term, detail, note) => ({
+    anchor: `inverter/${id}/${name}`,
+    term,
+    detail,
+    ...(note !== undefined && { note }),
+  })
 
 function machine(scene: ReportScene, id: string, inverter: Inverter): Entry[] {
   const put = putter(id)
   const { phases, line, rated_power, residual_monitoring, separation, residual_type_needed, fed_from } = inverter
   return [
     put('fed_from', 'Connected at', fed_from),
-    put('rated_power', 'Rated', amount(rated_power, 'VA'), phases === 3 ? 'three-phase' : `single-phase${line ? ` on ${line}` : ''}`),
+    put(
+      'rated_power',
+      'Rated',
+      amount(rated_power, 'VA'),
+      phases === 3 ? 'three-phase' : `single-phase${line ? ` on ${line}` : ''}`,
+    ),
     put('monitoring', 'Residual monitoring', residual_monitoring ?? 'not stated'),
     put('separation', 'Separation d.c. to a.c.', separation ?? 'not stated'),
     put('residual_type', 'Asks for RCD type', residual_type_needed ?? 'not stated'),
@@ -25,13 +35,36 @@ function machine(scene: ReportScene, id: string, inverter: Inverter): Entry[] {
 
 function island(scene: ReportScene, id: string, { island: source, settings }: Inverter): Entry[] {
   const put = putter(id)
-  const peak = source?.peak === undefined ? 'not stated' : `${amount(source.peak, 'VA')}${source.peak_time === undefined ? '' : ` for ${amount(source.peak_time, 's')}`}`
+  const peak =
+    source?.peak === undefined
+      ? 'not stated'
+      : `${amount(source.peak, 'VA')}${source.peak_time === undefined ? '' : ` for ${amount(source.peak_time, 's')}`}`
   return [
-    put('island', 'In the island', source ? amount(source.continuous, 'VA') : 'forms no island', source ? `peak ${peak}` : undefined),
+    put(
+      'island',
+      'In the island',
+      source ? amount(source.continuous, 'VA') : 'forms no island',
+      source ? `peak ${peak}` : undefined,
+    ),
     put('fault_current', 'Fault current', amountOr(source?.fault_current, 'A', 'not stated'), 'from the datasheet'),
-    put('shuts_down', 'Shuts down within', amountOr(source?.shuts_down_within, 's', 'not stated'), 'after a fault in the island'),
-    put('held_back', 'Charge held back', amountOr(settings?.held_back_charge, '%', 'not stated'), `low-charge alarm at ${amountOr(settings?.low_charge_alarm, '%', 'no stated charge')}`),
-    put('read_back', 'Settings', settings?.read_back === true ? 'read back from the inverter' : 'not read back', settings?.country_profile),
+    put(
+      'shuts_down',
+      'Shuts down within',
+      amountOr(source?.shuts_down_within, 's', 'not stated'),
+      'after a fault in the island',
+    ),
+    put(
+      'held_back',
+      'Charge held back',
+      amountOr(settings?.held_back_charge, '%', 'not stated'),
+      `low-charge alarm at ${amountOr(settings?.low_charge_alarm, '%', 'no stated charge')}`,
+    ),
+    put(
+      'read_back',
+      'Settings',
+      settings?.read_back === true ? 'read back from the inverter' : 'not read back',
+      settings?.country_profile,
+    ),
     verdictEntry(`inverter/${id}/verdict`, scene.verdicts.of(id)),
   ]
 }
@@ -44,7 +77,12 @@ const SETTINGS = [
   ['reconnect_after', 'Waits before it reconnects', 's', 'reconnect_after', 0],
 ] as const
 
-function settingRow(scene: ReportScene, id: string, inverter: Inverter, [name, title, unit, parameter, least]: (typeof SETTINGS)[number]): Row {
+function settingRow(
+  scene: ReportScene,
+  id: string,
+  inverter: Inverter,
+  [name, title, unit, parameter, least]: (typeof SETTINGS)[number],
+): Row {
   const set = inverter.interface_protection?.[name]
   const asked = scene.judged.book.parameters[parameter]
   const wanted = { fields: [name] }
@@ -75,7 +113,9 @@ function inverterBlocks(scene: ReportScene, id: string, inverter: Inverter): Blo
       beside: true,
       lists: [{ entries: machine(scene, id, inverter) }, { entries: island(scene, id, inverter) }],
     },
-    table(`inverter/${id}/settings`, columns, [{ rows: SETTINGS.map((setting) => settingRow(scene, id, inverter, setting)) }]),
+    table(`inverter/${id}/settings`, columns, [
+      { rows: SETTINGS.map((setting) => settingRow(scene, id, inverter, setting)) },
+    ]),
   ]
 }
 
@@ -84,6 +124,8 @@ export function inverters(scene: ReportScene): Section {
   return {
     anchor: 'inverters',
     title: 'Inverter and settings',
-    blocks: Object.entries(scene.install.inverters ?? {}).flatMap(([id, inverter]) => inverterBlocks(scene, id, inverter)),
+    blocks: Object.entries(scene.install.inverters ?? {}).flatMap(([id, inverter]) =>
+      inverterBlocks(scene, id, inverter),
+    ),
   }
 }

@@ -7,7 +7,10 @@ import { verdictEntry } from '../entries.ts'
 import { amount, amountOr, hoursText, printed } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 
-function batteryEntries(scene: ReportScene, id: string): readonly { readonly title: string; readonly entries: readonly Entry[] }[] {
+function batteryEntries(
+  scene: ReportScene,
+  id: string,
+): readonly { readonly title: string; readonly entries: readonly Entry[] }[] {
   const battery = scene.install.batteries?.[id]
   if (!battery) return []
   const hours = (name: string) => {
@@ -21,15 +24,30 @@ function batteryEntries(scene: ReportScene, id: string): readonly { readonly tit
       entries: [
         { anchor: `battery/${id}/chemistry`, term: 'Chemistry', detail: battery.chemistry },
         { anchor: `battery/${id}/place`, term: 'Place', detail: battery.place },
-        { anchor: `battery/${id}/usable`, term: 'Usable', detail: amount(battery.usable, 'Wh'), note: `${amount(battery.efficiency, '%')} efficiency to a.c.` },
-        { anchor: `battery/${id}/discharge`, term: 'Gives at most', detail: printed(scene.value(id, 'discharge_limit'), 'W') },
-        ...(ventilation === undefined ? [] : [{ anchor: `battery/${id}/ventilation`, term: 'Air needed', detail: amount(ventilation, 'm³/h') }]),
+        {
+          anchor: `battery/${id}/usable`,
+          term: 'Usable',
+          detail: amount(battery.usable, 'Wh'),
+          note: `${amount(battery.efficiency, '%')} efficiency to a.c.`,
+        },
+        {
+          anchor: `battery/${id}/discharge`,
+          term: 'Gives at most',
+          detail: printed(scene.value(id, 'discharge_limit'), 'W'),
+        },
+        ...(ventilation === undefined
+          ? []
+          : [{ anchor: `battery/${id}/ventilation`, term: 'Air needed', detail: amount(ventilation, 'm³/h') }]),
       ],
     },
     {
       title: 'Hours without sun',
       entries: [
-        { anchor: `battery/${id}/held_back_energy`, term: 'Held back', detail: printed(scene.value(id, 'held_back_energy'), 'Wh') },
+        {
+          anchor: `battery/${id}/held_back_energy`,
+          term: 'Held back',
+          detail: printed(scene.value(id, 'held_back_energy'), 'Wh'),
+        },
         { anchor: `battery/${id}/autonomy`, term: 'All backed-up loads', detail: hours('autonomy') },
         { anchor: `battery/${id}/autonomy_must_run`, term: 'What must run', detail: hours('autonomy_must_run') },
         verdictEntry(`battery/${id}/verdict`, scene.verdicts.of(id)),
@@ -61,13 +79,20 @@ function startRow(scene: ReportScene, id: string): Row[] {
   const start = scene.number(id, 'starting_current')
   const limit = scene.number(id, 'phase_peak_limit')
   if (start === undefined) return []
-  const bar = limit === undefined ? undefined : limitBar({ value: Number(start.toFixed(1)), most: limit, unit: 'A', name: 'starting current' })
+  const bar =
+    limit === undefined
+      ? undefined
+      : limitBar({ value: Number(start.toFixed(1)), most: limit, unit: 'A', name: 'starting current' })
   return [
     {
       anchor: `inverter/${id}/starting_current`,
       ...(limit !== undefined && start > limit && { look: 'row-fails' as const }),
       head: { text: `${id} largest start` },
-      cells: [{ text: amount(start, 'A') }, { text: amountOr(limit, 'A', 'not stated') }, bar === undefined ? { text: '' } : { svg: bar }],
+      cells: [
+        { text: amount(start, 'A') },
+        { text: amountOr(limit, 'A', 'not stated') },
+        bar === undefined ? { text: '' } : { svg: bar },
+      ],
     },
   ]
 }
@@ -76,7 +101,12 @@ function curve(scene: ReportScene): Block[] {
   const budget = islandBudget(scene.quantities)
   if (!budget) return []
   return [
-    { kind: 'figure', anchor: 'island/curve', svg: budgetCurve(budget), caption: 'Charge hour by hour after a grid failure at sunset.' },
+    {
+      kind: 'figure',
+      anchor: 'island/curve',
+      svg: budgetCurve(budget),
+      caption: 'Charge hour by hour after a grid failure at sunset.',
+    },
     { kind: 'prose', anchor: 'island/model', quiet: true, paragraphs: [budget.model, budget.source] },
   ]
 }
@@ -96,7 +126,14 @@ export function island(scene: ReportScene): Section {
     anchor: 'island',
     title: 'Battery and the island’s budget',
     blocks: [
-      ...batteries.map((id): Block => ({ kind: 'particulars', anchor: `battery/${id}`, beside: true, lists: batteryEntries(scene, id) })),
+      ...batteries.map(
+        (id): Block => ({
+          kind: 'particulars',
+          anchor: `battery/${id}`,
+          beside: true,
+          lists: batteryEntries(scene, id),
+        }),
+      ),
       ...(rows.length > 0 ? [table('island/lines', columns, [{ rows }], 'Power and starts, line by line')] : []),
       ...curve(scene),
     ],

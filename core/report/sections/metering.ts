@@ -1,4 +1,4 @@
-import { type Block, type Entry, type Section } from '../blocks.ts'
+import type { Block, Entry, Section } from '../blocks.ts'
 import { verdictEntry } from '../entries.ts'
 import { amount, amountOr, printed, readingWithUnit } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
@@ -9,15 +9,26 @@ function linkEntries(scene: ReportScene, id: string): Entry[] {
   const bus = `${id}/link`
   const bias = scene.number(id, 'bias_voltage')
   return [
-    { anchor: `meter/${id}/link/kind`, term: 'Link', detail: link.kind, ...(link.address !== undefined && { note: `address ${link.address}` }) },
-    { anchor: `meter/${id}/link/terminated`, term: 'Terminated at', detail: link.terminated_at?.join(' and ') ?? 'not stated' },
+    {
+      anchor: `meter/${id}/link/kind`,
+      term: 'Link',
+      detail: link.kind,
+      ...(link.address !== undefined && { note: `address ${link.address}` }),
+    },
+    {
+      anchor: `meter/${id}/link/terminated`,
+      term: 'Terminated at',
+      detail: link.terminated_at?.join(' and ') ?? 'not stated',
+    },
     {
       anchor: `meter/${id}/link/measured`,
       term: 'Across the pair',
       detail: readingWithUnit(link.measured_across, 'Ω', 0),
       note: `expected ${printed(scene.value(id, 'termination_expected'), 'Ω')}`,
     },
-    ...(bias === undefined ? [] : [{ anchor: `meter/${id}/link/bias`, term: 'Idle level', detail: amount(bias, 'mV') }]),
+    ...(bias === undefined
+      ? []
+      : [{ anchor: `meter/${id}/link/bias`, term: 'Idle level', detail: amount(bias, 'mV') }]),
     {
       anchor: `meter/${id}/link/length`,
       term: 'Length',
@@ -38,7 +49,12 @@ export function metering(scene: ReportScene): Section {
       { anchor: `meter/${id}/place`, term: 'Meter', detail: `${id}, at the ${at}` },
       { anchor: `meter/${id}/rated`, term: 'Rated current', detail: amountOr(rated_current, 'A', 'not stated') },
       { anchor: `meter/${id}/direction`, term: 'Direction', detail: direction ?? 'not stated' },
-      { anchor: `meter/${id}/neutral`, term: 'Measuring neutral', detail: neutral_reference ?? 'not stated', note: 'where it is taken from' },
+      {
+        anchor: `meter/${id}/neutral`,
+        term: 'Measuring neutral',
+        detail: neutral_reference ?? 'not stated',
+        note: 'where it is taken from',
+      },
       verdictEntry(`meter/${id}/verdict`, scene.verdicts.of(id)),
     ]
     const link = linkEntries(scene, id)

@@ -5,7 +5,10 @@ import type { ReportScene } from '../scene.ts'
 const MEANINGS = [
   ['meets', 'The rule holds at the value, and at both ends of its uncertainty.'],
   ['meets, inside the uncertainty', 'It holds at the value as read, but not over its whole uncertainty.'],
-  ['fails, inside the uncertainty', 'It does not hold at the value as read; the true value may still lie on the right side. Counts as failing.'],
+  [
+    'fails, inside the uncertainty',
+    'It does not hold at the value as read; the true value may still lie on the right side. Counts as failing.',
+  ],
   ['fails', 'It does not hold.'],
   ['not shown', 'A reading or an entry that the rule needs is missing.'],
   ['limited', 'It is missing for a stated reason, which the reviewer accepts or refuses.'],
@@ -34,7 +37,14 @@ export function method({ judged }: ReportScene): Section {
           'Only rules at the level of failure decide whether the report can be issued. Cautions and notes are opinions of the rule book, marked as such.',
         ],
       },
-      table('method/verdicts', [{ label: 'Verdict', width: 34 }, { label: 'Meaning', width: 66 }], [{ rows }]),
+      table(
+        'method/verdicts',
+        [
+          { label: 'Verdict', width: 34 },
+          { label: 'Meaning', width: 66 },
+        ],
+        [{ rows }],
+      ),
     ],
   }
 }

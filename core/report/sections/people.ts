@@ -14,7 +14,13 @@ export function people({ install, context }: ReportScene): Section {
     const person = install.people?.[role]
     if (!person) return []
     const { name, licence, company } = person
-    return [{ anchor: `person/${role}`, head: { text: title }, cells: [{ text: name }, { text: licence ?? '–' }, { text: company ?? '–' }] }]
+    return [
+      {
+        anchor: `person/${role}`,
+        head: { text: title },
+        cells: [{ text: name }, { text: licence ?? '–' }, { text: company ?? '–' }],
+      },
+    ]
   })
   const open = { text: context.draft ? 'not yet: this is a draft' : '' }
   const signing = ['reviewed by', 'authorised by'].map((role) => ({
@@ -39,14 +45,30 @@ export function people({ install, context }: ReportScene): Section {
           lists: [
             {
               entries: [
-                { anchor: 'handover/explained_to', term: 'Explained to', detail: handover.explained_to ?? 'not stated' },
-                { anchor: 'handover/on', term: 'On', detail: handover.on === undefined ? 'not stated' : dateText(handover.on) },
-                { anchor: 'handover/documents', term: 'Documents', detail: handover.documents?.join(', ') ?? 'none stated' },
+                {
+                  anchor: 'handover/explained_to',
+                  term: 'Explained to',
+                  detail: handover.explained_to ?? 'not stated',
+                },
+                {
+                  anchor: 'handover/on',
+                  term: 'On',
+                  detail: handover.on === undefined ? 'not stated' : dateText(handover.on),
+                },
+                {
+                  anchor: 'handover/documents',
+                  term: 'Documents',
+                  detail: handover.documents?.join(', ') ?? 'none stated',
+                },
               ],
             },
           ],
         },
       ]
     : []
-  return { anchor: 'people', title: 'People', blocks: [table('people/list', columns, [{ rows: [...named, ...signing] }]), ...told] }
+  return {
+    anchor: 'people',
+    title: 'People',
+    blocks: [table('people/list', columns, [{ rows: [...named, ...signing] }]), ...told],
+  }
 }

@@ -32,9 +32,21 @@ export function rulebook({ judged }: ReportScene): Section {
         `SHA-256 of the book: ${grouped(book.hash)}`,
       ],
     },
-    ...(parameters.length > 0 ? [table('rulebook/parameters', columns, [{ rows: parameters }], 'Where countries and editions differ')] : []),
+    ...(parameters.length > 0
+      ? [table('rulebook/parameters', columns, [{ rows: parameters }], 'Where countries and editions differ')]
+      : []),
     ...(off.length > 0
-      ? [table('rulebook/off', [{ label: 'Rule switched off', width: 36 }, { label: 'By', width: 16 }, { label: 'Reason', width: 48 }], [{ rows: off }])]
+      ? [
+          table(
+            'rulebook/off',
+            [
+              { label: 'Rule switched off', width: 36 },
+              { label: 'By', width: 16 },
+              { label: 'Reason', width: 48 },
+            ],
+            [{ rows: off }],
+          ),
+        ]
       : []),
   ]
   return { anchor: 'rulebook', title: 'Rule book', blocks }

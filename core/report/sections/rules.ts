@@ -39,7 +39,10 @@ export function rules({ judged }: ReportScene): Section {
     }
     chapters.set(chapter, [...(chapters.get(chapter) ?? []), row])
   }
-  const groups: RowGroup[] = [...chapters].map(([chapter, rows]) => ({ title: capital(chapter.replaceAll('-', ' ')), rows }))
+  const groups: RowGroup[] = [...chapters].map(([chapter, rows]) => ({
+    title: capital(chapter.replaceAll('-', ' ')),
+    rows,
+  }))
   const columns = [
     { label: 'Rule', width: 38 },
     { label: 'Source', width: 34 },

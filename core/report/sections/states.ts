@@ -17,20 +17,34 @@ const STATE_FIELDS = [
 ] as const
 
 function stateRows(scene: ReportScene): Row[] {
-  const row = (name: string, title: string, unit: string, text: (readings: StateReadings | undefined) => string): Row => ({
+  const row = (
+    name: string,
+    title: string,
+    unit: string,
+    text: (readings: StateReadings | undefined) => string,
+  ): Row => ({
     anchor: `state/${name}`,
-    ...(STATES.some((state) => scene.verdicts.fails('installation', { state, fields: [name] })) && { look: 'row-fails' as const }),
+    ...(STATES.some((state) => scene.verdicts.fails('installation', { state, fields: [name] })) && {
+      look: 'row-fails' as const,
+    }),
     head: { text: title },
     cells: STATES.flatMap((state) => {
       const cell = scene.verdicts.cell('installation', { state, fields: [name] }, `state/${name}/${state}/verdict`)
       const words = text(readingsIn(scene, state))
-      return [{ anchor: `state/${name}/${state}`, text: unit === '' || words === '–' ? words : `${words}\u00a0${unit}` }, cell]
+      return [
+        { anchor: `state/${name}/${state}`, text: unit === '' || words === '–' ? words : `${words}\u00a0${unit}` },
+        cell,
+      ]
     }),
   })
   const lines = LINES.slice(0, scene.install.supply.nominal.phases)
   return [
-    ...lines.map((line) => row(`voltage_${line}`, `Voltage ${line}`, 'V', (readings) => readingText(readings?.voltage?.[line], 0))),
-    ...STATE_FIELDS.map(([name, title, unit, least]) => row(name, title, unit, (readings) => readingText(readings?.[name], least))),
+    ...lines.map((line) =>
+      row(`voltage_${line}`, `Voltage ${line}`, 'V', (readings) => readingText(readings?.voltage?.[line], 0)),
+    ),
+    ...STATE_FIELDS.map(([name, title, unit, least]) =>
+      row(name, title, unit, (readings) => readingText(readings?.[name], least)),
+    ),
     ...(lines.length === 3 ? [row('rotation', 'Rotation', '', (readings) => readings?.rotation ?? '–')] : []),
   ]
 }
@@ -54,8 +68,16 @@ function transferRow(scene: ReportScene, transfer: Transfer, index: number): Row
     ...(scene.verdicts.fails(id, {}) && { look: 'row-fails' as const }),
     head: { text: `To the ${transfer.to}`, note: transfer.not_tested ?? transfer.cause ?? '' },
     cells: [
-      { text: seconds(toIsland ? transfer.dark_after : transfer.observed), anchor: `${anchor}/first`, note: toIsland ? 'until dark' : 'wait' },
-      { text: seconds(toIsland ? transfer.restored_after : transfer.gap), anchor: `${anchor}/second`, note: toIsland ? 'until restored' : 'interrupted' },
+      {
+        text: seconds(toIsland ? transfer.dark_after : transfer.observed),
+        anchor: `${anchor}/first`,
+        note: toIsland ? 'until dark' : 'wait',
+      },
+      {
+        text: seconds(toIsland ? transfer.restored_after : transfer.gap),
+        anchor: `${anchor}/second`,
+        note: toIsland ? 'until restored' : 'interrupted',
+      },
       { text: toIsland ? leftOver(transfer) : '–', anchor: `${anchor}/grid-terminals` },
       scene.verdicts.cell(id, {}, `${anchor}/verdict`),
     ],
@@ -70,8 +92,16 @@ function stepRow(scene: ReportScene, step: LoadStep, index: number): Row {
     ...(scene.verdicts.fails(id, {}) && { look: 'row-fails' as const }),
     head: { text: capital(step.step), note: step.not_tested ?? '' },
     cells: [
-      { text: readingText(step.lowest_voltage, 0), anchor: `${anchor}/voltage`, note: `≥ ${rounded(scene.number(id, 'voltage_floor'), 1)}` },
-      { text: readingText(step.lowest_frequency, 1), anchor: `${anchor}/frequency`, note: `≥ ${rounded(scene.number(id, 'frequency_floor'), 1)}` },
+      {
+        text: readingText(step.lowest_voltage, 0),
+        anchor: `${anchor}/voltage`,
+        note: `≥ ${rounded(scene.number(id, 'voltage_floor'), 1)}`,
+      },
+      {
+        text: readingText(step.lowest_frequency, 1),
+        anchor: `${anchor}/frequency`,
+        note: `≥ ${rounded(scene.number(id, 'frequency_floor'), 1)}`,
+      },
       { text: step.tripped === undefined ? '–' : step.tripped ? 'tripped' : 'held' },
       scene.verdicts.cell(id, {}, `${anchor}/verdict`),
     ],
@@ -108,10 +138,24 @@ export function states(scene: ReportScene): Section {
   const blocks: Block[] = [
     ...(found ? [table('state/readings', STATE_COLUMNS, [{ rows: stateRows(scene) }], 'Measured in each state')] : []),
     ...(transfers.length > 0
-      ? [table('transfer/list', TRANSFER_COLUMNS, [{ rows: transfers.map((transfer, index) => transferRow(scene, transfer, index)) }], 'Transfers through the changeover')]
+      ? [
+          table(
+            'transfer/list',
+            TRANSFER_COLUMNS,
+            [{ rows: transfers.map((transfer, index) => transferRow(scene, transfer, index)) }],
+            'Transfers through the changeover',
+          ),
+        ]
       : []),
     ...(load_steps.length > 0
-      ? [table('load-step/list', STEP_COLUMNS, [{ rows: load_steps.map((step, index) => stepRow(scene, step, index)) }], 'Load steps')]
+      ? [
+          table(
+            'load-step/list',
+            STEP_COLUMNS,
+            [{ rows: load_steps.map((step, index) => stepRow(scene, step, index)) }],
+            'Load steps',
+          ),
+        ]
       : []),
   ]
   return { anchor: 'states', title: 'States and transfers', blocks }
