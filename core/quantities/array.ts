@@ -1,5 +1,6 @@
 import type { PvArray } from '#core/install.ts'
 import { fuseMaximum, fuseNeeded } from './array-fuse.ts'
+import { altitudeFactor } from './array-insulation.ts'
 import { arrayInsulationQuantities } from './array-insulation-quantities.ts'
 import { highestVoltage, lowestOperatingVoltage } from './array-voltage.ts'
 import type { Family } from './quantity.ts'
@@ -92,6 +93,18 @@ export const arrayFamily: Family<Item> = {
       source: FUSE_SOURCE,
       from: ['module.isc', 'module.max_fuse', 'book.string_fuse_ceiling'],
       compute: ({ array }, { parameters }) => fuseMaximum(array, parameters.string_fuse_ceiling),
+    },
+    {
+      name: 'altitude_factor',
+      unit: '',
+      title: 'Factor from open-circuit to system voltage by altitude',
+      formula: '1.15 up to 800 m, 1.20 up to 1500 m, 1.25 above; only where the rule book goes by altitude',
+      source: 'EN 62446-1:2019, Swiss practice, as printed by a test house',
+      from: ['site.position.altitude', 'book.array_band'],
+      compute: (_item, { install, parameters }) => {
+        const altitude = install.site.position?.altitude
+        return altitude === undefined || parameters.array_band === 'factor' ? undefined : altitudeFactor(altitude)
+      },
     },
     ...arrayInsulationQuantities<Item>(),
   ],

@@ -11,7 +11,7 @@ const gases = (chemistry: Battery['chemistry']): boolean => chemistry.startsWith
  *
  * @param factor the rule book's, m³/Ah: 0.05, in older texts 0.055
  * @returns undefined for other chemistries, and where cells, capacity or gas current are not stated
- * @source IEC 62485-2, 7.2, as printed in two engineering texts
+ * @source IEC 62485-2, as printed in two engineering texts (clause 7.2 from memory)
  */
 export function ventilation(battery: Battery, factor: number): number | undefined {
   const { chemistry, cells, capacity, gas_current } = battery

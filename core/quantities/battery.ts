@@ -9,9 +9,12 @@ interface Item {
   readonly battery: Battery
 }
 
-function discharge({ into, max_discharge }: Battery, { install }: Scene): number | undefined {
-  const inverter = install.inverters?.[into]
-  return inverter && Math.min(inverter.island?.continuous ?? inverter.rated_power, max_discharge)
+/** Undefined where the battery cannot feed the island: a limit there would be held against loads that it never sees. */
+function discharge(battery: Battery, scene: Scene): number | undefined {
+  const { into, max_discharge } = battery
+  const inverter = scene.install.inverters?.[into]
+  if (!inverter || !feedsIsland(battery, scene)) return undefined
+  return Math.min(inverter.island?.continuous ?? inverter.rated_power, max_discharge)
 }
 
 function autonomyOf(
@@ -40,9 +43,11 @@ export const batteryFamily: Family<Item> = {
       name: 'discharge_limit',
       unit: 'W',
       title: 'Highest power that it gives in the island',
-      formula: 'smaller of the inverter’s continuous power and the highest discharge power',
+      formula:
+        'smaller of its inverter’s continuous power, else rated power, and the highest discharge power; ' +
+        'only where the inverter feeds the island',
       source: 'common practice',
-      from: ['max_discharge', 'inverters.island.continuous', 'inverters.rated_power'],
+      from: ['max_discharge', 'into', 'inverters.fed_from', 'inverters.island.continuous', 'inverters.rated_power'],
       compute: ({ battery }, scene) => discharge(battery, scene),
     },
     {
@@ -64,7 +69,7 @@ export const batteryFamily: Family<Item> = {
       unit: 'm³/h',
       title: 'Air that its place needs',
       formula: 'factor · n · Igas · C · 10⁻³, lead-acid only',
-      source: 'IEC 62485-2, 7.2, as printed in two engineering texts',
+      source: 'IEC 62485-2, as printed in two engineering texts (clause 7.2 from memory)',
       from: ['chemistry', 'cells', 'gas_current', 'capacity', 'book.ventilation_factor'],
       compute: ({ battery }, { parameters }) => ventilation(battery, parameters.ventilation_factor),
     },

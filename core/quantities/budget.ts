@@ -7,7 +7,7 @@ import type { Scene } from './quantity.ts'
 /** How many hours the budget looks ahead. */
 const HOURS = 48
 
-/** The island's energy, hour by hour, from a grid failure at sunset on. */
+/** The island's energy, hour by hour from a grid failure on: at sunset, where the sun is in it. */
 export interface IslandBudget {
   readonly hours: number
   /** ISO 8601, UTC; undefined where the sun is not in the budget */
@@ -30,12 +30,20 @@ export interface IslandBudget {
   readonly source: string
 }
 
-const MODEL =
-  'The grid fails at sunset with only the held-back charge left. Load: the mean of a day. ' +
-  'Sun: clear sky, rated power × irradiance / 1000 W/m², at most the inverter’s rated power; no haze, shade, heat or losses.'
-const SOURCE =
-  'Sun: suncalc 2.0.2 after Meeus. Irradiance: Meinel and Meinel (1976), air mass by Kasten and Young (1989), ' +
-  'as printed in a public course on photovoltaics. Energy: own derivation.'
+const LOAD = 'Load: the mean of a day.'
+const WITH_SUN = {
+  model:
+    `The grid fails at sunset with only the held-back charge left. ${LOAD} ` +
+    'Sun: clear sky, rated power × irradiance / 1000 W/m², at most the inverter’s rated power; ' +
+    'no cloud, haze, shade, heat or losses: no forecast.',
+  source:
+    'Sun: suncalc 2.0.2 after Meeus. Irradiance: Meinel and Meinel (1976), air mass by Kasten and Young (1989), ' +
+    'as printed in a public course on photovoltaics. Energy: own derivation.',
+}
+const WITHOUT_SUN = {
+  model: `The grid fails with only the held-back charge left. ${LOAD} The sun is not in it.`,
+  source: 'Energy: own derivation.',
+}
 
 /** All batteries that can feed the island as one; undefined where there is none, or one does not say what it holds back. */
 function storeOf(scene: Scene): Store | undefined {
@@ -76,7 +84,6 @@ export function islandBudget(scene: Scene): IslandBudget | undefined {
     withoutSun: courseOf(store, load, dark, HOURS),
     withSun: sun && courseOf(store, load, sun.powerIn, HOURS),
     mustRun: mustRunLoad > 0 ? courseOf(store, mustRunLoad, dark, HOURS) : undefined,
-    model: MODEL,
-    source: SOURCE,
+    ...(sun ? WITH_SUN : WITHOUT_SUN),
   }
 }

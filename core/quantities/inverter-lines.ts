@@ -13,7 +13,7 @@ export function linesFed({ phases, line }: Inverter, { topology }: Scene): reado
  * Highest apparent power in VA that an inverter gives on one line in the island: as stated, else an equal share of its
  * continuous power, or of its rated power where that is all that is known.
  *
- * @source an Austrian and a German trade text on backup supplies: each phase gives one third
+ * @source a German trade text on backup supplies: each phase gives one third
  */
 export function phaseLimit({ phases, rated_power, island }: Inverter): number {
   return island?.per_phase ?? (island?.continuous ?? rated_power) / phases

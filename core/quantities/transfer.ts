@@ -1,4 +1,6 @@
+import type { Measured, Transfer } from '#core/install.ts'
 import table from '#schemas/tables/changeover-classes.json' with { type: 'json' }
+import type { Family } from './quantity.ts'
 
 const CLASSES = ['uninterrupted', 'very short', 'short', 'average', 'medium'] as const
 
@@ -14,4 +16,30 @@ export type ChangeoverClass = (typeof CLASSES)[number] | 'long'
  */
 export function changeoverClass(time: number): ChangeoverClass {
   return CLASSES.find((name) => time <= table.upTo[name]) ?? 'long'
+}
+
+/** A time that was read inside the instrument's range; 0 s is one, since nothing was interrupted then. */
+function exactTime(reading: Measured | undefined): number | undefined {
+  return reading && 'value' in reading && reading.bound === undefined ? reading.value : undefined
+}
+
+/** Everything computed for a transfer between the states. */
+export const transferFamily: Family<{ readonly transfer: Transfer }> = {
+  subject: 'transfer',
+  quantities: [
+    {
+      name: 'changeover_class',
+      unit: '',
+      title: 'Class of the changeover',
+      formula:
+        'to the island by the time from the loss of the grid to restored supply, to the grid by the interruption; ' +
+        'a word, never a limit',
+      source: 'IEC 60364-5-56, as printed in OVE E 8101:2019, part 5-56; standby supplies are outside its scope',
+      from: ['to', 'restored_after', 'gap'],
+      compute: ({ transfer }) => {
+        const time = exactTime(transfer.to === 'island' ? transfer.restored_after : transfer.gap)
+        return time === undefined ? undefined : changeoverClass(time)
+      },
+    },
+  ],
 }

@@ -23,9 +23,10 @@ export function buildTopology(install: Install): { topology: Topology | undefine
   const tree = treeEntries(install)
   const all = [...tree, ...otherEntries(install)]
   const beside = referenceProblems(install, new Set(tree.map(({ id }) => id)))
-  const names = [...duplicateNames(all, install.changeover.id), ...feederProblems(all, install)]
-  // Rings can be told only once every name leads to one thing.
-  const broken = names.length > 0 ? names : loops(tree, install)
+  const duplicates = duplicateNames(all, install.changeover.id)
+  // Rings can be told only where every name means one thing.
+  const rings = duplicates.length > 0 ? [] : loops(tree, install)
+  const broken = [...duplicates, ...feederProblems(all, install), ...rings]
   if (broken.length > 0) return { topology: undefined, problems: [...broken, ...beside] }
   const { root, nodes } = growTree(tree, install)
   return { topology: topologyOf(install, root, nodes), problems: beside }

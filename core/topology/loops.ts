@@ -7,7 +7,7 @@ import { feederId } from './feeders.ts'
 /**
  * Rings in `fed_from`: things that in the end feed themselves, so that nothing connects them to the supply.
  *
- * @param entries the tree's entries, whose `fed_from` all name a feeder
+ * @param entries the tree's entries, one whose `fed_from` names nothing ends its way there
  * @returns one problem with code `loop` for each ring, at the ring's first member in the order of the file, with the whole ring in its message
  */
 export function loops(entries: readonly Entry[], install: Install): Problem[] {

@@ -147,6 +147,13 @@ describe('insulation of the array, IEC 62446-1 as printed by a Swiss test house'
     expect(quantities(item, { position }, { array_band: 'altitude' })).toMatchObject({ insulation_test_voltage: 500 })
   })
 
+  test('the factor by altitude shows only where the rule book goes by it', () => {
+    const position = { latitude: 47, longitude: 9, altitude: 1200 }
+    expect(quantities(array(10, {}), { position }, { array_band: 'altitude' }).altitude_factor).toBe(1.2)
+    expect(quantities(array(10, {}), { position }).altitude_factor).toBeUndefined()
+    expect(quantities(array(10, {}), {}, { array_band: 'altitude' }).altitude_factor).toBeUndefined()
+  })
+
   test('by altitude with none stated nothing is guessed', () => {
     const values = quantities(array(10, {}), {}, { array_band: 'altitude' })
     expect(values.system_voltage).toBeUndefined()

@@ -1,3 +1,4 @@
+import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import type { Battery, Circuit, Install, Inverter } from '#core/install.ts'
 import { batteryFamily } from '#core/quantities/battery.ts'
@@ -38,6 +39,10 @@ describe('discharge limit', () => {
     expect(quantities(lithium, installWith({ rated_power: 4000 })).discharge_limit).toBe(4000)
   })
 
+  test('a battery on the grid side gives the island nothing, so no limit is held against its loads', () => {
+    expect(quantities(lithium, installWith({ fed_from: 'MB' })).discharge_limit).toBeUndefined()
+  })
+
   test('no such inverter: nothing', () => {
     expect(quantities({ ...lithium, into: 'nowhere' }, installWith({})).discharge_limit).toBeUndefined()
   })
@@ -62,6 +67,18 @@ describe('how long it lasts', () => {
   test('a load without energy of a day counts as if it ran all day; one that states nothing does not count', () => {
     const circuits = { K1: plainCircuit('EB', { load: { current: 2 } }), K2: plainCircuit('EB') }
     expect(quantities(lithium, installWith({}, circuits)).autonomy).toBeCloseTo((3840 * 0.95) / 460, 9)
+  })
+
+  test('more charge lasts longer, more load shorter, and energy is neither made nor lost on the way', () => {
+    const amount = fc.double({ min: 1, max: 100_000, noNaN: true })
+    fc.assert(
+      fc.property(amount, fc.double({ min: 1, max: 100, noNaN: true }), amount, (energy, efficiency, load) => {
+        const hours = autonomy(energy, efficiency, load) ?? 0
+        expect((hours * load) / ((energy * efficiency) / 100)).toBeCloseTo(1, 9)
+        expect(autonomy(energy + 1, efficiency, load)).toBeGreaterThan(hours)
+        expect(autonomy(energy, efficiency, load + 1)).toBeLessThan(hours)
+      }),
+    )
   })
 
   test('loads past the changeover do not count', () => {

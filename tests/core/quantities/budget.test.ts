@@ -162,6 +162,14 @@ describe('the island’s budget', () => {
 
   test('the model and its source are stated for the report', () => {
     expect(budgetOf()?.model).toContain('clear sky')
+    expect(budgetOf()?.model).toContain('no cloud')
     expect(budgetOf()?.source).toContain('Meinel')
+  })
+
+  test('without the sun in it the words claim neither a sunset nor a clear sky', () => {
+    const budget = budgetOf({ arrays: {} })
+    expect(budget?.model).toContain('The sun is not in it')
+    expect(budget?.model).not.toMatch(/sunset|clear sky/)
+    expect(budget?.source).not.toContain('Meinel')
   })
 })

@@ -1,0 +1,204 @@
+import { LINES, type State } from '#core/glossary.ts'
+import type { Measured, ResidualTest } from '#core/install.ts'
+import { STATE_WORDS } from '#core/texts/label.ts'
+import { type Block, type Row, table } from '../blocks.ts'
+import { rowsByFeeder } from '../by-board.ts'
+import { clearedBy } from '../clearing.ts'
+import { residualName } from '../devices.ts'
+import { rounded } from '../print.ts'
+import type { ReportScene } from '../scene.ts'
+import { plainPoints } from './plain.ts'
+import { type Point, pointCell, wordCell } from './points.ts'
+
+function originPoints({ install }: ReportScene): Point[] {
+  const { loop_impedance, fault_current } = install.supply
+  return [
+    {
+      anchor: 'point/supply/loop',
+      name: 'External loop Ze at the origin',
+      unit: 'Ω',
+      limit: 'write it down',
+      measured: loop_impedance,
+      least: 2,
+    },
+    {
+      anchor: 'point/supply/fault',
+      name: 'Fault current at the origin, the larger',
+      unit: 'A',
+      limit: 'no more than any device breaks',
+      measured: fault_current,
+      least: 0,
+    },
+  ]
+}
+
+const between = (scene: ReportScene, kind: 'voltage' | 'frequency', count: number): string => {
+  const low = rounded(scene.number('installation', `${kind}_floor`), count)
+  return `${low} to ${rounded(scene.number('installation', `${kind}_ceiling`), count)}`
+}
+
+function statePoints(scene: ReportScene, state: State): Block[] {
+  const { install, topology } = scene
+  const found = install.readings?.states?.[state]
+  const reason: Measured | undefined = found && 'not_tested' in found ? found : undefined
+  const read = found && !('not_tested' in found) ? found : undefined
+  const point = (
+    name: string,
+    title: string,
+    unit: string,
+    limit: string,
+    measured: Measured | undefined,
+    least: number,
+  ): Point => ({
+    anchor: `point/state/${name}/${state}`,
+    name: title,
+    unit,
+    limit,
+    measured: measured ?? reason,
+    least,
+  })
+  const lines = LINES.slice(0, install.supply.nominal.phases)
+  const points = [
+    ...(state === 'grid' ? originPoints(scene) : []),
+    ...lines.map((line) =>
+      point(
+        `voltage_${line}`,
+        `Voltage ${line} to neutral`,
+        'V',
+        between(scene, 'voltage', 1),
+        read?.voltage?.[line],
+        0,
+      ),
+    ),
+    point('frequency', 'Frequency', 'Hz', between(scene, 'frequency', 1), read?.frequency, 1),
+    point('neutral_to_earth', 'Neutral to earth', 'V', 'near zero: one link', read?.neutral_to_earth, 1),
+    ...(state === 'island'
+      ? [
+          point(
+            'link_resistance',
+            'Link between neutral and earth',
+            'Ω',
+            `${topology.neutralEarthLinks.island.length} closed`,
+            read?.link_resistance,
+            2,
+          ),
+        ]
+      : []),
+  ]
+  return plainPoints(`point/state/${state}`, `At the ${state === 'grid' ? 'origin' : 'backed-up board'}`, points)
+}
+
+function loopRow(scene: ReportScene, id: string, serves: string, state: State): Row {
+  const limit = scene.number(id, 'loop_limit_measured')
+  const read = scene.install.readings?.circuits?.[id]
+  const skipped = read?.not_tested === undefined ? undefined : { not_tested: read.not_tested }
+  return {
+    anchor: `point/circuit/${id}/${state}`,
+    head: { text: id },
+    cells: [
+      { text: serves },
+      { text: clearedBy(scene, id, state) },
+      { text: limit === undefined ? '–' : `≤ ${rounded(limit, 2)}` },
+      { text: rounded(scene.number(id, 'loop_expected'), 2) },
+      pointCell({
+        anchor: `point/circuit/${id}/loop/${state}`,
+        name: `loop of ${id} ${STATE_WORDS[state]}`,
+        unit: 'Ω',
+        limit: '',
+        measured: read?.loop?.[state] ?? skipped,
+        least: 2,
+      }),
+    ],
+  }
+}
+
+function loops(scene: ReportScene, state: State): Block[] {
+  const groups = rowsByFeeder(scene, (id, { serves }) => loopRow(scene, id, serves, state)).map(
+    ({ title = '', rows }) => ({
+      title,
+      rows: rows.filter(({ head }) => scene.topology.live(head.text ?? '', state)),
+    }),
+  )
+  const columns = [
+    { label: 'Circuit', width: 9 },
+    { label: 'Serves', width: 25 },
+    { label: 'Cleared by', width: 18 },
+    { label: 'Limit', unit: 'Ω', width: 11, align: 'num' as const },
+    { label: 'expected', unit: 'Ω', width: 11, align: 'num' as const },
+    { label: 'Loop', unit: 'Ω', width: 26 },
+  ]
+  const block = table(`point/loop/${state}`, columns, groups, 'Fault loop at the far end of each circuit')
+  return block.groups.length > 0 ? [block] : []
+}
+
+const TIMES = [
+  ['rated', '1 × IΔ_n', 'time_limit_rated'],
+  ['five_times', '5 × IΔ_n', 'time_limit_five_times'],
+] as const
+
+function residualRow(scene: ReportScene, id: string, state: State): Row {
+  const device = scene.install.residual_current?.[id]
+  const readings = scene.install.readings?.residual_current?.[id]
+  const found =
+    readings?.[state] ?? (readings?.not_tested === undefined ? undefined : { not_tested: readings.not_tested })
+  const reason: Measured | undefined =
+    found && 'not_tested' in found ? { not_tested: String(found.not_tested) } : undefined
+  const test: ResidualTest = found && !('not_tested' in found) ? found : {}
+  const point = (name: keyof ResidualTest, unit: string, limit: string) =>
+    pointCell({
+      anchor: `point/residual/${id}/${name}/${state}`,
+      name: `${name} of ${id} ${STATE_WORDS[state]}`,
+      unit,
+      limit,
+      measured: test[name] ?? reason,
+      least: 0,
+    })
+  const ramp = `${rounded(scene.number(id, 'ramp_minimum'), 1)} to ${rounded(scene.number(id, 'ramp_maximum'), 1)}`
+  return {
+    anchor: `point/residual/${id}/${state}`,
+    head: { text: id, note: device ? residualName(device) : '' },
+    cells: [
+      point('half', 'ms', 'no trip'),
+      ...TIMES.map(([name, , limit]) => point(name, 'ms', `≤ ${rounded(scene.number(id, limit), 0)}`)),
+      point('ramp', 'mA', ramp),
+    ],
+  }
+}
+
+function residual(scene: ReportScene, state: State): Block[] {
+  const ids = Object.keys(scene.install.residual_current ?? {}).filter((id) => scene.topology.live(id, state))
+  if (ids.length === 0) return []
+  const columns = [
+    { label: 'Device', width: 16 },
+    { label: '½ IΔ_n', unit: 'ms', width: 21 },
+    ...TIMES.map(([, label]) => ({ label, unit: 'ms', width: 21 })),
+    { label: 'Ramp', unit: 'mA', width: 21 },
+  ]
+  const rows = ids.map((id) => residualRow(scene, id, state))
+  return [table(`point/residual/${state}`, columns, [{ rows }], 'Residual-current devices')]
+}
+
+function rotation({ install }: ReportScene, state: State): Block[] {
+  if (install.supply.nominal.phases !== 3) return []
+  const found = install.readings?.states?.[state]
+  const word = found && 'not_tested' in found ? found.not_tested : found?.rotation
+  const cells = [
+    { text: 'the same in both states' },
+    wordCell(`point/state/rotation/${state}`, `rotation ${STATE_WORDS[state]}`, word),
+  ]
+  const columns = [
+    { label: 'Test point', width: 38 },
+    { label: 'Limit', width: 36 },
+    { label: 'Found', width: 26 },
+  ]
+  return [
+    table(`point/rotation/${state}`, columns, [
+      { rows: [{ anchor: `point/rotation/${state}/row`, head: { text: 'Direction of rotation' }, cells }] },
+    ]),
+  ]
+}
+
+/** What is read with the supply of a state on. */
+export function livePoints(scene: ReportScene, state: State): Block[] {
+  return [...statePoints(scene, state), ...rotation(scene, state), ...residual(scene, state), ...loops(scene, state)]
+}

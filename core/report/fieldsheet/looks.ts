@@ -1,0 +1,55 @@
+import { INSPECTION_ITEMS } from '#core/sheets/inspection.ts'
+import { type Block, table } from '../blocks.ts'
+import { capital } from '../print.ts'
+import type { ReportScene } from '../scene.ts'
+import { wordCell, writingBox } from './points.ts'
+
+/** Things to look at, with the result where there is one. */
+export function looks({ install }: ReportScene): Block[] {
+  const known = new Map((install.inspection ?? []).map(({ item, result }) => [item, result]))
+  const own = [...known.keys()].filter((item) => !(INSPECTION_ITEMS as readonly string[]).includes(item))
+  const rows = [...INSPECTION_ITEMS, ...own].map((item) => ({
+    anchor: `point/inspection/${item}/row`,
+    head: { text: capital(item) },
+    cells: [
+      wordCell(`point/inspection/${item}`, `result: ${item}`, known.get(item)),
+      known.has(item) ? { text: '' } : { svg: writingBox(`note on ${item}`, 150) },
+    ],
+  }))
+  const columns = [
+    { label: 'Item', width: 36 },
+    { label: 'Good, defect, not applicable', width: 26 },
+    { label: 'Note, photo', width: 38 },
+  ]
+  return [table('point/inspection', columns, [{ rows }])]
+}
+
+/** Who tests, when, with what. */
+export function whoAndWhen({ install }: ReportScene): Block {
+  const named = Object.entries(install.instruments ?? {}).map(
+    ([id, { kind, serial }]) => `${id} ${kind}, serial ${serial}`,
+  )
+  const tester = install.people?.tested_by?.name
+  const cells = [
+    ['date', 'Date', install.report.inspected?.from],
+    ['name', 'Tested by', tester],
+    ['instrument', 'Instrument, serial', named.length > 0 ? named.join('; ') : undefined],
+  ] as const
+  const rows = cells.map(([name, title, word]) => ({
+    anchor: `point/head/${name}/row`,
+    head: { text: title },
+    cells: [
+      word === undefined
+        ? { anchor: `point/head/${name}`, svg: writingBox(title, 300) }
+        : { anchor: `point/head/${name}`, text: word },
+    ],
+  }))
+  return table(
+    'point/head',
+    [
+      { label: 'On site', width: 24 },
+      { label: '', width: 76 },
+    ],
+    [{ rows }],
+  )
+}

@@ -1,0 +1,105 @@
+import type { Finding } from '#core/glossary.ts'
+import { labelOf, STATE_WORDS } from '#core/texts/label.ts'
+import { ruleTitle } from '#core/texts/words.ts'
+import { type Block, type Notice, type Row, type Section, table } from '../blocks.ts'
+import { findingMark } from '../marks.ts'
+import { capital, few } from '../print.ts'
+import type { ReportScene } from '../scene.ts'
+import type { Standing } from '../standing.ts'
+
+const count = (number: number, one: string, many: string): readonly string[] =>
+  number === 0 ? [] : [`${number} ${number === 1 ? one : many}`]
+
+function obstacles({ failing, notShown, limited, departing }: Standing): string[] {
+  const blocking = notShown.filter(({ severity }) => severity === 'failure').length
+  return [
+    ...count(failing.length, 'rule is not met.', 'rules are not met.'),
+    ...count(blocking, 'verdict lacks a reading or an entry.', 'verdicts lack a reading or an entry.'),
+    ...count(limited.length, 'limitation waits for the reviewer.', 'limitations wait for the reviewer.'),
+    ...count(departing.length, 'departure waits for the reviewer.', 'departures wait for the reviewer.'),
+  ]
+}
+
+function titleOf({ word }: Standing, items: readonly string[]): string {
+  if (word !== 'meets') return 'It cannot be issued as it stands'
+  if (items.length === 0) return 'It can be issued: nothing fails and nothing is missing'
+  return 'Nothing fails and nothing is missing; the reviewer decides on what is listed here'
+}
+
+function standingNotice(standing: Standing): Notice {
+  const items = obstacles(standing)
+  return {
+    kind: 'notice',
+    anchor: 'report/standing',
+    box: standing.word === 'fails' ? 'box-caution' : 'box-note',
+    title: titleOf(standing, items),
+    paragraphs: [],
+    items,
+  }
+}
+
+function about({ sheet }: ReportScene, { subject, state }: Finding): string {
+  const found = sheet(subject)
+  const name = capital(found ? labelOf(found) : subject)
+  return state === null ? name : `${name}, ${STATE_WORDS[state]}`
+}
+
+const short = ({ subject, state }: Finding): string =>
+  state === null ? subject : `${subject} ${STATE_WORDS[state]}`
+
+/** One line for each rule that stands in the way, its subjects together. */
+function lines(scene: ReportScene, findings: readonly Finding[]): Row[] {
+  const keys = new Map(scene.judged.book.rules.map(({ id, key }) => [id, key]))
+  const groups = new Map<string, Finding[]>()
+  for (const finding of findings) {
+    const name = `${finding.rule}/${findingMark(finding).word.replaceAll(/[ ,]+/g, '-')}`
+    const group = groups.get(name)
+    if (group) group.push(finding)
+    else groups.set(name, [finding])
+  }
+  return [...groups].flatMap(([name, group]) => {
+    const [first] = group
+    const key = first && keys.get(first.rule)
+    if (!first || key === undefined) return []
+    const where = group.length === 1 ? about(scene, first) : few(group.map(short), 8)
+    return [
+      {
+        anchor: `summary/${name}`,
+        head: { mark: findingMark(first) },
+        cells: [{ text: where }, { text: ruleTitle(key) }],
+      },
+    ]
+  })
+}
+
+const COLUMNS = [
+  { label: 'Verdict', width: 24 },
+  { label: 'Where', width: 30 },
+  { label: 'What must hold', width: 46 },
+] as const
+
+function asides({ insideUncertainty, cautions, notes }: Standing): string[] {
+  return [
+    ...count(
+      insideUncertainty.length,
+      'verdict is met as read, but not over the whole uncertainty of the reading.',
+      'verdicts are met as read, but not over the whole uncertainty of the reading.',
+    ),
+    ...count(cautions.length, 'caution for the reviewer to weigh.', 'cautions for the reviewer to weigh.'),
+    ...count(notes.length, 'note.', 'notes.'),
+  ]
+}
+
+/** What fails, what is missing, and whether the report can be issued. */
+export function summary(scene: ReportScene, standing: Standing): Section {
+  const { failing, departing, notShown, limited } = standing
+  const rows = lines(scene, [...failing, ...departing, ...notShown, ...limited])
+  const beside = asides(standing)
+  const words = `Besides: ${beside.join(' ')} Each stands in full under Findings.`
+  const blocks: Block[] = [
+    standingNotice(standing),
+    ...(rows.length > 0 ? [table('summary/list', COLUMNS, [{ rows }])] : []),
+    ...(beside.length > 0 ? [{ kind: 'prose' as const, anchor: 'summary/asides', paragraphs: [words] }] : []),
+  ]
+  return { anchor: 'summary', title: 'Summary', blocks }
+}
