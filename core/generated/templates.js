@@ -43,7 +43,7 @@ pages: {
     + "</div>\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias3,(depth0 != null ? lookupProperty(depth0,"front") : depth0),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":10,"column":9}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"each").call(alias3,(depth0 != null ? lookupProperty(depth0,"sections") : depth0),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":13,"column":9}}})) != null ? stack1 : "")
-    + "<div class=\"keep\" data-anchor=\"report/end\">\n<p class=\"muted centre\">"
+    + "<div class=\"box-tint\" data-anchor=\"report/end\">\n<p class=\"muted centre\">"
     + alias2(alias1((depth0 != null ? lookupProperty(depth0,"end") : depth0), depth0))
     + "</p>\n</div>\n";
 },"usePartial":true,"useData":true}),
@@ -90,7 +90,7 @@ pages: {
     + "</div>\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias3,(depth0 != null ? lookupProperty(depth0,"front") : depth0),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":10,"column":9}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"each").call(alias3,(depth0 != null ? lookupProperty(depth0,"sections") : depth0),{"name":"each","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":13,"column":9}}})) != null ? stack1 : "")
-    + "<div class=\"keep\" data-anchor=\"report/end\">\n<p class=\"muted centre\">"
+    + "<div class=\"box-tint\" data-anchor=\"report/end\">\n<p class=\"muted centre\">"
     + alias2(alias1((depth0 != null ? lookupProperty(depth0,"end") : depth0), depth0))
     + "</p>\n</div>\n";
 },"usePartial":true,"useData":true}),
@@ -338,7 +338,7 @@ partials: {
 
   return "<div class=\""
     + alias2(alias1((depth0 != null ? lookupProperty(depth0,"box") : depth0), depth0))
-    + "\" data-anchor=\""
+    + " keep\" data-anchor=\""
     + alias2(alias1((depth0 != null ? lookupProperty(depth0,"anchor") : depth0), depth0))
     + "\">\n"
     + ((stack1 = lookupProperty(helpers,"if").call(alias3,(depth0 != null ? lookupProperty(depth0,"title") : depth0),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":0},"end":{"line":3,"column":7}}})) != null ? stack1 : "")

@@ -43,9 +43,7 @@ export const batteryFamily: Family<Item> = {
       name: 'discharge_limit',
       unit: 'W',
       title: 'Highest power that it gives in the island',
-      formula:
-        'smaller of its inverter’s continuous power, else rated power, and the highest discharge power; ' +
-        'only where the inverter feeds the island',
+      formula: 'smaller of the inverter’s continuous power and the highest discharge power',
       source: 'common practice',
       from: ['max_discharge', 'into', 'inverters.fed_from', 'inverters.island.continuous', 'inverters.rated_power'],
       compute: ({ battery }, scene) => discharge(battery, scene),

@@ -31,7 +31,7 @@ export function courseOf(store: Store, load: number, power: (hour: number) => nu
   for (let hour = 0; hour < hours; hour += 1) {
     const surplus = power(hour) - load
     const change = surplus >= 0 ? surplus : surplus / store.efficiency
-    if (change < 0 && now + change <= 0) lasts ??= hour + now / -change
+    if (change < 0 && now + change < 0) lasts ??= hour + now / -change
     now = Math.min(store.usable, Math.max(0, now + change))
     charge.push(now)
   }

@@ -139,6 +139,25 @@ export interface Section {
   readonly blocks: readonly Block[]
 }
 
+/** Up to this many rows a group is kept in one piece. */
+const WHOLE = 8
+
+/** Groups as one table where they are small, else each as a table of its own under its title. */
+export function tables(
+  anchor: string,
+  columns: readonly Column[],
+  groups: readonly RowGroup[],
+  caption?: string,
+): TableBlock[] {
+  const filled = groups.filter(({ rows }) => rows.length > 0)
+  if (filled.length === 0) return []
+  if (filled.every(({ rows }) => rows.length <= WHOLE)) return [table(anchor, columns, filled, caption)]
+  return filled.map(({ title, rows }) => {
+    const words = [caption, title].filter((part) => part !== undefined).join(' · ')
+    return table(`${anchor}/${title ?? ''}`, columns, [{ rows }], words)
+  })
+}
+
 /** Puts a table together; `span` is its count of columns. */
 export function table(
   anchor: string,

@@ -71,6 +71,16 @@ function key(entries: readonly (readonly [string, Readonly<Record<string, string
     .join('')
 }
 
+/** When it runs empty, on a staff above the hill of the sun. */
+function empty(lasts: number, { x }: Axes): string {
+  const [at, top] = [x(lasts), BOTTOM - 60]
+  const words = `empty after ${hoursText(lasts)}`
+  return [
+    line(at, BOTTOM, at, top, { stroke: COLOUR.ink, 'stroke-width': 0.7 }),
+    text(at + 4, top + 6, words, { 'font-size': 8.5, 'font-weight': 500, fill: COLOUR.ink }),
+  ].join('')
+}
+
 /**
  * The charge of the island's batteries over two days from sunset: without sun, under a clear sky, and for what must run.
  *
@@ -90,13 +100,7 @@ export function budgetCurve(budget: IslandBudget): string {
     ...(mustRun ? [course(mustRun.charge, axes, least)] : []),
     ...(withSun ? [course(withSun.charge, axes, lit)] : []),
     course(withoutSun.charge, axes, dark),
-    lasts === undefined
-      ? ''
-      : text(axes.x(lasts) + 5, axes.y(0) - 5, `empty after ${hoursText(lasts)}`, {
-          'font-size': 8.5,
-          'font-weight': 500,
-          fill: COLOUR.ink,
-        }),
+    lasts === undefined ? '' : empty(lasts, axes),
     key([
       ['without sun', dark],
       ...(withSun ? [['clear sky', lit] as const] : []),

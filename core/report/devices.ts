@@ -1,4 +1,4 @@
-import type { Cable, Circuit, Device, ResidualProtection } from '#core/install.ts'
+import type { Cable, Device, ResidualProtection } from '#core/install.ts'
 import { amount } from './print.ts'
 
 /** `B16`, `gG 35`. */
@@ -35,9 +35,4 @@ export function cableLaid({ insulation, method, length, ambient, grouped }: Cabl
 /** `A 30 mA`, `B 300 mA S`. */
 export function residualName({ type, residual, delay }: ResidualProtection): string {
   return `${type} ${amount(residual, 'mA')}${delay === undefined ? '' : ` ${delay}`}`
-}
-
-/** A circuit's device, with the residual-current protection that is built into it. */
-export function circuitDevice({ device, residual_current }: Circuit): string {
-  return residual_current ? `${deviceName(device)} + ${residualName(residual_current)}` : deviceName(device)
 }

@@ -30,8 +30,8 @@ export function fieldsheetModel(judged: Judged): ReportModel {
     { anchor: 'sheet/dead', title: 'Dead', blocks: deadPoints(scene) },
     { anchor: 'sheet/strings', title: 'Strings, inverter off', blocks: stringPoints(scene) },
     { anchor: 'sheet/grid', title: 'On the grid', blocks: livePoints(scene, 'grid') },
-    { anchor: 'sheet/transfers', title: 'Through the changeover', blocks: transferPoints(scene) },
     { anchor: 'sheet/island', title: 'In the island', blocks: livePoints(scene, 'island') },
+    { anchor: 'sheet/transfers', title: 'Through the changeover, both ways', blocks: transferPoints(scene) },
   ]
   return {
     reference: report.reference,

@@ -67,7 +67,7 @@ function block(scene: ReportScene, finding: Finding): FindingBlock {
     ...saysOf(scene, finding, key),
     rule: finding.rule,
     cites: citesText(rulePage(key).record.cites),
-    place: `line ${scene.judged.locate(finding.path).line}`,
+    place: `file, line ${scene.judged.locate(finding.path).line}`,
     ...(departure !== undefined && { departure }),
   }
 }

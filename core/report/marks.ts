@@ -30,9 +30,19 @@ export function markOf(verdict: Verdict): Mark {
 /** A departure that the reviewer accepts or refuses. */
 export const DEPARTS: Mark = { word: 'departs on purpose', shape: 'verdict-limited' }
 
-/** A finding's verdict as printed; a departure stands in its place. */
-export function findingMark({ verdict, departure }: Pick<Finding, 'verdict' | 'departure'>): Mark {
-  return departure ? DEPARTS : markOf(verdict)
+const UNMET: Readonly<Record<'caution' | 'note', Mark>> = {
+  caution: { word: 'caution: not met', shape: 'verdict-limited' },
+  note: { word: 'note: not met', shape: 'verdict-not-applicable' },
+}
+
+/** A finding's verdict as printed; a departure stands in its place, and what is no failure is not called one. */
+export function findingMark({
+  verdict,
+  severity,
+  departure,
+}: Pick<Finding, 'verdict' | 'severity' | 'departure'>): Mark {
+  if (departure) return DEPARTS
+  return severity !== 'failure' && isFailing(verdict) ? UNMET[severity] : markOf(verdict)
 }
 
 /** Whether a verdict says that the rule is not met. */

@@ -1,17 +1,25 @@
 import type { SheetValue } from '#core/glossary.ts'
 import type { Measured } from '#core/install.ts'
-import { plainNumber } from '#core/texts/number.ts'
 import { shown } from '#core/texts/value.ts'
 
 /** Holds a number and its unit on one line. */
 const JOIN = '\u00a0'
 const THOUSANDS: ReadonlySet<string> = new Set(['A', 'W', 'Wh', 'VA'])
 
-/** A number with its unit, from 1000 on with kilo where the unit takes it: `2.1 kA`. */
-export function amount(value: number, unit: string): string {
+/** A number with so many significant digits, no needless zeros, and a true minus. */
+function digits(value: number, significant: number): string {
+  return signed(String(Number(value.toPrecision(significant))))
+}
+
+function joined(value: number, unit: string, significant: number): string {
   const kilo = THOUSANDS.has(unit) && Math.abs(value) >= 1000
   const [number, name] = kilo ? [value / 1000, `k${unit}`] : [value, unit]
-  return name === '' ? plainNumber(number) : `${plainNumber(number)}${JOIN}${name}`
+  return name === '' ? digits(number, significant) : `${digits(number, significant)}${JOIN}${name}`
+}
+
+/** A stated number with its unit, from 1000 on with kilo where the unit takes it: `2.1 kA`. */
+export function amount(value: number, unit: string): string {
+  return joined(value, unit, 4)
 }
 
 /** The same for what may not be known: `–`. */
@@ -19,10 +27,11 @@ export function amountOr(value: number | undefined, unit: string, missing = '–
   return value === undefined ? missing : amount(value, unit)
 }
 
-/** A value of a sheet as printed; `–` where there is none. */
+/** A value of a sheet as printed, computed numbers with three digits that count; `–` where there is none. */
 export function printed(value: SheetValue | undefined, unit: string): string {
   if (value === undefined) return '–'
-  return typeof value === 'number' && Number.isFinite(value) ? amount(value, unit) : shown(value, unit)
+  if (typeof value !== 'number' || !Number.isFinite(value)) return shown(value, unit)
+  return joined(value, unit, Math.abs(value) < 100 ? 3 : 4)
 }
 
 /** A number with at least so many decimals, more where it was read finer (up to four). */
@@ -78,11 +87,13 @@ export function dateText(iso: string): string {
   return `${day}${JOIN}${MONTHS[Number(month) - 1]}${JOIN}${year}`
 }
 
-/** The days of an inspection in words. */
+/** The days of an inspection in words: `12 to 13 October 2026`. */
 export function daysText(days: { readonly from: string; readonly to?: string } | undefined): string {
   if (days === undefined) return 'not yet inspected'
-  if (days.to === undefined || days.to === days.from) return dateText(days.from)
-  return `${dateText(days.from)} to ${dateText(days.to)}`
+  const { from, to = from } = days
+  if (to === from) return dateText(from)
+  const sameMonth = to.slice(0, 7) === from.slice(0, 7)
+  return `${sameMonth ? Number(from.slice(8, 10)) : dateText(from)} to ${dateText(to)}`
 }
 
 /** Hours as people say them: `7 h 18 min`. */

@@ -56,7 +56,8 @@ export function verdictCell(findings: readonly Finding[]): Cell {
   const binding = findings.filter(({ severity }) => severity === 'failure')
   const cautions = findings.filter(({ severity, verdict }) => severity === 'caution' && isFailing(verdict)).length
   const words = cautions === 0 ? '' : cautions === 1 ? '1 caution' : `${cautions} cautions`
-  if (binding.length === 0) return words === '' ? { text: '–' } : { text: words }
+  if (binding.length === 0 && words !== '') return { text: words }
+  if (findings.length === 0) return { text: '–' }
   const open = binding.filter(({ departure }) => !departure)
   const mark =
     open.length < binding.length && !open.some(({ verdict }) => isFailing(verdict)) ? DEPARTS : markOf(worst(open))

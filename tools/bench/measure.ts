@@ -30,7 +30,7 @@ export function once({ name, command, codes = [0, 1] }: Contestant, watchMemory 
   const [program = '', ...args] = command
   return new Promise((resolve, reject) => {
     const start = performance.now()
-    const child = spawn(program, args, { stdio: ['ignore', 'ignore', 'inherit'] })
+    const child = spawn(program, args, { stdio: ['ignore', 'ignore', 'ignore'] })
     let megabytes = 0
     const watch = watchMemory
       ? setInterval(() => {

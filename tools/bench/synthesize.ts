@@ -74,7 +74,7 @@ export function synthesize(circuits: number, seed: number): string {
   const rows = Array.from({ length: circuits }, (_, index) => row(index, next))
   return `# A made installation for measuring: ${circuits} circuits, number ${seed}.
 skerry: 1
-report: { reference: FM-M-${seed}, purpose: initial verification, rulebook: iec, inspected: { from: 2026-05-04 }, next_due: 2030-05-04 }
+report: { reference: FM-M-${seed}, purpose: initial verification, rulebook: iec, inspected: { from: "2026-05-04" }, next_due: "2030-05-04" }
 site:
   name: Measured House ${seed}
   address: [ Long Row ${seed}, Fennmark ]
@@ -116,7 +116,7 @@ batteries:
   BAT: { into: INV, chemistry: lithium iron phosphate, usable: 9.6 kWh, max_discharge: 5.1 kW, efficiency: 95 %, place: utility room }
 circuits:
 ${rows.map(({ design }) => design).join('')}instruments:
-  T1: { kind: multifunction installation tester, serial: "0417-A", calibrated: 2026-03-02, due: 2027-03-02 }
+  T1: { kind: multifunction installation tester, serial: "0417-A", calibrated: "2026-03-02", due: "2027-03-02" }
 readings:
   with: T1
   circuits:

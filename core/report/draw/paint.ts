@@ -5,7 +5,7 @@ import type { Topology } from '#core/topology/topology.ts'
 import { cableName, deviceName, residualName } from '../devices.ts'
 import { amount } from '../print.ts'
 import type { PartKind } from './parts.ts'
-import type { Placed } from './place.ts'
+import { leadsOn, type Placed, RAISED } from './place.ts'
 import { group, line, rect, text } from './svg.ts'
 import * as symbol from './symbols.ts'
 
@@ -54,8 +54,6 @@ interface Told {
 function told({ part: { id, kind } }: Placed, { install }: DiagramScene): Told {
   const { supply, changeover } = install
   switch (kind) {
-    case 'supply':
-      return { above: supply.operator }
     case 'meter':
       return { above: id }
     case 'main protection':
@@ -103,7 +101,7 @@ function changeover({ x, y, part }: Placed, scene: DiagramScene): string {
   const closed = scene.state === 'grid'
   const carries = scene.install.changeover.neutral_link !== 'none'
   return [
-    rect(x + 2, y - 15, 74, carries ? 56 : 30, {
+    rect(x + 2, y - 15, 80, carries ? 56 : 30, {
       fill: 'none',
       stroke: COLOUR.rule,
       'stroke-width': 0.7,
@@ -111,8 +109,8 @@ function changeover({ x, y, part }: Placed, scene: DiagramScene): string {
     }),
     group(lookOf(closed), [line(x, y, x + 16, y)]),
     symbol.contact(x + 16, y, closed),
-    line(x + 46, y, x + 78, y),
-    carries ? linkAt(x + 54, y, part.id, scene, 'N–PE') : '',
+    line(x + 46, y, x + 84, y),
+    carries ? linkAt(x + 53, y, part.id, scene, 'N–PE') : '',
   ].join('')
 }
 
@@ -129,7 +127,12 @@ function board(placed: Placed, scene: DiagramScene): string {
       ...(!live && { stroke: DEAD.stroke }),
     }),
     line(x, y, x + 2, y),
-    text(x - 1, y - 12, name, { 'font-size': 8.6, 'font-weight': 600, fill: inkOf(live), stroke: 'none' }),
+    text(x - 1, y - (leadsOn(part.children) ? RAISED : 12), name, {
+      'font-size': 8.6,
+      'font-weight': 600,
+      fill: inkOf(live),
+      stroke: 'none',
+    }),
     found?.neutral_link && found.neutral_link !== 'none'
       ? linkAt(x + 2, Math.max(last, y) + 7, part.id, scene, 'N–PE')
       : '',
@@ -193,13 +196,28 @@ function link(placed: Placed, { install }: DiagramScene, live: boolean): string 
   return symbol.contact(placed.x, placed.y, found.position === 'closed') + beside(placed, words, live)
 }
 
+/** Room for the operator's name before the first board's busbar. */
+const OPERATOR = 100
+
+function operator({ x, y }: Placed, { install }: DiagramScene, live: boolean): string {
+  return text(x + 18, y + 45, cut(install.supply.operator, OPERATOR, 7.6), {
+    'font-size': 7.6,
+    fill: inkOf(live),
+    stroke: 'none',
+  })
+}
+
 function figure(placed: Placed, scene: DiagramScene, live: boolean): string {
   const { x, y, out, part } = placed
   const { install, state, topology } = scene
   const ink = inkOf(live)
   switch (part.kind) {
     case 'supply':
-      return symbol.gridSource(x, y) + linkAt(x + 9, y + 8.5, 'supply', scene, install.supply.earthing)
+      return (
+        symbol.gridSource(x, y) +
+        linkAt(x + 9, y + 8.5, 'supply', scene, install.supply.earthing) +
+        operator(placed, scene, live)
+      )
     case 'meter':
       return symbol.meter(x, y, ink)
     case 'main protection':

@@ -25,13 +25,22 @@ const ROOM: Readonly<Record<PartKind, Room>> = {
   board: { along: 4, above: 20, below: 14 },
   'overcurrent device': { along: 42, above: 22, below: 28 },
   'residual-current device': { along: 44, above: 22, below: 28 },
-  changeover: { along: 78, above: 28, below: 58 },
+  changeover: { along: 84, above: 28, below: 58 },
   inverter: { along: 44, above: 28, below: 30 },
   array: { along: 36, above: 16, below: 12 },
   battery: { along: 36, above: 12, below: 12 },
   link: { along: 34, above: 10, below: 10 },
-  circuit: { along: 36, above: 8.5, below: 8.5 },
-  circuits: { along: 36, above: 8.5, below: 8.5 },
+  circuit: { along: 52, above: 8.5, below: 8.5 },
+  circuits: { along: 52, above: 8.5, below: 8.5 },
+}
+
+/** Where the name of a board stands when a device with a name of its own follows at the same height. */
+export const RAISED = 31
+
+/** Whether the first thing on a board is a device, not a circuit. */
+export function leadsOn(children: readonly { readonly kind: PartKind }[]): boolean {
+  const [first] = children
+  return first !== undefined && first.kind !== 'circuit' && first.kind !== 'circuits'
 }
 
 /** Rows move closer together when there are many. */
@@ -50,8 +59,9 @@ class Placing {
     this.#factor = rows > MANY ? CLOSE : 1
   }
 
-  #room({ kind }: Part): Room {
+  #room({ kind, children }: Part): Room {
     const room = ROOM[kind]
+    if (kind === 'board' && leadsOn(children)) return { ...room, above: RAISED + 8 }
     if (kind !== 'circuit' && kind !== 'circuits') return room
     return { ...room, above: room.above * this.#factor, below: room.below * this.#factor }
   }

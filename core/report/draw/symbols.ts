@@ -24,28 +24,21 @@ export function fuse(x: number, y: number): string {
 }
 
 /** The summation transformer of residual-current protection, linked to the blade before it. */
-function summation(x: number, y: number): string {
-  return [
-    path(
-      `M${x + 27} ${y - 6.5}C${x + 30.5} ${y - 6.5} ${x + 30.5} ${y + 6.5} ${x + 27} ${y + 6.5}C${x + 23.5} ${y + 6.5} ${x + 23.5} ${y - 6.5} ${x + 27} ${y - 6.5}Z`,
-      { fill: 'none' },
-    ),
-    path(`M${x + 27} ${y - 6.5}V${y - 11}H${x + 17}V${y - 6}`, {
-      fill: 'none',
-      'stroke-width': 0.7,
-      'stroke-dasharray': '2 1.4',
-    }),
-  ].join('')
+function summation(x: number, y: number, half: number): string {
+  const [top, bottom] = [y - half, y + half]
+  const ring = `M${x} ${top}C${x + 3.5} ${top} ${x + 3.5} ${bottom} ${x} ${bottom}C${x - 3.5} ${bottom} ${x - 3.5} ${top} ${x} ${top}Z`
+  const shaft = `M${x} ${top}V${top - 3}H${x - 10}V${y - 6}`
+  return path(ring, { fill: 'none' }) + path(shaft, { fill: 'none', 'stroke-width': 0.7, 'stroke-dasharray': '2 1.4' })
 }
 
 /** Residual-current device: a contact that a summation transformer opens. */
 export function residualDevice(x: number, y: number): string {
-  return [line(x, y, x + 8, y), blade(x, y), line(x + 21, y, x + 34, y), summation(x, y)].join('')
+  return [line(x, y, x + 8, y), blade(x, y), line(x + 21, y, x + 34, y), summation(x + 27, y, 6.5)].join('')
 }
 
 /** A breaker with residual-current protection built in. */
 export function residualBreaker(x: number, y: number): string {
-  return breaker(x, y) + line(x + DEVICE, y, x + 34, y) + summation(x + 2, y)
+  return breaker(x, y) + line(x + DEVICE, y, x + 36, y) + summation(x + 32, y, 4.4)
 }
 
 /** A contact that is open or closed as the state has it. */

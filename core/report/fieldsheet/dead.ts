@@ -1,4 +1,4 @@
-import { type Block, type Row, table } from '../blocks.ts'
+import { type Block, type Row, tables } from '../blocks.ts'
 import { rowsByFeeder } from '../by-board.ts'
 import { distinct } from '../names.ts'
 import { amountOr, rounded } from '../print.ts'
@@ -83,7 +83,7 @@ function busPoints(scene: ReportScene): Block[] {
 
 /** What is read with everything off. */
 export function deadPoints(scene: ReportScene): Block[] {
-  const circuits = table(
+  const circuits = tables(
     'point/dead',
     [
       { label: 'Circuit', width: 9 },
@@ -95,5 +95,5 @@ export function deadPoints(scene: ReportScene): Block[] {
     rowsByFeeder(scene, (id, { serves }) => circuitRow(scene, id, serves)),
     'Circuits',
   )
-  return [...earthingPoints(scene), ...(circuits.groups.length > 0 ? [circuits] : []), ...busPoints(scene)]
+  return [...earthingPoints(scene), ...circuits, ...busPoints(scene)]
 }

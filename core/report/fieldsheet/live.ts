@@ -1,7 +1,7 @@
 import { LINES, type State } from '#core/glossary.ts'
 import type { Measured, ResidualTest } from '#core/install.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
-import { type Block, type Row, table } from '../blocks.ts'
+import { type Block, type Row, table, tables } from '../blocks.ts'
 import { rowsByFeeder } from '../by-board.ts'
 import { clearedBy } from '../clearing.ts'
 import { residualName } from '../devices.ts'
@@ -127,8 +127,7 @@ function loops(scene: ReportScene, state: State): Block[] {
     { label: 'expected', unit: 'Ω', width: 11, align: 'num' as const },
     { label: 'Loop', unit: 'Ω', width: 26 },
   ]
-  const block = table(`point/loop/${state}`, columns, groups, 'Fault loop at the far end of each circuit')
-  return block.groups.length > 0 ? [block] : []
+  return tables(`point/loop/${state}`, columns, groups, 'Fault loop at the far end of each circuit')
 }
 
 const TIMES = [

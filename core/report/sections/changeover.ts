@@ -47,6 +47,8 @@ function device(scene: ReportScene): Entry[] {
   ]
 }
 
+const circuitsText = (count: number): string => (count === 1 ? '1 circuit' : `${count} circuits`)
+
 function neutral(scene: ReportScene): Entry[] {
   const { changeover } = scene.install
   const { id, neutral_link, neutral_opens } = changeover
@@ -78,13 +80,13 @@ function neutral(scene: ReportScene): Entry[] {
     {
       anchor: `changeover/${id}/backed-up`,
       term: 'Lives on',
-      detail: `${backedUp.length} circuits`,
+      detail: circuitsText(backedUp.length),
       note: backedUp.slice(0, 24).join(', ') || 'none',
     },
     {
       anchor: `changeover/${id}/grid-only`,
       term: 'Grid only',
-      detail: `${gridOnly.length} circuits`,
+      detail: circuitsText(gridOnly.length),
       note: gridOnly.slice(0, 24).join(', ') || 'none',
     },
   ]

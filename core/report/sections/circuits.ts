@@ -1,9 +1,9 @@
 import type { Circuit } from '#core/install.ts'
 import { limitBar } from '../bars.ts'
-import { type Cell, type Row, type Section, table } from '../blocks.ts'
+import { type Cell, type Row, type Section, tables } from '../blocks.ts'
 import { rowsByFeeder } from '../by-board.ts'
 import { clearedBy } from '../clearing.ts'
-import { cableLaid, cableName, circuitDevice } from '../devices.ts'
+import { cableLaid, cableName, deviceName, residualName } from '../devices.ts'
 import { printed, rounded } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 import { DEAD_FIELDS } from './tests.ts'
@@ -16,8 +16,18 @@ function dropCell(scene: ReportScene, id: string, { lighting }: Circuit): Cell {
   if (drop === undefined) return { text: '–', anchor }
   const { voltage_drop_lighting, voltage_drop_other } = scene.judged.book.parameters
   const most = lighting ? voltage_drop_lighting : voltage_drop_other
-  const bar = { value: Number(drop.toFixed(2)), most, unit: '%', name: `voltage drop of ${id}` }
+  const bar = {
+    value: Number(drop.toFixed(2)),
+    most,
+    unit: '%',
+    name: `voltage drop of ${id}`,
+    size: 'narrow',
+  } as const
   return { text: rounded(drop, 2), anchor, svg: limitBar(bar) }
+}
+
+function deviceCell({ device, residual_current }: Circuit): Cell {
+  return { text: deviceName(device), ...(residual_current && { note: residualName(residual_current) }) }
 }
 
 function designRow(scene: ReportScene, id: string, circuit: Circuit): Row {
@@ -29,7 +39,7 @@ function designRow(scene: ReportScene, id: string, circuit: Circuit): Row {
     head: { text: id },
     cells: [
       { text: circuit.serves, note: circuit.phases.join(' '), anchor: `circuit/${id}/serves` },
-      { text: circuitDevice(circuit), anchor: `circuit/${id}/device` },
+      { ...deviceCell(circuit), anchor: `circuit/${id}/device` },
       { text: cableName(cable), note: cableLaid(cable), anchor: `circuit/${id}/cable` },
       { text: rounded(scene.number(id, 'design_current'), 1), anchor: `circuit/${id}/design_current` },
       { text: printed(scene.value(id, 'device_rated'), '') },
@@ -91,17 +101,17 @@ const FAULT_COLUMNS = [
 
 /** The circuits as designed: what protects, what carries, and what clears a fault in each state. */
 export function circuits(scene: ReportScene): Section {
-  const design = table(
+  const design = tables(
     'circuits/design',
     DESIGN_COLUMNS,
     rowsByFeeder(scene, (id, circuit) => designRow(scene, id, circuit)),
     'Design: load, device, cable, voltage drop from the origin',
   )
-  const faults = table(
+  const faults = tables(
     'circuits/fault',
     FAULT_COLUMNS,
     rowsByFeeder(scene, (id) => faultRow(scene, id)),
     'Faults to earth: what must clear them, and what does, in each state',
   )
-  return { anchor: 'circuits', title: 'Circuits', blocks: design.groups.length === 0 ? [] : [design, faults] }
+  return { anchor: 'circuits', title: 'Circuits', blocks: [...design, ...faults] }
 }

@@ -15,7 +15,6 @@ export function diagram({ install, topology }: ReportScene): Section {
   return {
     anchor: 'diagram',
     title: 'Single-line diagram',
-    newPage: true,
     blocks: STATES.map((state) => ({
       kind: 'figure',
       anchor: `diagram/${state}`,

@@ -10,6 +10,16 @@ function outcomeTile({ word, counts }: Standing): Tile {
   return { anchor: 'report/outcome', box: 'box', label: 'Outcome', figure: word, lines: [], marks }
 }
 
+function islandLines(scene: ReportScene, batteries: readonly string[], held: number): string[] {
+  const mustRun = batteries.flatMap((id) => scene.number(id, 'autonomy_must_run') ?? []).filter(Number.isFinite)
+  const limits = batteries.flatMap((id) => scene.number(id, 'discharge_limit') ?? [])
+  const power = limits.reduce((sum, limit) => sum + limit, 0)
+  return [
+    `from ${amount(held, 'Wh')} held back, giving ${amount(power, 'W')} at most`,
+    ...(mustRun.length > 0 ? [`${hoursText(Math.min(...mustRun))} for what must run`] : []),
+  ]
+}
+
 function islandTile(scene: ReportScene): Tile {
   const batteries = Object.keys(scene.install.batteries ?? {})
   const hours = batteries.flatMap((id) => scene.number(id, 'autonomy') ?? [])
@@ -20,21 +30,28 @@ function islandTile(scene: ReportScene): Tile {
     box: 'box-island',
     label: 'In the island, without sun',
     figure: known ? hoursText(Math.min(...hours)) : 'not known',
-    lines: [known ? `from ${amount(held, 'Wh')} held back` : 'held-back charge or load not stated'],
+    lines: known ? islandLines(scene, batteries, held) : ['held-back charge or load not stated'],
     marks: [],
   }
 }
 
 function circuitsTile({ install, topology }: ReportScene): Tile {
   const { backedUp, gridOnly } = topology.circuits
-  const names = backedUp.map((id) => install.circuits?.[id]?.serves ?? id)
+  const names = (ids: readonly string[]) =>
+    few(
+      ids.map((id) => install.circuits?.[id]?.serves ?? id),
+      4,
+    )
   const total = backedUp.length + gridOnly.length
   return {
     anchor: 'report/lives-on',
     box: 'box',
     label: 'What lives on',
     figure: `${backedUp.length} of ${total}`,
-    lines: [names.length === 0 ? 'no circuit is backed up' : few(names, 4)],
+    lines: [
+      ...(backedUp.length > 0 ? [names(backedUp)] : []),
+      ...(gridOnly.length > 0 ? [`On the grid only: ${names(gridOnly)}`] : []),
+    ],
     marks: [],
   }
 }

@@ -24,7 +24,7 @@ function statedText({ uncertainty = {} }: Instrument): string {
   const stated = Object.entries(uncertainty).map(
     ([kind, percent]) => `${kind.replaceAll('_', ' ')} ±${amount(percent, '%')}`,
   )
-  return stated.length === 0 ? 'none stated: the widest that the standard permits is used' : stated.join(', ')
+  return stated.length === 0 ? 'none stated' : stated.join(', ')
 }
 
 /** What the readings were taken with, and how far each kind of reading can be off. */
@@ -42,13 +42,16 @@ export function instruments({ install, verdicts }: ReportScene): Section {
       verdicts.cell(id, {}, `instrument/${id}/verdict`),
     ],
   }))
-  const kinds = KINDS.map((kind) => {
+  const kinds = KINDS.flatMap((kind) => {
     const { percent, source } = uncertaintyOf(kind)
-    return {
-      anchor: `uncertainty/${kind}`,
-      head: { text: kind.replaceAll('_', ' ') },
-      cells: [{ text: percent === 0 ? 'none added' : `±${amount(percent, '%')}` }, { text: source }],
-    }
+    if (percent === 0) return []
+    return [
+      {
+        anchor: `uncertainty/${kind}`,
+        head: { text: kind.replaceAll('_', ' ') },
+        cells: [{ text: `±${amount(percent, '%')}` }, { text: source }],
+      },
+    ]
   })
   const columns = [
     { label: 'Instrument', width: 10 },
@@ -66,7 +69,7 @@ export function instruments({ install, verdicts }: ReportScene): Section {
       { label: 'Source', width: 50 },
     ],
     [{ rows: kinds }],
-    'Uncertainty used where the instrument states none',
+    'Where the instrument states none: the widest uncertainty that the standard permits, and nothing for other kinds',
   )
   return {
     anchor: 'instruments',

@@ -63,7 +63,7 @@ function lineRows(scene: ReportScene, id: string): Row[] {
   return LINES.flatMap((line) => {
     const load = (loads as Readonly<Record<string, unknown>>)[line]
     if (typeof load !== 'number') return []
-    const bar = limitBar({ value: Math.round(load), most: limit, unit: 'VA', name: `load on ${line}` })
+    const bar = limitBar({ value: Math.round(load), most: limit, unit: 'VA', name: `load on ${line}`, size: 'wide' })
     return [
       {
         anchor: `inverter/${id}/phase_load/${line}`,
@@ -82,7 +82,7 @@ function startRow(scene: ReportScene, id: string): Row[] {
   const bar =
     limit === undefined
       ? undefined
-      : limitBar({ value: Number(start.toFixed(1)), most: limit, unit: 'A', name: 'starting current' })
+      : limitBar({ value: Number(start.toFixed(1)), most: limit, unit: 'A', name: 'starting current', size: 'wide' })
   return [
     {
       anchor: `inverter/${id}/starting_current`,
@@ -100,15 +100,8 @@ function startRow(scene: ReportScene, id: string): Row[] {
 function curve(scene: ReportScene): Block[] {
   const budget = islandBudget(scene.quantities)
   if (!budget) return []
-  return [
-    {
-      kind: 'figure',
-      anchor: 'island/curve',
-      svg: budgetCurve(budget),
-      caption: 'Charge hour by hour after a grid failure at sunset.',
-    },
-    { kind: 'prose', anchor: 'island/model', quiet: true, paragraphs: [budget.model, budget.source] },
-  ]
+  const caption = `Charge hour by hour after a grid failure at sunset. ${budget.model} ${budget.source}`
+  return [{ kind: 'figure', anchor: 'island/curve', svg: budgetCurve(budget), caption }]
 }
 
 /** The island's budget: lines, starts, hours, and the charge hour by hour. */

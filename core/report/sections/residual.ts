@@ -2,7 +2,7 @@ import { STATES, type State } from '#core/glossary.ts'
 import type { ResidualTest } from '#core/install.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import { limitBar } from '../bars.ts'
-import { type Cell, type Row, type Section, table } from '../blocks.ts'
+import { type Cell, type Row, type Section, tables } from '../blocks.ts'
 import { residualName } from '../devices.ts'
 import { capital, readingText, rounded } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
@@ -34,7 +34,14 @@ function timeCell(
   const span = scene.sheet(id)?.spansInState[state][name]
   const anchor = `residual/${id}/${name}/${state}`
   if (most === undefined || value === undefined || !Number.isFinite(value)) return { anchor, text }
-  const bar = { value, most, unit: 'ms', name: `${name} of ${id} ${STATE_WORDS[state]}`, ...(span && { span }) }
+  const bar = {
+    value,
+    most,
+    unit: 'ms',
+    name: `${name} of ${id} ${STATE_WORDS[state]}`,
+    size: 'narrow' as const,
+    ...(span && { span }),
+  }
   return { anchor, text, note: `≤ ${rounded(most, 0)}`, svg: limitBar(bar) }
 }
 
@@ -75,7 +82,7 @@ export function residual(scene: ReportScene): Section {
     title: capital(STATE_WORDS[state]),
     rows: ids.filter((id) => scene.topology.live(id, state)).map((id) => testRow(scene, id, state)),
   }))
-  const tests = table(
+  const tests = tables(
     'residual/tests',
     [
       { label: 'Device', width: 14 },
@@ -93,6 +100,6 @@ export function residual(scene: ReportScene): Section {
   return {
     anchor: 'residual',
     title: 'Residual-current devices, tested',
-    blocks: tests.groups.length === 0 ? [] : [tests],
+    blocks: tests,
   }
 }

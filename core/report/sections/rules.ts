@@ -1,7 +1,7 @@
 import type { Finding, Verdict } from '#core/glossary.ts'
 import { rulePage } from '#core/judge/pages.ts'
 import { ruleTitle } from '#core/texts/words.ts'
-import { type Row, type RowGroup, type Section, table } from '../blocks.ts'
+import { type Row, type RowGroup, type Section, tables } from '../blocks.ts'
 import { citesText } from '../finding-blocks.ts'
 import { WORST_FIRST } from '../marks.ts'
 import { capital, few } from '../print.ts'
@@ -44,14 +44,14 @@ export function rules({ judged }: ReportScene): Section {
     rows,
   }))
   const columns = [
-    { label: 'Rule', width: 38 },
-    { label: 'Source', width: 34 },
-    { label: 'Verdicts', width: 28 },
+    { label: 'Rule', width: 36 },
+    { label: 'Source', width: 40 },
+    { label: 'Verdicts', width: 24 },
   ]
   return {
     anchor: 'rules',
     title: 'Every rule judged',
     newPage: true,
-    blocks: [table('rules/list', columns, groups)],
+    blocks: tables('rules/list', columns, groups),
   }
 }

@@ -1,7 +1,7 @@
 import type { Finding } from '#core/glossary.ts'
 import { labelOf, STATE_WORDS } from '#core/texts/label.ts'
 import { ruleTitle } from '#core/texts/words.ts'
-import { type Block, type Notice, type Row, type Section, table } from '../blocks.ts'
+import { type Block, type Mark, type Notice, type Row, type Section, table } from '../blocks.ts'
 import { findingMark } from '../marks.ts'
 import { capital, few } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
@@ -44,31 +44,48 @@ function about({ sheet }: ReportScene, { subject, state }: Finding): string {
   return state === null ? name : `${name}, ${STATE_WORDS[state]}`
 }
 
-const short = ({ subject, state }: Finding): string =>
-  state === null ? subject : `${subject} ${STATE_WORDS[state]}`
+const short = ({ subject, state }: Finding): string => (state === null ? subject : `${subject} ${STATE_WORDS[state]}`)
 
-/** One line for each rule that stands in the way, its subjects together. */
-function lines(scene: ReportScene, findings: readonly Finding[]): Row[] {
-  const keys = new Map(scene.judged.book.rules.map(({ id, key }) => [id, key]))
-  const groups = new Map<string, Finding[]>()
-  for (const finding of findings) {
-    const name = `${finding.rule}/${findingMark(finding).word.replaceAll(/[ ,]+/g, '-')}`
-    const group = groups.get(name)
-    if (group) group.push(finding)
-    else groups.set(name, [finding])
+/** Findings by a name that is made of each. */
+function groupedBy<Item>(items: readonly Item[], name: (item: Item) => string): (readonly [string, Item[]])[] {
+  const groups = new Map<string, Item[]>()
+  for (const item of items) {
+    const key = name(item)
+    const group = groups.get(key)
+    if (group) group.push(item)
+    else groups.set(key, [item])
   }
-  return [...groups].flatMap(([name, group]) => {
+  return [...groups]
+}
+
+interface Line {
+  readonly mark: Mark
+  readonly where: string
+  readonly name: string
+  readonly title: string
+}
+
+/** One line for each rule, its subjects together. */
+function ruleLines(scene: ReportScene, findings: readonly Finding[]): Line[] {
+  const keys = new Map(scene.judged.book.rules.map(({ id, key }) => [id, key]))
+  return groupedBy(findings, (finding) => `${finding.rule}/${findingMark(finding).word}`).flatMap(([, group]) => {
     const [first] = group
     const key = first && keys.get(first.rule)
     if (!first || key === undefined) return []
-    const where = group.length === 1 ? about(scene, first) : few(group.map(short), 8)
-    return [
-      {
-        anchor: `summary/${name}`,
-        head: { mark: findingMark(first) },
-        cells: [{ text: where }, { text: ruleTitle(key) }],
-      },
-    ]
+    const subjects = group.map(short)
+    const where = group.length === 1 ? about(scene, first) : few(subjects, 8)
+    return [{ mark: findingMark(first), where, name: subjects.join('+'), title: ruleTitle(key) }]
+  })
+}
+
+/** Lines about the same subjects and of the same verdict become one row. */
+function lines(scene: ReportScene, findings: readonly Finding[]): Row[] {
+  const rows = groupedBy(ruleLines(scene, findings), ({ mark, name }) => `${mark.word}/${name}`)
+  return rows.flatMap(([name, group]) => {
+    const [first] = group
+    if (!first) return []
+    const titles = group.map(({ title }) => `${title}.`).join(' ')
+    return [{ anchor: `summary/${name}`, head: { mark: first.mark }, cells: [{ text: first.where }, { text: titles }] }]
   })
 }
 

@@ -15,10 +15,7 @@ const SYSTEMS: Readonly<Record<Install['supply']['earthing'], string>> = {
 function supplyEntries(scene: ReportScene): Entry[] {
   const { supply } = scene.install
   const { nominal } = supply
-  const voltage =
-    nominal.phases === 3
-      ? `${Math.round(nominal.voltage * Math.sqrt(3))}/${amount(nominal.voltage, 'V')}, three-phase`
-      : `${amount(nominal.voltage, 'V')}, single-phase`
+  const voltage = `${amount(nominal.voltage, 'V')} line to neutral, ${nominal.phases === 3 ? 'three-phase' : 'single-phase'}`
   return [
     { anchor: 'supply/earthing', term: 'Earthing system', detail: supply.earthing, note: SYSTEMS[supply.earthing] },
     { anchor: 'supply/nominal', term: 'Nominal', detail: `${voltage}, ${amount(nominal.frequency, 'Hz')}` },

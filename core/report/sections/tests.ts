@@ -2,7 +2,7 @@ import { STATES, type State } from '#core/glossary.ts'
 import type { Circuit, CircuitReadings } from '#core/install.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import { limitBar } from '../bars.ts'
-import { type Block, type Cell, type Row, type RowGroup, type Section, table } from '../blocks.ts'
+import { type Cell, type Row, type RowGroup, type Section, tables } from '../blocks.ts'
 import { rowsByFeeder } from '../by-board.ts'
 import { clearedBy } from '../clearing.ts'
 import { amount, amountOr, capital, readingText, rounded } from '../print.ts'
@@ -48,9 +48,15 @@ function deadRow(scene: ReportScene, id: string, { serves }: Circuit): Row {
   }
 }
 
+/** Whether the loop decides: where residual current or the source's shut-down cuts off, its limit is not the overcurrent device's. */
+function decides({ value }: ReportScene, id: string, state: State): boolean {
+  const means = value(id, `${state}_disconnection`)
+  return means === 'overcurrent' || means === 'none'
+}
+
 function loopBar(scene: ReportScene, id: string, state: State): string | undefined {
   const value = scene.number(id, 'loop', state)
-  const most = scene.number(id, 'loop_limit_measured')
+  const most = decides(scene, id, state) ? scene.number(id, 'loop_limit_measured') : undefined
   if (value === undefined || most === undefined || !Number.isFinite(value)) return undefined
   const span = scene.sheet(id)?.spansInState[state]['loop']
   return limitBar({ value, most, unit: 'Ω', name: `loop of ${id} ${STATE_WORDS[state]}`, ...(span && { span }) })
@@ -59,7 +65,6 @@ function loopBar(scene: ReportScene, id: string, state: State): string | undefin
 function loopRow(scene: ReportScene, id: string, { serves }: Circuit, state: State): Row {
   const { verdicts } = scene
   const bar = loopBar(scene, id, state)
-  const byOvercurrent = scene.value(id, `${state}_disconnection`) === 'overcurrent'
   return {
     anchor: `circuit/${id}/${state}`,
     ...(verdicts.fails(id, { state }) && { look: 'row-fails' as const }),
@@ -68,7 +73,7 @@ function loopRow(scene: ReportScene, id: string, { serves }: Circuit, state: Sta
       { text: serves },
       { text: clearedBy(scene, id, state) },
       { text: readingText(readingsOf(scene, id)?.loop?.[state], 2), anchor: `circuit/${id}/loop/${state}` },
-      { text: rounded(scene.number(id, 'loop_limit_measured'), 2), ...(!byOvercurrent && { note: 'for overcurrent' }) },
+      { text: decides(scene, id, state) ? rounded(scene.number(id, 'loop_limit_measured'), 2) : '–' },
       bar === undefined ? { text: '' } : { svg: bar },
       verdicts.cell(id, { state }, `circuit/${id}/${state}/verdict`),
     ],
@@ -87,7 +92,7 @@ function loopGroups(scene: ReportScene): RowGroup[] {
 
 /** What was read on the circuits: with the supply off, then in each state. */
 export function tests(scene: ReportScene): Section {
-  const dead = table(
+  const dead = tables(
     'tests/dead',
     [
       { label: 'Circuit', width: 8 },
@@ -103,7 +108,7 @@ export function tests(scene: ReportScene): Section {
     rowsByFeeder(scene, (id, circuit) => deadRow(scene, id, circuit)),
     'Dead: continuity, insulation, polarity',
   )
-  const loops = table(
+  const loops = tables(
     'tests/loop',
     [
       { label: 'Circuit', width: 8 },
@@ -117,6 +122,5 @@ export function tests(scene: ReportScene): Section {
     loopGroups(scene),
     'Live: fault loop and what clears a fault, in each state',
   )
-  const blocks: readonly Block[] = dead.groups.length === 0 ? [] : [dead, loops]
-  return { anchor: 'tests', title: 'Tests of the circuits', blocks }
+  return { anchor: 'tests', title: 'Tests of the circuits', blocks: [...dead, ...loops] }
 }

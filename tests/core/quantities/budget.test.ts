@@ -4,6 +4,8 @@ import type { Battery, Install, PvArray } from '#core/install.ts'
 import { islandBudget } from '#core/quantities/budget.ts'
 import { courseOf } from '#core/quantities/budget-charge.ts'
 import { islandSun } from '#core/quantities/budget-sun.ts'
+import { sunPosition } from '#core/quantities/sun.ts'
+import { clearSkyIrradiance } from '#core/quantities/sun-irradiance.ts'
 import { bakery, plainCircuit } from '../topology/bakery.ts'
 import { sceneOf } from './circuit-scene.ts'
 
@@ -68,6 +70,17 @@ describe('the course of a charge', () => {
     expect(charge).toEqual([500, 0, 2000, 1000])
   })
 
+  test('empty just as the sun takes over: the load was never left without', () => {
+    const { charge, lasts } = courseOf(
+      { ...store, held: 1000, efficiency: 1 },
+      1000,
+      (hour) => (hour === 1 ? 3000 : 0),
+      3,
+    )
+    expect(charge).toEqual([1000, 0, 2000, 1000])
+    expect(lasts).toBeUndefined()
+  })
+
   test('nothing held back lasts no time', () => {
     expect(courseOf({ ...store, held: 0 }, 500, dark, 4).lasts).toBe(0)
   })
@@ -129,6 +142,20 @@ describe('the island’s budget', () => {
     expect(budget?.sunset).toBeUndefined()
     expect(budget?.sun).toEqual([])
     expect(budget?.withoutSun.lasts).toBeCloseTo(7.296, 9)
+  })
+
+  test('each hour stands for its middle', () => {
+    const sun = islandSun(sceneOf(island))
+    const middle = new Date((sun?.sunset.getTime() ?? 0) + 12.5 * 3_600_000)
+    const position = sunPosition(middle, { latitude: 47.31, longitude: 9.64 })
+    const irradiance = clearSkyIrradiance(position, { tilt: 30, azimuth: 170 })
+    expect(sun?.powerIn(12)).toBeCloseTo((16 * 450 * irradiance) / 1000, 6)
+  })
+
+  test('one array that cannot be told leaves the sun out: half a sum would look like a whole one', () => {
+    const { orientation: _none, ...unknown } = array
+    expect(budgetOf({ arrays: { A1: array, A2: unknown } })?.withSun).toBeUndefined()
+    expect(budgetOf({ arrays: { A1: array, A2: array } })?.withSun).toBeDefined()
   })
 
   test('an array on the grid side gives the island nothing', () => {

@@ -81,6 +81,8 @@ describe('a residual-current device in its tree', () => {
     expect(values.time_minimum_rated).toBeUndefined()
     expect(values.upstream_residual).toBeUndefined()
     expect(values.upstream_delayed).toBeUndefined()
+    // Three times 30 mA: practice of IEC 61008-1 as printed in a switchgear catalogue.
+    expect(values.upstream_residual_needed).toBe(90)
     expect(values.electrode_limit).toBeCloseTo(50 / 0.03, 6)
     expect(values.load_current).toBeCloseTo(1400 / 230 / 0.85, 6)
   })
