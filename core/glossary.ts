@@ -87,9 +87,8 @@ export interface Sheet {
   /** For measured fields: the interval in which the true value lies (common fields, then per state). */
   readonly spans: Readonly<Record<string, Span>>
   readonly spansInState: Readonly<Record<State, Readonly<Record<string, Span>>>>
-  /** Where each field stands, or would stand, in the file. */
-  readonly at: Readonly<Record<string, Path>>
-  readonly atInState: Readonly<Record<State, Readonly<Record<string, Path>>>>
+  /** Where a field stands, or would stand, in the file; the subject's own place for one that stands nowhere. */
+  readonly pathOf: (name: string, state: State | null) => Path
   /** Where the subject itself stands. */
   readonly path: Path
 }

@@ -95,11 +95,20 @@ export function judge(book: RuleBook, facts: Case): Finding[] {
     return (bySubject.get(sheet.subject) ?? []).flatMap((rule) =>
       statesOf(rule).map((state) => {
         const seen = view(state)
-        if (rule.when && !rule.when(seen.values)) return notApplicable(rule, sheet, state)
+        if (!applies(rule, seen)) return notApplicable(rule, sheet, state)
         return judgeOne(rule, sheet, state, seen, facts)
       }),
     )
   })
+}
+
+function applies({ when }: Rule, view: View): boolean {
+  if (!when) return true
+  const known = view.applies.get(when)
+  if (known !== undefined) return known
+  const holds = when(view.values)
+  view.applies.set(when, holds)
+  return holds
 }
 
 function notApplicable(rule: Rule, sheet: Sheet, state: State | null): Finding {

@@ -24,12 +24,24 @@ export function restOfLine(text: string, offset: number): string {
   return text.slice(offset, end === -1 ? text.length : end).replace(/\r$/, '')
 }
 
+/** Where the lines of the text last asked about begin: findings come in crowds, all of one file. */
+let counted: { readonly text: string; readonly starts: readonly number[] } = { text: '', starts: [0] }
+
+function lineStarts(text: string): readonly number[] {
+  if (counted.text === text) return counted.starts
+  const starts = [0]
+  for (let end = text.indexOf('\n'); end !== -1; end = text.indexOf('\n', end + 1)) starts.push(end + 1)
+  counted = { text, starts }
+  return starts
+}
+
 function lineAndColumn(text: string, offset: number): [line: number, column: number] {
-  let line = 1
-  let start = 0
-  for (let end = text.indexOf('\n'); end !== -1 && end < offset; end = text.indexOf('\n', start)) {
-    line++
-    start = end + 1
+  const starts = lineStarts(text)
+  let [low, high] = [0, starts.length]
+  while (high - low > 1) {
+    const middle = (low + high) >> 1
+    if ((starts[middle] ?? 0) <= offset) low = middle
+    else high = middle
   }
-  return [line, offset - start + 1]
+  return [low + 1, offset - (starts[low] ?? 0) + 1]
 }

@@ -95,11 +95,15 @@ export function usualUnits(kind: Kind): string[] {
   return units.map(printed)
 }
 
+/** Spellings that are canonical as they stand. */
+const CANONICAL = /^[A-Za-z0-9%/]*$/
+
 /**
  * One spelling for each unit: the ohm sign and the Greek letter (both are in use, the Unicode standard makes them equal),
  * both micro signs, the degree sign and its look-alike, and superscripts written as digits.
  */
 export function canonical(unit: string): string {
+  if (CANONICAL.test(unit)) return unit
   return unit
     .replace(/[\u03a9\u2126]/g, 'ohm')
     .replace(/[\u03bc]/g, 'µ')

@@ -6,7 +6,7 @@ import { joined } from '#core/texts/value.ts'
 import { ruleTitle, ruleWordsFor } from '#core/texts/words.ts'
 import type { FindingBlock } from './blocks.ts'
 import { findingMark, isFailing } from './marks.ts'
-import { capital, dateText } from './print.ts'
+import { capital, dateText, held } from './print.ts'
 import type { ReportScene } from './scene.ts'
 
 /** A source as printed: `IEC 60364-4-41:2005+A1:2017, 411.4.4`. */
@@ -36,7 +36,7 @@ function saysOf(scene: ReportScene, finding: Finding, key: string): { readonly s
   if (isFailing(finding.verdict) && sheet) {
     const words = ruleWordsFor(key, { sheet, state: finding.state, parameters, units })
     const inside = finding.verdict === 'fails' ? '' : ' The limit lies inside the uncertainty of the reading.'
-    return { says: `${words.says}${inside}`, remedy: words.do }
+    return { says: held(capital(`${words.says}${inside}`)), remedy: held(words.do) }
   }
   if (finding.verdict === 'not shown') return { says: `Missing: ${missingWords(scene, finding)}.`, remedy: '' }
   if (finding.verdict === 'limited') return { says: `Not tested: ${finding.reason ?? ''}.`, remedy: '' }

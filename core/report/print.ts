@@ -110,6 +110,14 @@ export function few(names: readonly string[], most: number): string {
   return `${names.slice(0, most).join(', ')} and ${names.length - most} more`
 }
 
+/** A unit that belongs to the number before it. */
+const UNIT = /(\d) (?=(?:[kmM]?(?:A|V|W|Wh|VA|Ω|Hz|s|m)|mm²|m²|%|°C|h|W\/m²)(?![A-Za-z²]))/g
+
+/** Keeps numbers and their units on one line. */
+export function held(words: string): string {
+  return words.replace(UNIT, `$1${JOIN}`)
+}
+
 /** With a capital in front. */
 export function capital(text: string): string {
   return text.charAt(0).toUpperCase() + text.slice(1)

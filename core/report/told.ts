@@ -118,7 +118,13 @@ function toldJudged(judged: Judged, all: boolean): ToldFinding[] {
   const { findings, sheets, book, locate } = judged
   const bySubject = new Map(sheets.map((sheet) => [sheet.id, sheet]))
   const keys = new Map(book.rules.map(({ id, key }) => [id, key]))
-  const place = (path: Path): Place => ({ path, range: locate(path) })
+  const ranges = new Map<string, Range>()
+  const place = (path: Path): Place => {
+    const name = path.join('\n')
+    const range = ranges.get(name) ?? locate(path)
+    ranges.set(name, range)
+    return { path, range }
+  }
   return findings
     .filter(({ verdict }) => all || (verdict !== 'meets' && verdict !== 'not applicable'))
     .flatMap((finding) => {

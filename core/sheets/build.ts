@@ -2,16 +2,19 @@ import type { NotTested, Path, Sheet, SheetValue, Span, State } from '#core/glos
 import type { Measured } from '#core/install.ts'
 import type { Known, Scene } from '#core/quantities/quantity.ts'
 import { spanOf } from '#core/quantities/uncertainty.ts'
+import { placesOf } from './places.ts'
 import type { SheetPlan } from './plan.ts'
 import { PLANS } from './plans.ts'
 
 interface Columns {
   readonly values: Record<string, SheetValue>
   readonly spans: Record<string, Span>
-  readonly at: Record<string, Path>
 }
 
-const columns = (): Columns => ({ values: {}, spans: {}, at: {} })
+type Instrument = Parameters<typeof spanOf>[2]
+type Kind = Parameters<typeof spanOf>[1]
+
+const columns = (): Columns => ({ values: {}, spans: {} })
 
 function put(into: Columns, name: string, value: SheetValue | undefined): void {
   if (value !== undefined) into.values[name] = value
@@ -22,16 +25,15 @@ const taken = (measured: Measured | undefined): measured is Exclude<Measured, No
 
 function measure(
   into: Columns,
-  field: { readonly name: string; readonly kind: Parameters<typeof spanOf>[1] },
-  path: Path,
+  name: string,
+  kind: Kind,
   measured: Measured | undefined,
-  instrument: Parameters<typeof spanOf>[2],
+  instrument: Instrument,
 ): void {
-  into.at[field.name] = path
   if (!taken(measured)) return
-  into.values[field.name] = measured.value
-  const span = spanOf(measured, field.kind, instrument)
-  if (span.low !== span.high) into.spans[field.name] = span
+  into.values[name] = measured.value
+  const span = spanOf(measured, kind, instrument)
+  if (span.low !== span.high) into.spans[name] = span
 }
 
 function fillState<Item>(
@@ -39,23 +41,18 @@ function fillState<Item>(
   item: Item,
   scene: Scene,
   state: State,
-  instrument: Parameters<typeof spanOf>[2],
+  instrument: Instrument,
 ): Columns {
   const into = columns()
-  for (const field of plan.inState ?? []) {
-    into.at[field.name] =
-      typeof field.at === 'function' ? field.at(item, state) : [...plan.path(item, scene), ...field.at]
-    put(into, field.name, field.value(item, scene, state))
-  }
-  for (const field of plan.measuredInState ?? [])
-    measure(into, field, field.path(item, state), field.reading(item, scene, state), instrument)
+  for (const field of plan.inState ?? []) put(into, field.name, field.value(item, scene, state))
+  for (const { name, kind, reading } of plan.measuredInState ?? [])
+    measure(into, name, kind, reading(item, scene, state), instrument)
   return into
 }
 
 function compute<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene, into: Columns): void {
-  const known: Record<string, SheetValue | undefined> = into.values as Record<string, SheetValue>
-  for (const quantity of plan.quantities ?? [])
-    put(into, quantity.name, quantity.compute(item, scene, known satisfies Known))
+  const known: Known = into.values
+  for (const quantity of plan.quantities ?? []) put(into, quantity.name, quantity.compute(item, scene, known))
 }
 
 function sheetOf<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene): Sheet {
@@ -63,12 +60,9 @@ function sheetOf<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene): Sheet {
   const instrument = named === undefined ? undefined : scene.install.instruments?.[named]
   const path = plan.path(item, scene)
   const common = columns()
-  for (const field of plan.entered) {
-    common.at[field.name] = typeof field.at === 'function' ? field.at(item) : [...path, ...field.at]
-    put(common, field.name, field.value(item, scene))
-  }
-  for (const field of plan.measured ?? [])
-    measure(common, field, field.path(item), field.reading(item, scene), instrument)
+  for (const field of plan.entered) put(common, field.name, field.value(item, scene))
+  for (const { name, kind, reading } of plan.measured ?? [])
+    measure(common, name, kind, reading(item, scene), instrument)
   compute(plan, item, scene, common)
   const grid = fillState(plan, item, scene, 'grid', instrument)
   const island = fillState(plan, item, scene, 'island', instrument)
@@ -78,10 +72,9 @@ function sheetOf<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene): Sheet {
     path,
     values: common.values,
     spans: common.spans,
-    at: common.at,
     inState: { grid: grid.values, island: island.values },
     spansInState: { grid: grid.spans, island: island.spans },
-    atInState: { grid: grid.at, island: island.at },
+    pathOf: (name: string, state: State | null): Path => placesOf(plan)(name, state, item, path),
   }
 }
 

@@ -31,8 +31,7 @@ export const PLANS = [
   personPlan,
 ] as const
 
-/** Words for every field that a rule may name, by subject. */
-export function fieldsOf(subject: Subject): ReadonlyMap<string, FieldWords> {
+function wordsOf(subject: Subject): ReadonlyMap<string, FieldWords> {
   const plan = PLANS.find((candidate) => candidate.subject === subject)
   const lists: readonly (readonly FieldWords[] | undefined)[] = [
     plan?.entered,
@@ -42,6 +41,15 @@ export function fieldsOf(subject: Subject): ReadonlyMap<string, FieldWords> {
     plan?.measuredInState,
   ]
   return new Map(lists.flatMap((list) => list ?? []).map((field) => [field.name, field]))
+}
+
+const fields = new Map<Subject, ReadonlyMap<string, FieldWords>>()
+
+/** Words for every field that a rule may name, by subject. */
+export function fieldsOf(subject: Subject): ReadonlyMap<string, FieldWords> {
+  const known = fields.get(subject) ?? wordsOf(subject)
+  fields.set(subject, known)
+  return known
 }
 
 /** Names of the fields that hold in one state only. */

@@ -110,7 +110,7 @@ function changeover({ x, y, part }: Placed, scene: DiagramScene): string {
     group(lookOf(closed), [line(x, y, x + 16, y)]),
     symbol.contact(x + 16, y, closed),
     line(x + 46, y, x + 84, y),
-    carries ? linkAt(x + 53, y, part.id, scene, 'N–PE') : '',
+    carries ? linkAt(x + 51, y, part.id, scene, 'N–PE') : '',
   ].join('')
 }
 
@@ -163,7 +163,7 @@ function circuit({ x, y, part }: Placed, scene: DiagramScene, live: boolean): st
     text(words, y + 3, cut(part.id, 30, 8.4), { ...plain, 'font-weight': 600 }),
     text(words + 33, y + 3, cut(found.serves, 96, 8.4), plain),
     text(words + 133, y + 3, deviceName(found.device), plain),
-    text(words + 160, y + 3, cut(cableName(found.cable), width - words - 160, 8.4), plain),
+    text(words + 164, y + 3, cut(cableName(found.cable), width - words - 164, 8.4), plain),
   ].join('')
 }
 
@@ -238,7 +238,9 @@ function figure(placed: Placed, scene: DiagramScene, live: boolean): string {
       return changeover(placed, scene)
     case 'inverter': {
       const feeds = state === 'island' && topology.inverters.island.includes(part.id)
-      return symbol.inverter(x, y, feeds ? COLOUR.lampTint : COLOUR.paper)
+      const own = install.inverters?.[part.id]?.neutral_link ?? 'none'
+      const box = symbol.inverter(x, y, feeds ? COLOUR.lampTint : COLOUR.paper)
+      return own === 'none' ? box : box + linkAt(x + 21, y + 15, part.id, scene, 'N–PE')
     }
     case 'array':
       return symbol.array(x, y) + beside(placed, arrayWords(part.id, install), live)

@@ -26,7 +26,7 @@ const ROOM: Readonly<Record<PartKind, Room>> = {
   'overcurrent device': { along: 42, above: 22, below: 28 },
   'residual-current device': { along: 44, above: 22, below: 28 },
   changeover: { along: 84, above: 28, below: 58 },
-  inverter: { along: 44, above: 28, below: 30 },
+  inverter: { along: 44, above: 28, below: 54 },
   array: { along: 36, above: 16, below: 12 },
   battery: { along: 36, above: 12, below: 12 },
   link: { along: 34, above: 10, below: 10 },

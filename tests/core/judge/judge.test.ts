@@ -38,10 +38,14 @@ const sheet = (loop: number | undefined, span?: Span): Sheet => ({
   path: ['circuits', 'K1'],
   values: { device_rated: 16 },
   spans: {},
-  at: { device_rated: ['circuits', 'K1', 'device'] },
   inState: { grid: loop === undefined ? {} : { loop }, island: {} },
   spansInState: { grid: span ? { loop: span } : {}, island: {} },
-  atInState: { grid: { loop: ['readings', 'circuits', 'K1', 'loop', 'grid'] }, island: {} },
+  pathOf: (name) =>
+    name === 'loop'
+      ? ['readings', 'circuits', 'K1', 'loop', 'grid']
+      : name === 'device_rated'
+        ? ['circuits', 'K1', 'device']
+        : ['circuits', 'K1'],
 })
 
 function verdict(rule: Rule, of: Sheet, tree: unknown = {}, departures: Departure[] = []): Finding {

@@ -14,10 +14,9 @@ const sheet: Sheet = {
   path: ['circuits', 'K1'],
   values: { serves: 'Cold store {{name}} <b>', cable_length: 18, lines: ['L1'] },
   spans: {},
-  at: {},
   inState: { grid: { loop: 0.55 }, island: {} },
   spansInState: { grid: {}, island: {} },
-  atInState: { grid: {}, island: {} },
+  pathOf: () => ['circuits', 'K1'],
 }
 
 const scene = (state: WordScene['state']): WordScene => ({
