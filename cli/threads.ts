@@ -14,6 +14,8 @@ interface Task {
 /** What a helper is handed at a time: enough to keep it busy, few enough that nobody waits for the last one. */
 const PORTION = 16
 const MOST_THREADS = 8
+/** MB for what lives no longer than one file: with room enough most of it is gone before it is ever looked at. */
+const YOUNG = 32
 
 interface Portion {
   readonly start: number
@@ -52,7 +54,12 @@ export function checkInThreads(
   return new Promise((resolve, reject) => {
     const workers = Array.from(
       { length: count },
-      () => new Worker(process.argv[1] ?? '', { workerData: task, argv: [THREAD] }),
+      () =>
+        new Worker(process.argv[1] ?? '', {
+          workerData: task,
+          argv: [THREAD],
+          resourceLimits: { maxYoungGenerationSizeMb: YOUNG },
+        }),
     )
     const hand = (worker: Worker): void => {
       const portion = portions[next]

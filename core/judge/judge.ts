@@ -41,36 +41,46 @@ function atTheEnds(
 
 function verdictOf(rule: Rule, view: View): Verdict {
   const holds = rule.must(view.values)
+  if (!rule.reads.some((name) => view.spanOf(name) !== undefined)) return holds ? 'meets' : 'fails'
   const spans = rule.reads.flatMap((name) => {
     const span = view.spanOf(name)
     return span ? [[name, span] as const] : []
   })
-  if (spans.length === 0) return holds ? 'meets' : 'fails'
   const ends = atTheEnds(rule, view, spans.slice(0, MOST_CORNERS))
   if (holds) return ends.all ? 'meets' : 'meets, inside the uncertainty'
   return ends.some ? 'fails, inside the uncertainty' : 'fails'
 }
 
 function judgeOne(rule: Rule, sheet: Sheet, state: State | null, view: View, { tree, departures }: Case): Finding {
-  const missing = rule.needs.filter((name) => view.values[name] === undefined)
+  const shown = rule.needs.every((name) => view.values[name] !== undefined)
+  const missing = shown ? NONE : rule.needs.filter((name) => view.values[name] === undefined)
   const reason = missing.map((name) => limitationAt(tree, view.pathOf(name))).find((found) => found !== undefined)
-  const shown = missing.length === 0
   const verdict = shown ? verdictOf(rule, view) : reason === undefined ? 'not shown' : 'limited'
-  const names = shown || rule.at.length === 0 ? rule.at : missing
-  const [path = sheet.path, ...related] = names.map((name) => view.pathOf(name))
-  const departure = departures.find((candidate) => candidate.rule === rule.id && candidate.subject === sheet.id)
+  const departure =
+    verdict === 'meets'
+      ? undefined
+      : departures.find((candidate) => candidate.rule === rule.id && candidate.subject === sheet.id)
   return {
-    rule: rule.id,
-    subject: sheet.id,
-    state,
-    verdict,
-    severity: rule.severity,
-    path,
-    related: related.filter((other) => other.join('/') !== path.join('/')),
-    missing,
+    ...plainly(rule, sheet, state, verdict),
+    ...(verdict !== 'meets' && placesOf(shown || rule.at.length === 0 ? rule.at : missing, sheet, view)),
+    ...(!shown && { missing }),
     ...(reason !== undefined && { reason }),
-    ...(departure && verdict !== 'meets' && { departure }),
+    ...(departure && { departure }),
   }
+}
+
+const NONE: readonly never[] = []
+
+/** A finding that nobody needs to be led to: it points to its subject. */
+function plainly(rule: Rule, sheet: Sheet, state: State | null, verdict: Verdict): Finding {
+  const { id, severity } = rule
+  return { rule: id, subject: sheet.id, state, verdict, severity, path: sheet.path, related: NONE, missing: NONE }
+}
+
+function placesOf(names: readonly string[], sheet: Sheet, view: View): Pick<Finding, 'path' | 'related'> {
+  const [path = sheet.path, ...others] = names.map((name) => view.pathOf(name))
+  const same = path.join('/')
+  return { path, related: others.filter((other) => other.join('/') !== same) }
 }
 
 const statesOf = (rule: Rule): readonly (State | null)[] =>
@@ -95,7 +105,7 @@ export function judge(book: RuleBook, facts: Case): Finding[] {
     return (bySubject.get(sheet.subject) ?? []).flatMap((rule) =>
       statesOf(rule).map((state) => {
         const seen = view(state)
-        if (!applies(rule, seen)) return notApplicable(rule, sheet, state)
+        if (!applies(rule, seen)) return plainly(rule, sheet, state, 'not applicable')
         return judgeOne(rule, sheet, state, seen, facts)
       }),
     )
@@ -109,19 +119,6 @@ function applies({ when }: Rule, view: View): boolean {
   const holds = when(view.values)
   view.applies.set(when, holds)
   return holds
-}
-
-function notApplicable(rule: Rule, sheet: Sheet, state: State | null): Finding {
-  return {
-    rule: rule.id,
-    subject: sheet.id,
-    state,
-    verdict: 'not applicable',
-    severity: rule.severity,
-    path: sheet.path,
-    related: [],
-    missing: [],
-  }
 }
 
 /** Rules by the subject that they are about. */

@@ -5,6 +5,7 @@ import { parseCable, parseDevice } from '#core/read/shorthand.ts'
 import { isObject } from '#core/shape/locate.ts'
 import { rangeFault } from '#core/shape/range.ts'
 import type { ObjectPlan, Plan, QuantityPlan, ReadingPlan, ShorthandPlan } from './plan.ts'
+import { remembered } from './remembered.ts'
 
 /** Where the walk is, and what it found. The path grows and shrinks with the walk. */
 export interface Walk {
@@ -27,9 +28,17 @@ export function walk(value: unknown, plan: Plan, at: Walk): unknown {
     case 'reading':
       return isObject(value) ? value : reading(value, plan, at)
     case 'device':
-      return shorthand(parseDevice(value), plan, at)
+      return shorthand(
+        remembered(plan, value, () => parseDevice(value)),
+        plan,
+        at,
+      )
     case 'cable':
-      return shorthand(parseCable(value), plan, at)
+      return shorthand(
+        remembered(plan, value, () => parseCable(value)),
+        plan,
+        at,
+      )
     case 'object':
       return isObject(value) ? block(value, plan, at) : value
     case 'map':
@@ -40,14 +49,14 @@ export function walk(value: unknown, plan: Plan, at: Walk): unknown {
 }
 
 function quantity(value: unknown, plan: QuantityPlan, at: Walk): number | undefined {
-  const read = parseQuantity(value, plan.kind, plan.unit)
+  const read = remembered(plan, value, () => parseQuantity(value, plan.kind, plan.unit))
   if (!read.ok) return refuse(read, at)
   const fault = rangeFault(read.value, plan.bounds, plan.unit)
   return fault ? refuse(fault, at) : read.value
 }
 
 function reading(value: unknown, plan: ReadingPlan, at: Walk): unknown {
-  const read = parseReading(value, plan.kind, plan.unit)
+  const read = remembered(plan, value, () => parseReading(value, plan.kind, plan.unit))
   if (!read.ok) return refuse(read, at)
   const fault = read.value.noTrip ? undefined : rangeFault(read.value.value, plan.bounds, plan.unit)
   return fault ? refuse(fault, at) : read.value

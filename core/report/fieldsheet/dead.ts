@@ -32,7 +32,7 @@ function circuitRow(scene: ReportScene, id: string, serves: string): Row {
         measured: read?.insulation ?? skipped,
         least: 0,
       }),
-      wordCell(`point/circuit/${id}/polarity`, `polarity of ${id}`, read?.polarity ?? skipped?.not_tested),
+      wordCell(`point/circuit/${id}/polarity`, `polarity of ${id}`, read?.polarity ?? skipped?.not_tested, 'correct'),
     ],
   }
 }

@@ -31,6 +31,7 @@ export function pointCell({ anchor, name, unit, limit, measured, least }: Point)
 }
 
 /** The same for what is told in a word, such as the polarity. */
-export function wordCell(anchor: string, name: string, word: string | undefined): Cell {
-  return word === undefined ? { anchor, svg: writingBox(name) } : { anchor, text: word }
+export function wordCell(anchor: string, name: string, word: string | undefined, limit = ''): Cell {
+  const given = limit === '' ? {} : { note: limit }
+  return word === undefined ? { anchor, ...given, svg: writingBox(name) } : { anchor, text: word }
 }

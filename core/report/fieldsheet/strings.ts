@@ -33,7 +33,7 @@ function stringRow(scene: ReportScene, arrayId: string, index: number): Row {
     head: { text: id },
     cells: [
       point('irradiance', 'W/m²', '≥ 400', 0),
-      point('cell_temperature', '°C', '', 0),
+      point('cell_temperature', '°C', 'write it down', 0),
       point('voc', 'V', expected('voc_expected', 'V'), 0),
       point('isc', 'A', expected('isc_expected', 'A'), 1),
       point(
@@ -42,7 +42,7 @@ function stringRow(scene: ReportScene, arrayId: string, index: number): Row {
         `≥ ${rounded(scene.number(id, 'insulation_minimum'), 1)} at ${rounded(scene.number(id, 'insulation_test_voltage'), 0)} V`,
         0,
       ),
-      wordCell(`point/string/${id}/polarity`, `polarity of ${id}`, read?.polarity ?? reason?.not_tested),
+      wordCell(`point/string/${id}/polarity`, `polarity of ${id}`, read?.polarity ?? reason?.not_tested, 'correct'),
     ],
   }
 }
