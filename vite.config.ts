@@ -12,6 +12,7 @@ export default defineConfig({
       exclude: ['core/generated/**', 'core/**/*.d.ts'],
       reporter: ['text-summary', 'json-summary', 'json'],
       reportsDirectory: 'coverage',
+      reportOnFailure: true,
     },
   },
 })

@@ -4,7 +4,11 @@ import templates from '#core/generated/templates.js'
 
 /** The package declares no types for its runtime: it is the full engine without the compiler. */
 const engine = (runtime as unknown as typeof Handlebars).create()
-const pages = new Map<string, (model: object) => string>()
+/** Only what a model has itself is looked up. */
+const OWN_ONLY = { allowProtoPropertiesByDefault: false, allowProtoMethodsByDefault: false }
+
+type Page = (model: object, options?: typeof OWN_ONLY) => string
+const pages = new Map<string, Page>()
 
 /** Words of our own: escaped, then `I_b` with its b below the line. */
 function words(text: string): Handlebars.SafeString {
@@ -12,7 +16,7 @@ function words(text: string): Handlebars.SafeString {
   return new engine.SafeString(escaped.replace(/_([A-Za-z0-9]+)/g, '<sub>$1</sub>'))
 }
 
-function open(name: string): (model: object) => string {
+function open(name: string): Page {
   if (pages.size === 0) {
     engine.registerHelper('words', words)
     for (const [partial, specification] of Object.entries(templates.partials))
@@ -32,5 +36,5 @@ function open(name: string): (model: object) => string {
  * @param model own properties only are looked up; their text is escaped and never read as a template
  */
 export function fillPage(name: 'report' | 'fieldsheet', model: object): string {
-  return (pages.get(name) ?? open(name))(model)
+  return (pages.get(name) ?? open(name))(model, OWN_ONLY)
 }

@@ -10,7 +10,7 @@ function limitations(limited: readonly Finding[]) {
   return [...byReason].map(([reason, subjects]) => {
     const names = [...subjects]
     return {
-      anchor: `limitation/${names.join('+')}/${reason}`,
+      anchor: `limitation/${names.toSorted().join('+')}/${reason}`,
       head: { text: names.join(', ') },
       cells: [{ text: capital(reason) }],
     }

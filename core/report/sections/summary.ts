@@ -74,7 +74,7 @@ function ruleLines(scene: ReportScene, findings: readonly Finding[]): Line[] {
     if (!first || key === undefined) return []
     const subjects = group.map(short)
     const where = group.length === 1 ? about(scene, first) : few(subjects, 8)
-    return [{ mark: findingMark(first), where, name: subjects.join('+'), title: ruleTitle(key) }]
+    return [{ mark: findingMark(first), where, name: subjects.toSorted().join('+'), title: ruleTitle(key) }]
   })
 }
 

@@ -147,11 +147,16 @@ describe('nothing is guessed where something is missing', () => {
     expect(missing(circuit)).toEqual([
       'tabulated_capacity',
       'capacity',
+      'overload_limit',
       'voltage_drop',
       'voltage_drop_percent',
       'voltage_drop_total_percent',
       'continuity_expected',
+      'continuity_highest',
+      'continuity_lowest',
       'loop_expected',
+      'loop_highest',
+      'loop_lowest',
       'fault_current_grid',
       'protective_conductor_minimum',
     ])
@@ -166,6 +171,8 @@ describe('nothing is guessed where something is missing', () => {
     const unknown = [
       'voltage_drop_total_percent',
       'loop_expected',
+      'loop_highest',
+      'loop_lowest',
       'fault_current_grid',
       'fault_current_at_device',
       'protective_conductor_minimum',
@@ -177,6 +184,8 @@ describe('nothing is guessed where something is missing', () => {
     const { loop_impedance: _loop, fault_current: _current, ...supply } = bakery.supply
     const unknown = [
       'loop_expected',
+      'loop_highest',
+      'loop_lowest',
       'fault_current_grid',
       'fault_current_at_device',
       'grid_disconnection',

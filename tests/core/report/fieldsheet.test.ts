@@ -1,0 +1,152 @@
+import { describe, expect, it } from 'vitest'
+import { fieldsheetModel } from '#core/report/fieldsheet.ts'
+import { anchorsOf, judgedBase, judgedExample, textsOf } from './judged.ts'
+
+interface Point {
+  readonly anchor: string
+  readonly text: string | undefined
+  readonly note: string | undefined
+  readonly box: boolean
+}
+
+/** Every cell of a sheet that is a test point. */
+function pointsOf(part: unknown): Point[] {
+  if (Array.isArray(part)) return part.flatMap(pointsOf)
+  if (typeof part !== 'object' || part === null) return []
+  const { anchor, cells, rows, text, note, svg } = part as Record<string, unknown>
+  const isPoint =
+    typeof anchor === 'string' &&
+    anchor.startsWith('point/') &&
+    cells === undefined &&
+    rows === undefined &&
+    !('groups' in part)
+  const own = isPoint
+    ? [{ anchor, text: text as string | undefined, note: note as string | undefined, box: svg !== undefined }]
+    : []
+  return [...own, ...Object.values(part).flatMap(pointsOf)]
+}
+
+const sheetOf = (judged: ReturnType<typeof judgedBase>) =>
+  new Map(pointsOf(fieldsheetModel(judged)).map((point) => [point.anchor, point]))
+
+describe('the field sheet', () => {
+  it('has a box for each test point that is not read, and the reading where it is', () => {
+    for (const judged of [judgedExample('reed-hall-design'), judgedExample('alder-mill-bakery'), judgedBase()]) {
+      const points = [...sheetOf(judged).values()]
+      expect(points.length).toBeGreaterThan(20)
+      expect(points.filter(({ box, text }) => box === (text !== undefined && text !== ''))).toEqual([])
+    }
+  })
+
+  it('asks of every circuit for continuity, insulation, polarity and loops in the states in which it lives', () => {
+    const judged = judgedExample('reed-hall-design')
+    const sheet = sheetOf(judged)
+    const ids = Object.keys(judged.install.circuits ?? {})
+    expect(ids.length).toBe(4)
+    for (const id of ids)
+      for (const name of ['continuity', 'insulation', 'polarity', 'loop/grid'])
+        expect(sheet.get(`point/circuit/${id}/${name}`)?.box).toBe(true)
+    expect(sheet.has('point/circuit/K1/loop/island')).toBe(true)
+    expect(sheet.has('point/circuit/G1/loop/island')).toBe(false)
+  })
+
+  it('goes from dead to the grid, the island, and the transfers', () => {
+    const { sections } = fieldsheetModel(judgedExample('reed-hall-design'))
+    expect(sections.map(({ anchor }) => anchor)).toEqual([
+      'sheet/before',
+      'sheet/looks',
+      'sheet/dead',
+      'sheet/strings',
+      'sheet/grid',
+      'sheet/island',
+      'sheet/transfers',
+    ])
+  })
+
+  it('prints the limits that the readings will be held against', () => {
+    const sheet = sheetOf(judgedExample('reed-hall-design'))
+    expect(sheet.get('point/circuit/K1/insulation')?.note).toBe('≥ 1 at 500\u00a0V')
+    expect(sheet.get('point/residual/RCD1/rated/island')?.note).toBe('≤ 300')
+    expect(textsOf(fieldsheetModel(judgedExample('reed-hall-design')))).toContain('195.5 to 253.0')
+  })
+
+  it('puts the cautions first', () => {
+    const [first] = fieldsheetModel(judgedExample('reed-hall-design')).sections
+    expect(first?.blocks[0]).toMatchObject({ kind: 'notice', box: 'box-caution' })
+  })
+
+  it('tells where a reading is left out on purpose', () => {
+    const skipped = () => ({ not_tested: 'no access' })
+    const judged = judgedBase({
+      remove: ['readings.load_steps', 'readings.transfers'],
+      set: {
+        'readings.circuits.K1': skipped(),
+        'readings.residual_current.RCD1.island': skipped(),
+        'readings.residual_current.RCD0': skipped(),
+        'readings.arrays.A1.strings': [skipped(), skipped(), skipped()],
+        'readings.states.island': skipped(),
+        'readings.transfers': [
+          { to: 'island', not_tested: 'no access' },
+          { to: 'grid', not_tested: 'no access' },
+        ],
+        'readings.load_steps': [{ step: 'pump started', not_tested: 'no access' }],
+      },
+    })
+    const sheet = sheetOf(judged)
+    for (const anchor of [
+      'point/circuit/K1/continuity',
+      'point/circuit/K1/loop/grid',
+      'point/residual/RCD1/half/island',
+      'point/residual/RCD0/half/grid',
+      'point/string/A1/2/voc',
+      'point/state/frequency/island',
+      'point/transfer/island/dark',
+      'point/transfer/grid/gap',
+      'point/load-step/1/voltage',
+    ])
+      expect(sheet.get(anchor), anchor).toMatchObject({ text: 'not tested', note: 'no access', box: false })
+    expect(sheet.get('point/circuit/K1/polarity')?.text).toBe('no access')
+    expect(sheet.get('point/state/rotation/island')?.text).toBe('no access')
+  })
+
+  it('asks for the start of each load that draws more at its start, else for the largest load', () => {
+    const starting = judgedBase({ remove: ['readings'], set: { 'circuits.K1.load.start': '3x' } })
+    expect(textsOf(fieldsheetModel(starting)).join('\n')).toContain('started: lowest voltage')
+    const loads = Object.keys(starting.install.circuits ?? {}).filter(
+      (id) => starting.install.circuits?.[id]?.load?.start !== undefined,
+    )
+    const steady = judgedBase({ remove: ['readings', ...loads.map((id) => `circuits.${id}.load`)] })
+    expect(textsOf(fieldsheetModel(steady))).toContain('Largest load started: lowest voltage')
+  })
+
+  it('says to write down what has no limit yet', () => {
+    const bare = judgedBase({
+      remove: [
+        'readings',
+        'inspection',
+        'instruments',
+        'people',
+        'report.inspected',
+        'earthing',
+        'meter.link',
+        'residual_current',
+        'circuits.K1.cable.length',
+        'inverters.INV.interface_protection',
+      ],
+      set: { 'boards.MB.fed_from': 'supply', 'boards.EB.fed_from': 'CO', 'circuits.K7.fed_from': 'MB' },
+    })
+    const sheet = sheetOf(bare)
+    expect(sheet.get('point/circuit/K1/continuity')?.note).toBe('write it down')
+    expect(sheet.get('point/head/date')?.box).toBe(true)
+    expect(
+      [...sheet.keys()].filter((anchor) => anchor.startsWith('point/residual') || anchor.startsWith('point/earthing')),
+    ).toEqual([])
+  })
+
+  it('asks for three poles less on a single-phase supply, and for no rotation', () => {
+    const anchors = anchorsOf(fieldsheetModel(judgedExample('heron-ford-dwelling')))
+    expect(anchors).toContain('point/transfer/island/terminal/N')
+    expect(anchors).not.toContain('point/transfer/island/terminal/L2')
+    expect(anchors).not.toContain('point/state/rotation/grid')
+  })
+})

@@ -1,0 +1,192 @@
+import { readFileSync } from 'node:fs'
+import { join } from 'node:path'
+import { describe, expect, it } from 'vitest'
+import type { Judged } from '#core/engine.ts'
+import { factsOf } from '#core/report/facts.ts'
+import { createdFrom, renderFieldsheet, renderReport } from '#core/report/render.ts'
+import { anchorsOf, exampleText, judgedBase, judgedText, modelOf, textsOf } from '../core/report/judged.ts'
+import { fonts } from './fonts.ts'
+import { pagesOf, run, withFile, wordsOf } from './tools.ts'
+
+const optionsOf = (judged: Judged, text: string, draft = true) => ({
+  text,
+  file: 'alder-mill.skerry.yaml',
+  fonts,
+  created: createdFrom(judged.install),
+  draft,
+})
+
+function reportOf(name: string): { readonly judged: Judged; readonly text: string; readonly pdf: Uint8Array } {
+  const text = exampleText(name)
+  const judged = judgedText(text)
+  return { judged, text, pdf: renderReport(judged, optionsOf(judged, text)) }
+}
+
+/** Letters and digits only: where lines end and words are parted does not count. */
+const bare = (text: string): string => text.replaceAll(/[\s\u00a0\u00ad-]+/g, '')
+
+/** The words of a PDF without what stands at the top and foot of each page. */
+const textOf = (pdf: Uint8Array): string => bare(wordsOf(pdf))
+
+describe('the report on paper', () => {
+  it.each(['alder-mill-bakery', 'tern-farm-tt', 'reed-hall-design', 'wrong-in-twenty-ways'])(
+    'holds every finding of %s, in its words',
+    (name) => {
+      const { judged, pdf } = reportOf(name)
+      const words = textOf(pdf)
+      const findings = modelOf(judged)
+        .sections.flatMap(({ blocks }) => blocks)
+        .flatMap((block) => (block.kind === 'findings' ? block.findings : []))
+      expect(findings.length).toBeGreaterThan(1)
+      for (const { title, says, remedy, rule, subjects } of findings)
+        for (const text of [title, says, remedy, rule, ...subjects.map(({ name: subject }) => subject)])
+          expect(words).toContain(bare(text))
+    },
+  )
+
+  it('holds every text of the model', () => {
+    const { judged, text, pdf } = reportOf('alder-mill-bakery')
+    const words = textOf(pdf)
+    const skipped =
+      /^(verdict-|row-|box|num$|centre$|table$|figure$|prose$|notice$|tiles$|findings$|particulars$|report|summary$|usual$)/
+    const texts = textsOf(modelOf(judged)).filter((part) => !skipped.test(part) && !/^[a-z]+$/.test(part))
+    expect(texts.length).toBeGreaterThan(500)
+    const missing = texts.filter(
+      (part) =>
+        !words.includes(bare(part.replaceAll('_', ''))) && !part.includes('SHA-256') && part !== 'a.skerry.yaml',
+    )
+    expect(missing).toEqual([])
+    expect(text.length).toBeGreaterThan(0)
+  })
+
+  it('carries the reference and the site, its number and the count of pages on each page, and a clear end', () => {
+    const { pdf } = reportOf('tern-farm-tt')
+    const pages = pagesOf(pdf)
+    expect(pages.length).toBeGreaterThan(5)
+    pages.forEach((page, index) => {
+      expect(page).toContain('FM-2026-052 · Tern Farm')
+      expect(page).toContain(`page ${index + 1} of ${pages.length}`)
+    })
+    expect(pages.at(-1)).toContain('End of report FM-2026-052')
+  })
+
+  it('carries what a report must: title, place, customer, dates, method, instruments, people, decision rule, limits of its meaning', () => {
+    const words = wordsOf(reportOf('tern-farm-tt').pdf)
+    for (const part of [
+      'Test report',
+      'Upper Moss 2, Fennmark',
+      'K. Tern',
+      '17 to 18 June 2026',
+      'not issued: a draft',
+      'International base, iec 1.0.0',
+      'The results relate to this installation only',
+      'Decision rule: simple acceptance',
+      'ILAC-G8:09/2019',
+      'IEC 61557',
+      'Authorised by',
+      'Tested by',
+      'Local codes and licensed practice come before anything printed here',
+    ])
+      expect(words).toContain(part)
+  })
+
+  it('says DRAFT across each page of a draft only', () => {
+    const text = exampleText('tern-farm-tt')
+    const judged = judgedText(text)
+    const marks = (draft: boolean) =>
+      bare(wordsOf(renderReport(judged, optionsOf(judged, text, draft)))).split('DRAFT').length - 1
+    expect(marks(true)).toBe(pagesOf(renderReport(judged, optionsOf(judged, text))).length)
+    expect(marks(false)).toBe(0)
+  })
+
+  it('is the same, byte for byte, each time', () => {
+    const [first, second] = [reportOf('alder-mill-bakery').pdf, reportOf('alder-mill-bakery').pdf]
+    expect(Buffer.compare(first, second)).toBe(0)
+  })
+
+  it('carries the file as it was entered, and every quantity with unit, formula and source', () => {
+    const { judged, text, pdf } = reportOf('alder-mill-bakery')
+    withFile('report.pdf', pdf, (path, folder) => {
+      run('pdfdetach', '-saveall', '-o', folder, path)
+      expect(readFileSync(join(folder, 'alder-mill.skerry.yaml'), 'utf8')).toBe(text)
+      expect(JSON.parse(readFileSync(join(folder, 'facts.json'), 'utf8'))).toEqual(
+        JSON.parse(JSON.stringify(factsOf(judged))),
+      )
+    })
+  })
+
+  it.each([
+    '{{constructor}}',
+    '{{{{raw}}}} {{/raw}}',
+    '<b>bold</b>',
+    '${7*7}',
+    '<%=7*7%>',
+    '</td></table>',
+    'Tür & Sohn “Öl” ²Ω',
+    '&lt;',
+  ])('prints %s as it was written, in every text field', (odd) => {
+    const text = {
+      'site.name': odd,
+      'site.customer': odd,
+      'report.extent': odd,
+      'report.remarks': odd,
+      'circuits.K1.serves': odd,
+      'boards.EB.name': odd,
+      'supply.operator': odd,
+      'instruments.T1.kind': odd,
+      'people.tested_by.name': odd,
+      'inspection.0.note': odd,
+      'batteries.BAT.place': odd,
+    }
+    const judged = judgedBase({ set: text })
+    const words = textOf(renderReport(judged, optionsOf(judged, 'x: 1')))
+    expect(words.split(bare(odd)).length).toBeGreaterThan(10)
+    expect(words).not.toContain('49')
+    expect(textOf(renderFieldsheet(judged, optionsOf(judged, 'x: 1')))).toContain(bare(odd))
+  })
+
+  it('dates a file without an inspection the same on every day', () => {
+    const judged = judgedBase({ remove: ['report.inspected'] })
+    expect(createdFrom(judged.install)).toBe('2000-01-01T00:00:00Z')
+    const oneDay = judgedBase({ remove: ['report.inspected.to'] })
+    expect(createdFrom(oneDay.install)).toBe('2026-06-16T00:00:00Z')
+    expect(createdFrom(judgedBase().install)).toBe('2026-06-17T00:00:00Z')
+  })
+
+  it('takes a building of a thousand circuits, each in the schedule and in the tests', { timeout: 120_000 }, () => {
+    const circuits = Object.fromEntries(
+      Array.from({ length: 1000 }, (_, index) => [
+        `N${index}`,
+        {
+          serves: `Room ${index}`,
+          fed_from: 'MB',
+          phases: ['L1'],
+          device: { breaker: 'B16', breaking: '6 kA' },
+          cable: { type: '3G2.5', insulation: 'pvc', method: 'C', length: '12 m' },
+          load: { power: '10 W' },
+        },
+      ]),
+    )
+    const judged = judgedBase({
+      set: Object.fromEntries(Object.entries(circuits).map(([id, circuit]) => [`circuits.${id}`, circuit])),
+    })
+    const anchors = new Set(anchorsOf(modelOf(judged)))
+    expect(
+      Object.keys(circuits).filter(
+        (id) => !anchors.has(`circuit/${id}/design`) || !anchors.has(`circuit/${id}/loop/grid`),
+      ),
+    ).toEqual([])
+    const words = textOf(renderReport(judged, optionsOf(judged, 'x: 1')))
+    expect(Object.keys(circuits).filter((id) => !words.includes(id))).toEqual([])
+  })
+})
+
+describe('the field sheet on paper', () => {
+  it('has no mark of a draft, and ends clearly', () => {
+    const text = exampleText('reed-hall-design')
+    const judged = judgedText(text)
+    const pages = pagesOf(renderFieldsheet(judged, optionsOf(judged, text)))
+    expect(pages.join('')).not.toContain('DRAFT')
+    expect(pages.at(-1)).toContain('End of field sheet FM-2026-071')
+  })
+})
