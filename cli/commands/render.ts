@@ -1,7 +1,7 @@
 import { endWith, ownFile, say, writeWhole } from '#cli/io.ts'
 import { judgedFile } from '#cli/judged.ts'
-import { createdFrom, renderFieldsheet, renderReport } from '#core/document/render.ts'
 import type { FontName } from '#core/paper/options.ts'
+import { createdFrom, renderFieldsheet, renderReport } from '#core/report/render.ts'
 
 const FACES = ['regular', 'italic', 'medium', 'semibold', 'fallback'] as const satisfies readonly FontName[]
 

@@ -63,7 +63,7 @@ const KINDS = {
   'gas-current': { name: 'a gassing current', units: { 'mA/Ah': ten(0), 'A/Ah': ten(3) }, example: '5 mA/Ah' },
 } as const satisfies Readonly<Record<string, Kind>>
 
-export type QuantityKind = keyof typeof KINDS
+type QuantityKind = keyof typeof KINDS
 
 const BY_NAME: ReadonlyMap<string, Kind> = new Map(Object.entries(KINDS))
 

@@ -1,9 +1,9 @@
 // Pages a second: the example's report, against plain PDFKit text of as many pages.
 import { spawnSync } from 'node:child_process'
 import { readFileSync } from 'node:fs'
-import { renderReport } from '#core/document/render.ts'
 import { check } from '#core/engine.ts'
 import { SHIPPED_BOOKS, shippedBook } from '#core/judge/shipped.ts'
+import { renderReport } from '#core/report/render.ts'
 import { readFonts } from '#tools/build/fonts.ts'
 
 const FILE = 'examples/alder-mill-bakery.skerry.yaml'

@@ -1,7 +1,7 @@
 import { readFile } from 'node:fs/promises'
-import { generateTemplates } from '#tools/document/generate.ts'
 import { generateRules } from '#tools/rules/generate.ts'
 import { generateSchemas } from '#tools/schema/generate.ts'
+import { generateTemplates } from '#tools/templates/generate.ts'
 
 /** What lies in the working tree under a path; nothing where there is no such file. */
 async function present(path: string): Promise<string | undefined> {
