@@ -391,6 +391,11 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Install or find an electrode, measure it, and write it under earthing.";
 },"useData":true})},
+"iec/tt-building-has-an-electrode":{title:"In a TT system the building has an electrode",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "The supply is a TT system, and the building has no electrode on record.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Install an electrode, measure it, and write it under earthing.";
+},"useData":true})},
 "iec/electrode-is-measured":{title:"The electrode's resistance is measured",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -436,6 +441,34 @@ export default {
     + " is the least.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Run larger main bonding conductors.";
+},"useData":true})},
+"iec/main-bonding-is-continuous":{title:"The main bonding is continuous",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The main bonding reads up to "
+    + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"bonding_continuity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":29},"end":{"line":1,"column":58}}})) != null ? stack1 : "")
+    + "; a sound clamp and conductor read a few hundredths of an ohm.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Clean and tighten the clamp, follow the conductor, and read again. Where it is very long, say so in a departure.";
+},"useData":true})},
+"iec/every-main-bond-was-read":{title:"Every main bond has a reading",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "These main bonds have no reading: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"bonding_unread",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":34},"end":{"line":1,"column":59}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read the continuity of each bond, or state why it was not tested.";
 },"useData":true})},
 "iec/transfer-to-the-island-was-tried":{title:"The transfer to the island was tried",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "No transfer to the island is on record.";
@@ -1819,6 +1852,23 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read the currents again at 400 W/m² or more, or state why not.";
 },"useData":true})},
+"iec/string-was-read-by-daylight":{title:"The sun was up when the string was read",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " is said to have been read at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"taken",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":38},"end":{"line":1,"column":54}}})) != null ? stack1 : "")
+    + "; the sun stood at "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"sun_elevation",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":73},"end":{"line":1,"column":97}}})) != null ? stack1 : "")
+    + " then.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Correct the time, its offset from universal time, or the position of the site.";
+},"useData":true})},
 "iec/interface-protection-is-on-record":{title:"The settings of the interface protection are on record",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -2147,6 +2197,20 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Move loads to the grid side, or fit a larger inverter.";
 },"useData":true})},
+"iec/every-loaded-line-is-fed":{title:"Each line with backed-up load is fed in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "No inverter feeds these lines in the island, and backed-up circuits are on them: "
+    + ((stack1 = lookupProperty(helpers,"list").call(depth0 != null ? depth0 : (container.nullContext || {}),"unfed_lines",{"name":"list","hash":{},"data":data,"loc":{"start":{"line":1,"column":81},"end":{"line":1,"column":103}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Move the circuits to a line that is fed, or use an inverter that feeds all lines.";
+},"useData":true})},
 "iec/starts-fit-the-peak":{title:"The largest start fits the inverter's peak",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -2193,7 +2257,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take it from the datasheet or measure it; there is no figure that holds for all.";
 },"useData":true})},
-"iec/battery-can-give-the-load":{title:"The battery can give the power of the backed-up loads",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/battery-can-give-the-load":{title:"The batteries can give the power of the backed-up loads",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2203,11 +2267,37 @@ export default {
 
   return "The backed-up loads draw "
     + ((stack1 = lookupProperty(helpers,"show").call(alias1,"backed_up_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":25},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
-    + " together; the battery and its inverter give "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"discharge_limit",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":95},"end":{"line":1,"column":121}}})) != null ? stack1 : "")
-    + " without sun.";
+    + " together; what the batteries and their inverters give without sun is "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"discharge_limit_together",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":120},"end":{"line":1,"column":155}}})) != null ? stack1 : "")
+    + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Tell the customer which loads may run together at night, or move some to the grid side.";
+},"useData":true})},
+"iec/must-run-loads-fit-the-battery":{title:"The batteries can give the power of what must run",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "What must run draws "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"must_run_load",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":20},"end":{"line":1,"column":44}}})) != null ? stack1 : "")
+    + "; what the batteries and their inverters give without sun is "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"discharge_limit_together",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":105},"end":{"line":1,"column":140}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit more discharge power, or agree with the customer on what really must run.";
+},"useData":true})},
+"iec/must-run-loads-are-marked":{title:"It is marked which circuits must run in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "No backed-up circuit is marked as one that must run.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Ask the customer what must not fail, and write must_run true under the load of those circuits.";
+},"useData":true})},
+"iec/hours-of-supply-are-known":{title:"It is known how long the held-back charge lasts",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "How long the held-back charge lasts cannot be computed.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "State the charge that is held back in the inverter's settings, and power or daily energy of each backed-up load.";
 },"useData":true})},
 "iec/charge-is-held-back":{title:"Charge is held back for the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -2313,6 +2403,26 @@ export default {
     + " are usual.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "On the grid ask the operator; in the island check the setting and the load.";
+},"useData":true})},
+"iec/island-keeps-to-its-setting":{title:"The voltages in the island lie near the inverter's setting",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "In the island the lines read L1 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L1",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":53}}})) != null ? stack1 : "")
+    + ", L2 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L2",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":58},"end":{"line":1,"column":79}}})) != null ? stack1 : "")
+    + " and L3 "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"voltage_L3",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":87},"end":{"line":1,"column":108}}})) != null ? stack1 : "")
+    + "; the inverter is set to "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"island_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":133},"end":{"line":1,"column":158}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Read the setting back, look at the load while the reading was taken, and check the neutral's terminals.";
 },"useData":true})},
 "iec/frequency-is-within-the-yardstick":{title:"The frequency lies within the yardstick of the public supply",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -2666,6 +2776,24 @@ export default {
     + ".";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Write the date that the kind of premises and local rules ask for under next_due.";
+},"useData":true})},
+"iec/next-verification-comes-within-the-usual-interval":{title:"The next verification comes within the interval that is usual for the premises",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The next verification is due on "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"next_due",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":32},"end":{"line":1,"column":51}}})) != null ? stack1 : "")
+    + "; for "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"premises",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":57},"end":{"line":1,"column":76}}})) != null ? stack1 : "")
+    + " premises "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"usual_interval",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":86},"end":{"line":1,"column":111}}})) != null ? stack1 : "")
+    + " is the usual interval at most.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Bring the date forward, or say which local rule allows a longer time.";
 },"useData":true})},
 "iec/extent-is-stated":{title:"It is stated what the report covers",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {

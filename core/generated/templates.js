@@ -181,6 +181,35 @@ partials: {
     + alias2(lookupProperty(helpers,"words").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"caption") : depth0),{"name":"words","hash":{},"data":data,"loc":{"start":{"line":2,"column":29},"end":{"line":2,"column":46}}}))
     + "</figcaption></figure>\n</div>\n";
 },"useData":true}),
+"figures": () => ({"0":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=container.lambda, alias2=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<figure data-anchor=\""
+    + alias2(alias1((depth0 != null ? lookupProperty(depth0,"anchor") : depth0), depth0))
+    + "\">"
+    + ((stack1 = alias1((depth0 != null ? lookupProperty(depth0,"svg") : depth0), depth0)) != null ? stack1 : "")
+    + "<figcaption>"
+    + alias2(lookupProperty(helpers,"words").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"caption") : depth0),{"name":"words","hash":{},"data":data,"loc":{"start":{"line":3,"column":54},"end":{"line":3,"column":71}}}))
+    + "</figcaption></figure>\n";
+},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div class=\"keep\" data-anchor=\""
+    + container.escapeExpression(container.lambda((depth0 != null ? lookupProperty(depth0,"anchor") : depth0), depth0))
+    + "\">\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"figures") : depth0),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":0},"end":{"line":4,"column":9}}})) != null ? stack1 : "")
+    + "</div>\n";
+},"useData":true}),
 "findings": () => ({"0":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -309,6 +338,37 @@ partials: {
     + "<table>\n<colgroup><col width=\"25%\"><col width=\"75%\"></colgroup>\n<thead><tr><th scope=\"col\">Verdict and subject</th><th scope=\"col\">Finding, what to do, source</th></tr></thead>\n<tbody>\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias3,(depth0 != null ? lookupProperty(depth0,"findings") : depth0),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":9,"column":0},"end":{"line":22,"column":9}}})) != null ? stack1 : "")
     + "</tbody>\n</table>\n</div>\n";
+},"useData":true}),
+"names": () => ({"0":function(container,depth0,helpers,partials,data) {
+    var alias1=container.lambda, alias2=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<li data-anchor=\""
+    + alias2(alias1((depth0 != null ? lookupProperty(depth0,"anchor") : depth0), depth0))
+    + "\"><small>"
+    + alias2(alias1((depth0 != null ? lookupProperty(depth0,"name") : depth0), depth0))
+    + "</small></li>\n";
+},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=container.lambda, alias2=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<div data-anchor=\""
+    + alias2(alias1((depth0 != null ? lookupProperty(depth0,"anchor") : depth0), depth0))
+    + "\">\n<h3>"
+    + alias2(alias1((depth0 != null ? lookupProperty(depth0,"title") : depth0), depth0))
+    + "</h3>\n<p class=\"muted\">"
+    + alias2(alias1((depth0 != null ? lookupProperty(depth0,"lead") : depth0), depth0))
+    + "</p>\n<div class=\"columns-2\">\n<ul>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"names") : depth0),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":6,"column":0},"end":{"line":7,"column":9}}})) != null ? stack1 : "")
+    + "</ul>\n</div>\n</div>\n";
 },"useData":true}),
 "notice": () => ({"0":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {

@@ -1,5 +1,6 @@
 import type { Battery, Circuit } from '#core/install.ts'
 import { autonomy, feedsIsland, heldBackEnergy, meanLoad } from './battery-energy.ts'
+import { dischargeTogether, powerTogether } from './battery-power.ts'
 import { ventilation, ventOpening } from './battery-ventilation.ts'
 import { knownNumber } from './circuit-item.ts'
 import type { Family, Quantity, Scene } from './quantity.ts'
@@ -47,6 +48,24 @@ export const batteryFamily: Family<Item> = {
       source: 'common practice',
       from: ['max_discharge', 'into', 'inverters.fed_from', 'inverters.island.continuous', 'inverters.rated_power'],
       compute: ({ battery }, scene) => discharge(battery, scene),
+    },
+    {
+      name: 'discharge_limit_together',
+      unit: 'W',
+      title: 'Highest power that all batteries give in the island together',
+      formula: 'Σ over the inverters of the smaller of its continuous power and Σ discharge power of its batteries',
+      source: 'common practice',
+      from: ['batteries', 'inverters.fed_from', 'inverters.island.continuous', 'inverters.rated_power'],
+      compute: ({ battery }, scene) => (feedsIsland(battery, scene) ? dischargeTogether(scene) : undefined),
+    },
+    {
+      name: 'must_run_load',
+      unit: 'W',
+      title: 'Load that must run in the island',
+      formula: 'Σ active power of backed-up circuits marked so',
+      source: 'definition of active power; without diversity',
+      from: ['circuits.load.must_run', 'circuits.load.power', 'circuits.load.current'],
+      compute: (_item, scene) => powerTogether(scene, ({ load }) => load?.must_run === true),
     },
     {
       name: 'held_back_energy',

@@ -5,6 +5,7 @@ import { usable } from './loop-reading.ts'
 import type { Family, Quantity } from './quantity.ts'
 import { deviation, modulesMissing, percentFrom, type StringReadingName } from './string-spread.ts'
 import { currentAtStc, expectedCurrent, expectedVoltage, voltageAtStc } from './string-translation.ts'
+import { sunPosition } from './sun.ts'
 
 interface Item {
   readonly id: string
@@ -120,6 +121,18 @@ export const stringFamily: Family<Item> = {
         const short = knownNumber(known, 'voc_from_expected')
         return short === undefined ? undefined : modulesMissing(short, array.modules_in_series)
       },
+    },
+    {
+      name: 'sun_elevation',
+      unit: '°',
+      title: 'Height of the sun when it was read',
+      formula: 'at the stated time and the position of the site',
+      source: 'suncalc 2.0.2 after Meeus, Astronomical Algorithms',
+      from: ['site.position', 'taken'],
+      compute: ({ readings }, { install: { site } }) =>
+        readings?.taken === undefined || site.position === undefined
+          ? undefined
+          : sunPosition(new Date(readings.taken), site.position).elevation,
     },
     ...arrayInsulationQuantities<Item>(),
   ],

@@ -63,8 +63,6 @@ const KINDS = {
   'gas-current': { name: 'a gassing current', units: { 'mA/Ah': ten(0), 'A/Ah': ten(3) }, example: '5 mA/Ah' },
 } as const satisfies Readonly<Record<string, Kind>>
 
-type QuantityKind = keyof typeof KINDS
-
 const BY_NAME: ReadonlyMap<string, Kind> = new Map(Object.entries(KINDS))
 
 /**

@@ -72,7 +72,13 @@ export interface FigureBlock {
   readonly anchor: string
   readonly svg: string
   readonly caption: string
-  readonly width?: string
+}
+
+/** Drawings that are seen together. */
+export interface Figures {
+  readonly kind: 'figures'
+  readonly anchor: string
+  readonly figures: readonly FigureBlock[]
 }
 
 export interface Prose {
@@ -130,7 +136,16 @@ export interface Findings {
   readonly findings: readonly FindingBlock[]
 }
 
-export type Block = Particulars | TableBlock | FigureBlock | Prose | Notice | Tiles | Findings
+/** Names in running text, each of which can be pointed at. */
+export interface Names {
+  readonly kind: 'names'
+  readonly anchor: string
+  readonly title: string
+  readonly lead: string
+  readonly names: readonly { readonly anchor: string; readonly name: string }[]
+}
+
+export type Block = Names | Figures | Particulars | TableBlock | FigureBlock | Prose | Notice | Tiles | Findings
 
 export interface Section {
   readonly anchor: string

@@ -1,6 +1,6 @@
+import { strToU8 } from 'fflate'
 import type { Judged } from '#core/engine.ts'
 import type { Install } from '#core/install.ts'
-import { encodeUtf8 } from '#core/judge/canonical.ts'
 import type { Attachment, FontName, PaperOptions } from '#core/paper/options.ts'
 import { typeset } from '#core/paper/paper.ts'
 import { sha256 } from '#core/paper/sha256.ts'
@@ -36,7 +36,7 @@ function attachments(judged: Judged, { text, file, created }: RenderOptions): At
     {
       name: file,
       type: 'application/yaml',
-      bytes: encodeUtf8(text),
+      bytes: strToU8(text),
       relationship: 'Source',
       description: 'The installation as entered',
       created,
@@ -44,7 +44,7 @@ function attachments(judged: Judged, { text, file, created }: RenderOptions): At
     {
       name: 'facts.json',
       type: 'application/json',
-      bytes: encodeUtf8(`${JSON.stringify(factsOf(judged), null, 2)}\n`),
+      bytes: strToU8(`${JSON.stringify(factsOf(judged), null, 2)}\n`),
       relationship: 'Data',
       description: 'Every computed quantity, with its formula and source',
       created,
@@ -74,7 +74,7 @@ function paperOptions({ install, book }: Judged, { fonts, created, draft }: Rend
  */
 export function renderReport(judged: Judged, options: RenderOptions): Uint8Array {
   const { text, file, draft } = options
-  const model = reportModel(judged, { file, hash: hex(sha256(encodeUtf8(text))), draft })
+  const model = reportModel(judged, { file, hash: hex(sha256(strToU8(text))), draft })
   return typeset(fillPage('report', model), {
     ...paperOptions(judged, options, 'Test report'),
     attachments: attachments(judged, options),

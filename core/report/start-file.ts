@@ -77,6 +77,7 @@ inverters:
     rated_power: ${three ? 10 : 5} kVA
     island: { continuous: ${three ? 10 : 5} kVA, peak: ${three ? 12 : 6} kVA, fault_current: 40 A, shuts_down_within: 0.2 s }   # from the datasheet
     residual_monitoring: integrated
+    # interface_protection: { u_high: 253 V, u_low: 184 V, f_high: 51.5 Hz, f_low: 47.5 Hz, reconnect_after: 60 s }   # as read back
     settings: { island_voltage: 230 V, held_back_charge: 40 %, low_charge_alarm: 20 % }
 
 batteries:

@@ -3,6 +3,8 @@ import type { Install, StateReadings } from '#core/install.ts'
 import { installationFamily } from '#core/quantities/installation.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
 import { inspectionFields } from './inspection.ts'
+import { intervalFields } from './interval.ts'
+import { islandFields } from './island.ts'
 import { entered, type SheetPlan, type StateMeasuredField } from './plan.ts'
 
 function stateOf({ install }: Scene, state: State): StateReadings | undefined {
@@ -45,6 +47,8 @@ export const installationPlan: SheetPlan<Install> = {
   quantities: installationFamily.quantities,
   entered: [
     ...inspectionFields,
+    ...intervalFields,
+    ...islandFields,
     entered('reference', '', 'Reference of the report', ['report', 'reference'], ({ report }) => report.reference),
     entered('purpose', '', 'Purpose', ['report', 'purpose'], ({ report }) => report.purpose),
     entered(

@@ -72,11 +72,16 @@ export const supplyPlan: SheetPlan<Supply> = {
   ],
 }
 
-/** The largest of the readings that were taken, so that one rule can judge them all. */
-function worst(readings: readonly (Measured | undefined)[]): Measured | undefined {
-  const taken = readings.flatMap((reading) => (reading && 'value' in reading ? [reading] : []))
-  if (taken.length === 0) return readings.find((reading) => reading !== undefined)
-  return taken.reduce((most, reading) => (reading.value > most.value ? reading : most))
+/** How bad a reading is: the highest comes first, then one that was not taken for a stated reason, then a missing one. */
+function badness(reading: Measured | undefined): number {
+  if (reading === undefined) return -2
+  return 'value' in reading ? reading.value : -1
+}
+
+/** Which main bond reads worst, so that one rule can judge them all; the first one where none was read. */
+function worstBond({ bonding = [] }: EarthingArrangement): number {
+  const scores = bonding.map(({ continuity }) => badness(continuity))
+  return Math.max(0, scores.indexOf(Math.max(...scores)))
 }
 
 /** What the rules see of the earthing arrangement. */
@@ -114,6 +119,9 @@ export const earthingPlan: SheetPlan<EarthingArrangement> = {
     entered('bonding_smallest', 'mm²', 'Smallest main bonding conductor', ['bonding'], ({ bonding }) =>
       bonding && bonding.length > 0 ? Math.min(...bonding.map(({ size }) => size)) : undefined,
     ),
+    entered('bonding_unread', '', 'Bonded parts without a reading', ['bonding'], ({ bonding }) =>
+      (bonding ?? []).filter(({ continuity }) => continuity === undefined).map(({ to }) => to),
+    ),
     entered(
       'neutral_switched',
       '',
@@ -136,8 +144,8 @@ export const earthingPlan: SheetPlan<EarthingArrangement> = {
       unit: 'Ω',
       title: 'Highest continuity reading of the main bonding',
       kind: 'continuity',
-      path: () => ['earthing', 'bonding'],
-      reading: (earthing) => worst((earthing.bonding ?? []).map(({ continuity }) => continuity)),
+      path: (earthing) => ['earthing', 'bonding', worstBond(earthing), 'continuity'],
+      reading: (earthing) => earthing.bonding?.[worstBond(earthing)]?.continuity,
     },
   ],
 }

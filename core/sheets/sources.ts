@@ -1,6 +1,7 @@
 import type { Battery, Inverter, PvArray } from '#core/install.ts'
 import { arrayFamily } from '#core/quantities/array.ts'
 import { batteryFamily } from '#core/quantities/battery.ts'
+import { powerTogether } from '#core/quantities/battery-power.ts'
 import { inverterFamily } from '#core/quantities/inverter.ts'
 import { entered, type SheetPlan } from './plan.ts'
 
@@ -333,9 +334,6 @@ export const batteryPlan: SheetPlan<BatteryItem> = {
       ({ battery }) => battery.distance_to_opening,
     ),
     entered('premises', '', 'Kind of premises', ['place'], (_, { install }) => install.site.premises),
-    entered('backed_up_load', 'W', 'Backed-up load', [], (_, { install, topology }) => {
-      const powers = topology.circuitsBelow(install.changeover.id).map((id) => install.circuits?.[id]?.load?.power ?? 0)
-      return powers.reduce((sum, power) => sum + power, 0)
-    }),
+    entered('backed_up_load', 'W', 'Backed-up load', [], (_, scene) => powerTogether(scene, () => true)),
   ],
 }

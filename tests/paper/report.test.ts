@@ -53,7 +53,7 @@ describe('the report on paper', () => {
   )
 
   it('holds every text of the model', () => {
-    const { judged, text, pdf } = reportOf('alder-mill-bakery')
+    const { judged, pdf } = reportOf('alder-mill-bakery')
     const words = textOf(pdf)
     const skipped =
       /^(verdict-|row-|box|num$|centre$|table$|figure$|prose$|notice$|tiles$|findings$|particulars$|report|summary$|usual$)/
@@ -61,10 +61,12 @@ describe('the report on paper', () => {
     expect(texts.length).toBeGreaterThan(500)
     const missing = texts.filter(
       (part) =>
-        !words.includes(bare(part.replaceAll('_', ''))) && !part.includes('SHA-256') && part !== 'a.skerry.yaml',
+        !words.includes(bare(part)) &&
+        !words.includes(bare(part.replaceAll('_', ''))) &&
+        !part.includes('SHA-256') &&
+        part !== 'a.skerry.yaml',
     )
     expect(missing).toEqual([])
-    expect(text.length).toBeGreaterThan(0)
   })
 
   it('carries the reference and the site, its number and the count of pages on each page, and a clear end', () => {
@@ -123,34 +125,43 @@ describe('the report on paper', () => {
     })
   })
 
-  it.each([
-    '{{constructor}}',
-    '{{{{raw}}}} {{/raw}}',
-    '<b>bold</b>',
-    '${7*7}',
-    '<%=7*7%>',
-    '</td></table>',
-    'Tür & Sohn “Öl” ²Ω',
-    '&lt;',
-  ])('prints %s as it was written, in every text field', (odd) => {
-    const text = {
-      'site.name': odd,
-      'site.customer': odd,
-      'report.extent': odd,
-      'report.remarks': odd,
-      'circuits.K1.serves': odd,
-      'boards.EB.name': odd,
-      'supply.operator': odd,
-      'instruments.T1.kind': odd,
-      'people.tested_by.name': odd,
-      'inspection.0.note': odd,
-      'batteries.BAT.place': odd,
+  it('prints odd text as it was written, in every text field, and runs none of it', () => {
+    const odd = [
+      '{{constructor}}',
+      '{{{{raw}}}} {{/raw}}',
+      '<b>bold</b>',
+      '${1234567*2}',
+      '<%=1234567*2%>',
+      '</td></table>',
+      'Tür & Sohn “Öl” ²Ω',
+      '&lt;',
+      '\'`="',
+      'file:///etc/hosts',
+      'a_b_c',
+    ]
+    const fields = [
+      'site.name',
+      'site.customer',
+      'report.extent',
+      'report.remarks',
+      'circuits.K1.serves',
+      'boards.EB.name',
+      'supply.operator',
+      'instruments.T1.kind',
+      'people.tested_by.name',
+      'inspection.0.note',
+      'batteries.BAT.place',
+    ]
+    expect(fields.length).toBe(odd.length)
+    for (const turn of [0, 3, 7]) {
+      const texts = fields.map((_, index) => odd[(index + turn) % odd.length] ?? '')
+      const judged = judgedBase({ set: Object.fromEntries(fields.map((field, index) => [field, texts[index]])) })
+      const words = textOf(renderReport(judged, optionsOf(judged, 'x: 1')))
+      expect(odd.filter((text) => !words.includes(bare(text)))).toEqual([])
+      expect(words.includes('2469134')).toBe(false)
+      const sheet = textOf(renderFieldsheet(judged, optionsOf(judged, 'x: 1')))
+      expect([texts[0], texts[4], texts[5]].filter((text = '') => !sheet.includes(bare(text)))).toEqual([])
     }
-    const judged = judgedBase({ set: text })
-    const words = textOf(renderReport(judged, optionsOf(judged, 'x: 1')))
-    expect(words.split(bare(odd)).length).toBeGreaterThan(10)
-    expect(words).not.toContain('49')
-    expect(textOf(renderFieldsheet(judged, optionsOf(judged, 'x: 1'))).includes(bare(odd))).toBe(true)
   })
 
   it('dates a file without an inspection the same on every day', () => {

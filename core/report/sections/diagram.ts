@@ -15,11 +15,17 @@ export function diagram({ install, topology }: ReportScene): Section {
   return {
     anchor: 'diagram',
     title: 'Single-line diagram',
-    blocks: STATES.map((state) => ({
-      kind: 'figure',
-      anchor: `diagram/${state}`,
-      svg: singleLine({ install, topology }, state),
-      caption: `${capital(STATE_WORDS[state])}. ${CAPTIONS[state]}`,
-    })),
+    blocks: [
+      {
+        kind: 'figures',
+        anchor: 'diagram/states',
+        figures: STATES.map((state) => ({
+          kind: 'figure',
+          anchor: `diagram/${state}`,
+          svg: singleLine({ install, topology }, state),
+          caption: `${capital(STATE_WORDS[state])}. ${CAPTIONS[state]}`,
+        })),
+      },
+    ],
   }
 }

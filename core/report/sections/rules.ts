@@ -1,7 +1,8 @@
 import type { Finding, Verdict } from '#core/glossary.ts'
 import { rulePage } from '#core/judge/pages.ts'
+import type { ShippedRule } from '#core/judge/shipped.ts'
 import { ruleTitle } from '#core/texts/words.ts'
-import { type Row, type RowGroup, type Section, tables } from '../blocks.ts'
+import { type Names, type Row, type RowGroup, type Section, tables } from '../blocks.ts'
 import { citesText } from '../finding-blocks.ts'
 import { WORST_FIRST } from '../marks.ts'
 import { capital, few } from '../print.ts'
@@ -9,8 +10,21 @@ import type { ReportScene } from '../scene.ts'
 
 const MOST = 10
 
+type ByRule = ReadonlyMap<string, readonly Finding[]>
+
+function findingsByRule(findings: readonly Finding[]): ByRule {
+  const byRule = new Map<string, Finding[]>()
+  for (const finding of findings) {
+    const known = byRule.get(finding.rule)
+    if (known) known.push(finding)
+    else byRule.set(finding.rule, [finding])
+  }
+  return byRule
+}
+
+/** Each verdict with its count and what it is about: `2 meets: K1, K2; 1 not applicable`. */
 function verdictsText(findings: readonly Finding[]): string {
-  const list = (verdict: Verdict) => {
+  const list = (verdict: Verdict): string[] => {
     const found = findings.filter((finding) => finding.verdict === verdict)
     if (found.length === 0) return []
     const names = [...new Set(found.map(({ subject }) => subject))]
@@ -20,38 +34,49 @@ function verdictsText(findings: readonly Finding[]): string {
   return WORST_FIRST.flatMap(list).join('; ')
 }
 
-/** Every rule that was judged, with its verdicts and its source. */
-export function rules({ judged }: ReportScene): Section {
-  const byRule = new Map<string, Finding[]>()
-  for (const finding of judged.findings) {
-    const known = byRule.get(finding.rule)
-    if (known) known.push(finding)
-    else byRule.set(finding.rule, [finding])
+function ruleRow({ id, key, severity }: ShippedRule, found: readonly Finding[]): Row {
+  return {
+    anchor: `judged/${id}`,
+    head: { text: ruleTitle(key), note: severity === 'failure' ? id : `${id} · ${severity}` },
+    cells: [{ text: citesText(rulePage(key).record.cites) }, { text: verdictsText(found) }],
   }
+}
+
+function chapterGroups(rules: readonly ShippedRule[], byRule: ByRule): RowGroup[] {
   const chapters = new Map<string, Row[]>()
-  for (const { id, key, severity } of judged.book.rules) {
-    const { chapter, record } = rulePage(key)
-    const found = byRule.get(id) ?? []
-    const row: Row = {
-      anchor: `judged/${id}`,
-      head: { text: ruleTitle(key), note: severity === 'failure' ? id : `${id} · ${severity}` },
-      cells: [{ text: citesText(record.cites) }, { text: verdictsText(found) || 'nothing to judge' }],
-    }
-    chapters.set(chapter, [...(chapters.get(chapter) ?? []), row])
+  for (const rule of rules) {
+    const { chapter } = rulePage(rule.key)
+    const row = ruleRow(rule, byRule.get(rule.id) ?? [])
+    const rows = chapters.get(chapter)
+    if (rows) rows.push(row)
+    else chapters.set(chapter, [row])
   }
-  const groups: RowGroup[] = [...chapters].map(([chapter, rows]) => ({
-    title: capital(chapter.replaceAll('-', ' ')),
-    rows,
-  }))
-  const columns = [
-    { label: 'Rule', width: 36 },
-    { label: 'Source', width: 40 },
-    { label: 'Verdicts', width: 24 },
-  ]
+  return [...chapters].map(([chapter, rows]) => ({ title: capital(chapter.replaceAll('-', ' ')), rows }))
+}
+
+function idle(rules: readonly ShippedRule[]): Names[] {
+  if (rules.length === 0) return []
+  const names = rules.map(({ id, key }) => ({ anchor: `judged/${id}`, name: `${ruleTitle(key)} (${id})` }))
+  const lead = 'Rules of the book that were looked at and found to be about nothing that is here.'
+  return [{ kind: 'names', anchor: 'rules/idle', title: 'Rules that do not apply', lead, names }]
+}
+
+const COLUMNS = [
+  { label: 'Rule', width: 36 },
+  { label: 'Source', width: 40 },
+  { label: 'Verdicts', width: 24 },
+] as const
+
+/** Every rule that was judged, with its verdicts and its source; last those that apply to nothing here. */
+export function rules({ judged }: ReportScene): Section {
+  const byRule = findingsByRule(judged.findings)
+  const applies = ({ id }: ShippedRule) => byRule.get(id)?.some(({ verdict }) => verdict !== 'not applicable') ?? false
+  const judgedRules = judged.book.rules.filter(applies)
+  const others = judged.book.rules.filter((rule) => !applies(rule))
   return {
     anchor: 'rules',
     title: 'Every rule judged',
     newPage: true,
-    blocks: tables('rules/list', columns, groups),
+    blocks: [...tables('rules/list', COLUMNS, chapterGroups(judgedRules, byRule)), ...idle(others)],
   }
 }
