@@ -269,3 +269,4 @@ export declare const c267: (values: object) => boolean
 export declare const c268: (values: object) => boolean
 export declare const c269: (values: object) => boolean
 export declare const c270: (values: object) => boolean
+export declare const c271: (values: object) => boolean

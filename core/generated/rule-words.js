@@ -456,7 +456,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Clean and tighten the clamp, follow the conductor, and read again. Where it is very long, say so in a departure.";
 },"useData":true})},
-"iec/every-main-bond-was-read":{title:"Every main bond has a reading",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/every-main-bond-was-read":{title:"Where main bonds were read, none was left out",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];

@@ -7,7 +7,7 @@ import { everyPlaced, place } from './draw/place.ts'
 import { drawing, group } from './draw/svg.ts'
 
 /** Room for the words behind each circuit. */
-const WORDS = 214
+const WORDS = 230
 const LEAST = 560
 
 /**

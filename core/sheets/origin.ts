@@ -119,9 +119,10 @@ export const earthingPlan: SheetPlan<EarthingArrangement> = {
     entered('bonding_smallest', 'mm²', 'Smallest main bonding conductor', ['bonding'], ({ bonding }) =>
       bonding && bonding.length > 0 ? Math.min(...bonding.map(({ size }) => size)) : undefined,
     ),
-    entered('bonding_unread', '', 'Bonded parts without a reading', ['bonding'], ({ bonding }) =>
-      (bonding ?? []).filter(({ continuity }) => continuity === undefined).map(({ to }) => to),
-    ),
+    entered('bonding_unread', '', 'Bonded parts that were left out', ['bonding'], ({ bonding = [] }) => {
+      const unread = bonding.filter(({ continuity }) => continuity === undefined)
+      return unread.length === bonding.length ? undefined : unread.map(({ to }) => to)
+    }),
     entered(
       'neutral_switched',
       '',

@@ -27,7 +27,7 @@ export async function compileValidator(bundled: SchemaNode): Promise<string> {
     inlineRefs: false,
     code: { source: true, esm: true, lines: false },
   })
-  const source = standalone.default(ajv, ajv.compile(mapSchema(bundled, bare)))
+  const source = quickPatterns(standalone.default(ajv, ajv.compile(mapSchema(bundled, bare))))
   const { outputFiles } = await build({
     stdin: { contents: slim(source), resolveDir: PROJECT, loader: 'js' },
     bundle: true,
@@ -61,6 +61,86 @@ function slim(source: string): string {
       'params:{}',
     )
 }
+
+const PATTERN = /new RegExp\(("(?:[^"\\]|\\.)*"), "u"\)/g
+
+/** Units as they are written nearly always; the full pattern judges every other spelling. */
+const USUAL_UNITS = [
+  '',
+  'V',
+  'mV',
+  'kV',
+  'A',
+  'mA',
+  'kA',
+  'ohm',
+  'Ω',
+  'mΩ',
+  'MΩ',
+  'kΩ',
+  'W',
+  'kW',
+  'VA',
+  'kVA',
+  'Wh',
+  'kWh',
+  's',
+  'ms',
+  'min',
+  'h',
+  'm',
+  'mm',
+  'mm²',
+  'mm2',
+  '°C',
+  '%',
+  '%/K',
+  'Hz',
+  'W/m²',
+  'W/m2',
+  '°',
+  'x',
+  'A²s',
+  'Ah',
+  'mA/Ah',
+] as const
+
+/** What every accepted number of the usual form has: the unit alone decides whether the pattern takes it. */
+const PROBES = ['0', '1', '1.5', '250', '0.42'] as const
+
+function takenUnits(pattern: string): readonly string[] {
+  const full = new RegExp(pattern, 'u')
+  return USUAL_UNITS.filter((unit) =>
+    PROBES.every((number) => full.test(`${number} ${unit}`.trim()) && full.test(`${number}${unit}`)),
+  )
+}
+
+/**
+ * A pattern is compiled by the engine when it is first used, and the patterns of quantities are long: a number in its
+ * usual form with a usual unit is told by one short pattern that all of them share. What that one does not know goes to
+ * the pattern of the schema, so the verdict is the same.
+ */
+function quickPatterns(source: string): string {
+  const replaced = source.replace(PATTERN, (all, literal: string) => {
+    const units = takenUnits(JSON.parse(literal) as string)
+    return units.length < 2 ? all : `usual(${literal}, ${JSON.stringify(units)})`
+  })
+  return `${USUAL}\n${replaced}`
+}
+
+const USUAL = `const number = /^(?:0|[1-9][0-9]*)(?:\\.[0-9]+)? ?([A-Za-z%/°Ω²2]*)$/
+function usual(source, units) {
+  const taken = new Set(units)
+  let full
+  return {
+    test(text) {
+      const match = number.exec(text)
+      if (match && taken.has(match[1])) return true
+      full ??= new RegExp(source, 'u')
+      return full.test(text)
+    },
+  }
+}`
 
 /** The schema without what only people read: the code carries its schema along. */
 function bare(node: SchemaNode): SchemaNode {

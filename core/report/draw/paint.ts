@@ -37,13 +37,16 @@ function isLive({ part }: Placed, { topology, install, state }: DiagramScene): b
 const lookOf = (live: boolean) => (live ? {} : DEAD)
 const inkOf = (live: boolean): string => (live ? COLOUR.ink : GREY)
 
+/** Part of its size that a letter is wide, on average and a little more. */
+const LETTER = 0.52
+
 /** About how wide words are, in units of the drawing: a little more than half their size a letter. */
-const wide = (words: string, size: number): number => words.length * size * 0.54
+const wide = (words: string, size: number): number => words.length * size * LETTER
 
 /** Words cut to a width. */
 function cut(words: string, width: number, size: number): string {
   if (wide(words, size) <= width) return words
-  return `${words.slice(0, Math.max(1, Math.floor(width / (size * 0.54)) - 1)).trimEnd()}…`
+  return `${words.slice(0, Math.max(1, Math.floor(width / (size * LETTER)) - 1)).trimEnd()}…`
 }
 
 interface Told {
@@ -133,9 +136,7 @@ function board(placed: Placed, scene: DiagramScene): string {
       fill: inkOf(live),
       stroke: 'none',
     }),
-    found?.neutral_link && found.neutral_link !== 'none'
-      ? linkAt(x + 2, Math.max(last, y) + 7, part.id, scene, 'N–PE')
-      : '',
+    part.linked ? linkAt(x + 2, Math.max(last, y) + 7, part.id, scene, 'N–PE') : '',
   ].join('')
 }
 
@@ -161,9 +162,9 @@ function circuit({ x, y, part }: Placed, scene: DiagramScene, live: boolean): st
     symbol.conductors(words - 26, y, found.phases.length),
     end,
     text(words, y + 3, cut(part.id, 30, 8.4), { ...plain, 'font-weight': 600 }),
-    text(words + 33, y + 3, cut(found.serves, 96, 8.4), plain),
-    text(words + 133, y + 3, deviceName(found.device), plain),
-    text(words + 164, y + 3, cut(cableName(found.cable), width - words - 164, 8.4), plain),
+    text(words + 33, y + 3, cut(found.serves, 112, 8.4), plain),
+    text(words + 149, y + 3, deviceName(found.device), plain),
+    text(words + 180, y + 3, cut(cableName(found.cable), width - words - 180, 8.4), plain),
   ].join('')
 }
 
@@ -238,9 +239,8 @@ function figure(placed: Placed, scene: DiagramScene, live: boolean): string {
       return changeover(placed, scene)
     case 'inverter': {
       const feeds = state === 'island' && topology.inverters.island.includes(part.id)
-      const own = install.inverters?.[part.id]?.neutral_link ?? 'none'
       const box = symbol.inverter(x, y, feeds ? COLOUR.lampTint : COLOUR.paper)
-      return own === 'none' ? box : box + linkAt(x + 21, y + 15, part.id, scene, 'N–PE')
+      return part.linked !== true ? box : box + linkAt(x + 21, y + 15, part.id, scene, 'N–PE')
     }
     case 'array':
       return symbol.array(x, y) + beside(placed, arrayWords(part.id, install), live)

@@ -7,6 +7,8 @@ export interface Part {
   readonly id: string
   readonly kind: PartKind
   readonly children: readonly Part[]
+  /** Carries a link between neutral and earth of its own, which hangs below it. */
+  readonly linked?: true
   /** For several circuits in one row. */
   readonly words?: string
 }
@@ -91,7 +93,9 @@ function sourcesOf(id: string, { arrays = {}, batteries = {} }: Install): Part[]
 function partOf(node: TopologyNode, plan: Plan): Part {
   const { id, kind } = node
   const children = kind === 'inverter' ? sourcesOf(id, plan.install) : childrenOf(node, plan)
-  return { id, kind, children }
+  const { boards, inverters } = plan.install
+  const link = (kind === 'inverter' ? inverters?.[id] : boards?.[id])?.neutral_link ?? 'none'
+  return { id, kind, children, ...(link !== 'none' && { linked: true }) }
 }
 
 /** The parts of the diagram from the supply on: the meter and the main protection stand before the first board. */

@@ -26,13 +26,16 @@ const ROOM: Readonly<Record<PartKind, Room>> = {
   'overcurrent device': { along: 42, above: 22, below: 28 },
   'residual-current device': { along: 44, above: 22, below: 28 },
   changeover: { along: 84, above: 28, below: 58 },
-  inverter: { along: 44, above: 28, below: 54 },
+  inverter: { along: 44, above: 28, below: 30 },
   array: { along: 36, above: 16, below: 12 },
   battery: { along: 36, above: 12, below: 12 },
   link: { along: 34, above: 10, below: 10 },
   circuit: { along: 52, above: 8.5, below: 8.5 },
   circuits: { along: 52, above: 8.5, below: 8.5 },
 }
+
+/** Room for a link to earth below a part. */
+const LINK = 40
 
 /** Where the name of a board stands when a device with a name of its own follows at the same height. */
 export const RAISED = 31
@@ -59,8 +62,8 @@ class Placing {
     this.#factor = rows > MANY ? CLOSE : 1
   }
 
-  #room({ kind, children }: Part): Room {
-    const room = ROOM[kind]
+  #room({ kind, children, linked }: Part): Room {
+    const room = linked ? { ...ROOM[kind], below: ROOM[kind].below + LINK } : ROOM[kind]
     if (kind === 'board' && leadsOn(children)) return { ...room, above: RAISED + 8 }
     if (kind !== 'circuit' && kind !== 'circuits') return room
     return { ...room, above: room.above * this.#factor, below: room.below * this.#factor }

@@ -48,6 +48,43 @@ describe('discharge limit', () => {
   })
 })
 
+describe('all batteries of the island together', () => {
+  const B = (into: string, max_discharge: number): Battery => ({ ...lithium, into, max_discharge })
+  const inverter = (more: Partial<Inverter>): Inverter => ({
+    fed_from: 'CO.load',
+    phases: 3,
+    rated_power: 4000,
+    ...more,
+  })
+  const together = (batteries: Record<string, Battery>, inverters: Record<string, Inverter>) =>
+    quantities(B('INV', 2000), { ...installWith({}), inverters, batteries }).discharge_limit_together
+
+  test('two on one inverter add up, as far as it passes them on', () => {
+    const batteries = { B1: B('INV', 2000), B2: B('INV', 3000) }
+    expect(together(batteries, { INV: inverter({ island: { continuous: 6000 } }) })).toBe(5000)
+    expect(together(batteries, { INV: inverter({}) })).toBe(4000)
+  })
+
+  test('an inverter without a battery gives nothing at night, one on the grid side nothing in the island', () => {
+    const batteries = { B1: B('INV', 2000), B2: B('OUT', 3000) }
+    const inverters = { INV: inverter({}), SUN: inverter({}), OUT: inverter({ fed_from: 'MB' }) }
+    expect(together(batteries, inverters)).toBe(2000)
+    expect(together(batteries, { ...inverters, INV: inverter({ fed_from: 'MB' }) })).toBeUndefined()
+  })
+
+  test('what must run adds up by power, or by current where only that is stated', () => {
+    const circuits = {
+      K1: fridge,
+      K2: sockets,
+      K3: plainCircuit('EB', { load: { current: 2, must_run: true } }),
+      K4: plainCircuit('EB', { load: { must_run: true } }),
+      K7: plainCircuit('MB', { load: { power: 9000, must_run: true } }),
+    }
+    expect(quantities(lithium, installWith({}, circuits)).must_run_load).toBeCloseTo(1400 + 460, 9)
+    expect(quantities(lithium, installWith({}, circuits)).discharge_limit_together).toBe(0)
+  })
+})
+
 describe('how long it lasts', () => {
   test('the bakery: 40 % of 9.6 kWh at 95 % for 12 kWh a day: 7.3 h; what must run: 9.7 h', () => {
     const values = quantities(lithium, installWith({}, { K1: fridge, K2: sockets }))

@@ -87,6 +87,25 @@ describe('readings translated to standard test conditions', () => {
   })
 })
 
+describe('the sun when the string was read', () => {
+  const position = { latitude: 47.31, longitude: 9.64 }
+  const elevation = (readings: StringReadings | undefined, site: object) => {
+    const scene = sceneOf({ ...bakery, site: { ...bakery.site, ...site } })
+    return compute(stringFamily, { id: 'A1/1', arrayId: 'A1', array: array(12), readings }, scene).sun_elevation
+  }
+
+  test('an hour off by its offset turns a noon reading into one by night', () => {
+    expect(elevation({ taken: '2026-06-16T12:00:00+02:00' }, { position })).toBeGreaterThan(55)
+    expect(elevation({ taken: '2026-06-16T12:00:00-10:00' }, { position })).toBeLessThan(0)
+  })
+
+  test('without a time, a position or a reading it is not known', () => {
+    expect(elevation({}, { position })).toBeUndefined()
+    expect(elevation({ taken: '2026-06-16T12:00:00+02:00' }, {})).toBeUndefined()
+    expect(elevation(undefined, { position })).toBeUndefined()
+  })
+})
+
 describe('strings of an array against each other', () => {
   test('570.1, 571.8, 569.4 and 523.0 V: the fourth lies 8.21 % below the median of 569.75 V', () => {
     const strings = [570.1, 571.8, 569.4, 523].map((volts) => ({ voc: of(volts) }))
