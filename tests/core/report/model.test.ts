@@ -6,6 +6,7 @@ import { findingAnchor } from '#core/report/finding-blocks.ts'
 import { anchorsOf, exampleText, judgedBase, judgedExample, judgedText, modelOf, textsOf } from './judged.ts'
 
 const EXAMPLES = readdirSync('examples')
+  .filter((file) => file.endsWith('.skerry.yaml'))
   .filter((name) => name.endsWith('.skerry.yaml'))
   .map((file) => file.replace('.skerry.yaml', ''))
   .filter((name) => name !== 'wrong-in-shape')

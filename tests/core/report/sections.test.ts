@@ -5,6 +5,7 @@ import { reportModel } from '#core/report/model.ts'
 import { judgedBase, judgedExample, modelOf, textsOf } from './judged.ts'
 
 const EXAMPLES = readdirSync('examples')
+  .filter((file) => file.endsWith('.skerry.yaml'))
   .map((file) => file.replace('.skerry.yaml', ''))
   .filter((name) => name !== 'wrong-in-shape')
 
@@ -100,6 +101,8 @@ describe('the sections of a report', () => {
     expect(words).toMatch(/Overvoltage\n264 V\n253 V\nfails/)
     expect(words).toContain('iec, then de')
     expect(plain(modelOf(judgedBase()))).toMatch(/Overvoltage\n253 V\nleft to the operator/)
+    const southern = plain(modelOf(judgedBase({ set: { 'report.rulebook': 'au' } })))
+    expect(southern).toMatch(/neutral-opens-no-sooner-than-the-lines\nau\nThere is no neutral contact to open\./)
   })
 
   it('tell a single-phase supply and a line of a single-phase inverter', () => {
