@@ -9,6 +9,19 @@ function fonts(): Record<FontName, Uint8Array> {
   return Object.fromEntries(FACES.map((name) => [name, ownFile(`fonts/${name}.ttf`)])) as Record<FontName, Uint8Array>
 }
 
+type Made = { readonly ok: true; readonly bytes: Uint8Array } | { readonly ok: false; readonly message: string }
+
+/** What cannot be printed, such as a character that no font has, is told with its words; anything else is a fault of ours. */
+function made(draw: () => Uint8Array): Made {
+  try {
+    return { ok: true, bytes: draw() }
+  } catch (error) {
+    // The engine stands beside this bundle, so its class is not ours to compare with.
+    if (error instanceof Error && error.name === 'PaperError') return { ok: false, message: error.message }
+    throw error
+  }
+}
+
 /** Writes the report, or the sheet for the site, as a PDF. */
 export async function render(
   name: 'render' | 'fieldsheet',
@@ -25,8 +38,9 @@ export async function render(
     created: createdFrom(judged.install),
     draft: true,
   }
-  const bytes = name === 'render' ? renderReport(judged, options) : renderFieldsheet(judged, options)
-  const written = writeWhole(output, bytes)
-  say(written.ok ? `Wrote ${output} (${(bytes.length / 1024).toFixed(0)} kB).\n` : `${written.message}\n`)
-  if (!written.ok) endWith(2)
+  const page = made(() => (name === 'render' ? renderReport(judged, options) : renderFieldsheet(judged, options)))
+  const written = page.ok ? writeWhole(output, page.bytes) : page
+  if (page.ok && written.ok) return say(`Wrote ${output} (${(page.bytes.length / 1024).toFixed(0)} kB).\n`)
+  say(`${written.ok ? '' : written.message}\nNothing was written.\n`)
+  endWith(2)
 }
