@@ -17,7 +17,10 @@ function made(draw: () => Uint8Array): Made {
     return { ok: true, bytes: draw() }
   } catch (error) {
     // The engine stands beside this bundle, so its class is not ours to compare with.
-    if (error instanceof Error && error.name === 'PaperError') return { ok: false, message: error.message }
+    if (error instanceof Error && error.name === 'PaperError') {
+      // Lines and columns of the typeset page mean nothing to whoever wrote the file.
+      return { ok: false, message: error.message.replace(/^Line \d+, column \d+: /, '') }
+    }
     throw error
   }
 }
