@@ -27,6 +27,8 @@ export interface FileResult {
   readonly stops: boolean
   readonly stopsStrictly: boolean
   readonly book: { readonly id: string; readonly version: string; readonly hash: string } | null
+  /** Already put in words where it was checked, its findings left there: what comes from another thread is copied. */
+  readonly block?: string
 }
 
 export interface ResultOptions {

@@ -1,5 +1,7 @@
 import { availableParallelism } from 'node:os'
 import { parentPort, Worker, workerData } from 'node:worker_threads'
+import type { FormatScene } from './formats/format.ts'
+import { worded } from './formats/text.ts'
 import { readText } from './io.ts'
 import { checkFile, type FileResult, unopened } from './result.ts'
 import { shippedShelf } from './shelf.ts'
@@ -9,6 +11,8 @@ export const THREAD = '--thread'
 
 interface Task {
   readonly all: boolean
+  /** How words are printed, where words are all that is wanted. */
+  readonly words: FormatScene | undefined
 }
 
 /** What a helper is handed at a time: enough to keep it busy, few enough that nobody waits for the last one. */
@@ -29,10 +33,11 @@ interface Done {
 /** The other end: checks what it is handed until nothing comes. */
 export function workInThread(): void {
   const shelf = shippedShelf()
-  const { all } = workerData as Task
+  const { all, words } = workerData as Task
   const checked = async (file: string): Promise<FileResult> => {
     const text = readText(file)
-    return text.ok ? checkFile(file, text.text, { all, shelf }) : unopened(file, text.message)
+    const result = text.ok ? await checkFile(file, text.text, { all, shelf }) : unopened(file, text.message)
+    return words ? worded(result, words) : result
   }
   parentPort?.on('message', ({ start, files }: Portion) => {
     void Promise.all(files.map(checked)).then((results) => parentPort?.postMessage({ start, results } satisfies Done))

@@ -1,3 +1,4 @@
+import type { FormatScene } from '#cli/formats/format.ts'
 import { FORMATS, type FormatName } from '#cli/formats/formats.ts'
 import {
   colourOf,
@@ -49,7 +50,9 @@ async function results(files: readonly string[], shelf: Shelf, options: CheckOpt
   const tell = progress(files.length)
   if (files.length >= MANY && options.rulebook === undefined) {
     const { checkInThreads } = await import('#cli/threads.ts')
-    return checkInThreads(files, { all: options.all }, tell)
+    const [only, ...others] = options.formats
+    const words = only?.format === 'text' && others.length === 0 ? sceneOf(options, only.output) : undefined
+    return checkInThreads(files, { all: options.all, words }, tell)
   }
   const found: FileResult[] = []
   for (const file of files) {
@@ -59,17 +62,21 @@ async function results(files: readonly string[], shelf: Shelf, options: CheckOpt
   return found
 }
 
+function sceneOf({ color, verbose, quiet, strict }: CheckOptions, output: string | undefined): FormatScene {
+  return {
+    version: VERSION,
+    colour: output === undefined && colourOf('stdout', color),
+    width: output === undefined ? Math.min(terminalWidth(), 120) : 100,
+    verbose,
+    quiet,
+    strict,
+  }
+}
+
 async function write(found: readonly FileResult[], options: CheckOptions): Promise<boolean> {
   for (const { format, output } of options.formats) {
     const print_ = await FORMATS[format]()
-    const content = print_(found, {
-      version: VERSION,
-      colour: output === undefined && colourOf('stdout', options.color),
-      width: output === undefined ? Math.min(terminalWidth(), 120) : 100,
-      verbose: options.verbose,
-      quiet: options.quiet,
-      strict: options.strict,
-    })
+    const content = print_(found, sceneOf(options, output))
     if (output === undefined) print(content)
     else {
       const written = writeWhole(output, content)

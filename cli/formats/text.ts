@@ -146,10 +146,15 @@ function fileBlock(result: FileResult, scene: FormatScene, ink: Ink): string {
     .join('\n')
 }
 
+/** A result put in words where it was checked. */
+export function worded(result: FileResult, scene: FormatScene): FileResult {
+  return { ...result, findings: [], block: fileBlock(result, scene, inks(scene.colour)) }
+}
+
 /** For people at a terminal: grouped by file, worst news with its place, its words and what to do. */
 export const text: Format = (results, scene) => {
   const ink = inks(scene.colour)
-  const blocks = results.map((result) => fileBlock(result, scene, ink))
+  const blocks = results.map((result) => result.block ?? fileBlock(result, scene, ink))
   const bad = results.filter(({ stops, stopsStrictly }) => (scene.strict ? stopsStrictly : stops)).length
   const many = results.length > 1 ? `${results.length} files, ${bad} with something at failure level.\n` : ''
   return `${blocks.join(scene.quiet ? '' : '\n')}${many}${scene.quiet ? '' : `${ink.faint(CAUTION)}\n`}`
