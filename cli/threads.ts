@@ -19,7 +19,7 @@ interface Task {
 const PORTION = 16
 const MOST_THREADS = 8
 /** MB for what lives no longer than one file: with room enough most of it is gone before it is ever looked at. */
-const YOUNG = 32
+const YOUNG = 8
 
 interface Portion {
   readonly start: number
@@ -44,18 +44,23 @@ export function workInThread(): void {
   })
 }
 
-/** Checks many files in several threads, this one only handing out and collecting; results in the order of the files. */
+/**
+ * Checks many files in several threads, this one only handing out and collecting; results in the order of the files.
+ *
+ * @param take is given each result in that order as soon as it and all before it are there, and says what is kept of it
+ */
 export function checkInThreads(
   files: readonly string[],
   task: Task,
   tell: (done: number) => void,
+  take: (result: FileResult) => FileResult = (result) => result,
 ): Promise<readonly FileResult[]> {
   const portions: Portion[] = []
   for (let start = 0; start < files.length; start += PORTION)
     portions.push({ start, files: files.slice(start, start + PORTION) })
   const found = new Array<FileResult>(files.length)
   const count = Math.min(MOST_THREADS, availableParallelism(), portions.length)
-  let [next, done] = [0, 0]
+  let [next, done, taken] = [0, 0, 0]
   return new Promise((resolve, reject) => {
     const workers = Array.from(
       { length: count },
@@ -78,6 +83,10 @@ export function checkInThreads(
         results.forEach((result, index) => {
           found[start + index] = result
         })
+        for (let ready = found[taken]; ready; ready = found[taken]) {
+          found[taken] = take(ready)
+          taken += 1
+        }
         done += results.length
         tell(done)
         if (done === files.length) resolve(found)

@@ -50,9 +50,8 @@ async function results(files: readonly string[], shelf: Shelf, options: CheckOpt
   const tell = progress(files.length)
   if (files.length >= MANY && options.rulebook === undefined) {
     const { checkInThreads } = await import('#cli/threads.ts')
-    const [only, ...others] = options.formats
-    const words = only?.format === 'text' && others.length === 0 ? sceneOf(options, only.output) : undefined
-    return checkInThreads(files, { all: options.all, words }, tell)
+    const words = wordsOnly(options)
+    return checkInThreads(files, { all: options.all, words }, tell, words && printed(words))
   }
   const found: FileResult[] = []
   for (const file of files) {
@@ -73,7 +72,31 @@ function sceneOf({ color, verbose, quiet, strict }: CheckOptions, output: string
   }
 }
 
+/** How words are printed, where words on standard output are all that is wanted: they can come as they are made. */
+function wordsOnly(options: CheckOptions): FormatScene | undefined {
+  const [only, ...others] = options.formats
+  return only?.format === 'text' && only.output === undefined && others.length === 0
+    ? sceneOf(options, undefined)
+    : undefined
+}
+
+/** Prints a result at once, and keeps of it only how it came out. */
+function printed({ quiet }: FormatScene): (result: FileResult) => FileResult {
+  let first = true
+  return (result) => {
+    print(`${first || quiet ? '' : '\n'}${result.block ?? ''}`)
+    first = false
+    return { ...result, block: '' }
+  }
+}
+
 async function write(found: readonly FileResult[], options: CheckOptions): Promise<boolean> {
+  const words = wordsOnly(options)
+  if (words && found.some(({ block }) => block !== undefined)) {
+    const { closing } = await import('#cli/formats/text.ts')
+    print(closing(found, words))
+    return true
+  }
   for (const { format, output } of options.formats) {
     const print_ = await FORMATS[format]()
     const content = print_(found, sceneOf(options, output))

@@ -151,11 +151,16 @@ export function worded(result: FileResult, scene: FormatScene): FileResult {
   return { ...result, findings: [], block: fileBlock(result, scene, inks(scene.colour)) }
 }
 
+/** What stands below all files: how many there were, and the caution. */
+export function closing(results: readonly Pick<FileResult, 'stops' | 'stopsStrictly'>[], scene: FormatScene): string {
+  const bad = results.filter(({ stops, stopsStrictly }) => (scene.strict ? stopsStrictly : stops)).length
+  const many = results.length > 1 ? `${results.length} files, ${bad} with something at failure level.\n` : ''
+  return `${many}${scene.quiet ? '' : `${inks(scene.colour).faint(CAUTION)}\n`}`
+}
+
 /** For people at a terminal: grouped by file, worst news with its place, its words and what to do. */
 export const text: Format = (results, scene) => {
   const ink = inks(scene.colour)
   const blocks = results.map((result) => result.block ?? fileBlock(result, scene, ink))
-  const bad = results.filter(({ stops, stopsStrictly }) => (scene.strict ? stopsStrictly : stops)).length
-  const many = results.length > 1 ? `${results.length} files, ${bad} with something at failure level.\n` : ''
-  return `${blocks.join(scene.quiet ? '' : '\n')}${many}${scene.quiet ? '' : `${ink.faint(CAUTION)}\n`}`
+  return `${blocks.join(scene.quiet ? '' : '\n')}${closing(results, scene)}`
 }
