@@ -1,6 +1,7 @@
 import { ambientFactor, capacity, groupingFactor, tabulatedCapacity } from './capacity.ts'
 import { circuitDesignCurrent, connectionOf } from './circuit-design-current.ts'
 import { type CircuitItem, knownNumber, nominalVoltage } from './circuit-item.ts'
+import { derived } from './derived.ts'
 import { conventionalOperatingCurrent } from './overcurrent-operating.ts'
 import type { Quantity } from './quantity.ts'
 
@@ -80,18 +81,17 @@ export const circuitCableQuantities: readonly Quantity<CircuitItem>[] = [
     from: ['device'],
     compute: ({ circuit }) => conventionalOperatingCurrent(circuit.device),
   },
-  {
-    name: 'overload_limit',
-    unit: 'A',
-    title: 'Highest conventional operating current that the cable bears',
-    formula: '1.45 × Iz',
-    source: 'IEC 60364-4-43, 433.1',
-    from: ['capacity'],
-    compute: (_item, _scene, known) => {
-      const iz = knownNumber(known, 'capacity')
-      return iz === undefined ? undefined : 1.45 * iz
+  derived(
+    {
+      name: 'overload_limit',
+      unit: 'A',
+      title: 'Highest conventional operating current that the cable bears',
+      formula: '1.45 × Iz',
+      source: 'IEC 60364-4-43, 433.1',
     },
-  },
+    'capacity',
+    (iz) => 1.45 * iz,
+  ),
   {
     name: 'cores_needed',
     unit: '',

@@ -1,5 +1,6 @@
 import { lineAndReturn } from './cable-resistance.ts'
 import { type CircuitItem, knownNumber, nominalVoltage } from './circuit-item.ts'
+import { derived } from './derived.ts'
 import { disconnectionTime } from './disconnection-time.ts'
 import { faultCurrent, faultCurrentAlong, loopLimit, loopLimitMeasured } from './loop-impedance.ts'
 import { usable } from './loop-reading.ts'
@@ -70,30 +71,28 @@ export const circuitLoopQuantities: readonly Quantity<CircuitItem>[] = [
     from: ['cable.line', 'cable.protective', 'cable.length', 'cable.conductor_class', 'cable.material'],
     compute: ({ circuit }) => lineAndReturn(circuit.cable, 'protective'),
   },
-  {
-    name: 'continuity_highest',
-    unit: 'Ω',
-    title: 'Highest continuity reading that length and size explain',
-    formula: '1.5 × continuity expected + 0.1 Ω for terminals and the way inside boards',
-    source: 'common practice: own band, no standard gives one',
-    from: ['continuity_expected'],
-    compute: (_item, _scene, known) => {
-      const expected = knownNumber(known, 'continuity_expected')
-      return expected === undefined ? undefined : 1.5 * expected + 0.1
+  derived(
+    {
+      name: 'continuity_highest',
+      unit: 'Ω',
+      title: 'Highest continuity reading that length and size explain',
+      formula: '1.5 × continuity expected + 0.1 Ω for terminals and the way inside boards',
+      source: 'common practice: own band, no standard gives one',
     },
-  },
-  {
-    name: 'continuity_lowest',
-    unit: 'Ω',
-    title: 'Lowest continuity reading that length and size explain',
-    formula: '0.5 × continuity expected',
-    source: 'common practice: own band, no standard gives one',
-    from: ['continuity_expected'],
-    compute: (_item, _scene, known) => {
-      const expected = knownNumber(known, 'continuity_expected')
-      return expected === undefined ? undefined : 0.5 * expected
+    'continuity_expected',
+    (expected) => 1.5 * expected + 0.1,
+  ),
+  derived(
+    {
+      name: 'continuity_lowest',
+      unit: 'Ω',
+      title: 'Lowest continuity reading that length and size explain',
+      formula: '0.5 × continuity expected',
+      source: 'common practice: own band, no standard gives one',
     },
-  },
+    'continuity_expected',
+    (expected) => 0.5 * expected,
+  ),
   {
     name: 'loop_expected',
     unit: 'Ω',
@@ -103,30 +102,28 @@ export const circuitLoopQuantities: readonly Quantity<CircuitItem>[] = [
     from: ['supply.loop_impedance', 'continuity_expected', 'fed_from'],
     compute: ({ id }, scene) => loopExpected(id, scene),
   },
-  {
-    name: 'loop_highest',
-    unit: 'Ω',
-    title: 'Highest loop reading that supply and cables explain',
-    formula: '1.5 × loop expected + 0.1 Ω',
-    source: 'common practice: own band, no standard gives one',
-    from: ['loop_expected'],
-    compute: (_item, _scene, known) => {
-      const expected = knownNumber(known, 'loop_expected')
-      return expected === undefined ? undefined : 1.5 * expected + 0.1
+  derived(
+    {
+      name: 'loop_highest',
+      unit: 'Ω',
+      title: 'Highest loop reading that supply and cables explain',
+      formula: '1.5 × loop expected + 0.1 Ω',
+      source: 'common practice: own band, no standard gives one',
     },
-  },
-  {
-    name: 'loop_lowest',
-    unit: 'Ω',
-    title: 'Lowest loop reading that supply and cables explain',
-    formula: '0.5 × loop expected',
-    source: 'common practice: own band, no standard gives one',
-    from: ['loop_expected'],
-    compute: (_item, _scene, known) => {
-      const expected = knownNumber(known, 'loop_expected')
-      return expected === undefined ? undefined : 0.5 * expected
+    'loop_expected',
+    (expected) => 1.5 * expected + 0.1,
+  ),
+  derived(
+    {
+      name: 'loop_lowest',
+      unit: 'Ω',
+      title: 'Lowest loop reading that supply and cables explain',
+      formula: '0.5 × loop expected',
+      source: 'common practice: own band, no standard gives one',
     },
-  },
+    'loop_expected',
+    (expected) => 0.5 * expected,
+  ),
   {
     name: 'fault_current_grid',
     unit: 'A',

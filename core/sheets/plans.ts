@@ -1,13 +1,15 @@
 import type { Subject } from '#core/glossary.ts'
+import { arrayPlan } from './array.ts'
+import { batteryPlan } from './battery.ts'
 import { changeoverPlan } from './changeover.ts'
 import { circuitPlan } from './circuit.ts'
 import { overcurrentPlan, residualCurrentPlan } from './devices.ts'
 import { installationPlan } from './installation.ts'
+import { inverterPlan } from './inverter.ts'
 import { busPlan, meterPlan } from './metering.ts'
 import { earthingPlan, supplyPlan } from './origin.ts'
 import type { FieldWords } from './plan.ts'
 import { instrumentPlan, loadStepPlan, personPlan, transferPlan } from './record.ts'
-import { arrayPlan, batteryPlan, inverterPlan } from './sources.ts'
 import { stringPlan } from './string.ts'
 
 /** Every kind of sheet, in the order of the report. */
