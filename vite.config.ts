@@ -3,6 +3,7 @@ import { defineConfig } from 'vitest/config'
 export default defineConfig({
   test: {
     include: ['tests/**/*.test.ts'],
+    globalSetup: ['tests/cli/global-setup.ts'],
     testTimeout: 30_000,
     hookTimeout: 120_000,
     pool: 'threads',

@@ -1,9 +1,11 @@
 // The only place of the command line that touches streams, files and the process.
 import {
+  type Dirent,
   existsSync,
   fstatSync,
   readdirSync,
   readFileSync,
+  realpathSync,
   renameSync,
   rmSync,
   statSync,
@@ -11,13 +13,15 @@ import {
   writeFileSync,
   writeSync,
 } from 'node:fs'
-import { dirname, join } from 'node:path'
+import { dirname, join, relative, resolve } from 'node:path'
 import { decode } from '#core/read/guard.ts'
 
 /** What went wrong with a file, in words for the person at the terminal. */
 export interface FileFault {
   readonly ok: false
   readonly message: string
+  /** What the bytes themselves are at fault for; none where they could not be had. */
+  readonly code?: string
 }
 
 export type FileText = { readonly ok: true; readonly text: string } | FileFault
@@ -25,6 +29,9 @@ export type FileText = { readonly ok: true; readonly text: string } | FileFault
 const FAULTS: Readonly<Record<string, string>> = {
   ENOENT: 'there is no such file',
   EACCES: 'this account may not read it',
+  EPERM: 'this account may not do that',
+  EROFS: 'the disk takes no writing',
+  ENOSPC: 'the disk is full',
   EISDIR: 'it is a folder, and a file is wanted here',
   ENOTDIR: 'a part of its path is no folder',
   EMFILE: 'too many files are open',
@@ -35,9 +42,21 @@ function faultOf(error: unknown): string {
   return FAULTS[code] ?? (error instanceof Error ? error.message : String(error))
 }
 
-/** The bytes of a file. */
+/** No file that is read is anywhere near as long; one that is would only fill the memory before it is refused. */
+const FAR_TOO_LONG = 64_000_000
+
+/** The bytes of a file, `-` for standard input. */
 export function readBytes(file: string): { readonly ok: true; readonly bytes: Uint8Array } | FileFault {
+  if (file === '-' && isTerminal('stdin'))
+    return { ok: false, message: 'Standard input is this terminal, and nothing comes from it: pipe a file in with |.' }
   try {
+    const { size } = file === '-' ? { size: 0 } : statSync(file)
+    if (size > FAR_TOO_LONG)
+      return {
+        ok: false,
+        code: 'too-large',
+        message: `Cannot read ${file}: its ${size} bytes are far more than any file has that is read here.`,
+      }
     return { ok: true, bytes: readFileSync(file === '-' ? 0 : file) }
   } catch (error) {
     return { ok: false, message: `Cannot read ${file}: ${faultOf(error)}.` }
@@ -49,23 +68,44 @@ export function readText(file: string): FileText {
   const read = readBytes(file)
   if (!read.ok) return read
   const decoded = decode(read.bytes)
-  return decoded.ok ? decoded : { ok: false, message: `Cannot read ${file}: ${decoded.problem.message}` }
+  if (decoded.ok) return decoded
+  const { code, message } = decoded.problem
+  return { ok: false, code, message: `Cannot read ${file}: ${message}` }
 }
 
 const unfinished = new Set<string>()
 let drafts = 0
 
-/** Writes a file whole or not at all: under another name first, then renamed. */
+/** Where a file really is, and who may do what with it: writing must change neither. */
+function standing(file: string): { readonly target: string; readonly mode: number | undefined } {
+  if (!existsSync(file)) return { target: file, mode: undefined }
+  const target = realpathSync(file)
+  return { target, mode: statSync(target).mode }
+}
+
+/** Writes a file whole or not at all: under another name first, then renamed. `-` is standard output. */
 export function writeWhole(file: string, content: string | Uint8Array): FileFault | { readonly ok: true } {
+  if (file === '-') {
+    writeOut(OUTPUT, content)
+    return { ok: true }
+  }
+  if (drafts === 0) endOnInterrupt()
   drafts += 1
-  const draft = join(dirname(file), `.skerry-${process.pid}-${drafts}.part`)
+  const { target, mode } = standing(file)
+  const draft = join(dirname(target), `.skerry-${process.pid}-${drafts}.part`)
   try {
+    if (mode !== undefined && !statSync(target).isFile()) {
+      // What is no plain file, such as a pipe, is written to and never replaced.
+      writeFileSync(target, content)
+      return { ok: true }
+    }
     unfinished.add(draft)
-    writeFileSync(draft, content)
-    renameSync(draft, file)
+    writeFileSync(draft, content, { mode: mode ?? 0o666 })
+    renameSync(draft, target)
     return { ok: true }
   } catch (error) {
-    return { ok: false, message: `Cannot write ${file}: ${faultOf(error)}.` }
+    const gone = existsSync(dirname(target)) ? faultOf(error) : `there is no folder ${dirname(target)}`
+    return { ok: false, message: `Cannot write ${file}: ${gone}.` }
   } finally {
     rmSync(draft, { force: true })
     unfinished.delete(draft)
@@ -75,16 +115,29 @@ export function writeWhole(file: string, content: string | Uint8Array): FileFaul
 export const exists = (file: string): boolean => existsSync(file)
 export const isFolder = (file: string): boolean => existsSync(file) && statSync(file).isDirectory()
 
-const SUFFIX = '.skerry.yaml'
+/** The folder that a file is in, and a path from the root: by these, two spellings of one place are the same. */
+export const folderOf = (file: string): string => dirname(file)
+export const wholePath = (path: string): string => resolve(path)
+
+/** Whether a file is one by its name; any file is that is named itself. */
+export const isInstallFile = (path: string): boolean => path.endsWith('.skerry.yaml')
+
 const SKIPPED: ReadonlySet<string> = new Set(['node_modules', '.git'])
 
+/** What is in a folder, by name; null where this account may not look. */
+function entriesOf(folder: string): readonly (Dirent | null)[] {
+  try {
+    return readdirSync(folder, { withFileTypes: true }).toSorted((a, b) => (a.name < b.name ? -1 : 1))
+  } catch {
+    return [null]
+  }
+}
+
 /** Install files below a folder, in the order of their names. */
-export function filesBelow(
-  folder: string,
-  matches: (path: string) => boolean = (path) => path.endsWith(SUFFIX),
-): string[] {
-  const entries = readdirSync(folder, { withFileTypes: true }).toSorted((a, b) => (a.name < b.name ? -1 : 1))
-  return entries.flatMap((entry) => {
+export function filesBelow(folder: string, matches: (path: string) => boolean = isInstallFile): string[] {
+  return entriesOf(folder).flatMap((entry) => {
+    // A folder that may not be looked into is told in its place, as a file that cannot be read.
+    if (entry === null) return [folder]
     const path = folder === '.' ? entry.name : join(folder, entry.name)
     if (entry.isDirectory()) return SKIPPED.has(entry.name) ? [] : filesBelow(path, matches)
     return matches(path) ? [path] : []
@@ -94,19 +147,26 @@ export function filesBelow(
 const OUTPUT = 1
 const TALK = 2
 
+/** Streams whose reader has gone away: nothing more is written to them, and the command ends as it would have. */
+const unread = new Set<number>()
+
 /**
  * Writes to a stream by its number, all of it before going on: Node.js loads a quarter of itself for its own streams. A
  * reader that has gone away is no fault of ours; one that is slow is waited for.
  */
-function writeOut(stream: number, text: string): void {
-  const bytes = Buffer.from(text)
+function writeOut(stream: number, content: string | Uint8Array): void {
+  if (unread.has(stream)) return
+  const bytes = typeof content === 'string' ? Buffer.from(content) : content
   let written = 0
   while (written < bytes.length) {
     try {
       written += writeSync(stream, bytes, written)
     } catch (error) {
       const code = error instanceof Error && 'code' in error ? error.code : ''
-      if (code === 'EPIPE') process.exit(0)
+      if (code === 'EPIPE') {
+        unread.add(stream)
+        return
+      }
       if (code !== 'EAGAIN') throw error
       Atomics.wait(new Int32Array(new SharedArrayBuffer(4)), 0, 0, 5)
     }
@@ -141,34 +201,74 @@ export function colourOf(stream: 'stdout' | 'stderr', asked?: boolean): boolean 
 }
 
 const USUAL_WIDTH = 100
-export const terminalWidth = (): number => (isTerminal('stdout') ? process.stdout.columns : USUAL_WIDTH)
+const NARROWEST = 40
 
-/** Ends with a code once everything is written. */
+/** Columns of the terminal; some say that they have none. */
+export function terminalWidth(): number {
+  const columns = isTerminal('stdout') ? process.stdout.columns : USUAL_WIDTH
+  return columns > 0 ? Math.max(NARROWEST, columns) : USUAL_WIDTH
+}
+
+/** The bytes of files, as the disk has them; one that is not there has none. */
+export const bytesIn = (files: readonly string[]): number =>
+  files.reduce((sum, file) => sum + (statSync(file, { throwIfNoEntry: false })?.size ?? 0), 0)
+
+/** Tells the engine not to compile a second time what runs often: that pays only where it runs for long. */
+export async function expectShortRun(): Promise<void> {
+  const { setFlagsFromString } = await import('node:v8')
+  setFlagsFromString('--no-opt')
+}
+
+/** Ends with a code once everything is done. */
 export function endWith(code: number): void {
   process.exitCode = code
 }
 
-/** Calls back after a file or folder changed and stayed quiet for a moment. */
-export function watchPaths(paths: readonly string[], changed: () => void): void {
+/** Ends now: all that was to be written is, and tidying up memory that goes away as a whole would only take time. */
+export function leave(): never {
+  process.exit()
+}
+
+/**
+ * From now on, calls back with a path after it changed and all was quiet for a moment. Folders are watched, for many editors put a
+ * new file in the place of the old one.
+ *
+ * @param wanted whether a path, from the root, is of interest
+ * @param changed is given the path from where the command runs
+ */
+export function watchFolders(
+  folders: readonly string[],
+  wanted: (path: string) => boolean,
+  changed: (path: string) => void,
+): void {
   const QUIET = 120
   let timer: NodeJS.Timeout | undefined
-  for (const path of paths) {
-    watch(path, { recursive: false }, () => {
+  for (const folder of folders) {
+    watch(folder, (_, name) => {
+      const path = resolve(folder, name ?? '')
+      if (name !== null && !wanted(path)) return
       clearTimeout(timer)
-      timer = setTimeout(changed, QUIET)
+      timer = setTimeout(() => changed(relative('', path)), QUIET)
     })
   }
 }
 
-/** Keeps the details of a failure that should not have happened, and says where. */
-export function keepDetails(error: unknown): string {
+/** Keeps the details of a failure that should not have happened, and says where; undefined where no place takes them. */
+export function keepDetails(error: unknown): string | undefined {
   const file = join(process.env['TMPDIR'] ?? process.env['TEMP'] ?? '/tmp', `skerry-${process.pid}-${Date.now()}.txt`)
   const details = error instanceof Error ? (error.stack ?? error.message) : String(error)
-  writeFileSync(
-    file,
-    `${new Date().toISOString()}\n${process.argv.slice(2).join(' ')}\n${process.version}\n\n${details}\n`,
-  )
-  return file
+  const head = `${new Date().toISOString()}\n${process.argv.slice(2).join(' ')}\n${process.version}`
+  try {
+    writeFileSync(file, `${head}\n\n${details}\n`)
+    return file
+  } catch {
+    return undefined
+  }
+}
+
+/** Hands over what nobody caught, wherever it was thrown. */
+export function onUncaught(handle: (error: unknown) => void): void {
+  process.on('uncaughtException', handle)
 }
 
 /** Files that the program brings along, beside its bundle. */
@@ -176,8 +276,8 @@ export function ownFile(name: string): Uint8Array {
   return new Uint8Array(readFileSync(join(dirname(process.argv[1] ?? ''), name)))
 }
 
-/** Takes away what was being written, and ends at once. */
-export function endOnInterrupt(): void {
+/** From the first writing on: takes away what was being written, and ends at once. Before it the system ends us. */
+function endOnInterrupt(): void {
   for (const signal of ['SIGINT', 'SIGTERM'] as const) {
     process.once(signal, () => {
       for (const draft of unfinished) rmSync(draft, { force: true })
@@ -186,12 +286,13 @@ export function endOnInterrupt(): void {
   }
 }
 
-/** Asks questions at the terminal, on standard error so that standard output stays clean. */
+/** Asks questions at the terminal, on standard error so that standard output stays clean; no answer where it was left. */
 export async function asker(): Promise<{
-  readonly ask: (question: string) => Promise<string>
+  readonly ask: (question: string) => Promise<string | undefined>
   readonly close: () => void
 }> {
   const { createInterface } = await import('node:readline/promises')
   const lines = createInterface({ input: process.stdin, output: process.stderr })
-  return { ask: (question) => lines.question(question), close: () => lines.close() }
+  const left = new Promise<undefined>((resolve) => lines.once('close', () => resolve(undefined)))
+  return { ask: (question) => Promise.race([lines.question(question), left]), close: () => lines.close() }
 }

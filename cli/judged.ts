@@ -1,7 +1,7 @@
 import { type Checked, check, type Judged, type Shelf } from '#core/engine.ts'
 import type { Range } from '#core/glossary.ts'
 import { endWith, readText, say } from './io.ts'
-import { shelfWith, shippedShelf } from './shelf.ts'
+import { shelfFor } from './shelf.ts'
 
 /** A file that could be judged, with its text. */
 export interface JudgedFile {
@@ -28,7 +28,7 @@ function complain(file: string, checked: Exclude<Checked, Judged>): void {
 /** Reads and judges one file for a command that needs it whole; otherwise says what is wrong and ends with 2. */
 export async function judgedFile(file: string, rulebook?: string): Promise<JudgedFile | undefined> {
   const read = readText(file)
-  const shelf = rulebook === undefined ? ({ ok: true, shelf: shippedShelf() } as const) : await shelfWith(rulebook)
+  const shelf = await shelfFor(rulebook)
   if (!read.ok || !shelf.ok) {
     say(`${read.ok ? (shelf.ok ? '' : shelf.message) : read.message}\n`)
     endWith(2)

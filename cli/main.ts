@@ -1,5 +1,5 @@
 import { Command, CommanderError, Option } from 'commander'
-import { endOnInterrupt, endWith, keepDetails, print, say } from './io.ts'
+import { endWith, keepDetails, leave, onUncaught, print, say } from './io.ts'
 import { addCheck } from './program/check.ts'
 import { addOthers } from './program/others.ts'
 import { versionText } from './program/version.ts'
@@ -15,7 +15,8 @@ Examples:
 Verification is work for skilled persons. Local codes and licensed practice come before anything printed here.
 `
 
-function program(): Command {
+/** The command that is called most is made without the others, which only help and suggestions would need. */
+function program(called: string | undefined): Command {
   const skerry = new Command('skerry')
     .description(
       'Computes, judges and typesets test reports for buildings with photovoltaics, a battery and automatic changeover.',
@@ -28,9 +29,11 @@ function program(): Command {
     })
     .addHelpText('after', EXAMPLES)
     .showSuggestionAfterError()
+    .showHelpAfterError('Add --help to see what this command takes.')
+    .helpCommand(false)
     .exitOverride()
   addCheck(skerry)
-  addOthers(skerry)
+  if (called !== 'check') addOthers(skerry)
   return skerry
 }
 
@@ -41,24 +44,32 @@ function ended(error: unknown): void {
     return
   }
   const file = keepDetails(error)
-  say(
-    `Something went wrong inside Skerry: ${error instanceof Error ? error.message : String(error)}\nYour files are as they were. The details are in ${file}; please send them along when you report this.\n`,
-  )
+  const where =
+    file === undefined
+      ? 'The details could not be written anywhere.'
+      : `The details are in ${file}; please send them along when you report this.`
+  // Node.js adds lines of its own to some messages.
+  const [message = ''] = (error instanceof Error ? error.message : String(error)).split('\n')
+  say(`Something went wrong inside Skerry: ${message}\nYour files are as they were. ${where}\n`)
   endWith(2)
 }
 
 /** Runs the command line. */
 export async function main(words: readonly string[]): Promise<void> {
-  endOnInterrupt()
-  const skerry = program()
+  onUncaught((error) => {
+    ended(error)
+    leave()
+  })
+  const skerry = program(words[0])
   try {
     if (words.length === 0) {
       skerry.outputHelp({ error: true })
       endWith(2)
-      return
+      leave()
     }
     await skerry.parseAsync([...words], { from: 'user' })
   } catch (error) {
     ended(error)
   }
+  leave()
 }

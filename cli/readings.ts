@@ -68,6 +68,20 @@ function editOf(row: Row, places: ReadonlyMap<Column, number>, install: Install)
   return { path, text: mended(value) }
 }
 
+/** Rows for a place that another row has filled before: nobody can tell which of the two is right. */
+function twice(rows: readonly Row[], made: readonly (Edit | string)[]): string[] {
+  const first = new Map<string, number>()
+  return made.flatMap((edit, index) => {
+    const line = rows[index]?.line ?? 0
+    if (typeof edit === 'string') return []
+    const place = edit.path.join('.')
+    const before = first.get(place)
+    if (before !== undefined) return [`line ${line}: ${place} has a value in line ${before} already.`]
+    first.set(place, line)
+    return []
+  })
+}
+
 /** The readings of a CSV file as edits of an install file; all of them, or everything that is wrong with them. */
 export function readingEdits(csv: string, install: Install): EditsResult {
   const [head, ...rows] = parseCsv(csv)
@@ -85,8 +99,12 @@ export function readingEdits(csv: string, install: Install): EditsResult {
         `line 1: the head line reads ${head.cells.join(', ')}; wanted are path,value or subject,reading,state,value.`,
       ],
     }
-  const made = rows.map((row) => editOf(row, places, install))
-  const faults = made.filter((edit) => typeof edit === 'string')
+  const made = rows.map((row) =>
+    row.cells.slice(head.cells.length).some((cell) => cell !== '')
+      ? `line ${row.line}: ${row.cells.length} cells, where the head line has ${head.cells.length}: put a value that has a comma in it in quotes.`
+      : editOf(row, places, install),
+  )
+  const faults = [...made.filter((edit) => typeof edit === 'string'), ...twice(rows, made)]
   if (faults.length > 0) return { ok: false, faults }
   return { ok: true, edits: made.filter((edit) => typeof edit !== 'string') }
 }

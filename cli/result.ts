@@ -1,3 +1,4 @@
+import type { FileFault } from '#cli/io.ts'
 import { check, type Shelf } from '#core/engine.ts'
 import type { Explain } from '#core/read/read.ts'
 import {
@@ -44,10 +45,10 @@ function lineAt(text: string, offset: number): string {
   return text.slice(start, Math.min(end === -1 ? text.length : end, start + LONGEST_LINE)).replace(/\r$/, '')
 }
 
-/** A file that could not even be opened. */
-export function unopened(file: string, message: string): FileResult {
+/** A file that could not even be opened, or is no text: the code says which. */
+export function unopened(file: string, { message, code = 'file' }: Omit<FileFault, 'ok'>): FileResult {
   const finding: ShownFinding = {
-    rule: 'file',
+    rule: code,
     key: null,
     subject: 'file',
     state: null,
@@ -55,6 +56,7 @@ export function unopened(file: string, message: string): FileResult {
     severity: 'failure',
     message,
     remedy: '',
+    cite: '',
     path: [],
     range: { line: 1, column: 1, endLine: 1, endColumn: 1, offset: 0, endOffset: 0 },
     related: [],

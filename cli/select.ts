@@ -8,22 +8,31 @@ export interface Selection {
 
 const MAGIC = /[*?[\]{}]/
 
-/** A glob as a regular expression: `**`, `*`, `?`, `[abc]` and `{a,b}`. */
+/** What the parts of a glob mean; a bracket that nothing closes is a character like any other. */
+const PARTS = /\*\*\/?|\*|\?|\{[^{}]*\}|\[!?[^[\]/]+\]|[.+^$()|\\[\]{}]/g
+
+/** A range that runs backwards has nothing in it; its signs stand for themselves. */
+const characters = (inside: string): string =>
+  inside
+    .replace(/^!/, '^')
+    .replaceAll('\\', '\\\\')
+    .replace(/(.)-(.)/g, (range, first: string, last: string) => (first <= last ? range : `${first}\\-${last}`))
+
+function meaning(part: string): string {
+  if (part === '**/') return '(?:[^/]+/)*'
+  if (part === '**') return '.*'
+  if (part === '*') return '[^/]*'
+  if (part === '?') return '[^/]'
+  if (part.length > 1 && part.startsWith('{')) return `(?:${part.slice(1, -1).split(',').map(sourceOf).join('|')})`
+  if (part.length > 1 && part.startsWith('[')) return `[${characters(part.slice(1, -1))}]`
+  return `\\${part}`
+}
+
+const sourceOf = (glob: string): string => glob.replace(PARTS, meaning)
+
+/** A glob as a regular expression: `**`, `*`, `?`, `[abc]`, `[!abc]` and `{a,b}`. */
 export function globPattern(glob: string): RegExp {
-  const source = glob.replace(/\*\*\/?|\*|\?|\{[^{}]*\}|[.+^$()|\\]/g, (part) => {
-    if (part === '**/') return '(?:[^/]+/)*'
-    if (part === '**') return '.*'
-    if (part === '*') return '[^/]*'
-    if (part === '?') return '[^/]'
-    if (part.startsWith('{'))
-      return `(?:${part
-        .slice(1, -1)
-        .split(',')
-        .map((choice) => choice.replace(/[.+^$()|\\*?]/g, '\\$&'))
-        .join('|')})`
-    return `\\${part}`
-  })
-  return new RegExp(`^${source}$`)
+  return new RegExp(`^${sourceOf(glob)}$`)
 }
 
 /** The folder above the first part of a glob that matches more than itself. */

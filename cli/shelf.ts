@@ -17,6 +17,11 @@ export function shippedShelf(): Shelf {
   }
 }
 
+/** The shipped books, with one of the house where a folder is named. */
+export async function shelfFor(folder: string | undefined): Promise<ShelfResult> {
+  return folder === undefined ? { ok: true, shelf: shippedShelf() } : shelfWith(folder)
+}
+
 export type ShelfResult =
   | { readonly ok: true; readonly shelf: Shelf }
   | { readonly ok: false; readonly message: string }
@@ -48,7 +53,7 @@ function folderAt(
 }
 
 /** The shipped books and one of the house, which files ask for by its id and which judges all files that ask for its base. */
-export async function shelfWith(folder: string): Promise<ShelfResult> {
+async function shelfWith(folder: string): Promise<ShelfResult> {
   const found = folderAt(folder)
   if (!found.ok) return found
   const { ownBook } = await import('#core/judge/own-book.ts')

@@ -4,13 +4,15 @@ import type { FormatScene } from './formats/format.ts'
 import { worded } from './formats/text.ts'
 import { readText } from './io.ts'
 import { checkFile, type FileResult, unopened } from './result.ts'
-import { shippedShelf } from './shelf.ts'
+import { shelfFor } from './shelf.ts'
 
 /** The word that tells the bundle to work in a thread. */
 export const THREAD = '--thread'
 
 interface Task {
   readonly all: boolean
+  /** The folder of a rule book of one's own: its checks are functions, so each thread reads it for itself. */
+  readonly rulebook: string | undefined
   /** How words are printed, where words are all that is wanted. */
   readonly words: FormatScene | undefined
 }
@@ -32,11 +34,14 @@ interface Done {
 
 /** The other end: checks what it is handed until nothing comes. */
 export function workInThread(): void {
-  const shelf = shippedShelf()
-  const { all, words } = workerData as Task
+  const { all, rulebook, words } = workerData as Task
+  const opened = shelfFor(rulebook)
   const checked = async (file: string): Promise<FileResult> => {
+    const shelf = await opened
+    // The thread that hands out has read the book before; a book that changed since is no book for half of the files.
+    if (!shelf.ok) throw new Error(shelf.message)
     const text = readText(file)
-    const result = text.ok ? await checkFile(file, text.text, { all, shelf }) : unopened(file, text.message)
+    const result = text.ok ? await checkFile(file, text.text, { all, shelf: shelf.shelf }) : unopened(file, text)
     return words ? worded(result, words) : result
   }
   parentPort?.on('message', ({ start, files }: Portion) => {
@@ -78,7 +83,10 @@ export function checkInThreads(
       else void worker.terminate()
     }
     for (const worker of workers) {
-      worker.on('error', reject)
+      worker.on('error', (error) => {
+        for (const other of workers) void other.terminate()
+        reject(error)
+      })
       worker.on('message', ({ start, results }: Done) => {
         results.forEach((result, index) => {
           found[start + index] = result

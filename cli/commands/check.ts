@@ -1,20 +1,25 @@
 import type { FormatScene } from '#cli/formats/format.ts'
 import { FORMATS, type FormatName } from '#cli/formats/formats.ts'
 import {
+  bytesIn,
   colourOf,
   endWith,
   environment,
+  expectShortRun,
+  folderOf,
+  isInstallFile,
   isTerminal,
   print,
   readText,
   say,
   terminalWidth,
-  watchPaths,
+  watchFolders,
+  wholePath,
   writeWhole,
 } from '#cli/io.ts'
 import { checkFile, exitCode, type FileResult, unopened } from '#cli/result.ts'
 import { select } from '#cli/select.ts'
-import { shelfWith, shippedShelf } from '#cli/shelf.ts'
+import { shelfFor } from '#cli/shelf.ts'
 import { VERSION } from '#cli/version.ts'
 import type { Shelf } from '#core/engine.ts'
 
@@ -33,26 +38,37 @@ export interface CheckOptions {
 
 /** From this many files on, other threads help. */
 const MANY = 48
+/** Clears the line from where the terminal stands. */
+const CLEARED = '\u001b[K'
+
+/** Up to so many bytes are judged before code that V8 compiled once more would have paid for itself; below, nothing is. */
+const SHORT_RUN = { from: 7_000, to: 100_000 } as const
+
+function isShort(files: readonly string[], { watch }: CheckOptions): boolean {
+  const bytes = bytesIn(files)
+  return !watch && bytes >= SHORT_RUN.from && bytes <= SHORT_RUN.to
+}
 
 async function checkOne(file: string, shelf: Shelf, { all, stdinFilename }: CheckOptions): Promise<FileResult> {
   const name = file === '-' ? (stdinFilename ?? 'standard input') : file
   const text = readText(file)
-  return text.ok ? checkFile(name, text.text, { all, shelf }) : unopened(name, text.message)
+  return text.ok ? checkFile(name, text.text, { all, shelf }) : unopened(name, text)
 }
 
-/** Tells on a terminal how far a long run has come. */
-function progress(total: number): (done: number) => void {
-  if (!isTerminal('stderr') || total < MANY) return () => undefined
-  return (done) => say(done === total ? '\r\u001b[K' : `\r${done} of ${total} files`)
+/** Tells on a terminal how far a long run has come, where nothing else shows it. The next line that is written takes its place. */
+function progress(total: number, shown: boolean): (done: number) => void {
+  if (shown || !isTerminal('stderr') || total < MANY) return () => undefined
+  return (done) => say(done === total ? CLEARED : `${CLEARED}${done} of ${total} files\r`)
 }
 
 async function results(files: readonly string[], shelf: Shelf, options: CheckOptions): Promise<readonly FileResult[]> {
-  const tell = progress(files.length)
-  if (files.length >= MANY && options.rulebook === undefined) {
+  const words = wordsOnly(options)
+  const tell = progress(files.length, words !== undefined && isTerminal('stdout'))
+  if (files.length >= MANY) {
     const { checkInThreads } = await import('#cli/threads.ts')
-    const words = wordsOnly(options)
-    return checkInThreads(files, { all: options.all, words }, tell, words && printed(words))
+    return checkInThreads(files, { all: options.all, rulebook: options.rulebook, words }, tell, words && printed(words))
   }
+  if (isShort(files, options)) await expectShortRun()
   const found: FileResult[] = []
   for (const file of files) {
     found.push(await checkOne(file, shelf, options))
@@ -118,31 +134,51 @@ async function once(files: readonly string[], shelf: Shelf, options: CheckOption
   return written ? exitCode(found, options.strict) : 2
 }
 
-async function shelfFor({ rulebook }: CheckOptions): Promise<Shelf | undefined> {
-  if (rulebook === undefined) return shippedShelf()
-  const made = await shelfWith(rulebook)
-  if (made.ok) return made.shelf
-  say(`${made.message}\n`)
-  return undefined
-}
-
-/** Validates, computes and judges files. */
-export async function check(words: readonly string[], options: CheckOptions): Promise<void> {
+/** Checks what the words mean now; answers with the files, or nothing where there was nothing to check. */
+async function run(words: readonly string[], options: CheckOptions): Promise<readonly string[] | undefined> {
   const { files, unmatched } = select(words)
   if (unmatched.length > 0 && options.errorOnUnmatched) {
     say(
       `${unmatched.map((word) => `Nothing matches ${word}: there is no such file, and no install file (*.skerry.yaml) below it.`).join('\n')}\n`,
     )
-    return endWith(2)
+    endWith(2)
+    return undefined
   }
-  const shelf = await shelfFor(options)
-  if (!shelf) return endWith(2)
-  endWith(await once(files, shelf, options))
-  if (!options.watch) return
+  const shelf = await shelfFor(options.rulebook)
+  if (!shelf.ok) {
+    say(`${shelf.message}\n`)
+    endWith(2)
+    return undefined
+  }
+  endWith(await once(files, shelf.shelf, options))
+  return files
+}
+
+/** Checks again after each change; a change during a check is looked at after it. It goes on until it is interrupted. */
+function watch(words: readonly string[], files: readonly string[], options: CheckOptions): Promise<never> {
+  const known = new Set(files.map(wholePath))
+  const book = options.rulebook === undefined ? undefined : wholePath(options.rulebook)
+  const folders = new Set([...[...known].map(folderOf), ...(book === undefined ? [] : [book])])
+  const isOfBook = (path: string): boolean => folderOf(path) === book && path.endsWith('.yaml')
+  let last: Promise<unknown> = Promise.resolve()
   say('Watching for changes; Ctrl-C ends.\n')
-  watchPaths(files, () => {
-    void once(files, shelf, options).then(endWith)
-  })
+  watchFolders(
+    [...folders],
+    (path) => known.has(path) || isInstallFile(path) || isOfBook(path),
+    (path) => {
+      last = last.then(() => {
+        say(`\n${path} changed.\n`)
+        return run(words, options)
+      })
+    },
+  )
+  return new Promise<never>(() => undefined)
+}
+
+/** Validates, computes and judges files. */
+export async function check(words: readonly string[], options: CheckOptions): Promise<void> {
+  const files = await run(words, options)
+  if (files && options.watch) await watch(words, files, options)
 }
 
 /** The format where none is asked for: annotations on a build service, words elsewhere. */

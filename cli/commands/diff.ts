@@ -38,9 +38,13 @@ function words({ verdicts, values }: Comparison, ink: Ink): string {
 }
 
 /** Prints what changed between two files by meaning. */
-export async function diff(before: string, after: string, { format }: { readonly format: string }): Promise<void> {
-  const old = await judgedFile(before)
-  const made = old && (await judgedFile(after))
+export async function diff(
+  before: string,
+  after: string,
+  { format, rulebook }: { readonly format: string; readonly rulebook?: string },
+): Promise<void> {
+  const old = await judgedFile(before, rulebook)
+  const made = old && (await judgedFile(after, rulebook))
   if (!old || !made) return
   const comparison = compare(old.judged, made.judged)
   print(format === 'json' ? `${JSON.stringify(comparison, null, 2)}\n` : words(comparison, inks(colourOf('stdout'))))

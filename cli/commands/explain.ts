@@ -1,62 +1,8 @@
 import { type Ink, inks } from '#cli/formats/ink.ts'
-import { wrapped } from '#cli/formats/wrap.ts'
+import { rulePageText } from '#cli/formats/rule-page.ts'
 import { colourOf, endWith, print, say } from '#cli/io.ts'
-import type { Citation } from '#core/glossary.ts'
-import { bookPage, bookPages, type RulePage, rulePage, rulePages } from '#core/judge/pages.ts'
-import type { RuleExample } from '#core/judge/rule.ts'
+import { bookPage, bookPages, rulePage, rulePages } from '#core/judge/pages.ts'
 import { nearest } from '#core/texts/nearest.ts'
-
-const WIDTH = 96
-
-const cited = ({ publication, clause, note }: Citation): string =>
-  `${publication}${clause === undefined ? '' : `, ${clause}`}${note === undefined ? '' : ` (${note})`}`
-
-function example({ subject, state, set, remove, gives, note }: RuleExample): string {
-  const patch = [
-    ...Object.entries(set ?? {}).map(([path, value]) => `${path}: ${JSON.stringify(value)}`),
-    ...(remove ?? []).map((path) => `without ${path}`),
-  ]
-  const about = `${subject}${state === undefined ? '' : ` (${state})`}`
-  return `${gives.padEnd(14)} ${about}: ${patch.join('; ') || 'the base file as it is'}${note === undefined ? '' : `. ${note}`}`
-}
-
-const part = (title: string, lines: readonly string[], ink: Ink): string[] =>
-  lines.length === 0
-    ? []
-    : [ink.faint(title), ...lines.flatMap((line) => wrapped(line, WIDTH - 2)).map((line) => `  ${line}`), '']
-
-const indented = (value: unknown): string[] =>
-  JSON.stringify(value, null, 2)
-    .split('\n')
-    .map((line) => `  ${line}`)
-
-function page({ key, record, chapter, from }: RulePage, ink: Ink): string {
-  const books = bookPages()
-    .filter(({ keys }) => keys.includes(key))
-    .map(({ id }) => id)
-  return [
-    `${ink.strong(record.title)}`,
-    ink.faint(
-      `${record.id} · ${record.severity} · ${record.subject} · state ${record.state} · chapter ${chapter} of ${from} · in the books ${books.join(', ')}`,
-    ),
-    '',
-    ...part('why', [record.why], ink),
-    ...part('caution', record.caution === undefined ? [] : [record.caution], ink),
-    ...part('it says', [record.says], ink),
-    ...part('what to do', [record.do], ink),
-    ...part('sources', record.cites.map(cited), ink),
-    ...(record.when ? [ink.faint('applies when'), ...indented(record.when), ''] : []),
-    ink.faint('must hold'),
-    ...indented(record.must),
-    '',
-    ...part('examples', record.examples.map(example), ink),
-    ...part(
-      'replaces the base rule because',
-      record.replaces_because === undefined ? [] : [record.replaces_because],
-      ink,
-    ),
-  ].join('\n')
-}
 
 function list(book: string, ink: Ink): string {
   const pages = (bookPage(book)?.keys ?? []).map(rulePage)
@@ -74,6 +20,11 @@ function fault(message: string): void {
   endWith(2)
 }
 
+function meant(word: string, known: readonly string[]): string {
+  const hint = nearest(word, known)
+  return hint === undefined ? '.' : `: did you mean ${hint}?`
+}
+
 /** Prints a rule's page, or the list of rules. */
 export function explain(
   rule: string | undefined,
@@ -81,12 +32,10 @@ export function explain(
 ): void {
   const ink = inks(colourOf('stdout'))
   const shelf = bookPage(book)
-  if (!shelf)
-    return fault(
-      `There is no rule book ${book}. At hand: ${bookPages()
-        .map(({ id }) => id)
-        .join(', ')}.`,
-    )
+  if (!shelf) {
+    const ids = bookPages().map(({ id }) => id)
+    return fault(`There is no rule book ${book}${meant(book, ids)} At hand: ${ids.join(', ')}.`)
+  }
   if (rule === undefined)
     return print(
       format === 'json'
@@ -95,10 +44,7 @@ export function explain(
     )
   const pages = [...shelf.keys.map(rulePage), ...rulePages()]
   const found = pages.find(({ record }) => record.id === rule)
-  if (found) return print(format === 'json' ? `${JSON.stringify(found, null, 2)}\n` : `${page(found, ink)}\n`)
-  const hint = nearest(
-    rule,
-    pages.map(({ record }) => record.id),
-  )
-  fault(`There is no rule ${rule}${hint === undefined ? '' : `: did you mean ${hint}?`} skerry explain lists all.`)
+  if (found) return print(format === 'json' ? `${JSON.stringify(found, null, 2)}\n` : `${rulePageText(found, ink)}\n`)
+  const ids = pages.map(({ record }) => record.id)
+  fault(`There is no rule ${rule}${meant(rule, ids)} skerry explain lists all.`)
 }

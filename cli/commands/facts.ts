@@ -22,8 +22,11 @@ function table(facts: Facts, sheets: readonly Sheet[]): string {
 }
 
 /** Prints every computed quantity of a file. */
-export async function facts(file: string, { format }: { readonly format: string }): Promise<void> {
-  const found = await judgedFile(file)
+export async function facts(
+  file: string,
+  { format, rulebook }: { readonly format: string; readonly rulebook?: string },
+): Promise<void> {
+  const found = await judgedFile(file, rulebook)
   if (!found) return
   const known = factsOf(found.judged)
   print(format === 'json' ? `${JSON.stringify(known, null, 2)}\n` : table(known, found.judged.sheets))

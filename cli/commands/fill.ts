@@ -1,6 +1,7 @@
 import { endWith, print, readText, say, writeWhole } from '#cli/io.ts'
+import { lineChanges } from '#cli/line-changes.ts'
 import { readingEdits } from '#cli/readings.ts'
-import { shippedShelf } from '#cli/shelf.ts'
+import { shelfFor } from '#cli/shelf.ts'
 import { check } from '#core/engine.ts'
 import { normalise } from '#core/normalise/normalise.ts'
 import { setValues } from '#core/read/edit.ts'
@@ -11,19 +12,17 @@ function stop(lines: readonly string[]): void {
   endWith(2)
 }
 
-/** Lines that differ, with their numbers: edits never move a line beyond the ones they add. */
-function changes(before: string, after: string): string {
-  const [old, made] = [before.split('\n'), after.split('\n')]
-  const gone = new Set(old)
-  const kept = new Set(made)
-  return [
-    ...old.flatMap((line, index) => (kept.has(line) ? [] : [`- ${index + 1}: ${line.trim()}`])),
-    ...made.flatMap((line, index) => (gone.has(line) ? [] : [`+ ${index + 1}: ${line.trim()}`])),
-  ].join('\n')
-}
+const changes = (before: string, after: string): string =>
+  lineChanges(before, after)
+    .map(({ sign, number, text }) => `${sign} ${number}: ${text}\n`)
+    .join('')
 
 /** Writes the readings of a CSV file into an install file: all of them or none, and nothing else. */
-export async function fill(file: string, readings: string, { dryRun }: { readonly dryRun?: true }): Promise<void> {
+export async function fill(
+  file: string,
+  readings: string,
+  { dryRun, rulebook }: { readonly dryRun?: true; readonly rulebook?: string },
+): Promise<void> {
   const [text, csv] = [readText(file), readText(readings)]
   if (!text.ok) return stop([text.message])
   if (!csv.ok) return stop([csv.message])
@@ -34,10 +33,12 @@ export async function fill(file: string, readings: string, { dryRun }: { readonl
   const { explain } = await import('#core/read/explain.ts')
   const filled = setValues(text.text, edits.edits, explain)
   if (!filled.ok) return stop(filled.problems.map(({ path, message }) => `${path.join('.')}: ${message}`))
-  const checked = check(filled.text, shippedShelf())
+  const shelf = await shelfFor(rulebook)
+  if (!shelf.ok) return stop([shelf.message])
+  const checked = check(filled.text, shelf.shelf)
   if (checked.kind !== 'judged')
     return stop(checked.problems.map(({ path, message }) => `${path.join('.')}: ${message}`))
-  if (dryRun) return print(`${changes(text.text, filled.text)}\n`)
+  if (dryRun) return print(changes(text.text, filled.text))
   const written = writeWhole(file, filled.text)
   if (!written.ok) return stop([written.message])
   say(`Wrote ${edits.edits.length} readings into ${file}.\n`)

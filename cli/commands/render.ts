@@ -1,4 +1,4 @@
-import { endWith, ownFile, say, writeWhole } from '#cli/io.ts'
+import { endWith, isTerminal, ownFile, say, writeWhole } from '#cli/io.ts'
 import { judgedFile } from '#cli/judged.ts'
 import type { FontName } from '#core/paper/options.ts'
 import { createdFrom, renderFieldsheet, renderReport } from '#core/report/render.ts'
@@ -25,12 +25,18 @@ function made(draw: () => Uint8Array): Made {
   }
 }
 
+function stop(message: string): void {
+  say(`${message}\n`)
+  endWith(2)
+}
+
 /** Writes the report, or the sheet for the site, as a PDF. */
 export async function render(
   name: 'render' | 'fieldsheet',
   file: string,
   { output, rulebook }: { readonly output: string; readonly rulebook?: string },
 ): Promise<void> {
+  if (output === '-' && isTerminal('stdout')) return stop('A terminal cannot show a PDF: name a file with -o, or pipe.')
   const found = await judgedFile(file, rulebook)
   if (!found) return
   const { judged, text } = found
@@ -43,7 +49,6 @@ export async function render(
   }
   const page = made(() => (name === 'render' ? renderReport(judged, options) : renderFieldsheet(judged, options)))
   const written = page.ok ? writeWhole(output, page.bytes) : page
-  if (page.ok && written.ok) return say(`Wrote ${output} (${(page.bytes.length / 1024).toFixed(0)} kB).\n`)
-  say(`${written.ok ? '' : written.message}\nNothing was written.\n`)
-  endWith(2)
+  if (!page.ok || !written.ok) return stop(`${written.ok ? '' : written.message}\nNothing was written.`)
+  if (output !== '-') say(`Wrote ${output} (${(page.bytes.length / 1024).toFixed(0)} kB).\n`)
 }

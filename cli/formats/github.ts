@@ -1,6 +1,7 @@
 import type { FileResult, ShownFinding } from '#cli/result.ts'
 import { atFailureLevel } from '#core/report/told.ts'
 import type { Format } from './format.ts'
+import { visible } from './visible.ts'
 
 /** The service shows no more than this many of each kind for one step, and drops the rest without a word. */
 const CAP = 10
@@ -32,9 +33,8 @@ function ofKind(kind: Kind, all: readonly (readonly [FileResult, ShownFinding])[
 /** Annotations for a pull request, worst first, with every place in the log as well. */
 export const github: Format = (results) => {
   const all = results.flatMap((result) => result.findings.map((finding) => [result, finding] as const))
-  const log = all.map(
-    ([{ file }, { range, verdict, rule, message }]) =>
-      `${file}:${range.line}:${range.column}: ${verdict}: ${message} (${rule})`,
+  const log = all.map(([{ file }, { range, verdict, rule, message }]) =>
+    visible(`${file}:${range.line}:${range.column}: ${verdict}: ${message} (${rule})`),
   )
   return `${[...(['error', 'warning', 'notice'] as const).flatMap((kind) => ofKind(kind, all)), ...log].join('\n')}\n`
 }

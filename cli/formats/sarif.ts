@@ -48,9 +48,13 @@ const region = ({ line, column, endLine, endColumn }: ShownFinding['range']): ob
   endColumn: endLine === line ? Math.max(endColumn, column + 1) : endColumn,
 })
 
-/** A path as a URI reference, relative to where the command ran. */
-const uriOf = (file: string): string =>
-  encodeURI(file.replaceAll('\\', '/')).replaceAll('#', '%23').replaceAll('?', '%3F')
+/** A path as a URI reference: a whole one from the root, else relative to where the command ran. */
+function uriOf(file: string): string {
+  const path = encodeURI(file.replaceAll('\\', '/')).replaceAll('#', '%23').replaceAll('?', '%3F')
+  if (path.startsWith('/')) return `file://${path}`
+  // A colon in the first part would make a scheme of it.
+  return /^[^/]*:/.test(path) ? `./${path}` : path
+}
 
 const location = (file: string, range: ShownFinding['range']): object => ({
   physicalLocation: { artifactLocation: { uri: uriOf(file) }, region: region(range) },

@@ -3,11 +3,12 @@ import type { Severity, Verdict } from '#core/glossary.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import type { Format, FormatScene } from './format.ts'
 import { type Ink, inks } from './ink.ts'
+import { visible } from './visible.ts'
 import { wrapped } from './wrap.ts'
 
 const SHAPES: Readonly<Record<Verdict, string>> = {
   fails: '✗',
-  'fails, inside the uncertainty': '✗',
+  'fails, inside the uncertainty': '!',
   'meets, inside the uncertainty': '≈',
   'not shown': '○',
   limited: '△',
@@ -53,7 +54,7 @@ function excerpt({ line, range }: ShownFinding, width: number, ink: Ink): string
 }
 
 function told(finding: ShownFinding, file: string, { width, verbose }: FormatScene, ink: Ink): string {
-  const { rule, subject, state, message, remedy, range, departure } = finding
+  const { rule, subject, state, message, remedy, cite, range, departure } = finding
   const paint = inkOf(finding, ink)
   const about = [subject, ...(state === null ? [] : [STATE_WORDS[state]])].join(' ')
   const head = `${paint(`${SHAPES[finding.verdict]} ${word(finding)}`)}  ${ink.strong(about)}  ${ink.faint(rule)}`
@@ -64,6 +65,7 @@ function told(finding: ShownFinding, file: string, { width, verbose }: FormatSce
     `${head}  ${ink.faint(`${file}:${range.line}:${range.column}`)}`,
     ...wrapped(message, width - 4).map((text) => `  ${text}`),
     ...(remedy === '' ? [] : wrapped(remedy, width - 6).map((text, index) => `  ${index === 0 ? '→' : ' '} ${text}`)),
+    ...(cite === '' ? [] : wrapped(`source: ${cite}`, width - 4).map((text) => ink.faint(`  ${text}`))),
     ...(departure
       ? wrapped(
           `Departs on purpose: ${departure.reason} (agreed by ${departure.agreed_by} on ${departure.on}).`,
@@ -128,13 +130,13 @@ function summary(result: FileResult, ink: Ink): string {
 
 function fileBlock(result: FileResult, scene: FormatScene, ink: Ink): string {
   const { file, findings } = result
-  const shown = findings.filter(({ verdict }) => verdict !== 'not shown')
+  const closed = findings.filter(({ verdict }) => verdict !== 'not shown')
   if (scene.quiet) return `${file}: ${summary(result, ink)}\n`
   if (findings.length === 0) return `${ink.sound('✓')} ${file}: ${summary(result, ink)}\n`
   return [
     ink.strong(file),
     '',
-    ...shown.map((finding) => told(finding, file, scene, ink)),
+    ...closed.map((finding) => told(finding, file, scene, ink)),
     open(
       findings.filter(({ verdict }) => verdict === 'not shown'),
       scene,
@@ -146,9 +148,24 @@ function fileBlock(result: FileResult, scene: FormatScene, ink: Ink): string {
     .join('\n')
 }
 
+/** Words of the program wrap at their spaces; whatever else is in them is shown as it is. */
+const shownFinding = (finding: ShownFinding): ShownFinding => ({
+  ...finding,
+  subject: visible(finding.subject),
+  message: visible(finding.message),
+  remedy: visible(finding.remedy),
+  line: visible(finding.line.replaceAll('\t', '⇥')),
+})
+
+const shown = (result: FileResult): FileResult => ({
+  ...result,
+  file: visible(result.file),
+  findings: result.findings.map(shownFinding),
+})
+
 /** A result put in words where it was checked. */
 export function worded(result: FileResult, scene: FormatScene): FileResult {
-  return { ...result, findings: [], block: fileBlock(result, scene, inks(scene.colour)) }
+  return { ...result, findings: [], block: fileBlock(shown(result), scene, inks(scene.colour)) }
 }
 
 /** What stands below all files: how many there were, and the caution. */
@@ -161,6 +178,6 @@ export function closing(results: readonly Pick<FileResult, 'stops' | 'stopsStric
 /** For people at a terminal: grouped by file, worst news with its place, its words and what to do. */
 export const text: Format = (results, scene) => {
   const ink = inks(scene.colour)
-  const blocks = results.map((result) => result.block ?? fileBlock(result, scene, ink))
+  const blocks = results.map((result) => result.block ?? fileBlock(shown(result), scene, ink))
   return `${blocks.join(scene.quiet ? '' : '\n')}${closing(results, scene)}`
 }

@@ -1,11 +1,8 @@
-import { type Command, InvalidArgumentError, Option } from 'commander'
-import type { CheckOptions } from '#cli/commands/check.ts'
-import { FORMAT_NAMES, type FormatName } from '#cli/formats/formats.ts'
-import { nearest } from '#core/texts/nearest.ts'
+import { type Command, Option } from 'commander'
+import { FORMAT_NAMES } from '#cli/formats/formats.ts'
+import { Outputs } from './outputs.ts'
 
 interface Raw {
-  readonly format: readonly FormatName[]
-  readonly output: readonly string[]
   readonly strict?: true
   readonly all?: true
   readonly quiet?: true
@@ -17,24 +14,9 @@ interface Raw {
   readonly errorOnUnmatched: boolean
 }
 
-function format(word: string, before: readonly FormatName[]): readonly FormatName[] {
-  const known = FORMAT_NAMES.find((name) => name === word)
-  if (known) return [...before, known]
-  const hint = nearest(word, FORMAT_NAMES)
-  throw new InvalidArgumentError(
-    `There is no format ${word}${hint === undefined ? '' : `: did you mean ${hint}?`} Formats: ${FORMAT_NAMES.join(', ')}.`,
-  )
-}
-
-const collect = (word: string, before: readonly string[]): readonly string[] => [...before, word]
-
-/** Each --format takes the --output of the same turn; the last ones without a file go to standard output. */
-function pairs(formats: readonly FormatName[], outputs: readonly string[]): CheckOptions['formats'] {
-  return formats.map((name, index) => ({ format: name, output: outputs[index] }))
-}
-
 /** `skerry check`. */
 export function addCheck(skerry: Command): void {
+  const outputs = new Outputs()
   skerry
     .command('check')
     .summary('validate, compute and judge install files')
@@ -43,15 +25,17 @@ export function addCheck(skerry: Command): void {
     )
     .argument('<paths...>', 'files, folders, globs, or - for standard input')
     .addOption(
-      new Option('-f, --format <name>', `${FORMAT_NAMES.join(', ')}; several, each with its own -o`)
-        .argParser(format)
-        .default([], 'text'),
+      new Option('-f, --format <name>', `${FORMAT_NAMES.join(', ')}; several, each with its own -o`).argParser((word) =>
+        outputs.format(word),
+      ),
     )
     .addOption(
-      new Option('-o, --output <file>', 'write the format to a file instead')
-        .argParser(collect)
-        .default([], 'standard output'),
+      new Option('-o, --output <file>', 'write the format before it to a file').argParser((file) =>
+        outputs.output(file),
+      ),
     )
+    .option('--json', 'the same as --format json')
+    .on('option:json', () => outputs.format('json'))
     .option('--strict', 'also end with 1 for what is not shown or lies inside the uncertainty')
     .option('--all', 'tell also what is met and what does not apply')
     .option('-q, --quiet', 'one line a file')
@@ -66,10 +50,12 @@ export function addCheck(skerry: Command): void {
       'after',
       '\nExamples:\n  skerry check site.skerry.yaml\n  skerry check sites/ --format sarif -o findings.sarif --format text\n  cat site.yaml | skerry check - --stdin-filename site.yaml\n',
     )
-    .action(async (paths: string[], raw: Raw) => {
+    .action(async (paths: string[], raw: Raw, command: Command) => {
       const { check, usualFormat } = await import('#cli/commands/check.ts')
+      const formats = outputs.all(usualFormat())
+      if (typeof formats === 'string') return command.error(`error: ${formats}`)
       await check(paths, {
-        formats: pairs(raw.format.length === 0 ? [usualFormat()] : raw.format, raw.output),
+        formats,
         strict: raw.strict ?? false,
         all: raw.all ?? false,
         quiet: raw.quiet ?? false,

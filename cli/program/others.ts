@@ -1,4 +1,25 @@
-import type { Command } from 'commander'
+import { type Command, Option } from 'commander'
+import { nearest } from '#core/texts/nearest.ts'
+
+interface FileOptions {
+  readonly format: 'text' | 'json'
+  readonly rulebook?: string
+}
+
+const textOrJson = (): Option =>
+  new Option('-f, --format <name>', 'how to print it').choices(['text', 'json']).default('text')
+const ownBook = (): Option => new Option('--rulebook <folder>', 'a rule book of your own, which extends one that ships')
+const CSV_EXAMPLE = '\nExample:\n  skerry fill site.skerry.yaml readings.csv --dry-run\n'
+
+function help(skerry: Command, name: string | undefined): void {
+  const asked = name === undefined ? skerry : skerry.commands.find((command) => command.name() === name)
+  if (asked) return asked.help()
+  const hint = nearest(
+    name ?? '',
+    skerry.commands.map((command) => command.name()),
+  )
+  skerry.error(`error: unknown command '${name}'${hint === undefined ? '' : `\n(Did you mean ${hint}?)`}`)
+}
 
 /** Every other command; each is loaded when it is called. */
 export function addOthers(skerry: Command): void {
@@ -6,15 +27,14 @@ export function addOthers(skerry: Command): void {
     .command('facts')
     .summary('print every computed quantity')
     .argument('<file>', 'an install file, or -')
-    .option('-f, --format <name>', 'text or json', 'text')
-    .action(async (file: string, options: { format: string }) =>
-      (await import('#cli/commands/facts.ts')).facts(file, options),
-    )
+    .addOption(textOrJson())
+    .addOption(ownBook())
+    .action(async (file: string, options: FileOptions) => (await import('#cli/commands/facts.ts')).facts(file, options))
   skerry
     .command('explain')
     .summary("a rule's words, schema, source and examples; without a name, the list")
     .argument('[rule]', 'the name of a rule')
-    .option('-f, --format <name>', 'text or json', 'text')
+    .addOption(textOrJson())
     .option('-b, --book <id>', 'the rule book to list or to look in', 'iec')
     .action(async (rule: string | undefined, options: { format: string; book: string }) =>
       (await import('#cli/commands/explain.ts')).explain(rule, options),
@@ -43,7 +63,9 @@ export function addOthers(skerry: Command): void {
     .argument('<file>', 'an install file')
     .argument('<readings>', 'a CSV file with a head line')
     .option('-n, --dry-run', 'show what would change')
-    .action(async (file: string, readings: string, options: { dryRun?: true }) =>
+    .addOption(ownBook())
+    .addHelpText('after', CSV_EXAMPLE)
+    .action(async (file: string, readings: string, options: { dryRun?: true; rulebook?: string }) =>
       (await import('#cli/commands/fill.ts')).fill(file, readings, options),
     )
   skerry
@@ -51,8 +73,9 @@ export function addOthers(skerry: Command): void {
     .summary('what changed between two files, by subject and value, and which verdicts flipped')
     .argument('<before>', 'an install file')
     .argument('<after>', 'an install file')
-    .option('-f, --format <name>', 'text or json', 'text')
-    .action(async (before: string, after: string, options: { format: string }) =>
+    .addOption(textOrJson())
+    .addOption(ownBook())
+    .action(async (before: string, after: string, options: FileOptions) =>
       (await import('#cli/commands/diff.ts')).diff(before, after, options),
     )
   for (const [name, summary] of [
@@ -63,8 +86,8 @@ export function addOthers(skerry: Command): void {
       .command(name)
       .summary(summary)
       .argument('<file>', 'an install file')
-      .requiredOption('-o, --output <file>', 'the PDF to write')
-      .option('--rulebook <folder>', 'a rule book of your own')
+      .requiredOption('-o, --output <file>', 'the PDF to write, or - for standard output')
+      .addOption(ownBook())
       .action(async (file: string, options: { output: string; rulebook?: string }) =>
         (await import('#cli/commands/render.ts')).render(name, file, options),
       )
@@ -74,6 +97,11 @@ export function addOthers(skerry: Command): void {
     .summary('print the JSON Schema of the install file')
     .option('--draft-07', 'the twin for editors')
     .action(async (options: { draft07?: true }) => (await import('#cli/commands/schema.ts')).schema(options))
+  skerry
+    .command('help')
+    .summary('what a command takes')
+    .argument('[command]', 'the name of a command')
+    .action((name: string | undefined) => help(skerry, name))
   skerry
     .command('completion')
     .summary('print a script that completes commands in a shell')

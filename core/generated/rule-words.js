@@ -1,5 +1,5 @@
 export default {
-"iec/inspection-ends-after-it-began":{title:"The inspection ends after it began",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/inspection-ends-after-it-began":{title:"The inspection ends after it began",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -15,7 +15,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Correct the dates.";
 },"useData":true})},
-"iec/next-verification-lies-ahead":{title:"The next verification falls after this one",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/next-verification-lies-ahead":{title:"The next verification falls after this one",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -31,7 +31,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Correct the date of the next verification.";
 },"useData":true})},
-"iec/instrument-is-in-calibration":{title:"The instrument was in calibration while it was used",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/instrument-is-in-calibration":{title:"The instrument was in calibration while it was used",cite:"ISO/IEC 17025:2017, 6.4.13",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -47,7 +47,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Repeat the readings with an instrument in calibration, or have this one calibrated as found and state the result.";
 },"useData":true})},
-"iec/instrument-was-calibrated-before":{title:"The instrument was calibrated before it was used",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/instrument-was-calibrated-before":{title:"The instrument was calibrated before it was used",cite:"ISO/IEC 17025:2017, 6.4.13",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -62,7 +62,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Give the calibration that was in force on the day.";
 },"useData":true})},
-"iec/calibration-runs-forward":{title:"The calibration is due after it was made",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/calibration-runs-forward":{title:"The calibration is due after it was made",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -79,7 +79,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check which of the two dates was written where.";
 },"useData":true})},
-"iec/every-circuit-was-tested":{title:"Every circuit has readings",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/every-circuit-was-tested":{title:"Every circuit has readings",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -93,7 +93,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Test them, or write not_tested with the reason.";
 },"useData":true})},
-"iec/every-residual-current-device-was-tested":{title:"Every residual-current device has readings",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/every-residual-current-device-was-tested":{title:"Every residual-current device has readings",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -107,7 +107,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Test them in each state in which they are live.";
 },"useData":true})},
-"iec/every-array-was-tested":{title:"Every array has readings",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/every-array-was-tested":{title:"Every array has readings",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -121,7 +121,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Test them in daylight, or write not_tested with the reason and the date when it will be done.";
 },"useData":true})},
-"iec/fault-current-agrees-with-the-loop":{title:"The supply's fault current agrees with its loop impedance",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/fault-current-agrees-with-the-loop":{title:"The supply's fault current agrees with its loop impedance",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -139,7 +139,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Write the larger of the line-neutral and the line-earth reading.";
 },"useData":true})},
-"iec/operator-states-the-poles":{title:"The operator's demand on the poles to be opened is on record",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/operator-states-the-poles":{title:"The operator's demand on the poles to be opened is on record",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -153,7 +153,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Ask the operator whether all poles or only the line poles are to be opened, and write the answer under separation.";
 },"useData":true})},
-"iec/operators-demand-has-a-source":{title:"It is on record where the operator states the poles",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/operators-demand-has-a-source":{title:"It is on record where the operator states the poles",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -169,7 +169,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Name the document, sheet and date under stated_in, so that the next person can check it.";
 },"useData":true})},
-"iec/changeover-breaks-the-neutral-where-the-book-says-so":{title:"The changeover opens the neutral",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-breaks-the-neutral-where-the-book-says-so":{title:"The changeover opens the neutral",cite:"BS 7671:2018, 551.4.3.2.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -183,7 +183,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a two-pole device on single-phase, a four-pole device on three-phase supply.";
 },"useData":true})},
-"iec/changeover-keeps-the-neutral-where-the-book-says-so":{title:"The changeover leaves the neutral connected",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-keeps-the-neutral-where-the-book-says-so":{title:"The changeover leaves the neutral connected",cite:"AS/NZS 3000:2018, 7.3.8.1.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -197,7 +197,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a device that opens the line poles only, and keep the neutral through.";
 },"useData":true})},
-"iec/changeover-opens-every-line":{title:"The changeover opens every line conductor",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-opens-every-line":{title:"The changeover opens every line conductor",cite:"IEC 60364-5-55, 551.6",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -213,7 +213,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a device with a pole for each line conductor.";
 },"useData":true})},
-"iec/changeover-carries-its-upstream-protection":{title:"The changeover carries the rating of its upstream overcurrent protection",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-carries-its-upstream-protection":{title:"The changeover carries the rating of its upstream overcurrent protection",cite:"IEC 60364-5-53, 536.4.3.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -229,7 +229,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit upstream protection no larger than the changeover, a larger changeover, or lead further loads past it on the grid side.";
 },"useData":true})},
-"iec/changeover-carries-the-backed-up-load":{title:"The changeover carries the backed-up load",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-carries-the-backed-up-load":{title:"The changeover carries the backed-up load",cite:"IEC 60364-5-53, 536.4.3.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -245,7 +245,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Lead loads past the changeover on the grid side, spread them over the lines, or fit a larger device.";
 },"useData":true})},
-"iec/changeover-carries-the-inverter":{title:"The changeover carries what the inverter feeds through it",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-carries-the-inverter":{title:"The changeover carries what the inverter feeds through it",cite:"IEC 60364-5-53, 536.4.3.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -261,7 +261,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a larger changeover, or limit the inverter's feed.";
 },"useData":true})},
-"iec/changeover-withstands-the-fault-current":{title:"The changeover withstands the fault current until the upstream device clears it",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-withstands-the-fault-current":{title:"The changeover withstands the fault current until the upstream device clears it",cite:"IEC 60947-6-1, 5.3.6",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -277,7 +277,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit the upstream device that the datasheet names for this fault current, or a changeover with a higher rating.";
 },"useData":true})},
-"iec/changeover-states-its-fault-rating":{title:"The changeover's conditional short-circuit current is on record",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-states-its-fault-rating":{title:"The changeover's conditional short-circuit current is on record",cite:"IEC 60947-6-1, 5.3.6",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -291,7 +291,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take it from the datasheet, with the upstream device that it holds for.";
 },"useData":true})},
-"iec/neutral-is-earthed-in-each-state":{title:"The neutral is linked to earth",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/neutral-is-earthed-in-each-state":{title:"The neutral is linked to earth",cite:"IET Wiring Matters 84, March 2021, island mode earthing arrangements",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -305,7 +305,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Let the changeover or the inverter close a link between neutral and earth in the island, and prove it by measurement.";
 },"useData":true})},
-"iec/neutral-is-earthed-once":{title:"The neutral is linked to earth in one place only",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/neutral-is-earthed-once":{title:"The neutral is linked to earth in one place only",cite:"IET Wiring Matters 84, March 2021",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -321,12 +321,12 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Open all but one link. A link that closes in the island must open before the grid returns.";
 },"useData":true})},
-"iec/changeover-is-interlocked":{title:"The changeover is interlocked against parallel closing",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-is-interlocked":{title:"The changeover is interlocked against parallel closing",cite:"IEC 60364-5-55, 551.6.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "The changeover has no interlock on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit and prove a mechanical or electrical interlock, and write it under interlock.";
 },"useData":true})},
-"iec/nothing-joins-island-and-grid":{title:"Nothing joins the island to the grid while the changeover is open",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/nothing-joins-island-and-grid":{title:"Nothing joins the island to the grid while the changeover is open",cite:"IEC 60364-5-55, 551.6",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -339,12 +339,12 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take the second way of supply out, or interlock it so that it cannot be closed in the island.";
 },"useData":true})},
-"iec/island-has-a-source":{title:"An inverter feeds the backed-up side",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/island-has-a-source":{title:"An inverter feeds the backed-up side",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "No inverter feeds the backed-up side of the changeover.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Connect the inverter that forms the island to the backed-up side, and write that under its fed_from.";
 },"useData":true})},
-"iec/signals-are-all-named":{title:"Command, confirmation and the state of the grid contactor are wired",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/signals-are-all-named":{title:"Command, confirmation and the state of the grid contactor are wired",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -358,7 +358,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Wire and test each signal, and write its terminal under signals.";
 },"useData":true})},
-"iec/signals-sit-where-they-are-configured":{title:"Each signal is configured to the terminal that it is wired to",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/signals-sit-where-they-are-configured":{title:"Each signal is configured to the terminal that it is wired to",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -372,7 +372,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Set the inverter to the terminals as labelled, keep the defaults where they equal the labels, and test both states of each signal.";
 },"useData":true})},
-"iec/signals-have-terminals-of-their-own":{title:"No two signals share a terminal",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/signals-have-terminals-of-their-own":{title:"No two signals share a terminal",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -386,17 +386,17 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Give each signal a terminal of its own.";
 },"useData":true})},
-"iec/island-has-its-own-electrode":{title:"The island has an electrode of its own",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/island-has-its-own-electrode":{title:"The island has an electrode of its own",cite:"IEC 60364-5-55, 551.4.3.2.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "The building has no electrode of its own on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Install or find an electrode, measure it, and write it under earthing.";
 },"useData":true})},
-"iec/tt-building-has-an-electrode":{title:"In a TT system the building has an electrode",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/tt-building-has-an-electrode":{title:"In a TT system the building has an electrode",cite:"IEC 60364-4-41:2005+A1:2017, 411.5.3",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "The supply is a TT system, and the building has no electrode on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Install an electrode, measure it, and write it under earthing.";
 },"useData":true})},
-"iec/electrode-is-measured":{title:"The electrode's resistance is measured",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/electrode-is-measured":{title:"The electrode's resistance is measured",cite:"IEC 60364-6:2016, 6.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -410,7 +410,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Measure the electrode while it is disconnected from the supply's earth.";
 },"useData":true})},
-"iec/earthing-conductor-is-large-enough":{title:"The earthing conductor is large enough",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/earthing-conductor-is-large-enough":{title:"The earthing conductor is large enough",cite:"IEC 60364-5-54, 542.3.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -426,7 +426,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Run a larger earthing conductor.";
 },"useData":true})},
-"iec/main-bonding-is-large-enough":{title:"The main bonding conductors are large enough",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/main-bonding-is-large-enough":{title:"The main bonding conductors are large enough",cite:"IEC 60364-5-54, 544.1.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -442,7 +442,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Run larger main bonding conductors.";
 },"useData":true})},
-"iec/main-bonding-is-continuous":{title:"The main bonding is continuous",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/main-bonding-is-continuous":{title:"The main bonding is continuous",cite:"IEC 60364-6",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -456,7 +456,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Clean and tighten the clamp, follow the conductor, and read again. Where it is very long, say so in a departure.";
 },"useData":true})},
-"iec/every-main-bond-was-read":{title:"Where main bonds were read, none was left out",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/every-main-bond-was-read":{title:"Where main bonds were read, none was left out",cite:"IEC 60364-6",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -470,17 +470,17 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read the continuity of each bond, or state why it was not tested.";
 },"useData":true})},
-"iec/transfer-to-the-island-was-tried":{title:"The transfer to the island was tried",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/transfer-to-the-island-was-tried":{title:"The transfer to the island was tried",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "No transfer to the island is on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Open the supply upstream of the changeover with the loads on, and write down what happens under transfers.";
 },"useData":true})},
-"iec/transfer-back-to-the-grid-was-tried":{title:"The transfer back to the grid was tried",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/transfer-back-to-the-grid-was-tried":{title:"The transfer back to the grid was tried",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "No transfer back to the grid is on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Close the supply again, watch the waiting time and the gap, and write them under transfers.";
 },"useData":true})},
-"iec/outage-is-made-upstream":{title:"The outage was made upstream of the changeover",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/outage-is-made-upstream":{title:"The outage was made upstream of the changeover",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -494,7 +494,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Repeat it by opening the supply upstream of the changeover, and say so in the cause.";
 },"useData":true})},
-"iec/every-grid-pole-was-read":{title:"The voltage left on every grid terminal was read in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/every-grid-pole-was-read":{title:"The voltage left on every grid terminal was read in the island",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -508,7 +508,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read every line and the neutral of the grid side to earth while the island runs.";
 },"useData":true})},
-"iec/grid-terminals-are-dead":{title:"No voltage is left on the grid terminals in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/grid-terminals-are-dead":{title:"No voltage is left on the grid terminals in the island",cite:"IEC 60364-4-41:2005+A1:2017, 411.5.3",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -530,7 +530,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Find what feeds back through the changeover before anything else. Lock the island off until it is found.";
 },"useData":true})},
-"iec/grid-terminals-carry-next-to-nothing":{title:"The grid terminals carry no more than a trace of voltage in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/grid-terminals-carry-next-to-nothing":{title:"The grid terminals carry no more than a trace of voltage in the island",cite:"from memory",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -550,7 +550,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Find out where the voltage comes from; a loaded tester tells coupling from feedback.";
 },"useData":true})},
-"iec/transfer-times-were-taken":{title:"The times to dark and to restored supply were taken",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/transfer-times-were-taken":{title:"The times to dark and to restored supply were taken",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -566,7 +566,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take both times, and write them under the transfer.";
 },"useData":true})},
-"iec/supply-is-restored-after-it-went-dark":{title:"The restored supply follows the dark moment",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/supply-is-restored-after-it-went-dark":{title:"The restored supply follows the dark moment",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -582,7 +582,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check which of the two times was written where.";
 },"useData":true})},
-"iec/return-waits-as-set":{title:"The return to the grid waits as long as is set",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/return-waits-as-set":{title:"The return to the grid waits as long as is set",cite:"EN 50549-1:2019",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -598,7 +598,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read the setting back, check the country profile, and repeat the test.";
 },"useData":true})},
-"iec/gap-on-return-was-taken":{title:"The interruption on return to the grid was observed",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/gap-on-return-was-taken":{title:"The interruption on return to the grid was observed",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -612,7 +612,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Watch the loads while the grid returns, and write the gap; 0 s where there is none.";
 },"useData":true})},
-"iec/load-stays-within-the-device":{title:"The design current is no more than the device's rating",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/load-stays-within-the-device":{title:"The design current is no more than the device's rating",cite:"IEC 60364-4-43, 433.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -630,7 +630,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Split the load, or fit a larger device if the cable bears it.";
 },"useData":true})},
-"iec/device-stays-within-the-cable":{title:"The device's rating is no more than the cable's capacity",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/device-stays-within-the-cable":{title:"The device's rating is no more than the cable's capacity",cite:"IEC 60364-4-43, 433.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -648,7 +648,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a smaller device, a larger cable, or install it so that it sheds more heat.";
 },"useData":true})},
-"iec/overload-stays-within-the-cable":{title:"The device trips before an overload harms the cable",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/overload-stays-within-the-cable":{title:"The device trips before an overload harms the cable",cite:"IEC 60364-4-43, 433.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -666,7 +666,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a smaller device or a larger cable. A fuse asks for more cable than a breaker of the same rating.";
 },"useData":true})},
-"iec/device-breaks-the-fault-current":{title:"The circuit's device can break the fault current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/device-breaks-the-fault-current":{title:"The circuit's device can break the fault current",cite:"IEC 60364-4-43, 434.5.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -684,7 +684,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a device with a higher breaking capacity, or show that a device upstream backs it up.";
 },"useData":true})},
-"iec/protective-conductor-is-run":{title:"A protective conductor is run with the circuit",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/protective-conductor-is-run":{title:"A protective conductor is run with the circuit",cite:"IEC 60364-4-41:2005+A1:2017, 411.3.1.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -698,7 +698,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Run one, or state in the long form of the cable where it is.";
 },"useData":true})},
-"iec/protective-conductor-bears-the-fault":{title:"The protective conductor bears the fault until it is cut off",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/protective-conductor-bears-the-fault":{title:"The protective conductor bears the fault until it is cut off",cite:"IEC 60364-5-54, 543.1.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -720,7 +720,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Run a larger protective conductor, or take the device's let-through energy from its datasheet.";
 },"useData":true})},
-"iec/protective-conductor-follows-the-table":{title:"The protective conductor has the size that the table gives without calculation",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/protective-conductor-follows-the-table":{title:"The protective conductor has the size that the table gives without calculation",cite:"IEC 60364-5-54:2011, Table 54.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -738,7 +738,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Nothing where the calculation shows that it is enough; keep the calculation.";
 },"useData":true})},
-"iec/lighting-keeps-its-voltage":{title:"The voltage drop to lighting stays within the limit",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/lighting-keeps-its-voltage":{title:"The voltage drop to lighting stays within the limit",cite:"IEC 60364-5-52:2009, Table G.52.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -756,7 +756,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Run a larger cable, or shorten it.";
 },"useData":true})},
-"iec/loads-keep-their-voltage":{title:"The voltage drop to other loads stays within the limit",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/loads-keep-their-voltage":{title:"The voltage drop to other loads stays within the limit",cite:"IEC 60364-5-52:2009, Table G.52.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -774,7 +774,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Run a larger cable, or shorten it.";
 },"useData":true})},
-"iec/cable-has-enough-cores":{title:"The cable has a core for each line, the neutral and the protective conductor",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/cable-has-enough-cores":{title:"The cable has a core for each line, the neutral and the protective conductor",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -792,7 +792,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check phases and type of the cable. A three-phase load without neutral is right with one core less.";
 },"useData":true})},
-"iec/circuit-uses-lines-of-the-supply":{title:"The circuit uses only lines that the supply has",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/circuit-uses-lines-of-the-supply":{title:"The circuit uses only lines that the supply has",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -809,7 +809,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Correct the phases of the circuit, or of the supply.";
 },"useData":true})},
-"iec/backed-up-load-is-stated":{title:"The load of each backed-up circuit is stated",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/backed-up-load-is-stated":{title:"The load of each backed-up circuit is stated",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -823,7 +823,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "State power, or current, and the energy of a day.";
 },"useData":true})},
-"iec/conductors-are-not-too-thin":{title:"Copper conductors have at least 1.5 mm²",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/conductors-are-not-too-thin":{title:"Copper conductors have at least 1.5 mm²",cite:"IEC 60364-5-52, Table 52.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -839,7 +839,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Run at least 1.5 mm².";
 },"useData":true})},
-"iec/protective-conductor-is-continuous":{title:"The continuity of the circuit's conductors was measured",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/protective-conductor-is-continuous":{title:"The continuity of the circuit's conductors was measured",cite:"IEC 60364-6:2016, 6.4.3.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -859,7 +859,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look for a loose terminal, a wrong length or a thinner conductor.";
 },"useData":true})},
-"iec/continuity-is-not-too-good":{title:"The continuity reading is no lower than the conductors can be",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/continuity-is-not-too-good":{title:"The continuity reading is no lower than the conductors can be",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -877,7 +877,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check the length, whether the leads were nulled, and whether a parallel path was measured.";
 },"useData":true})},
-"iec/insulation-is-high-enough":{title:"The insulation resistance is high enough",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/insulation-is-high-enough":{title:"The insulation resistance is high enough",cite:"IEC 60364-6:2016, Table 6.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -895,7 +895,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Disconnect loads, surge protection and electronics, and find the damp or damaged part.";
 },"useData":true})},
-"iec/insulation-is-tested-at-the-right-voltage":{title:"The insulation is tested at the right voltage",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/insulation-is-tested-at-the-right-voltage":{title:"The insulation is tested at the right voltage",cite:"IEC 60364-6:2016, Table 6.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -922,7 +922,7 @@ export default {
     + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"insulation_test_voltage",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":53}}})) != null ? stack1 : "")
     + ". Where equipment cannot be disconnected, 250 V is allowed; state the reason as a departure.";
 },"useData":true})},
-"iec/polarity-is-correct":{title:"The polarity is correct",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/polarity-is-correct":{title:"The polarity is correct",cite:"IEC 60364-6, order of tests",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -938,7 +938,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Correct it, and repeat the tests that it may have spoilt.";
 },"useData":true})},
-"iec/upstream-device-stays-within-its-cables":{title:"An overcurrent device is no larger than the cables behind it bear",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/upstream-device-stays-within-its-cables":{title:"An overcurrent device is no larger than the cables behind it bear",cite:"IEC 60364-4-43, 433.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -955,7 +955,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a smaller device or a larger cable.";
 },"useData":true})},
-"iec/upstream-device-carries-its-load":{title:"An overcurrent device carries the load behind it",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/upstream-device-carries-its-load":{title:"An overcurrent device carries the load behind it",cite:"IEC 60364-4-43, 433.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -973,7 +973,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Spread the loads over the lines, or share them out.";
 },"useData":true})},
-"iec/upstream-device-breaks-the-fault-current":{title:"An overcurrent device can break the fault current where it sits",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/upstream-device-breaks-the-fault-current":{title:"An overcurrent device can break the fault current where it sits",cite:"IEC 60364-4-43, 434.5.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -990,7 +990,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a device with a higher breaking capacity.";
 },"useData":true})},
-"iec/upstream-device-is-smaller-than-the-one-above":{title:"Each overcurrent device is smaller than the one above it",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/upstream-device-is-smaller-than-the-one-above":{title:"Each overcurrent device is smaller than the one above it",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1007,7 +1007,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Step the ratings so that a fault is cut off near itself.";
 },"useData":true})},
-"iec/main-protection-breaks-the-fault-current":{title:"The main protection can break the fault current of the supply",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/main-protection-breaks-the-fault-current":{title:"The main protection can break the fault current of the supply",cite:"IEC 60364-4-43, 434.5.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1023,7 +1023,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Ask the operator for the fault current, and fit protection for it.";
 },"useData":true})},
-"iec/supply-is-measured":{title:"The supply's loop impedance and fault current are on record",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/supply-is-measured":{title:"The supply's loop impedance and fault current are on record",cite:"IEC CDV 60364-6:2015, model report",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1039,7 +1039,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Measure both at the origin, and write them under supply.";
 },"useData":true})},
-"iec/fault-is-cut-off-on-the-grid":{title:"On the grid something would cut off a fault in time, as designed",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/fault-is-cut-off-on-the-grid":{title:"On the grid something would cut off a fault in time, as designed",cite:"IEC 60364-4-41:2005+A1:2017, 411.3.2, 411.4.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1059,7 +1059,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Lower the loop, fit another characteristic, or add residual-current protection.";
 },"useData":true})},
-"iec/loop-was-read-on-the-grid":{title:"The fault loop was read on the grid and trips the overcurrent device",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/loop-was-read-on-the-grid":{title:"The fault loop was read on the grid and trips the overcurrent device",cite:"IEC 60364-6:2016, Annex D, 6.4.3.7.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1077,7 +1077,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read the loop at the far end of the circuit; if it is too high, lower it or fit another device.";
 },"useData":true})},
-"iec/loop-suits-the-device-even-with-residual-protection":{title:"The fault loop suits the overcurrent device even where residual-current protection cuts off",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/loop-suits-the-device-even-with-residual-protection":{title:"The fault loop suits the overcurrent device even where residual-current protection cuts off",cite:"IEC 60364-4-41:2005+A1:2017, 411.4.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1095,7 +1095,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look for a bad joint. Accept it only where the length of the circuit explains the reading.";
 },"useData":true})},
-"iec/loop-agrees-with-the-cable":{title:"The loop reading agrees with the supply and the cables",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/loop-agrees-with-the-cable":{title:"The loop reading agrees with the supply and the cables",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1113,7 +1113,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check the length, the supply's loop impedance, and whether the reading was taken at the far end.";
 },"useData":true})},
-"iec/fault-is-cut-off-in-the-island":{title:"In the island something cuts off a fault in time",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/fault-is-cut-off-in-the-island":{title:"In the island something cuts off a fault in time",cite:"IEC 60364-4-41:2005+A1:2017, 411.3.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1131,7 +1131,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Place residual-current protection downstream of the changeover, or show that the inverter shuts down in time.";
 },"useData":true})},
-"iec/loop-of-the-grid-does-not-count-in-the-island":{title:"Where a breaker must trip in the island, the loop was read in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/loop-of-the-grid-does-not-count-in-the-island":{title:"Where a breaker must trip in the island, the loop was read in the island",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1149,7 +1149,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read the loop while the island is running, with an instrument that the inverter bears, or rely on residual-current protection.";
 },"useData":true})},
-"iec/residual-protection-needs-an-earthed-island":{title:"Residual-current protection in the island has a neutral that is linked to earth",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/residual-protection-needs-an-earthed-island":{title:"Residual-current protection in the island has a neutral that is linked to earth",cite:"IET Wiring Matters 84, March 2021",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1163,7 +1163,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Close a link between neutral and earth on the source's side of the device while the island runs.";
 },"useData":true})},
-"iec/electrode-suits-the-residual-protection":{title:"The electrode lets the residual-current protection cut off in time",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/electrode-suits-the-residual-protection":{title:"The electrode lets the residual-current protection cut off in time",cite:"IEC 60364-4-41:2005+A1:2017, 411.5.3",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1181,7 +1181,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Improve the electrode, or fit a more sensitive device.";
 },"useData":true})},
-"iec/electrode-is-stable":{title:"The electrode is low enough to be stable",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/electrode-is-stable":{title:"The electrode is low enough to be stable",cite:"BS 7671:2018, Table 41.5, note",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1197,7 +1197,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Drive it deeper, add a second one, or measure again in a dry month.";
 },"useData":true})},
-"iec/tt-circuits-have-residual-protection":{title:"In a TT system each circuit has residual-current protection",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/tt-circuits-have-residual-protection":{title:"In a TT system each circuit has residual-current protection",cite:"IEC 60364-4-41:2005+A1:2017, 411.5.3",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1212,7 +1212,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Feed it through a residual-current device that works in this state.";
 },"useData":true})},
-"iec/half-the-residual-current-does-not-trip":{title:"The device does not trip at half its rated residual current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/half-the-residual-current-does-not-trip":{title:"The device does not trip at half its rated residual current",cite:"IEC 61008-1, Table 1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1229,7 +1229,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Measure what leaks already, take loads off, and test again; replace the device if it still trips.";
 },"useData":true})},
-"iec/rated-residual-current-trips-in-time":{title:"The device trips in time at its rated residual current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/rated-residual-current-trips-in-time":{title:"The device trips in time at its rated residual current",cite:"IEC 61008-1, Table 1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1248,7 +1248,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Replace the device. In the island, prove the link between neutral and earth first.";
 },"useData":true})},
-"iec/delayed-device-waits-at-its-rated-residual-current":{title:"The time-delayed device waits long enough at its rated residual current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/delayed-device-waits-at-its-rated-residual-current":{title:"The time-delayed device waits long enough at its rated residual current",cite:"IEC 61008-1, Table 1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1267,7 +1267,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check that the device is time-delayed; replace it if it is.";
 },"useData":true})},
-"iec/double-residual-current-trips-in-time":{title:"The device trips in time at twice its rated residual current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/double-residual-current-trips-in-time":{title:"The device trips in time at twice its rated residual current",cite:"IEC 61008-1, Table 1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1286,7 +1286,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Replace the device.";
 },"useData":true})},
-"iec/delayed-device-waits-at-double-residual-current":{title:"The time-delayed device waits long enough at twice its rated residual current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/delayed-device-waits-at-double-residual-current":{title:"The time-delayed device waits long enough at twice its rated residual current",cite:"from memory",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1305,7 +1305,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check that the device is time-delayed.";
 },"useData":true})},
-"iec/five-times-the-residual-current-trips-at-once":{title:"The device trips at once at five times its rated residual current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/five-times-the-residual-current-trips-at-once":{title:"The device trips at once at five times its rated residual current",cite:"IEC 61008-1, Table 1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1324,7 +1324,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Replace the device.";
 },"useData":true})},
-"iec/delayed-device-waits-at-five-times":{title:"The time-delayed device waits long enough at five times its rated residual current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/delayed-device-waits-at-five-times":{title:"The time-delayed device waits long enough at five times its rated residual current",cite:"IEC 61008-1, Table 1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1343,7 +1343,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check that the device is time-delayed.";
 },"useData":true})},
-"iec/rising-residual-current-trips-soon-enough":{title:"Under a rising residual current the device trips soon enough",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/rising-residual-current-trips-soon-enough":{title:"Under a rising residual current the device trips soon enough",cite:"EN 61008-1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1364,7 +1364,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Replace the device.";
 },"useData":true})},
-"iec/rising-residual-current-does-not-trip-too-soon":{title:"Under a rising residual current the device does not trip too soon",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/rising-residual-current-does-not-trip-too-soon":{title:"Under a rising residual current the device does not trip too soon",cite:"EN 61008-1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1385,7 +1385,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Measure what leaks already, take loads off, and test again.";
 },"useData":true})},
-"iec/device-has-the-type-that-the-inverter-asks-for":{title:"The device has the type that the inverter's datasheet asks for",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/device-has-the-type-that-the-inverter-asks-for":{title:"The device has the type that the inverter's datasheet asks for",cite:"Energy Safe Victoria, EIS-008",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1402,7 +1402,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit the type that the datasheet asks for at the backed-up output.";
 },"useData":true})},
-"iec/inverter-without-separation-asks-for-type-b":{title:"Behind an inverter without separation the device is of type B, unless its datasheet says otherwise",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/inverter-without-separation-asks-for-type-b":{title:"Behind an inverter without separation the device is of type B, unless its datasheet says otherwise",cite:"IEC 60364-7-712, 712.530.3.101",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1417,7 +1417,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look in the datasheet whether type A is enough, and write it under residual_type_needed.";
 },"useData":true})},
-"iec/device-is-more-than-type-ac":{title:"The device knows pulsating direct current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/device-is-more-than-type-ac":{title:"The device knows pulsating direct current",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1432,7 +1432,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit type A or better where anything with electronics is connected.";
 },"useData":true})},
-"iec/device-carries-its-upstream-protection":{title:"The residual-current device carries the rating of the overcurrent device upstream",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/device-carries-its-upstream-protection":{title:"The residual-current device carries the rating of the overcurrent device upstream",cite:"IEC 60364-5-53, 536.4.3.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1449,7 +1449,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a device with a higher rated current, or smaller protection upstream.";
 },"useData":true})},
-"iec/sockets-have-additional-protection":{title:"Socket circuits have additional protection",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/sockets-have-additional-protection":{title:"Socket circuits have additional protection",cite:"IEC 60364-4-41:2005+A1:2017, 411.3.3, 415.1.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1478,7 +1478,7 @@ export default {
     + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"book.additional_residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":30},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
     + " that works in this state.";
 },"useData":true})},
-"iec/lighting-in-dwellings-has-additional-protection":{title:"Lighting circuits of dwellings have additional protection",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/lighting-in-dwellings-has-additional-protection":{title:"Lighting circuits of dwellings have additional protection",cite:"IEC 60364-4-41:2005+A1:2017, 411.3.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1505,7 +1505,7 @@ export default {
     + ((stack1 = lookupProperty(helpers,"show").call(depth0 != null ? depth0 : (container.nullContext || {}),"book.additional_residual",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":30},"end":{"line":1,"column":65}}})) != null ? stack1 : "")
     + " that works in this state.";
 },"useData":true})},
-"iec/protection-of-the-grid-goes-on-in-the-island":{title:"A circuit with residual-current protection on the grid has it in the island too",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/protection-of-the-grid-goes-on-in-the-island":{title:"A circuit with residual-current protection on the grid has it in the island too",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1518,7 +1518,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Place the device downstream of the changeover and of the link between neutral and earth.";
 },"useData":true})},
-"iec/device-does-not-stand-before-the-changeover-alone":{title:"A residual-current device upstream of the changeover is not relied on in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/device-does-not-stand-before-the-changeover-alone":{title:"A residual-current device upstream of the changeover is not relied on in the island",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1531,7 +1531,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Keep it only where another device stands downstream of the changeover.";
 },"useData":true})},
-"iec/devices-in-series-are-selective":{title:"Residual-current devices in series are selective",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/devices-in-series-are-selective":{title:"Residual-current devices in series are selective",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1552,7 +1552,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a time-delayed device with at least three times the residual current upstream.";
 },"useData":true})},
-"iec/array-voltage-stays-below-the-input-limit":{title:"The array's highest voltage stays below the inverter's limit",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/array-voltage-stays-below-the-input-limit":{title:"The array's highest voltage stays below the inverter's limit",cite:"NEC 690.7(A)",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1570,7 +1570,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take modules out of the string, or fit an inverter with a higher input voltage.";
 },"useData":true})},
-"iec/lowest-temperature-is-stated":{title:"The lowest temperature at the site is on record",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/lowest-temperature-is-stated":{title:"The lowest temperature at the site is on record",cite:"NEC 690.7(A)",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1584,7 +1584,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take it from the local weather record, and write it under site.";
 },"useData":true})},
-"iec/voltage-coefficient-comes-from-the-datasheet":{title:"The temperature coefficient of the open-circuit voltage is on record",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/voltage-coefficient-comes-from-the-datasheet":{title:"The temperature coefficient of the open-circuit voltage is on record",cite:"NEC 690.7(A)",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1598,7 +1598,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take it from the module's datasheet, in %/K and negative. A value in V/K or mV/K must be divided by the open-circuit voltage.";
 },"useData":true})},
-"iec/array-voltage-stays-in-the-tracking-window":{title:"The hot array's voltage stays above the start of the tracking window",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/array-voltage-stays-in-the-tracking-window":{title:"The hot array's voltage stays above the start of the tracking window",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1614,7 +1614,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Put more modules in series, or fit an inverter that tracks from a lower voltage.";
 },"useData":true})},
-"iec/string-fuses-are-fitted-where-needed":{title:"String fuses are fitted where the other strings could overload a module",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-fuses-are-fitted-where-needed":{title:"String fuses are fitted where the other strings could overload a module",cite:"IEC 62548:2016",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1629,7 +1629,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit string fuses within the range that the module allows.";
 },"useData":true})},
-"iec/string-fuse-does-not-trip-in-sunshine":{title:"The string fuse is large enough for full sunshine",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-fuse-does-not-trip-in-sunshine":{title:"The string fuse is large enough for full sunshine",cite:"IEC 62548:2016",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1645,7 +1645,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a larger string fuse, within what the module allows.";
 },"useData":true})},
-"iec/string-fuse-protects-the-module":{title:"The string fuse is no larger than the module allows",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-fuse-protects-the-module":{title:"The string fuse is no larger than the module allows",cite:"IEC 62548:2016",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1661,7 +1661,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a string fuse within what the module's datasheet allows.";
 },"useData":true})},
-"iec/module-figures-agree":{title:"The module's power agrees with its voltage and current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/module-figures-agree":{title:"The module's power agrees with its voltage and current",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1677,7 +1677,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check the module's figures against its datasheet.";
 },"useData":true})},
-"iec/every-string-was-read":{title:"Every string was read",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/every-string-was-read":{title:"Every string was read",cite:"IEC 62446-1:2016+A1:2018, 6.4 and 6.5",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1692,7 +1692,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read each string on its own before it is joined to the others.";
 },"useData":true})},
-"iec/string-polarity-is-correct":{title:"The string's polarity is correct",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-polarity-is-correct":{title:"The string's polarity is correct",cite:"IEC 62446-1:2016+A1:2018, 6.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1708,7 +1708,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Correct the polarity before the string is connected to anything.";
 },"useData":true})},
-"iec/string-voltage-is-read":{title:"The string's open-circuit voltage is as expected on the day",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-voltage-is-read":{title:"The string's open-circuit voltage is as expected on the day",cite:"IEC 62446-1:2016+A1:2018, 6.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1727,7 +1727,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Count the modules, look for a bypassed one, and check the datasheet's figures and the cell temperature.";
 },"useData":true})},
-"iec/string-has-all-its-modules":{title:"No module is missing from the string",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-has-all-its-modules":{title:"No module is missing from the string",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1746,7 +1746,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Count the modules of the string on the roof and in the layout plan.";
 },"useData":true})},
-"iec/string-voltages-agree":{title:"The string's voltage agrees with the other strings",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-voltages-agree":{title:"The string's voltage agrees with the other strings",cite:"IEC 62446-1:2016+A1:2018, 6.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1763,7 +1763,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Compare count, type and direction of the modules; read the strings again under steady light.";
 },"useData":true})},
-"iec/string-current-is-as-expected":{title:"The string's short-circuit current is as expected on the day",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-current-is-as-expected":{title:"The string's short-circuit current is as expected on the day",cite:"IEC 62446-1:2016+A1:2018, 6.5.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1782,7 +1782,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look for shade and dirt, and measure irradiance in the plane of the modules at the same moment.";
 },"useData":true})},
-"iec/string-currents-agree":{title:"The string's current agrees with the other strings",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-currents-agree":{title:"The string's current agrees with the other strings",cite:"IEC 62446-1:2016+A1:2018, 6.5",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1799,7 +1799,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look for shade on this string, and read all strings again under steady light.";
 },"useData":true})},
-"iec/string-insulation-is-high-enough":{title:"The string's insulation resistance is high enough",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-insulation-is-high-enough":{title:"The string's insulation resistance is high enough",cite:"IEC 62446-1:2016+A1:2018, 6.7",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1817,7 +1817,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Find the damp connector or the pinched cable before the array is connected.";
 },"useData":true})},
-"iec/string-insulation-is-tested-at-the-right-voltage":{title:"The string's insulation is tested at the voltage that its system voltage asks for",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-insulation-is-tested-at-the-right-voltage":{title:"The string's insulation is tested at the voltage that its system voltage asks for",cite:"IEC 62446-1:2016+A1:2018, 6.7",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1837,7 +1837,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Repeat the test at the right voltage, with the inverter and surge protection disconnected.";
 },"useData":true})},
-"iec/light-was-strong-enough":{title:"The light was strong enough for a reading of current",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/light-was-strong-enough":{title:"The light was strong enough for a reading of current",cite:"IEC 62446-1:2016+A1:2018, 7.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1852,7 +1852,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read the currents again at 400 W/m² or more, or state why not.";
 },"useData":true})},
-"iec/string-was-read-by-daylight":{title:"The sun was up when the string was read",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/string-was-read-by-daylight":{title:"The sun was up when the string was read",cite:"Meeus, Astronomical Algorithms",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1869,7 +1869,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Correct the time, its offset from universal time, or the position of the site.";
 },"useData":true})},
-"iec/interface-protection-is-on-record":{title:"The settings of the interface protection are on record",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/interface-protection-is-on-record":{title:"The settings of the interface protection are on record",cite:"VDE-AR-N 4105:2018-11, form E.8",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1891,7 +1891,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read all five settings back from the inverter, and write them under interface_protection.";
 },"useData":true})},
-"iec/overvoltage-setting-follows-the-book":{title:"The overvoltage setting is the one that the rule book states",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/overvoltage-setting-follows-the-book":{title:"The overvoltage setting is the one that the rule book states",cite:"VDE-AR-N 4105:2018-11",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1907,7 +1907,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check the country profile with the operator, and set it.";
 },"useData":true})},
-"iec/undervoltage-setting-follows-the-book":{title:"The undervoltage setting is the one that the rule book states",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/undervoltage-setting-follows-the-book":{title:"The undervoltage setting is the one that the rule book states",cite:"VDE-AR-N 4105:2018-11",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1923,7 +1923,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check the country profile with the operator, and set it.";
 },"useData":true})},
-"iec/frequency-settings-follow-the-book":{title:"The frequency settings are the ones that the rule book states",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/frequency-settings-follow-the-book":{title:"The frequency settings are the ones that the rule book states",cite:"VDE-AR-N 4105:2018-11",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1943,7 +1943,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Check the country profile with the operator, and set it.";
 },"useData":true})},
-"iec/reconnection-waits-long-enough":{title:"The inverter waits long enough before it reconnects",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/reconnection-waits-long-enough":{title:"The inverter waits long enough before it reconnects",cite:"EN 50549-1:2019",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1959,7 +1959,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Set the waiting time of the operator's conditions.";
 },"useData":true})},
-"iec/unbalance-stays-within-the-book":{title:"The unbalance between the lines stays within what the rule book allows",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/unbalance-stays-within-the-book":{title:"The unbalance between the lines stays within what the rule book allows",cite:"VDE-AR-N 4100",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1977,7 +1977,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Spread the loads over the lines, or use an inverter that feeds all three.";
 },"useData":true})},
-"iec/inverter-monitors-residual-current":{title:"Residual current on the d.c. side is monitored",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/inverter-monitors-residual-current":{title:"Residual current on the d.c. side is monitored",cite:"IEC 62109-2, 4.8.3.5",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -1993,7 +1993,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Use an inverter with a residual-current monitor, or fit one.";
 },"useData":true})},
-"iec/battery-keeps-out-of-forbidden-places":{title:"The battery keeps out of sleeping rooms, escape routes and roof spaces",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/battery-keeps-out-of-forbidden-places":{title:"The battery keeps out of sleeping rooms, escape routes and roof spaces",cite:"PAS 63100:2024",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2007,7 +2007,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Move it out of sleeping rooms, escape routes, lofts and voids, or show that local rules allow the place.";
 },"useData":true})},
-"iec/battery-keeps-clear-of-openings":{title:"A battery outdoors keeps clear of doors, windows and vents",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/battery-keeps-clear-of-openings":{title:"A battery outdoors keeps clear of doors, windows and vents",cite:"PAS 63100:2024",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2021,7 +2021,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Keep 1 m from doors, windows and vents.";
 },"useData":true})},
-"iec/lead-battery-ventilation-is-known":{title:"The ventilation that a lead-acid battery needs is computed",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/lead-battery-ventilation-is-known":{title:"The ventilation that a lead-acid battery needs is computed",cite:"IEC 62485-2:2010, 7.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2035,7 +2035,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Give cells, capacity and gas_current from the datasheet.";
 },"useData":true})},
-"iec/meter-sits-at-the-connection-point":{title:"The meter that steers the inverter sits at the connection point",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/meter-sits-at-the-connection-point":{title:"The meter that steers the inverter sits at the connection point",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2049,7 +2049,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Move it to the connection point, where everything that the building draws and feeds passes.";
 },"useData":true})},
-"iec/meter-counts-the-right-way":{title:"The meter's direction was checked",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/meter-counts-the-right-way":{title:"The meter's direction was checked",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2063,7 +2063,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Switch a load and watch the sign follow; turn the meter or its transformers round if it does not.";
 },"useData":true})},
-"iec/meter-carries-the-main-protection":{title:"The direct-connected meter carries the rating of the main protection",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/meter-carries-the-main-protection":{title:"The direct-connected meter carries the rating of the main protection",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2079,7 +2079,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Use a meter with current transformers, or smaller main protection.";
 },"useData":true})},
-"iec/bus-is-terminated-at-both-ends":{title:"The bus is terminated at its two ends",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/bus-is-terminated-at-both-ends":{title:"The bus is terminated at its two ends",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2093,7 +2093,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit one resistor of 120 Ω at each end of the line, and take all others out.";
 },"useData":true})},
-"iec/bus-resistance-fits-its-terminators":{title:"The resistance across the bus is that of two terminators",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/bus-resistance-fits-its-terminators":{title:"The resistance across the bus is that of two terminators",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2107,7 +2107,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Near 120 Ω one terminator is missing, near 40 Ω there is one too many. Find it.";
 },"useData":true})},
-"iec/bus-address-is-valid":{title:"The address on the bus is valid",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/bus-address-is-valid":{title:"The address on the bus is valid",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2121,7 +2121,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Give the device an address from 1 to 247.";
 },"useData":true})},
-"iec/bus-address-is-its-own":{title:"No other device on the bus has the same address",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/bus-address-is-its-own":{title:"No other device on the bus has the same address",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2135,7 +2135,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Give each device an address of its own.";
 },"useData":true})},
-"iec/bus-is-short-enough":{title:"The bus is no longer than its devices allow",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/bus-is-short-enough":{title:"The bus is no longer than its devices allow",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2151,7 +2151,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Shorten it, or use a repeater.";
 },"useData":true})},
-"iec/bus-idles-at-a-defined-level":{title:"The idle bus is held at a defined level",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/bus-idles-at-a-defined-level":{title:"The idle bus is held at a defined level",cite:"from memory",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2165,7 +2165,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Use smaller bias resistors, in one place only.";
 },"useData":true})},
-"iec/each-line-fits-the-inverter":{title:"The load of each line stays within what the inverter gives it",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/each-line-fits-the-inverter":{title:"The load of each line stays within what the inverter gives it",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2181,7 +2181,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Move loads to another line or to the grid side.";
 },"useData":true})},
-"iec/whole-load-fits-the-inverter":{title:"The whole backed-up load stays within the inverter's continuous power",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/whole-load-fits-the-inverter":{title:"The whole backed-up load stays within the inverter's continuous power",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2197,7 +2197,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Move loads to the grid side, or fit a larger inverter.";
 },"useData":true})},
-"iec/every-loaded-line-is-fed":{title:"Each line with backed-up load is fed in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/every-loaded-line-is-fed":{title:"Each line with backed-up load is fed in the island",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2211,7 +2211,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Move the circuits to a line that is fed, or use an inverter that feeds all lines.";
 },"useData":true})},
-"iec/starts-fit-the-peak":{title:"The largest start fits the inverter's peak",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/starts-fit-the-peak":{title:"The largest start fits the inverter's peak",cite:"IEC 60034-12",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2227,7 +2227,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a soft starter, move the load to another line, or keep it on the grid side.";
 },"useData":true})},
-"iec/peak-is-on-record":{title:"The inverter's peak power in the island is on record",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/peak-is-on-record":{title:"The inverter's peak power in the island is on record",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2241,7 +2241,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take peak and peak time from the datasheet.";
 },"useData":true})},
-"iec/fault-current-in-the-island-is-on-record":{title:"The fault current that the inverter feeds in the island is on record",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/fault-current-in-the-island-is-on-record":{title:"The fault current that the inverter feeds in the island is on record",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2257,7 +2257,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take it from the datasheet or measure it; there is no figure that holds for all.";
 },"useData":true})},
-"iec/battery-can-give-the-load":{title:"The batteries can give the power of the backed-up loads",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/battery-can-give-the-load":{title:"The batteries can give the power of the backed-up loads",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2273,7 +2273,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Tell the customer which loads may run together at night, or move some to the grid side.";
 },"useData":true})},
-"iec/must-run-loads-fit-the-battery":{title:"The batteries can give the power of what must run",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/must-run-loads-fit-the-battery":{title:"The batteries can give the power of what must run",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2289,17 +2289,17 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit more discharge power, or agree with the customer on what really must run.";
 },"useData":true})},
-"iec/must-run-loads-are-marked":{title:"It is marked which circuits must run in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/must-run-loads-are-marked":{title:"It is marked which circuits must run in the island",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "No backed-up circuit is marked as one that must run.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Ask the customer what must not fail, and write must_run true under the load of those circuits.";
 },"useData":true})},
-"iec/hours-of-supply-are-known":{title:"It is known how long the held-back charge lasts",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/hours-of-supply-are-known":{title:"It is known how long the held-back charge lasts",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "How long the held-back charge lasts cannot be computed.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "State the charge that is held back in the inverter's settings, and power or daily energy of each backed-up load.";
 },"useData":true})},
-"iec/charge-is-held-back":{title:"Charge is held back for the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/charge-is-held-back":{title:"Charge is held back for the island",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2312,7 +2312,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Set the charge that the customer wants to have left when the grid fails.";
 },"useData":true})},
-"iec/alarm-comes-before-the-end":{title:"The low-charge alarm comes while held-back charge is left",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/alarm-comes-before-the-end":{title:"The low-charge alarm comes while held-back charge is left",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2328,7 +2328,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Set the alarm below the charge that is held back, and above the end of discharge.";
 },"useData":true})},
-"iec/island-voltage-is-set-to-nominal":{title:"The island voltage is set to the nominal voltage",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/island-voltage-is-set-to-nominal":{title:"The island voltage is set to the nominal voltage",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2344,7 +2344,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Set it with the installer's account, and read it back.";
 },"useData":true})},
-"iec/settings-were-read-back":{title:"The settings were read back after they were made",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/settings-were-read-back":{title:"The settings were read back after they were made",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2360,7 +2360,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read every setting back from the device, and write read_back true.";
 },"useData":true})},
-"iec/voltages-are-within-the-yardstick":{title:"The voltages lie within the yardstick of the public supply",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/voltages-are-within-the-yardstick":{title:"The voltages lie within the yardstick of the public supply",cite:"EN 50160",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2384,7 +2384,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "On the grid ask the operator; in the island check the setting, the load of each line and the neutral.";
 },"useData":true})},
-"iec/voltage-is-within-the-yardstick":{title:"The voltage of a single-phase supply lies within the yardstick of the public supply",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/voltage-is-within-the-yardstick":{title:"The voltage of a single-phase supply lies within the yardstick of the public supply",cite:"EN 50160",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2404,7 +2404,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "On the grid ask the operator; in the island check the setting and the load.";
 },"useData":true})},
-"iec/island-keeps-to-its-setting":{title:"The voltages in the island lie near the inverter's setting",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/island-keeps-to-its-setting":{title:"The voltages in the island lie near the inverter's setting",cite:"from memory",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2424,7 +2424,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Read the setting back, look at the load while the reading was taken, and check the neutral's terminals.";
 },"useData":true})},
-"iec/frequency-is-within-the-yardstick":{title:"The frequency lies within the yardstick of the public supply",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/frequency-is-within-the-yardstick":{title:"The frequency lies within the yardstick of the public supply",cite:"EN 50160",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2444,7 +2444,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "In the island, look whether the inverter throttles an array by its frequency, and whether the loads bear it.";
 },"useData":true})},
-"iec/neutral-stays-near-earth":{title:"The neutral stays near earth",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/neutral-stays-near-earth":{title:"The neutral stays near earth",cite:"IEC 60364-4-41:2005+A1:2017, 411.5.3",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2460,7 +2460,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Prove the link between neutral and earth, and look for a lost neutral.";
 },"useData":true})},
-"iec/link-in-the-island-was-measured":{title:"The link between neutral and earth was measured in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/link-in-the-island-was-measured":{title:"The link between neutral and earth was measured in the island",cite:"from memory",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2474,17 +2474,17 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Measure from the neutral bar to the earth bar with the island formed, and find the loose terminal.";
 },"useData":true})},
-"iec/rotation-stays-the-same":{title:"The direction of rotation is the same in both states",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/rotation-stays-the-same":{title:"The direction of rotation is the same in both states",cite:"IEC 60364-6",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "The direction of rotation changes between the grid and the island.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Swap two lines of the inverter, and measure again in both states.";
 },"useData":true})},
-"iec/load-steps-were-tried":{title:"A load step was tried in the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/load-steps-were-tried":{title:"A load step was tried in the island",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "No load step in the island is on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Start the largest motor and the largest heater in the island, and write the lowest voltage and frequency under load_steps.";
 },"useData":true})},
-"iec/load-step-does-not-trip-the-island":{title:"The load step does not trip the island",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/load-step-does-not-trip-the-island":{title:"The load step does not trip the island",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2498,7 +2498,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Move the load to the grid side, or start it softly.";
 },"useData":true})},
-"iec/load-step-keeps-the-voltage-up":{title:"The voltage stays up during the load step",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/load-step-keeps-the-voltage-up":{title:"The voltage stays up during the load step",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2516,7 +2516,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Start the load softly, or share the lines out differently.";
 },"useData":true})},
-"iec/load-step-keeps-the-frequency-up":{title:"The frequency stays up during the load step",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/load-step-keeps-the-frequency-up":{title:"The frequency stays up during the load step",cite:"EN 50160",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2534,7 +2534,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Ask the inverter's datasheet what it does at this step, and start the load softly.";
 },"useData":true})},
-"iec/notices-warn-of-two-sources":{title:"A notice at the boards warns of two sources",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/notices-warn-of-two-sources":{title:"A notice at the boards warns of two sources",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2548,7 +2548,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fix a notice at every board that two sources feed, and at the meter. Then add the item with its result.";
 },"useData":true})},
-"iec/backed-up-circuits-are-labelled":{title:"The backed-up circuits are labelled",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/backed-up-circuits-are-labelled":{title:"The backed-up circuits are labelled",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2562,7 +2562,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Label each backed-up circuit at its board. Then add the item with its result.";
 },"useData":true})},
-"iec/diagram-hangs-at-the-board":{title:"A single-line diagram is at the board",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/diagram-hangs-at-the-board":{title:"A single-line diagram is at the board",cite:"DIN VDE 0100",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2576,7 +2576,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Put a single-line diagram with both states at the board. Then add the item with its result.";
 },"useData":true})},
-"iec/fire-sealing-was-inspected":{title:"Fire sealing was inspected",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/fire-sealing-was-inspected":{title:"Fire sealing was inspected",cite:"from memory",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2590,7 +2590,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look at every passage of a cable through a wall or into a board. Then add the item with its result.";
 },"useData":true})},
-"iec/conductors-are-identified":{title:"The identification of conductors was inspected",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/conductors-are-identified":{title:"The identification of conductors was inspected",cite:"IEC 60445",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2604,7 +2604,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look at colours and marks at every termination. Then add the item with its result.";
 },"useData":true})},
-"iec/terminals-are-tight":{title:"The terminals were inspected for tightness",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/terminals-are-tight":{title:"The terminals were inspected for tightness",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2618,7 +2618,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Tighten to the torque of the datasheet, and mark what was tightened. Then add the item with its result.";
 },"useData":true})},
-"iec/barriers-were-inspected":{title:"Barriers and enclosures were inspected",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/barriers-were-inspected":{title:"Barriers and enclosures were inspected",cite:"from memory",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2632,7 +2632,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look for missing blanks, covers and cable glands. Then add the item with its result.";
 },"useData":true})},
-"iec/isolation-was-inspected":{title:"Isolation and switching were inspected",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/isolation-was-inspected":{title:"Isolation and switching were inspected",cite:"from memory",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2646,7 +2646,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Try every isolator, and see that it can be locked and reached. Then add the item with its result.";
 },"useData":true})},
-"iec/array-wiring-was-inspected":{title:"Array cables and connectors were inspected",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/array-wiring-was-inspected":{title:"Array cables and connectors were inspected",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2660,7 +2660,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look at every connector pair, and lift every cable off the roof. Then add the item with its result.";
 },"useData":true})},
-"iec/battery-mounting-was-inspected":{title:"Battery mounting and clearances were inspected",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/battery-mounting-was-inspected":{title:"Battery mounting and clearances were inspected",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2674,17 +2674,17 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Look at wall, fixings, clearances and the way to it. Then add the item with its result.";
 },"useData":true})},
-"iec/notices-are-photographed":{title:"The notices are photographed",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/notices-are-photographed":{title:"The notices are photographed",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "The notices were inspected, and no photo of them is on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take a photo of each notice in its place.";
 },"useData":true})},
-"iec/labels-are-photographed":{title:"The labels of the backed-up circuits are photographed",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/labels-are-photographed":{title:"The labels of the backed-up circuits are photographed",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "The labels of the backed-up circuits were inspected, and no photo of them is on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take a photo of the labelled board.";
 },"useData":true})},
-"iec/no-defect-is-left":{title:"No defect is left open",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/no-defect-is-left":{title:"No defect is left open",cite:"IEC 60364-6, 6.4.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2698,7 +2698,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Mend the defect, inspect again, and change the result.";
 },"useData":true})},
-"iec/defects-are-described":{title:"Each defect is described",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/defects-are-described":{title:"Each defect is described",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2712,7 +2712,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Say what is wrong and where, so that somebody else can mend it.";
 },"useData":true})},
-"iec/everything-was-inspected":{title:"No item of the inspection was left out",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/everything-was-inspected":{title:"No item of the inspection was left out",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2726,17 +2726,17 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Inspect them, or say in the extent of the report that they are left out, and why.";
 },"useData":true})},
-"iec/tester-is-named":{title:"The person who tested is named",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/tester-is-named":{title:"The person who tested is named",cite:"IEC CDV 60364-6:2015, model report",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Nobody is named who tested.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Name the person who took the readings under tested_by.";
 },"useData":true})},
-"iec/installer-is-named":{title:"The person who installed is named",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/installer-is-named":{title:"The person who installed is named",cite:"IEC CDV 60364-6:2015, model report",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Nobody is named who installed.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Name the person who is responsible for the construction under installed_by.";
 },"useData":true})},
-"iec/licence-is-stated":{title:"Each person's licence is stated",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/licence-is-stated":{title:"Each person's licence is stated",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2749,7 +2749,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Write the number of the licence or registration, or say under remarks why none is needed.";
 },"useData":true})},
-"iec/days-of-the-inspection-are-stated":{title:"The days of the inspection are stated",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/days-of-the-inspection-are-stated":{title:"The days of the inspection are stated",cite:"ISO/IEC 17020:2012, 7.4.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2763,7 +2763,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Write the first and the last day under inspected.";
 },"useData":true})},
-"iec/next-verification-is-stated":{title:"The next verification is stated",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/next-verification-is-stated":{title:"The next verification is stated",cite:"IEC 60364-6, 6.4.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2777,7 +2777,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Write the date that the kind of premises and local rules ask for under next_due.";
 },"useData":true})},
-"iec/next-verification-comes-within-the-usual-interval":{title:"The next verification comes within the interval that is usual for the premises",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/next-verification-comes-within-the-usual-interval":{title:"The next verification comes within the interval that is usual for the premises",cite:"IEE Guidance Note 3, table of intervals",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2795,7 +2795,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Bring the date forward, or say which local rule allows a longer time.";
 },"useData":true})},
-"iec/extent-is-stated":{title:"It is stated what the report covers",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/extent-is-stated":{title:"It is stated what the report covers",cite:"IEC 60364-6, 6.4.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2809,17 +2809,17 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Write in a sentence what was verified and what was left out under extent.";
 },"useData":true})},
-"iec/instruments-are-named":{title:"The instruments are named",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/instruments-are-named":{title:"The instruments are named",cite:"ISO/IEC 17025:2017, 7.5.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "No instrument is on record.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Write kind, serial number and calibration of each instrument under instruments.";
 },"useData":true})},
-"iec/customer-was-instructed":{title:"The installation was explained to the customer",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/customer-was-instructed":{title:"The installation was explained to the customer",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "It is not on record that the installation was explained to anybody.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Show the customer what lives on, for how long, and how to restart after an empty battery; write to whom under handover.";
 },"useData":true})},
-"iec/diagram-was-handed-over":{title:"The single-line diagram was handed over",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/diagram-was-handed-over":{title:"The single-line diagram was handed over",cite:"IEC 62446-1, documentation",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2833,12 +2833,12 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Hand over the diagram, the datasheets, the operating instructions and the list of settings.";
 },"useData":true})},
-"iec/second-person-looks-at-own-work":{title:"The tester is not the installer",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/second-person-looks-at-own-work":{title:"The tester is not the installer",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "The person who installed also tested.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Nothing, where local rules allow it. A second competent person reviews the report in any case.";
 },"useData":true})},
-"au/no-link-closes-beside-the-main-one":{title:"The changeover closes no second link between neutral and earth",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"au/no-link-closes-beside-the-main-one":{title:"The changeover closes no second link between neutral and earth",cite:"AS/NZS 3000:2018, 7.3.8.1.1(c)",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2852,7 +2852,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take the changeover's link out of service.";
 },"useData":true})},
-"iec/changeover-opens-the-poles-demanded":{title:"The changeover opens the poles that the operator demands",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/changeover-opens-the-poles-demanded":{title:"The changeover opens the poles that the operator demands",cite:"BS 7671:2018, 551.4.3.2.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2870,7 +2870,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a device with the poles that the operator demands, or get the operator's consent in writing.";
 },"useData":true})},
-"iec/neutral-opens-no-sooner-than-the-lines":{title:"The neutral contact opens no sooner than the lines",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"iec/neutral-opens-no-sooner-than-the-lines":{title:"The neutral contact opens no sooner than the lines",cite:"from memory",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2886,12 +2886,12 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Take the sequence from the datasheet. Fit a device whose neutral opens last and closes first, or with the lines.";
 },"useData":true})},
-"de/diagram-hangs-at-the-board":{title:"A single-line diagram is at the board or handed over",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"de/diagram-hangs-at-the-board":{title:"A single-line diagram is at the board or handed over",cite:"DIN VDE 0100",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "A single-line diagram is neither at the board nor among what was handed over.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Put one at the board, or hand it over and name it under documents.";
 },"useData":true})},
-"de/neutral-is-opened-in-tn-s-and-tt":{title:"In TN-S and TT systems the changeover opens all poles",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"de/neutral-is-opened-in-tn-s-and-tt":{title:"In TN-S and TT systems the changeover opens all poles",cite:"VDE-AR-E 2510-2:2021-02, 6.410.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2907,7 +2907,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a device that opens the neutral too.";
 },"useData":true})},
-"gb/battery-keeps-out-of-forbidden-places":{title:"The battery keeps out of sleeping rooms, escape routes and roof spaces",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"gb/battery-keeps-out-of-forbidden-places":{title:"The battery keeps out of sleeping rooms, escape routes and roof spaces",cite:"PAS 63100:2024",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -2921,7 +2921,7 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Move it out of sleeping rooms, escape routes, lofts and voids.";
 },"useData":true})},
-"gb/bonding-suits-a-combined-supply":{title:"With a combined neutral and earth the main bonding conductors are large enough",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+"gb/bonding-suits-a-combined-supply":{title:"With a combined neutral and earth the main bonding conductors are large enough",cite:"BS 7671:2018, Table 54.8",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];

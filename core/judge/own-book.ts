@@ -9,8 +9,8 @@ import { type BookFolder, overlayOn, type PlacedRule, type ResolvedBook } from '
 import { lintRule } from './lint.ts'
 import { bookPage, bookPages, rulePage, shelve } from './pages.ts'
 import type { Check, SheetSchema } from './rule.ts'
-import type { ShippedBook, ShippedRule } from './shipped.ts'
-import { keyOf, storedBook, storedRule } from './stored.ts'
+import { SHIPPED_BOOKS, type ShippedBook, type ShippedRule } from './shipped.ts'
+import { firstCite, keyOf, storedBook, storedRule } from './stored.ts'
 
 export type OwnBook =
   | { readonly ok: true; readonly book: ShippedBook }
@@ -68,6 +68,7 @@ function teach(rules: readonly PlacedRule[]): void {
   for (const rule of rules) {
     learnWords(keyOf(rule), {
       title: rule.record.title,
+      cite: firstCite(rule.record),
       says: engine.compile(rule.record.says, settings),
       do: engine.compile(rule.record.do, settings),
     })
@@ -92,7 +93,7 @@ export function ownBook(folder: BookFolder): OwnBook {
           .join(', ')}; found “${parent}”.`,
       ],
     }
-  if (bookPage(folder.book.id))
+  if (SHIPPED_BOOKS.includes(folder.book.id))
     return {
       ok: false,
       problems: [`book.yaml: the name ${folder.book.id} is taken by a book that ships. Choose another id.`],

@@ -1,11 +1,17 @@
 import type { PlacedRule, ResolvedBook } from './book.ts'
 import { hashOf } from './canonical.ts'
 import { needsOf, readsOf, whenSchema } from './needs.ts'
-import type { SheetSchema } from './rule.ts'
+import type { RuleRecord, SheetSchema } from './rule.ts'
 import type { StoredBook, StoredRule } from './shipped.ts'
 
 /** The name under which a rule's words and page are kept: two books may hold different rules of one name. */
 export const keyOf = ({ from, record }: PlacedRule): string => `${from}/${record.id}`
+
+/** The first source that a rule names, as it is printed beside a finding. */
+export function firstCite({ cites }: RuleRecord): string {
+  const [first] = cites
+  return [first?.publication, first?.clause].filter((part) => part !== undefined).join(', ')
+}
 
 /** A rule as the judge's list holds it; `nameOf` names the compiled form of each schema. */
 export function storedRule(rule: PlacedRule, nameOf: (schema: SheetSchema) => string): StoredRule {

@@ -2,7 +2,7 @@ import type { Checked, Judged } from '#core/engine.ts'
 import type { Departure, Finding, Path, Problem, Range, Severity, Sheet, State, Verdict } from '#core/glossary.ts'
 import { fieldsOf } from '#core/sheets/plans.ts'
 import { joined } from '#core/texts/value.ts'
-import { ruleTitle, ruleWordsFor } from '#core/texts/words.ts'
+import { ruleCite, ruleTitle, ruleWordsFor } from '#core/texts/words.ts'
 
 /** A place in the file. */
 export interface Place {
@@ -23,6 +23,8 @@ export interface ToldFinding extends Place {
   readonly message: string
   /** What to do about it; empty where the message says it, or where there is nothing to do. */
   readonly remedy: string
+  /** The first source that the rule names; empty for a problem. */
+  readonly cite: string
   readonly related: readonly Place[]
   readonly departure?: Departure
 }
@@ -81,6 +83,7 @@ function toldProblem(
     severity: 'failure',
     message,
     remedy: '',
+    cite: '',
     path,
     range: range ?? locate?.(path) ?? START,
     related: [],
@@ -141,6 +144,7 @@ function toldJudged(judged: Judged, all: boolean): ToldFinding[] {
           verdict,
           severity,
           ...messageOf(finding, sheet, key, judged),
+          cite: ruleCite(key),
           ...place(finding.path),
           related: finding.related.map(place),
           ...(departure && { departure }),

@@ -16,7 +16,7 @@ export type Printer = (scene: WordScene) => string
 const engine = (runtime as unknown as typeof Handlebars).create()
 registerHelpers(engine)
 const printers = new Map<string, Printer>()
-const ownTitles = new Map<string, string>()
+const own = new Map<string, { readonly title: string; readonly cite: string }>()
 
 function printer(key: string, part: 'says' | 'do'): Printer {
   const name = `${key} ${part}`
@@ -36,17 +36,31 @@ export function ruleWordsFor(key: string, scene: WordScene): FindingWords {
 
 /** What a rule says must hold. */
 export function ruleTitle(key: string): string {
-  const title = ownTitles.get(key) ?? ruleWords[key]?.title
-  if (title === undefined) throw new Error(`The words of the rule ${key} are missing: generate the rules again.`)
-  return title
+  return headOf(key).title
+}
+
+/** Where a rule comes from, by the first source that it names: `IEC 60364-6:2016, 6.4.3.2`. */
+export function ruleCite(key: string): string {
+  return headOf(key).cite
+}
+
+function headOf(key: string): { readonly title: string; readonly cite: string } {
+  const head = own.get(key) ?? ruleWords[key]
+  if (!head) throw new Error(`The words of the rule ${key} are missing: generate the rules again.`)
+  return head
 }
 
 /** Adds the words of a rule of one's own, compiled when its book was read. */
 export function learnWords(
   key: string,
-  { title, says, do: what }: { readonly title: string; readonly says: Printer; readonly do: Printer },
+  {
+    title,
+    cite,
+    says,
+    do: what,
+  }: { readonly title: string; readonly cite: string; readonly says: Printer; readonly do: Printer },
 ): void {
-  ownTitles.set(key, title)
+  own.set(key, { title, cite })
   printers.set(`${key} says`, says)
   printers.set(`${key} do`, what)
 }

@@ -20,7 +20,7 @@ describe('the command line', () => {
     made.push(folder)
     cpSync(source, folder, { recursive: true })
     cpSync(join(PROJECT, 'examples'), join(folder, 'examples'), { recursive: true })
-    const words = readFileSync(join(source, 'cmd'), 'utf8').trim().split(/\s+/)
+    const words = readFileSync(join(source, 'cmd'), 'utf8').split(/\s+/).filter(Boolean)
     const input = existsSync(join(source, 'stdin')) ? readFileSync(join(source, 'stdin')) : ''
     const run = spawnSync(process.execPath, [SKERRY, ...words], {
       cwd: folder,

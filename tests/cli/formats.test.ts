@@ -1,8 +1,10 @@
 import { spawnSync } from 'node:child_process'
-import { chmodSync, mkdtempSync, readFileSync, writeFileSync } from 'node:fs'
+import { chmodSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
-import { describe, expect, it } from 'vitest'
+import { Ajv2020 } from 'ajv/dist/2020.js'
+import addFormats from 'ajv-formats'
+import { afterAll, describe, expect, it } from 'vitest'
 import { PROJECT, skerry } from './skerry.ts'
 
 const FILES = [
@@ -11,6 +13,7 @@ const FILES = [
   'examples/tern-farm-tt.skerry.yaml',
 ]
 const folder = mkdtempSync(join(tmpdir(), 'skerry-formats-'))
+afterAll(() => rmSync(folder, { recursive: true, force: true }))
 
 interface JsonOutput {
   readonly version: string
@@ -81,6 +84,24 @@ describe('sarif', () => {
     expect(run.stdout).toContain('1 files scanned')
     const { runs } = JSON.parse(readFileSync(report, 'utf8')) as { runs: { results: unknown[] }[] }
     expect(runs.flatMap(({ results }) => results)).toEqual([])
+  })
+
+  it('is valid by the schema that is published for it', () => {
+    const ajv = new Ajv2020({ strict: false, allErrors: true })
+    addFormats.default(ajv)
+    // The multitool's package brings the schema along.
+    const published = readFileSync(
+      join(PROJECT, 'node_modules/@microsoft/sarif-multitool-linux/sarif-2.1.0.json'),
+      'utf8',
+    )
+    const validate = ajv.compile(JSON.parse(published))
+    const log = JSON.parse(
+      skerry('check', ...FILES, 'nowhere/else.yaml', '--no-error-on-unmatched', '--format', 'sarif', '--all').stdout,
+    )
+    expect([validate(log), validate.errors]).toEqual([true, null])
+    expect(log.runs[0].results.length).toBeGreaterThan(100)
+    delete log.runs[0].tool
+    expect(validate(log)).toBe(false)
   })
 
   it('holds a departure back with its reason', () => {

@@ -1,12 +1,13 @@
 import { spawn } from 'node:child_process'
-import { mkdirSync, mkdtempSync, readdirSync, readFileSync, writeFileSync } from 'node:fs'
+import { mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
-import { describe, expect, it } from 'vitest'
+import { afterAll, describe, expect, it } from 'vitest'
 import { synthesize } from '#tools/bench/synthesize.ts'
-import { SKERRY, skerry } from './skerry.ts'
+import { PROJECT, SKERRY, skerry } from './skerry.ts'
 
 const folder = mkdtempSync(join(tmpdir(), 'skerry-many-'))
+afterAll(() => rmSync(folder, { recursive: true, force: true }))
 const COUNT = 120
 mkdirSync(join(folder, 'sites'))
 for (let index = 0; index < COUNT; index += 1) {
@@ -34,6 +35,16 @@ describe('many files', () => {
       skerry('check', join(folder, 'sites', 'site-00?.skerry.yaml'), '--format', 'json').stdout,
     ) as { files: unknown[] }
     expect(found.files).toHaveLength(10)
+  })
+
+  it('are judged by a book of the house in every thread', () => {
+    const house = join(PROJECT, 'tests/cli/cases/check-by-a-book-of-ones-own/house')
+    const { rulebook, files } = JSON.parse(
+      skerry('check', join(folder, 'sites'), '--format', 'json', '--rulebook', house).stdout,
+    ) as { rulebook: { id: string }; files: { outcome: string; rulebook?: unknown }[] }
+    expect(rulebook.id).toBe('house')
+    expect(files).toHaveLength(COUNT)
+    expect(files.filter((file) => file.rulebook !== undefined)).toEqual([])
   })
 
   it('end with 2 when one of them cannot be read', () => {

@@ -59,6 +59,8 @@ const SHARED = {
   minify: true,
   charset: 'ascii',
   legalComments: 'none',
+  // A script that is run from its text has nobody to import for it: what stays outside is required.
+  supported: { 'dynamic-import': false },
   // Packages as CommonJS stay functions of their own, which cost nothing until they are called.
   mainFields: ['main', 'module'],
   define: { 'import.meta.url': '"file:///skerry.js"' },
@@ -80,6 +82,28 @@ const paperBeside: Plugin = {
   name: 'paper-beside',
   setup(setup) {
     setup.onResolve({ filter: /core\/paper\/paper\.ts$/ }, () => ({ path: `./${PAPER}`, external: true }))
+  },
+}
+
+/** Packages that only files with faults and books of one's own call for stand beside the bundle, each in a file. */
+const SELDOM = {
+  yaml: 'skerry-yaml.cjs',
+  'ajv/dist/2020.js': 'skerry-ajv.cjs',
+  handlebars: 'skerry-handlebars.cjs',
+} as const
+
+async function bundleSeldom(): Promise<void> {
+  for (const [entry, file] of Object.entries(SELDOM))
+    await build({ ...SHARED, entryPoints: [entry], absWorkingDir: PROJECT, outfile: `${DIST}/${file}` })
+}
+
+const seldomBeside: Plugin = {
+  name: 'seldom-beside',
+  setup(setup) {
+    setup.onResolve({ filter: /^(?:yaml|ajv\/dist\/2020\.js|handlebars)$/ }, ({ path }) => ({
+      path: `./${SELDOM[path as keyof typeof SELDOM]}`,
+      external: true,
+    }))
   },
 }
 
@@ -109,7 +133,7 @@ async function bundle(): Promise<void> {
     // The launcher calls the whole bundle as one function, so it need not copy it to put a head before it.
     banner: { js: '(function (exports, require, module, __filename, __dirname) {' },
     footer: { js: '})' },
-    plugins: [plainParserState, childProcessOnCall, paperBeside, textsBeside],
+    plugins: [plainParserState, childProcessOnCall, paperBeside, seldomBeside, textsBeside],
   })
 }
 
@@ -137,6 +161,7 @@ function link(): void {
 mkdirSync(DIST, { recursive: true })
 rmSync(`${DIST}/skerry-main.cache`, { force: true })
 await bundlePaper()
+await bundleSeldom()
 await bundle()
 copyFileSync(`${PROJECT}tools/build/launcher.cjs`, `${DIST}/skerry.cjs`)
 copyFileSync(`${PROJECT}schemas/install.draft-07.schema.json`, `${DIST}/install.draft-07.schema.json`)

@@ -1,12 +1,13 @@
 import Handlebars from 'handlebars'
 import type { PlacedRule } from '#core/judge/book.ts'
-import { keyOf } from '#core/judge/stored.ts'
+import { firstCite, keyOf } from '#core/judge/stored.ts'
 
 /** JavaScript of the rules' words, precompiled: an object of functions by rule key. */
 export function precompileWords(rules: readonly PlacedRule[]): string {
   const entries = rules.map((rule) => {
     const { title, says, do: what } = rule.record
-    return `${JSON.stringify(keyOf(rule))}:{title:${JSON.stringify(title)},says:${spec(says)},do:${spec(what)}}`
+    const cite = firstCite(rule.record)
+    return `${JSON.stringify(keyOf(rule))}:{title:${JSON.stringify(title)},cite:${JSON.stringify(cite)},says:${spec(says)},do:${spec(what)}}`
   })
   return `export default {\n${entries.join(',\n')}\n}\n`
 }

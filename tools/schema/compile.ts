@@ -105,14 +105,24 @@ const USUAL_UNITS = [
   'mA/Ah',
 ] as const
 
-/** What every accepted number of the usual form has: the unit alone decides whether the pattern takes it. */
-const PROBES = ['0', '1', '1.5', '250', '0.42'] as const
+const NUMBERS = ['0', '1', '1.5', '250', '0.42'] as const
+/** What may stand before the number, and after the unit: below zero, beyond the instrument, at a test voltage. */
+const BEFORE = ['', '-', '<', '>'] as const
+const AFTER = ['', ' at 1000 V'] as const
 
-function takenUnits(pattern: string): readonly string[] {
+/** The usual forms that a pattern takes whatever the number is: what stands around the number alone decides. */
+function takenForms(pattern: string): readonly string[] {
   const full = new RegExp(pattern, 'u')
-  return USUAL_UNITS.filter((unit) =>
-    PROBES.every((number) => full.test(`${number} ${unit}`.trim()) && full.test(`${number}${unit}`)),
+  const forms = BEFORE.flatMap((before) =>
+    USUAL_UNITS.flatMap((unit) => AFTER.map((after) => ({ before, unit, after }))),
   )
+  return forms
+    .filter(({ before, unit, after }) =>
+      NUMBERS.every((number) =>
+        [`${number} ${unit}`.trim(), `${number}${unit}`].every((text) => full.test(`${before}${text}${after}`)),
+      ),
+    )
+    .map(({ before, unit, after }) => `${before}${unit}${after === '' ? '' : '@'}`)
 }
 
 /**
@@ -122,20 +132,20 @@ function takenUnits(pattern: string): readonly string[] {
  */
 function quickPatterns(source: string): string {
   const replaced = source.replace(PATTERN, (all, literal: string) => {
-    const units = takenUnits(JSON.parse(literal) as string)
-    return units.length < 2 ? all : `usual(${literal}, ${JSON.stringify(units)})`
+    const forms = takenForms(JSON.parse(literal) as string)
+    return forms.length < 2 ? all : `usual(${literal}, ${JSON.stringify(forms)})`
   })
   return `${USUAL}\n${replaced}`
 }
 
-const USUAL = `const number = /^(?:0|[1-9][0-9]*)(?:\\.[0-9]+)? ?([A-Za-z%/°Ω²2]*)$/
-function usual(source, units) {
-  const taken = new Set(units)
+const USUAL = `const number = /^([-<>]?)(?:0|[1-9][0-9]*)(?:\\.[0-9]+)? ?([A-Za-z%/°Ω²2]*?)( at [1-9][0-9]{1,3} V)?$/
+function usual(source, forms) {
+  const taken = new Set(forms)
   let full
   return {
     test(text) {
       const match = number.exec(text)
-      if (match && taken.has(match[1])) return true
+      if (match && taken.has(match[1] + match[2] + (match[3] ? '@' : ''))) return true
       full ??= new RegExp(source, 'u')
       return full.test(text)
     },

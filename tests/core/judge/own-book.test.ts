@@ -4,7 +4,7 @@ import type { BookFolder } from '#core/judge/book.ts'
 import { ownBook } from '#core/judge/own-book.ts'
 import { rulePage } from '#core/judge/pages.ts'
 import type { RuleRecord } from '#core/judge/rule.ts'
-import { ruleWordsFor } from '#core/texts/words.ts'
+import { ruleCite, ruleTitle, ruleWordsFor } from '#core/texts/words.ts'
 import { patched } from './patch.ts'
 
 const houseRule: RuleRecord = {
@@ -73,6 +73,16 @@ describe("a rule book of one's own", () => {
     const strict = made(folder({ parameters: { touch_voltage: { value: 25, source: 'our own' } } }, []))
     expect(strict.parameters.touch_voltage).toBe(25)
     expect(strict.hash).not.toBe(plain.hash)
+  })
+
+  it('can be read again after it was changed, and has its new words', () => {
+    const before = folder()
+    made(before)
+    const changed = { ...houseRule, title: 'No cable of the house is long' }
+    const { rules } = made({ ...before, chapters: { local: [changed] } })
+    const key = rules.find(({ id }) => id === houseRule.id)?.key ?? ''
+    expect(ruleTitle(key)).toBe('No cable of the house is long')
+    expect(ruleCite(key)).toBe('common practice')
   })
 
   it.each([
