@@ -218,7 +218,7 @@ partials: {
         return undefined
     };
 
-  return "<p class=\"muted\">"
+  return "<p class=\"muted with-next\">"
     + container.escapeExpression(container.lambda((depth0 != null ? lookupProperty(depth0,"lead") : depth0), depth0))
     + "</p>\n";
 },"1":function(container,depth0,helpers,partials,data) {
@@ -340,6 +340,19 @@ partials: {
     + "</tbody>\n</table>\n</div>\n";
 },"useData":true}),
 "names": () => ({"0":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "<tr><th scope=\"row\">"
+    + container.escapeExpression(container.lambda((depth0 != null ? lookupProperty(depth0,"title") : depth0), depth0))
+    + "</th><td>\n<ul>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"names") : depth0),{"name":"each","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":12,"column":9}}})) != null ? stack1 : "")
+    + "</ul>\n</td></tr>\n";
+},"1":function(container,depth0,helpers,partials,data) {
     var alias1=container.lambda, alias2=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -351,7 +364,9 @@ partials: {
     + alias2(alias1((depth0 != null ? lookupProperty(depth0,"anchor") : depth0), depth0))
     + "\"><small>"
     + alias2(alias1((depth0 != null ? lookupProperty(depth0,"name") : depth0), depth0))
-    + "</small></li>\n";
+    + " <span class=\"muted\">"
+    + alias2(alias1((depth0 != null ? lookupProperty(depth0,"id") : depth0), depth0))
+    + "</span></small></li>\n";
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.lambda, alias2=container.escapeExpression, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -364,11 +379,11 @@ partials: {
     + alias2(alias1((depth0 != null ? lookupProperty(depth0,"anchor") : depth0), depth0))
     + "\">\n<h3>"
     + alias2(alias1((depth0 != null ? lookupProperty(depth0,"title") : depth0), depth0))
-    + "</h3>\n<p class=\"muted\">"
+    + "</h3>\n<p class=\"muted with-next\">"
     + alias2(alias1((depth0 != null ? lookupProperty(depth0,"lead") : depth0), depth0))
-    + "</p>\n<div class=\"columns-2\">\n<ul>\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"names") : depth0),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":6,"column":0},"end":{"line":7,"column":9}}})) != null ? stack1 : "")
-    + "</ul>\n</div>\n</div>\n";
+    + "</p>\n<table>\n<colgroup><col width=\"18%\"><col width=\"82%\"></colgroup>\n<thead><tr><th scope=\"col\">Chapter</th><th scope=\"col\">Rules</th></tr></thead>\n<tbody>\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"groups") : depth0),{"name":"each","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":15,"column":9}}})) != null ? stack1 : "")
+    + "</tbody>\n</table>\n</div>\n";
 },"useData":true}),
 "notice": () => ({"0":function(container,depth0,helpers,partials,data) {
     var lookupProperty = container.lookupProperty || function(parent, propertyName) {

@@ -49,8 +49,10 @@ const flowHeading = (heading: Heading, flow: Flow): Laid => {
 const flowParagraph = (paragraph: Paragraph, flow: Flow): Laid => {
   const text = styled(flow.base.text, [...flow.inherited, ...paragraph.classes])
   const width = text.align === 'left' ? Math.min(flow.width, MEASURE) : flow.width
+  const lines = textStrips({ ...flow, width }, child(flow, 'P'), paragraph.runs, text)
+  const leads = paragraph.classes.includes('with-next')
   return {
-    strips: textStrips({ ...flow, width }, child(flow, 'P'), paragraph.runs, text),
+    strips: leads ? lines.map((line) => ({ ...line, hold: 2 })) : lines,
     before: flow.base.before,
     after: flow.base.after,
   }

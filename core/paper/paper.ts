@@ -18,6 +18,7 @@
  *
  * ## Classes
  * - any block: `page-break` (starts a page), `keep` (is not divided between pages, unless taller than one)
+ * - p: `with-next` (stays on the page on which the following block starts)
  * - div or section as a box: `title-block` (once, at the start: chart frame with the skerry), `box`, `box-tint`, `box-note`, `box-caution` (heavy bar), `box-island` (the lamp's colour)
  * - div or section as columns: `columns-2`, `columns-3`, `grid-2`, `grid-3`, `grid-4`. Children that are all div, section or figure stand beside each other, boxes of one row equally high; other content is divided evenly
  * - table: `zebra`, `plain` (no lines between rows); several tbody are groups that stay whole. tr: `group`, `total`, `row-fails`, `row-island`. A row with a single `th` names a group

@@ -16,6 +16,8 @@ export interface LimitBar {
 
 /** Widths, so that strokes come out alike wherever a bar stands. */
 const SIZES = { narrow: 48, usual: 120, wide: 220 } as const
+/** A point that leaves its whisker to be seen, also where a few percent are a few hundredths of an inch. */
+const POINT = { narrow: 1.5, usual: 2.4, wide: 2.4 } as const
 const HEIGHT = 12
 const AXIS = 7
 /** Where the limit stands, as a part of the width, so that limits line up down a column. */
@@ -45,7 +47,7 @@ export function limitBar({ value, most, unit, name, span, size = 'usual' }: Limi
   const tint = DEPTHS.find(({ over }) => margin > over)?.tint
   const words = `${name}: ${value} ${unit}, at most ${Number(most.toPrecision(4))} ${unit}`
   const whisker = span
-    ? group({ stroke: COLOUR.ink, 'stroke-width': 0.9 }, [
+    ? group({ stroke: COLOUR.ink, 'stroke-width': 0.7 }, [
         line(place(span.low), AXIS, place(span.high), AXIS),
         line(place(span.low), AXIS - 2.6, place(span.low), AXIS + 2.6),
         line(place(span.high), AXIS - 2.6, place(span.high), AXIS + 2.6),
@@ -59,6 +61,6 @@ export function limitBar({ value, most, unit, name, span, size = 'usual' }: Limi
     whisker,
     over
       ? polygon([at - 3, AXIS - 3, at + 3, AXIS - 3, at + 3, AXIS + 3, at - 3, AXIS + 3], { fill: COLOUR.alarm })
-      : circle(at, AXIS, 2.7, { fill: COLOUR.ink }),
+      : circle(at, AXIS, POINT[size], { fill: COLOUR.ink }),
   ])
 }

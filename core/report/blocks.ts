@@ -136,13 +136,16 @@ export interface Findings {
   readonly findings: readonly FindingBlock[]
 }
 
-/** Names in running text, each of which can be pointed at. */
+/** Names by chapter, each of which can be pointed at. */
 export interface Names {
   readonly kind: 'names'
   readonly anchor: string
   readonly title: string
   readonly lead: string
-  readonly names: readonly { readonly anchor: string; readonly name: string }[]
+  readonly groups: readonly {
+    readonly title: string
+    readonly names: readonly { readonly anchor: string; readonly name: string; readonly id: string }[]
+  }[]
 }
 
 export type Block = Names | Figures | Particulars | TableBlock | FigureBlock | Prose | Notice | Tiles | Findings

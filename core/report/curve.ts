@@ -1,7 +1,9 @@
 import { COLOUR } from '#core/paper/style.ts'
 import type { IslandBudget } from '#core/quantities/budget.ts'
-import { drawing, line, polygon, polyline, text } from './draw/svg.ts'
+import { circle, drawing, line, polygon, polyline, text } from './draw/svg.ts'
 import { hoursText, rounded } from './print.ts'
+
+type Course = IslandBudget['withoutSun']
 
 const WIDTH = 560
 const LEFT = 44
@@ -65,21 +67,21 @@ function key(entries: readonly (readonly [string, Readonly<Record<string, string
   return entries
     .map(([words, look]) => {
       const from = at
-      at += 26 + words.length * 4.3 + 14
+      at += 26 + words.length * 4.1 + 12
       return line(from, 9, from + 20, 9, look) + text(from + 25, 12, words, LABEL)
     })
     .join('')
 }
 
-/** When it runs empty, on a staff above the hill of the sun. */
-function empty(lasts: number, { x }: Axes): string {
-  const [at, top] = [x(lasts), BOTTOM - 60]
-  const words = `empty after ${hoursText(lasts)}`
-  return [
-    line(at, BOTTOM, at, top, { stroke: COLOUR.ink, 'stroke-width': 0.7 }),
-    text(at + 4, top + 6, words, { 'font-size': 8.5, 'font-weight': 500, fill: COLOUR.ink }),
-  ].join('')
-}
+/** A ring where a course runs empty. */
+const empty = ({ lasts }: Course, { x }: Axes): string =>
+  lasts === undefined
+    ? ''
+    : circle(x(lasts), BOTTOM, 2.6, { fill: COLOUR.paper, stroke: COLOUR.ink, 'stroke-width': 1.1 })
+
+/** Its name with the hour at which it runs empty: in the key, where no line crosses the words. */
+const named = (name: string, { lasts }: Course): string =>
+  lasts === undefined ? name : `${name}: empty after ${hoursText(lasts)}`
 
 /**
  * The charge of the island's batteries over two days from sunset: without sun, under a clear sky, and for what must run.
@@ -100,11 +102,12 @@ export function budgetCurve(budget: IslandBudget): string {
     ...(mustRun ? [course(mustRun.charge, axes, least)] : []),
     ...(withSun ? [course(withSun.charge, axes, lit)] : []),
     course(withoutSun.charge, axes, dark),
-    lasts === undefined ? '' : empty(lasts, axes),
+    ...(mustRun ? [empty(mustRun, axes)] : []),
+    empty(withoutSun, axes),
     key([
-      ['without sun', dark],
+      [named('without sun', withoutSun), dark],
       ...(withSun ? [['clear sky', lit] as const] : []),
-      ...(mustRun ? [['what must run, without sun', least] as const] : []),
+      ...(mustRun ? [[named('what must run, without sun', mustRun), least] as const] : []),
     ]),
   ])
 }

@@ -3,6 +3,7 @@ import type { Section } from './blocks.ts'
 import { deadPoints } from './fieldsheet/dead.ts'
 import { livePoints } from './fieldsheet/live.ts'
 import { looks, whoAndWhen } from './fieldsheet/looks.ts'
+import { settingPoints } from './fieldsheet/settings.ts'
 import { stringPoints } from './fieldsheet/strings.ts'
 import { transferPoints } from './fieldsheet/transfers.ts'
 import { numbered, type ReportModel } from './model.ts'
@@ -30,6 +31,7 @@ export function fieldsheetModel(judged: Judged): ReportModel {
     { anchor: 'sheet/dead', title: 'Dead', blocks: deadPoints(scene) },
     { anchor: 'sheet/strings', title: 'Strings, inverter off', blocks: stringPoints(scene) },
     { anchor: 'sheet/grid', title: 'On the grid', blocks: livePoints(scene, 'grid') },
+    { anchor: 'sheet/settings', title: 'Signals and settings', blocks: settingPoints(scene) },
     { anchor: 'sheet/island', title: 'In the island', blocks: livePoints(scene, 'island') },
     { anchor: 'sheet/transfers', title: 'Through the changeover, both ways', blocks: transferPoints(scene) },
   ]

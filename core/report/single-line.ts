@@ -7,8 +7,8 @@ import { everyPlaced, place } from './draw/place.ts'
 import { drawing, group } from './draw/svg.ts'
 
 /** Room for the words behind each circuit. */
-const WORDS = 230
-const LEAST = 560
+const WORDS = 246
+const LEAST = 576
 
 /**
  * The installation as a single-line diagram in one state, as one SVG text: symbols after IEC 60617, live parts in ink,

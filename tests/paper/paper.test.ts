@@ -100,6 +100,16 @@ describe('page breaks', () => {
     }
   })
 
+  test('a paragraph with the class with-next goes over with the first lines of what follows', () => {
+    for (let lines = 25; lines < 40; lines++) {
+      const pages = pagesOf(
+        page(`${line.repeat(lines)}<p class="with-next">lead</p><table><tbody><tr><td>row</td></tr></tbody></table>`),
+      )
+      const at = (word: string) => pages.findIndex((text) => text.includes(word))
+      expect(at('lead')).toBe(at('row'))
+    }
+  })
+
   test('no page starts or ends with a single line of a paragraph', () => {
     for (let lines = 25; lines < 40; lines++) {
       const pages = pagesOf(

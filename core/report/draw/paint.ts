@@ -2,12 +2,13 @@ import type { State } from '#core/glossary.ts'
 import type { Install } from '#core/install.ts'
 import { COLOUR } from '#core/paper/style.ts'
 import type { Topology } from '#core/topology/topology.ts'
-import { cableName, deviceName, residualName } from '../devices.ts'
+import { cableName, deviceName } from '../devices.ts'
 import { amount } from '../print.ts'
 import type { PartKind } from './parts.ts'
 import { leadsOn, type Placed, RAISED } from './place.ts'
 import { group, line, rect, text } from './svg.ts'
 import * as symbol from './symbols.ts'
+import { cabled, cut, told } from './words.ts'
 
 /** What a part is painted from. */
 export interface DiagramScene {
@@ -37,53 +38,8 @@ function isLive({ part }: Placed, { topology, install, state }: DiagramScene): b
 const lookOf = (live: boolean) => (live ? {} : DEAD)
 const inkOf = (live: boolean): string => (live ? COLOUR.ink : GREY)
 
-/** Part of its size that a letter is wide, on average and a little more. */
-const LETTER = 0.52
-
-/** About how wide words are, in units of the drawing: a little more than half their size a letter. */
-const wide = (words: string, size: number): number => words.length * size * LETTER
-
-/** Words cut to a width. */
-function cut(words: string, width: number, size: number): string {
-  if (wide(words, size) <= width) return words
-  return `${words.slice(0, Math.max(1, Math.floor(width / (size * LETTER)) - 1)).trimEnd()}…`
-}
-
-interface Told {
-  readonly above?: string
-  readonly below?: readonly string[]
-}
-
-function told({ part: { id, kind } }: Placed, { install }: DiagramScene): Told {
-  const { supply, changeover } = install
-  switch (kind) {
-    case 'meter':
-      return { above: id }
-    case 'main protection':
-      return { below: [deviceName(supply.main_protection)] }
-    case 'overcurrent device': {
-      const found = install.overcurrent?.[id]
-      const breaking = found?.breaking ?? found?.device.breaking
-      return {
-        above: id,
-        below: found ? [deviceName(found.device), ...(breaking === undefined ? [] : [amount(breaking, 'A')])] : [],
-      }
-    }
-    case 'residual-current device': {
-      const found = install.residual_current?.[id]
-      return { above: id, below: found ? [residualName(found), amount(found.rated_current, 'A')] : [] }
-    }
-    case 'changeover':
-      return { above: `${id} · ${changeover.poles} poles · ${amount(changeover.rated_current, 'A')}` }
-    case 'inverter':
-      return { above: `${id} · ${amount(install.inverters?.[id]?.rated_power ?? 0, 'VA')}` }
-    default:
-      return {}
-  }
-}
-
 function labels(placed: Placed, scene: DiagramScene, live: boolean): string {
-  const { above, below = [] } = told(placed, scene)
+  const { above, below = [] } = told(placed.part, scene.install)
   const { x, y, part } = placed
   const lift = part.kind === 'changeover' || part.kind === 'inverter' ? 20 : 13
   return [
@@ -114,6 +70,11 @@ function changeover({ x, y, part }: Placed, scene: DiagramScene): string {
     symbol.contact(x + 16, y, closed),
     line(x + 46, y, x + 84, y),
     carries ? linkAt(x + 51, y, part.id, scene, 'N–PE') : '',
+    text(x + 6, y + (carries ? 36 : 11), cut(cabled(scene.install.changeover.cable).join(''), 42, 7.6), {
+      'font-size': 7.6,
+      fill: COLOUR.ink,
+      stroke: 'none',
+    }),
   ].join('')
 }
 
@@ -121,7 +82,7 @@ function board(placed: Placed, scene: DiagramScene): string {
   const { x, y, part, children } = placed
   const found = scene.install.boards?.[part.id]
   const last = children.at(-1)?.y ?? y
-  const name = `${part.id} ${found?.name ?? ''}`.trim()
+  const name = [`${part.id} ${found?.name ?? ''}`.trim(), ...cabled(found?.cable)].join(' · ')
   const live = isLive(placed, scene)
   return [
     line(x + 2, y - 7, x + 2, Math.max(last, y) + 7, {
@@ -162,9 +123,9 @@ function circuit({ x, y, part }: Placed, scene: DiagramScene, live: boolean): st
     symbol.conductors(words - 26, y, found.phases.length),
     end,
     text(words, y + 3, cut(part.id, 30, 8.4), { ...plain, 'font-weight': 600 }),
-    text(words + 33, y + 3, cut(found.serves, 112, 8.4), plain),
-    text(words + 149, y + 3, deviceName(found.device), plain),
-    text(words + 180, y + 3, cut(cableName(found.cable), width - words - 180, 8.4), plain),
+    text(words + 33, y + 3, cut(found.serves, 128, 8.4), plain),
+    text(words + 163, y + 3, deviceName(found.device), plain),
+    text(words + 194, y + 3, cut(cableName(found.cable), width - words - 194, 8.4), plain),
   ].join('')
 }
 

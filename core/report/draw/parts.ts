@@ -9,6 +9,8 @@ export interface Part {
   readonly children: readonly Part[]
   /** Carries a link between neutral and earth of its own, which hangs below it. */
   readonly linked?: true
+  /** A cable of its own is named below its ratings. */
+  readonly cabled?: true
   /** For several circuits in one row. */
   readonly words?: string
 }
@@ -93,9 +95,10 @@ function sourcesOf(id: string, { arrays = {}, batteries = {} }: Install): Part[]
 function partOf(node: TopologyNode, plan: Plan): Part {
   const { id, kind } = node
   const children = kind === 'inverter' ? sourcesOf(id, plan.install) : childrenOf(node, plan)
-  const { boards, inverters } = plan.install
+  const { boards, inverters, overcurrent, residual_current } = plan.install
+  const cable = (kind === 'overcurrent device' ? overcurrent : residual_current)?.[id]?.cable
   const link = (kind === 'inverter' ? inverters?.[id] : boards?.[id])?.neutral_link ?? 'none'
-  return { id, kind, children, ...(link !== 'none' && { linked: true }) }
+  return { id, kind, children, ...(link !== 'none' && { linked: true }), ...(cable && { cabled: true }) }
 }
 
 /** The parts of the diagram from the supply on: the meter and the main protection stand before the first board. */

@@ -36,6 +36,8 @@ const ROOM: Readonly<Record<PartKind, Room>> = {
 
 /** Room for a link to earth below a part. */
 const LINK = 40
+/** Room for one more line of words below a device. */
+const LINE = 9.5
 
 /** Where the name of a board stands when a device with a name of its own follows at the same height. */
 export const RAISED = 31
@@ -62,8 +64,9 @@ class Placing {
     this.#factor = rows > MANY ? CLOSE : 1
   }
 
-  #room({ kind, children, linked }: Part): Room {
-    const room = linked ? { ...ROOM[kind], below: ROOM[kind].below + LINK } : ROOM[kind]
+  #room({ kind, children, linked, cabled }: Part): Room {
+    const more = (linked ? LINK : 0) + (cabled ? LINE : 0)
+    const room = { ...ROOM[kind], below: ROOM[kind].below + more }
     if (kind === 'board' && leadsOn(children)) return { ...room, above: RAISED + 8 }
     if (kind !== 'circuit' && kind !== 'circuits') return room
     return { ...room, above: room.above * this.#factor, below: room.below * this.#factor }

@@ -6,6 +6,8 @@ import type { ReportScene } from '../scene.ts'
 import { plainPoints } from './plain.ts'
 import { pointCell, wordCell } from './points.ts'
 
+const WIDTH = { continuity: 21, insulation: 24, polarity: 21 } as const
+
 function circuitRow(scene: ReportScene, id: string, serves: string): Row {
   const read = scene.install.readings?.circuits?.[id]
   const skipped = read?.not_tested === undefined ? undefined : { not_tested: read.not_tested }
@@ -16,23 +18,37 @@ function circuitRow(scene: ReportScene, id: string, serves: string): Row {
     head: { text: id },
     cells: [
       { text: serves },
-      pointCell({
-        anchor: `point/circuit/${id}/continuity`,
-        name: `continuity of ${id}`,
-        unit: 'Ω',
-        limit: expected === undefined ? 'write it down' : `about ${rounded(expected, 2)}`,
-        measured: read?.continuity ?? skipped,
-        least: 2,
-      }),
-      pointCell({
-        anchor: `point/circuit/${id}/insulation`,
-        name: `insulation of ${id}`,
-        unit: 'MΩ',
-        limit: `≥ ${amountOr(scene.number(id, 'insulation_minimum'), '')} at ${voltage}`,
-        measured: read?.insulation ?? skipped,
-        least: 0,
-      }),
-      wordCell(`point/circuit/${id}/polarity`, `polarity of ${id}`, read?.polarity ?? skipped?.not_tested, 'correct'),
+      pointCell(
+        {
+          anchor: `point/circuit/${id}/continuity`,
+          name: `continuity of ${id}`,
+          unit: 'Ω',
+          limit: expected === undefined ? 'write it down' : `about ${rounded(expected, 2)}`,
+          measured: read?.continuity ?? skipped,
+          least: 2,
+        },
+        WIDTH.continuity,
+      ),
+      pointCell(
+        {
+          anchor: `point/circuit/${id}/insulation`,
+          name: `insulation of ${id}`,
+          unit: 'MΩ',
+          limit: `≥ ${amountOr(scene.number(id, 'insulation_minimum'), '')} at ${voltage}`,
+          measured: read?.insulation ?? skipped,
+          least: 0,
+        },
+        WIDTH.insulation,
+      ),
+      wordCell(
+        {
+          anchor: `point/circuit/${id}/polarity`,
+          name: `polarity of ${id}`,
+          word: read?.polarity ?? skipped?.not_tested,
+          limit: 'correct',
+        },
+        WIDTH.polarity,
+      ),
     ],
   }
 }
@@ -88,9 +104,9 @@ export function deadPoints(scene: ReportScene): Block[] {
     [
       { label: 'Circuit', width: 9 },
       { label: 'Serves', width: 25 },
-      { label: 'R_1 + R_2', unit: 'Ω', width: 21 },
-      { label: 'Insulation', unit: 'MΩ', width: 24 },
-      { label: 'Polarity', width: 21 },
+      { label: 'R_1 + R_2', unit: 'Ω', width: WIDTH.continuity },
+      { label: 'Insulation', unit: 'MΩ', width: WIDTH.insulation },
+      { label: 'Polarity', width: WIDTH.polarity },
     ],
     rowsByFeeder(scene, (id, { serves }) => circuitRow(scene, id, serves)),
     'Circuits',

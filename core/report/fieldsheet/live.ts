@@ -3,19 +3,22 @@ import type { Measured, ResidualTest } from '#core/install.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import { type Block, type Row, table, tables } from '../blocks.ts'
 import { rowsByFeeder } from '../by-board.ts'
-import { clearedBy } from '../clearing.ts'
+import { clearedBy, loopYardstick } from '../clearing.ts'
 import { residualName } from '../devices.ts'
 import { rounded } from '../print.ts'
+import { rampBand } from '../ramp.ts'
 import type { ReportScene } from '../scene.ts'
 import { plainPoints } from './plain.ts'
 import { type Point, pointCell, wordCell } from './points.ts'
+
+const WIDTH = { loop: 26, residual: 21, rotation: 26 } as const
 
 function originPoints({ install }: ReportScene): Point[] {
   const { loop_impedance, fault_current } = install.supply
   return [
     {
       anchor: 'point/supply/loop',
-      name: 'External loop Ze at the origin',
+      name: 'External loop at the origin',
       unit: 'Ω',
       limit: 'write it down',
       measured: loop_impedance,
@@ -78,7 +81,7 @@ function statePoints(scene: ReportScene, state: State): Block[] {
             'link_resistance',
             'Link between neutral and earth',
             'Ω',
-            `${topology.neutralEarthLinks.island.length} closed`,
+            `closed: ${topology.neutralEarthLinks.island.join(', ') || 'none'}`,
             read?.link_resistance,
             2,
           ),
@@ -89,7 +92,7 @@ function statePoints(scene: ReportScene, state: State): Block[] {
 }
 
 function loopRow(scene: ReportScene, id: string, serves: string, state: State): Row {
-  const limit = scene.number(id, 'loop_limit_measured')
+  const limit = loopYardstick(scene, id, state)
   const read = scene.install.readings?.circuits?.[id]
   const skipped = read?.not_tested === undefined ? undefined : { not_tested: read.not_tested }
   return {
@@ -100,14 +103,17 @@ function loopRow(scene: ReportScene, id: string, serves: string, state: State): 
       { text: clearedBy(scene, id, state) },
       { text: limit === undefined ? '–' : `≤ ${rounded(limit, 2)}` },
       { text: rounded(scene.number(id, 'loop_expected'), 2) },
-      pointCell({
-        anchor: `point/circuit/${id}/loop/${state}`,
-        name: `loop of ${id} ${STATE_WORDS[state]}`,
-        unit: 'Ω',
-        limit: '',
-        measured: read?.loop?.[state] ?? skipped,
-        least: 2,
-      }),
+      pointCell(
+        {
+          anchor: `point/circuit/${id}/loop/${state}`,
+          name: `loop of ${id} ${STATE_WORDS[state]}`,
+          unit: 'Ω',
+          limit: '',
+          measured: read?.loop?.[state] ?? skipped,
+          least: 2,
+        },
+        WIDTH.loop,
+      ),
     ],
   }
 }
@@ -125,7 +131,7 @@ function loops(scene: ReportScene, state: State): Block[] {
     { label: 'Cleared by', width: 18 },
     { label: 'Limit', unit: 'Ω', width: 11, align: 'num' as const },
     { label: 'expected', unit: 'Ω', width: 11, align: 'num' as const },
-    { label: 'Loop', unit: 'Ω', width: 26 },
+    { label: 'Loop', unit: 'Ω', width: WIDTH.loop },
   ]
   return tables(`point/loop/${state}`, columns, groups, 'Fault loop at the far end of each circuit')
 }
@@ -144,22 +150,24 @@ function residualRow(scene: ReportScene, id: string, state: State): Row {
     found && 'not_tested' in found ? { not_tested: String(found.not_tested) } : undefined
   const test: ResidualTest = found && !('not_tested' in found) ? found : {}
   const point = (name: keyof ResidualTest, unit: string, limit: string) =>
-    pointCell({
-      anchor: `point/residual/${id}/${name}/${state}`,
-      name: `${name} of ${id} ${STATE_WORDS[state]}`,
-      unit,
-      limit,
-      measured: test[name] ?? reason,
-      least: 0,
-    })
-  const ramp = `${rounded(scene.number(id, 'ramp_minimum'), 1)} to ${rounded(scene.number(id, 'ramp_maximum'), 1)}`
+    pointCell(
+      {
+        anchor: `point/residual/${id}/${name}/${state}`,
+        name: `${name} of ${id} ${STATE_WORDS[state]}`,
+        unit,
+        limit,
+        measured: test[name] ?? reason,
+        least: 0,
+      },
+      WIDTH.residual,
+    )
   return {
     anchor: `point/residual/${id}/${state}`,
     head: { text: id, note: device ? residualName(device) : '' },
     cells: [
       point('half', 'ms', 'no trip'),
       ...TIMES.map(([name, , limit]) => point(name, 'ms', `≤ ${rounded(scene.number(id, limit), 0)}`)),
-      point('ramp', 'mA', ramp),
+      point('ramp', 'mA', rampBand(scene, id) ?? 'write it down'),
     ],
   }
 }
@@ -169,9 +177,9 @@ function residual(scene: ReportScene, state: State): Block[] {
   if (ids.length === 0) return []
   const columns = [
     { label: 'Device', width: 16 },
-    { label: '½ IΔ_n', unit: 'ms', width: 21 },
-    ...TIMES.map(([, label]) => ({ label, unit: 'ms', width: 21 })),
-    { label: 'Ramp', unit: 'mA', width: 21 },
+    { label: '½ IΔ_n', unit: 'ms', width: WIDTH.residual },
+    ...TIMES.map(([, label]) => ({ label, unit: 'ms', width: WIDTH.residual })),
+    { label: 'Ramp', unit: 'mA', width: WIDTH.residual },
   ]
   const rows = ids.map((id) => residualRow(scene, id, state))
   return [table(`point/residual/${state}`, columns, [{ rows }], 'Residual-current devices')]
@@ -183,12 +191,12 @@ function rotation({ install }: ReportScene, state: State): Block[] {
   const word = found && 'not_tested' in found ? found.not_tested : found?.rotation
   const cells = [
     { text: 'the same in both states' },
-    wordCell(`point/state/rotation/${state}`, `rotation ${STATE_WORDS[state]}`, word),
+    wordCell({ anchor: `point/state/rotation/${state}`, name: `rotation ${STATE_WORDS[state]}`, word }, WIDTH.rotation),
   ]
   const columns = [
     { label: 'Test point', width: 38 },
     { label: 'Limit', width: 36 },
-    { label: 'Found', width: 26 },
+    { label: 'Found', width: WIDTH.rotation },
   ]
   return [
     table(`point/rotation/${state}`, columns, [

@@ -4,6 +4,10 @@ import { capital } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 import { wordCell, writingBox } from './points.ts'
 
+const RESULT = 26
+const NOTE = 38
+const ON_SITE = 76
+
 /** Things to look at, with the result where there is one. */
 export function looks({ install }: ReportScene): Block[] {
   const known = new Map((install.inspection ?? []).map(({ item, result }) => [item, result]))
@@ -12,14 +16,14 @@ export function looks({ install }: ReportScene): Block[] {
     anchor: `point/inspection/${item}/row`,
     head: { text: capital(item) },
     cells: [
-      wordCell(`point/inspection/${item}`, `result: ${item}`, known.get(item)),
-      known.has(item) ? { text: '' } : { svg: writingBox(`note on ${item}`, 150) },
+      wordCell({ anchor: `point/inspection/${item}`, name: `result: ${item}`, word: known.get(item) }, RESULT),
+      known.has(item) ? { text: '' } : { svg: writingBox(`note on ${item}`, NOTE) },
     ],
   }))
   const columns = [
     { label: 'Item', width: 36 },
-    { label: 'Good, defect, not applicable', width: 26 },
-    { label: 'Note, photo', width: 38 },
+    { label: 'Good, defect, not applicable', width: RESULT },
+    { label: 'Note, photo', width: NOTE },
   ]
   return [table('point/inspection', columns, [{ rows }])]
 }
@@ -40,7 +44,7 @@ export function whoAndWhen({ install }: ReportScene): Block {
     head: { text: title },
     cells: [
       word === undefined
-        ? { anchor: `point/head/${name}`, svg: writingBox(title, 300) }
+        ? { anchor: `point/head/${name}`, svg: writingBox(title, ON_SITE) }
         : { anchor: `point/head/${name}`, text: word },
     ],
   }))
@@ -48,7 +52,7 @@ export function whoAndWhen({ install }: ReportScene): Block {
     'point/head',
     [
       { label: 'On site', width: 24 },
-      { label: '', width: 76 },
+      { label: '', width: ON_SITE },
     ],
     [{ rows }],
   )

@@ -5,6 +5,8 @@ import { rounded } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 import { pointCell, wordCell } from './points.ts'
 
+const WIDTH = { irradiance: 14, cell_temperature: 14, voc: 15, isc: 15, insulation: 18, polarity: 15 } as const
+
 function stringRow(scene: ReportScene, arrayId: string, index: number): Row {
   const id = `${arrayId}/${index + 1}`
   const entry: StringReadings | NotTested | undefined = scene.install.readings?.arrays?.[arrayId]?.strings?.[index]
@@ -16,14 +18,17 @@ function stringRow(scene: ReportScene, arrayId: string, index: number): Row {
     limit: string,
     least: number,
   ) =>
-    pointCell({
-      anchor: `point/string/${id}/${name}`,
-      name: `${name} of ${id}`,
-      unit,
-      limit,
-      measured: read?.[name] ?? reason,
-      least,
-    })
+    pointCell(
+      {
+        anchor: `point/string/${id}/${name}`,
+        name: `${name} of ${id}`,
+        unit,
+        limit,
+        measured: read?.[name] ?? reason,
+        least,
+      },
+      WIDTH[name],
+    )
   const expected = (name: string, unit: string) => {
     const value = scene.number(id, name)
     return value === undefined ? 'write it down' : `about ${rounded(value, unit === 'A' ? 1 : 0)}`
@@ -42,19 +47,27 @@ function stringRow(scene: ReportScene, arrayId: string, index: number): Row {
         `≥ ${rounded(scene.number(id, 'insulation_minimum'), 1)} at ${rounded(scene.number(id, 'insulation_test_voltage'), 0)} V`,
         0,
       ),
-      wordCell(`point/string/${id}/polarity`, `polarity of ${id}`, read?.polarity ?? reason?.not_tested, 'correct'),
+      wordCell(
+        {
+          anchor: `point/string/${id}/polarity`,
+          name: `polarity of ${id}`,
+          word: read?.polarity ?? reason?.not_tested,
+          limit: 'correct',
+        },
+        WIDTH.polarity,
+      ),
     ],
   }
 }
 
 const COLUMNS = [
-  { label: 'String', width: 10 },
-  { label: 'Light', unit: 'W/m²', width: 14 },
-  { label: 'Cells', unit: '°C', width: 12 },
-  { label: 'V_oc', unit: 'V', width: 15 },
-  { label: 'I_sc', unit: 'A', width: 15 },
-  { label: 'Insulation', unit: 'MΩ', width: 18 },
-  { label: 'Polarity', width: 16 },
+  { label: 'String', width: 9 },
+  { label: 'Light', unit: 'W/m²', width: WIDTH.irradiance },
+  { label: 'Cells', unit: '°C', width: WIDTH.cell_temperature },
+  { label: 'V_oc', unit: 'V', width: WIDTH.voc },
+  { label: 'I_sc', unit: 'A', width: WIDTH.isc },
+  { label: 'Insulation', unit: 'MΩ', width: WIDTH.insulation },
+  { label: 'Polarity', width: WIDTH.polarity },
 ] as const
 
 /** What is read on the strings, in daylight and with the inverter off. */

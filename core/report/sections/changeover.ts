@@ -2,6 +2,7 @@ import type { Block, Entry, Section } from '../blocks.ts'
 import { table } from '../blocks.ts'
 import { cableLaid, cableName } from '../devices.ts'
 import { verdictEntry } from '../entries.ts'
+import { distinct } from '../names.ts'
 import { amount, amountOr, printed } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 
@@ -95,8 +96,9 @@ function neutral(scene: ReportScene): Entry[] {
 /** The device that makes the island: poles, ratings, link, signals. */
 export function changeover(scene: ReportScene): Section {
   const { id, signals = [] } = scene.install.changeover
-  const rows = signals.map(({ role, terminal, configured }) => ({
-    anchor: `changeover/${id}/signal/${role}`,
+  const names = distinct(signals.map(({ role }) => role))
+  const rows = signals.map(({ role, terminal, configured }, index) => ({
+    anchor: `changeover/${id}/signal/${names[index]}`,
     ...(terminal !== configured && { look: 'row-fails' as const }),
     head: { text: role },
     cells: [{ text: terminal }, { text: configured }, { text: terminal === configured ? 'the same' : 'differ' }],

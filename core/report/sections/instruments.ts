@@ -54,12 +54,12 @@ export function instruments({ install, verdicts }: ReportScene): Section {
     ]
   })
   const columns = [
-    { label: 'Instrument', width: 10 },
-    { label: 'Kind', width: 27 },
-    { label: 'Calibrated', width: 15 },
-    { label: 'Due', width: 15 },
-    { label: 'Uncertainty', width: 19 },
-    { label: 'Verdict', width: 14 },
+    { label: 'Instrument', width: 11 },
+    { label: 'Kind', width: 28 },
+    { label: 'Calibrated', width: 17 },
+    { label: 'Due', width: 17 },
+    { label: 'Uncertainty', width: 14 },
+    { label: 'Verdict', width: 13 },
   ]
   const widest = table(
     'instruments/uncertainty',

@@ -69,7 +69,8 @@ function island(scene: ReportScene, id: string, { island: source, settings }: In
   ]
 }
 
-const SETTINGS = [
+/** Settings of the interface protection: name, title, unit, the book's parameter, decimals at least. */
+export const PROTECTION_SETTINGS = [
   ['u_high', 'Overvoltage', 'V', 'interface_u_high', 0],
   ['u_low', 'Undervoltage', 'V', 'interface_u_low', 0],
   ['f_high', 'Overfrequency', 'Hz', 'interface_f_high', 1],
@@ -81,7 +82,7 @@ function settingRow(
   scene: ReportScene,
   id: string,
   inverter: Inverter,
-  [name, title, unit, parameter, least]: (typeof SETTINGS)[number],
+  [name, title, unit, parameter, least]: (typeof PROTECTION_SETTINGS)[number],
 ): Row {
   const set = inverter.interface_protection?.[name]
   const asked = scene.judged.book.parameters[parameter]
@@ -114,7 +115,7 @@ function inverterBlocks(scene: ReportScene, id: string, inverter: Inverter): Blo
       lists: [{ entries: machine(scene, id, inverter) }, { entries: island(scene, id, inverter) }],
     },
     table(`inverter/${id}/settings`, columns, [
-      { rows: SETTINGS.map((setting) => settingRow(scene, id, inverter, setting)) },
+      { rows: PROTECTION_SETTINGS.map((setting) => settingRow(scene, id, inverter, setting)) },
     ]),
   ]
 }

@@ -4,7 +4,7 @@ import { limitBar } from '../bars.ts'
 import { type Block, type Entry, type Row, type Section, table } from '../blocks.ts'
 import { budgetCurve } from '../curve.ts'
 import { verdictEntry } from '../entries.ts'
-import { amount, amountOr, hoursText, printed } from '../print.ts'
+import { amount, hoursText, printed } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 
 function batteryEntries(
@@ -56,6 +56,9 @@ function batteryEntries(
   ]
 }
 
+/** A computed load: three digits count. */
+const roundedLoad = (load: number): string => amount(Number(load.toPrecision(3)), 'VA')
+
 function lineRows(scene: ReportScene, id: string): Row[] {
   const loads = scene.value(id, 'phase_load')
   const limit = scene.number(id, 'phase_limit')
@@ -69,7 +72,7 @@ function lineRows(scene: ReportScene, id: string): Row[] {
         anchor: `inverter/${id}/phase_load/${line}`,
         ...(load > limit && { look: 'row-fails' as const }),
         head: { text: `${id} ${line}` },
-        cells: [{ text: amount(Math.round(load), 'VA') }, { text: amount(limit, 'VA') }, { svg: bar }],
+        cells: [{ text: roundedLoad(load) }, { text: roundedLoad(limit) }, { svg: bar }],
       },
     ]
   })
@@ -89,8 +92,8 @@ function startRow(scene: ReportScene, id: string): Row[] {
       ...(limit !== undefined && start > limit && { look: 'row-fails' as const }),
       head: { text: `${id} largest start` },
       cells: [
-        { text: amount(start, 'A') },
-        { text: amountOr(limit, 'A', 'not stated') },
+        { text: printed(start, 'A') },
+        { text: limit === undefined ? 'not stated' : printed(limit, 'A') },
         bar === undefined ? { text: '' } : { svg: bar },
       ],
     },

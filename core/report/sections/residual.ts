@@ -5,6 +5,7 @@ import { limitBar } from '../bars.ts'
 import { type Cell, type Row, type Section, tables } from '../blocks.ts'
 import { residualName } from '../devices.ts'
 import { capital, readingText, rounded } from '../print.ts'
+import { rampBand } from '../ramp.ts'
 import type { ReportScene } from '../scene.ts'
 
 const TIMES = [
@@ -46,8 +47,7 @@ function timeCell(
 }
 
 function rampCell(scene: ReportScene, id: string, state: State, test: ResidualTest): Cell {
-  const [low, high] = [scene.number(id, 'ramp_minimum'), scene.number(id, 'ramp_maximum')]
-  const band = low === undefined || high === undefined ? undefined : `${rounded(low, 1)} to ${rounded(high, 1)}`
+  const band = rampBand(scene, id)
   return {
     anchor: `residual/${id}/ramp/${state}`,
     text: readingText(test.ramp, 0),
@@ -86,11 +86,11 @@ export function residual(scene: ReportScene): Section {
     'residual/tests',
     [
       { label: 'Device', width: 14 },
-      { label: '½ IΔ_n', unit: 'ms', width: 11, align: 'num' },
+      { label: '½ IΔ_n', unit: 'ms', width: 10, align: 'num' },
       { label: '1 × IΔ_n', unit: 'ms', width: 14, align: 'num' },
-      { label: '2 × IΔ_n', unit: 'ms', width: 12, align: 'num' },
+      { label: '2 × IΔ_n', unit: 'ms', width: 14, align: 'num' },
       { label: '5 × IΔ_n', unit: 'ms', width: 14, align: 'num' },
-      { label: 'Ramp', unit: 'mA', width: 13, align: 'num' },
+      { label: 'Ramp', unit: 'mA', width: 12, align: 'num' },
       { label: 'With', width: 7 },
       { label: 'Verdict', width: 15 },
     ],

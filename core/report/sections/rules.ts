@@ -38,33 +38,50 @@ function ruleRow({ id, key, severity }: ShippedRule, found: readonly Finding[]):
   return {
     anchor: `judged/${id}`,
     head: { text: ruleTitle(key), note: severity === 'failure' ? id : `${id} · ${severity}` },
-    cells: [{ text: citesText(rulePage(key).record.cites) }, { text: verdictsText(found) }],
+    cells: [{ note: citesText(rulePage(key).record.cites) }, { text: verdictsText(found) }],
   }
 }
 
-function chapterGroups(rules: readonly ShippedRule[], byRule: ByRule): RowGroup[] {
-  const chapters = new Map<string, Row[]>()
+interface Chapter {
+  readonly title: string
+  readonly rules: readonly ShippedRule[]
+}
+
+function byChapter(rules: readonly ShippedRule[]): Chapter[] {
+  const chapters = new Map<string, ShippedRule[]>()
   for (const rule of rules) {
     const { chapter } = rulePage(rule.key)
-    const row = ruleRow(rule, byRule.get(rule.id) ?? [])
-    const rows = chapters.get(chapter)
-    if (rows) rows.push(row)
-    else chapters.set(chapter, [row])
+    const known = chapters.get(chapter)
+    if (known) known.push(rule)
+    else chapters.set(chapter, [rule])
   }
-  return [...chapters].map(([chapter, rows]) => ({ title: capital(chapter.replaceAll('-', ' ')), rows }))
+  return [...chapters].map(([chapter, members]) => ({
+    title: capital(chapter.replaceAll('-', ' ')),
+    rules: members,
+  }))
+}
+
+function chapterGroups(rules: readonly ShippedRule[], byRule: ByRule): RowGroup[] {
+  return byChapter(rules).map(({ title, rules: members }) => ({
+    title,
+    rows: members.map((rule) => ruleRow(rule, byRule.get(rule.id) ?? [])),
+  }))
 }
 
 function idle(rules: readonly ShippedRule[]): Names[] {
   if (rules.length === 0) return []
-  const names = rules.map(({ id, key }) => ({ anchor: `judged/${id}`, name: `${ruleTitle(key)} (${id})` }))
+  const groups = byChapter(rules).map(({ title, rules: members }) => ({
+    title,
+    names: members.map(({ id, key }) => ({ anchor: `judged/${id}`, name: ruleTitle(key), id })),
+  }))
   const lead = 'Rules of the book that were looked at and found to be about nothing that is here.'
-  return [{ kind: 'names', anchor: 'rules/idle', title: 'Rules that do not apply', lead, names }]
+  return [{ kind: 'names', anchor: 'rules/idle', title: 'Rules that do not apply', lead, groups }]
 }
 
 const COLUMNS = [
-  { label: 'Rule', width: 36 },
-  { label: 'Source', width: 40 },
-  { label: 'Verdicts', width: 24 },
+  { label: 'Rule', width: 48 },
+  { label: 'Source', width: 34 },
+  { label: 'Verdicts', width: 18 },
 ] as const
 
 /** Every rule that was judged, with its verdicts and its source; last those that apply to nothing here. */

@@ -59,6 +59,26 @@ describe('the single-line diagram', () => {
     }
   })
 
+  it('names the cable that leads to a board, a device, the changeover and an inverter', () => {
+    const cable = (type: string) => ({ type, insulation: 'xlpe', method: 'B2', length: '9 m' })
+    const svg = (changes: Record<string, unknown>) => singleLine(judgedBase({ set: changes }), 'grid')
+    const laid = svg({
+      'boards.EB.cable': cable('5G4'),
+      'residual_current.RCD1.cable': cable('5G6'),
+      'changeover.cable': cable('5G10'),
+      'overcurrent.F35.cable': cable('5G16'),
+      'inverters.INV.cable': cable('5G25'),
+    })
+    for (const [id, name] of [
+      ['EB', '5G4'],
+      ['RCD1', '5G6'],
+      ['CO', '5G10'],
+      ['F35', '5G16'],
+      ['INV', '5G25'],
+    ] as const)
+      expect(wordsOf(partOf(laid, id)).join(), id).toContain(name)
+  })
+
   it('dashes in the island what only the grid feeds, and nothing on the grid', () => {
     const judged = judgedExample('alder-mill-bakery')
     const [grid, island] = [singleLine(judged, 'grid'), singleLine(judged, 'island')]
@@ -193,14 +213,14 @@ describe('the budget of the island as a curve', () => {
     const svg = drawn(budgetCurve(budget))
     expect(wordsOf(svg)).toEqual(
       expect.arrayContaining([
-        'without sun',
+        'without sun: empty after 7\u00a0h 18\u00a0min',
         'clear sky',
-        'what must run, without sun',
-        'empty after 7\u00a0h 18\u00a0min',
+        'what must run, without sun: empty after 9\u00a0h 44\u00a0min',
         '48 h',
       ]),
     )
     expect(svg.match(/<polyline/g)).toHaveLength(3)
+    expect(svg.match(/<circle/g)).toHaveLength(2)
   })
 
   it('leaves out the sun where it cannot be told, and the end where there is none', () => {

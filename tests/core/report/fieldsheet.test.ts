@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { fieldsheetModel } from '#core/report/fieldsheet.ts'
-import { anchorsOf, judgedBase, judgedExample, textsOf } from './judged.ts'
+import { anchorsOf, judgedBase, judgedExample, modelOf, textsOf } from './judged.ts'
 
 interface Point {
   readonly anchor: string
@@ -58,6 +58,7 @@ describe('the field sheet', () => {
       'sheet/dead',
       'sheet/strings',
       'sheet/grid',
+      'sheet/settings',
       'sheet/island',
       'sheet/transfers',
     ])
@@ -73,6 +74,47 @@ describe('the field sheet', () => {
   it('puts the cautions first', () => {
     const [first] = fieldsheetModel(judgedExample('reed-hall-design')).sections
     expect(first?.blocks[0]).toMatchObject({ kind: 'notice', box: 'box-caution' })
+  })
+
+  it('asks for signals, settings and the meter’s direction, and takes what is known', () => {
+    const sheet = sheetOf(judgedExample('reed-hall-design'))
+    expect(sheet.get('point/changeover/CO/signal/changeover command')?.box).toBe(true)
+    expect(sheet.get('point/changeover/CO/neutral-opens')?.text).toBe('last')
+    expect(sheet.get('point/meter/M1/direction')?.box).toBe(true)
+    expect(sheet.get('point/inverter/INV/held_back_charge')?.box).toBe(true)
+    const known = sheetOf(judgedExample('tern-farm-tt'))
+    expect(known.get('point/meter/M1/direction')?.text).toBe('checked')
+    expect(known.get('point/inverter/INV/held_back_charge')?.text).toBe('read back')
+  })
+
+  it('asks no sequence of a changeover that leaves the neutral closed, and keeps signals of one name apart', () => {
+    const lines = sheetOf(judgedExample('osier-lane-three-pole'))
+    expect(lines.has('point/changeover/CO/neutral-opens')).toBe(false)
+    const twice = judgedBase({
+      set: {
+        'changeover.signals': [
+          { role: 'changeover command', terminal: 'DO1', configured: 'DO1' },
+          { role: 'changeover command', terminal: 'DO2', configured: 'DO2' },
+        ],
+      },
+    })
+    expect([...sheetOf(twice).keys()].filter((anchor) => anchor.includes('/signal/'))).toEqual([
+      'point/changeover/CO/signal/changeover command',
+      'point/changeover/CO/signal/changeover command/2',
+    ])
+    const anchors = anchorsOf(modelOf(twice))
+    expect(new Set(anchors).size).toBe(anchors.length)
+  })
+
+  it('holds a loop to the overcurrent device where that is a yardstick, and not where something else cuts off', () => {
+    const loop = (text: string, state: string) =>
+      fieldsheetModel(judgedExample(text))
+        .sections.find(({ anchor }) => anchor === `sheet/${state}`)
+        ?.blocks.flatMap((block) => (block.kind === 'table' ? block.groups.flatMap(({ rows }) => rows) : []))
+        .find(({ anchor }) => anchor === `point/circuit/K1/${state}`)?.cells[2]?.text
+    expect(loop('reed-hall-design', 'grid')).toBe('≤ 3.07')
+    expect(loop('reed-hall-design', 'island')).toBe('–')
+    expect(loop('tern-farm-tt', 'grid')).toBe('–')
   })
 
   it('tells where a reading is left out on purpose', () => {
@@ -132,12 +174,15 @@ describe('the field sheet', () => {
         'residual_current',
         'circuits.K1.cable.length',
         'inverters.INV.interface_protection',
+        'inverters.INV.settings',
       ],
       set: { 'boards.MB.fed_from': 'supply', 'boards.EB.fed_from': 'CO', 'circuits.K7.fed_from': 'MB' },
     })
     const sheet = sheetOf(bare)
     expect(sheet.get('point/circuit/K1/continuity')?.note).toBe('write it down')
     expect(sheet.get('point/head/date')?.box).toBe(true)
+    expect(textsOf(fieldsheetModel(bare)).join('\n')).toMatch(/INV, charge held back\nwrite it down/)
+    expect([...sheet.keys()]).not.toContain('point/inverter/INV/u_high')
     expect(
       [...sheet.keys()].filter((anchor) => anchor.startsWith('point/residual') || anchor.startsWith('point/earthing')),
     ).toEqual([])
