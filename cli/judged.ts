@@ -12,8 +12,8 @@ export interface JudgedFile {
 async function thorough(text: string, shelf: Shelf): Promise<Checked> {
   const checked = check(text, shelf)
   if (checked.kind !== 'unreadable') return checked
-  const { explain } = await import('#core/read/explain.ts')
-  return check(text, shelf, explain)
+  const { readThoroughly } = await import('#core/read/thorough.ts')
+  return check(text, shelf, readThoroughly)
 }
 
 function complain(file: string, checked: Exclude<Checked, Judged>): void {

@@ -1,6 +1,6 @@
 import type { FileFault } from '#cli/io.ts'
 import { check, type Shelf } from '#core/engine.ts'
-import type { Explain } from '#core/read/read.ts'
+import type { ReadResult } from '#core/read/read.ts'
 import {
   atFailureLevel,
   atStrictLevel,
@@ -73,8 +73,13 @@ export function unopened(file: string, { message, code = 'file' }: Omit<FileFaul
   }
 }
 
-function resultOf(file: string, text: string, { all, shelf }: ResultOptions, explain?: Explain): FileResult {
-  const checked = check(text, shelf, explain)
+function resultOf(
+  file: string,
+  text: string,
+  { all, shelf }: ResultOptions,
+  reader?: (text: string) => ReadResult,
+): FileResult {
+  const checked = check(text, shelf, reader)
   const told = toldFindings(checked, all)
   const judged = checked.kind === 'judged' ? checked.findings : told
   const counts = countVerdicts(judged)
@@ -95,12 +100,12 @@ function resultOf(file: string, text: string, { all, shelf }: ResultOptions, exp
   }
 }
 
-/** Checks the text of a file. The slower reader, which tells all syntax errors, is loaded only for a file that has some. */
+/** Checks the text of a file. The slower reader, which tells all that is wrong, is loaded only for a file that has some. */
 export async function checkFile(file: string, text: string, options: ResultOptions): Promise<FileResult> {
   const result = resultOf(file, text, options)
   if (result.outcome !== 'unreadable') return result
-  const { explain } = await import('#core/read/explain.ts')
-  return resultOf(file, text, options, explain)
+  const { readThoroughly } = await import('#core/read/thorough.ts')
+  return resultOf(file, text, options, readThoroughly)
 }
 
 /** 0 where nothing stops, 1 where something does, 2 where a file could not be read. */

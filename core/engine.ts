@@ -3,9 +3,10 @@ import type { Finding, Problem, Sheet } from './glossary.ts'
 import type { Install } from './install.ts'
 import { judge } from './judge/judge.ts'
 import type { ShippedBook } from './judge/shipped.ts'
+import { everyProblem } from './misshapen.ts'
 import { normalise } from './normalise/normalise.ts'
-import { type Explain, type Locate, read } from './read/read.ts'
-import { checkShape } from './shape/shape.ts'
+import { type Locate, type ReadResult, read } from './read/read.ts'
+import { hasShape } from './shape/shape.ts'
 import { buildSheets } from './sheets/build.ts'
 import { buildTopology } from './topology/build.ts'
 import type { Topology } from './topology/topology.ts'
@@ -60,15 +61,24 @@ function bookFor(install: Install, shelf: Shelf): ShippedBook | Problem {
  *
  * @param text the whole file
  * @param shelf the rule books at hand
- * @param explain finds all syntax errors of a text that is no YAML; without it only the first is told
+ * @param reader `readThoroughly`, for a file that was found to be unreadable: without it only what was met first is told
  */
-export function check(text: string, shelf: Shelf, explain?: Explain): Checked {
-  const file = read(text, explain)
-  if (!file.ok) return { kind: 'unreadable', problems: file.problems }
+export function check(text: string, shelf: Shelf, reader: (text: string) => ReadResult = read): Checked {
+  const file = reader(text)
+  const wrongBook = (install: Install): Problem | undefined => {
+    const book = bookFor(install, shelf)
+    return 'code' in book ? book : undefined
+  }
+  if (!file.ok) {
+    const { problems, certain } = file
+    return {
+      kind: 'unreadable',
+      problems: certain ? everyProblem(certain.tree, wrongBook, { problems, certain }) : problems,
+    }
+  }
   const { tree, locate } = file
   const misshapen = (problems: readonly Problem[]): Misshapen => ({ kind: 'misshapen', problems, locate })
-  const shape = checkShape(tree)
-  if (shape.length > 0) return misshapen(shape)
+  if (!hasShape(tree)) return misshapen(everyProblem(tree, wrongBook))
   const { install, problems } = normalise(tree)
   const { topology, problems: tangles } = buildTopology(install)
   const book = bookFor(install, shelf)

@@ -22,7 +22,8 @@ function ruleOf({ rule, key, severity }: ShownFinding): object {
     const meaning = (PROBLEM_CODES as Readonly<Record<string, string>>)[rule] ?? 'The file cannot be opened.'
     return {
       id: rule,
-      name,
+      // A name that is the id once more is none; ids of one word would make one.
+      name: `${name}Problem`,
       shortDescription: { text: meaning },
       fullDescription: { text: meaning },
       help: { text: 'Mend the place that is shown. The message says what is allowed there.' },

@@ -26,7 +26,17 @@ export type ReadResult =
       readonly problems: readonly Problem[]
       /** The text is not well-formed YAML and only its first error is told: reading again with an explainer tells all. */
       readonly brief?: true
+      /** What the file says for certain in spite of the problems; only `readThoroughly` looks for it. */
+      readonly certain?: Certain
     }
+
+/** The values of a file in which single places are in doubt. */
+export interface Certain {
+  readonly tree: unknown
+  readonly locate: Locate
+  /** Whether a problem of the tree is about a place that was told already when reading. */
+  readonly told: (problem: Problem) => boolean
+}
 
 /** Finds all syntax errors of a text; `explain` of `explain.ts`. */
 export type Explain = (text: string) => readonly Problem[]

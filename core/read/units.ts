@@ -82,9 +82,13 @@ export function kindWithUnit(unit: string): Kind | undefined {
   return [...BY_NAME.values()].find((kind) => Object.hasOwn(kind.units, unit))
 }
 
-/** A unit of the kind that differs from a misspelt one by capital letters only: `KV` for `kV`. */
+/**
+ * A unit of the kind that differs from a misspelt one by capital letters only: `KV` for `kV`. A capital in front is a
+ * factor of a thousand million between milli and mega, so the one that begins alike goes first: `MOhm` is `MΩ`.
+ */
 export function sameButForCapitals(kind: Kind, unit: string): string | undefined {
-  return Object.keys(kind.units).find((known) => known.toLowerCase() === unit.toLowerCase())
+  const alike = Object.keys(kind.units).filter((known) => known.toLowerCase() === unit.toLowerCase())
+  return alike.find((known) => known.charAt(0) === unit.charAt(0)) ?? alike[0]
 }
 
 /** The units of a kind as they are printed, the usual ones only; none for a factor. */

@@ -15,3 +15,12 @@ export function checkShape(tree: unknown, schema: () => SchemaNode = installSche
   if (validate(tree)) return []
   return explain(validate.errors, tree, schema())
 }
+
+/**
+ * Whether the shape is right, for whoever does not ask what is wrong.
+ *
+ * @param tree the file's values
+ */
+export function hasShape(tree: unknown): boolean {
+  return validate(tree)
+}

@@ -1,9 +1,11 @@
 import { readdirSync, readFileSync } from 'node:fs'
+import fc from 'fast-check'
 import { load } from 'js-yaml'
 import { describe, expect, it } from 'vitest'
 import { check } from '#core/engine.ts'
 import { SHIPPED_BOOKS, shippedBook } from '#core/judge/shipped.ts'
-import { explain } from '#core/read/explain.ts'
+import { readThoroughly } from '#core/read/thorough.ts'
+import { example, mutants } from '../schemas/corpus.ts'
 import { patched } from './judge/patch.ts'
 
 const shelf = { find: shippedBook, names: SHIPPED_BOOKS }
@@ -16,7 +18,7 @@ describe('a file', () => {
   })
 
   it('that is no YAML is unreadable, and every syntax error is told', () => {
-    const result = check('skerry: 1\n\tsite: [\n', shelf, explain)
+    const result = check('skerry: 1\n\tsite: [\n', shelf, readThoroughly)
     expect(result.kind).toBe('unreadable')
   })
 
@@ -100,4 +102,100 @@ it('gives the same findings whatever the order of keys', () => {
       .toSorted()
   }
   expect(lines(JSON.stringify(turned(load(base))))).toEqual(lines(base))
+})
+
+describe('a file with errors of every kind', () => {
+  const wrong = example('wrong-in-shape')
+  const numbered = wrong.text
+    .split('\n')
+    .flatMap((line, index) => [...(line.split('#')[1]?.matchAll(/\b\d+(?=[:,]|$)/g) ?? [])].map(() => index + 1))
+
+  it('is told all of them at once, each on its line, no value twice', () => {
+    const result = check(wrong.text, shelf, readThoroughly)
+    if (result.kind === 'judged') throw new Error('It cannot be judged.')
+    expect(numbered).toHaveLength(28)
+    expect(result.problems.map(({ range }) => range?.line).toSorted((a = 0, b = 0) => a - b)).toEqual(numbered)
+    expect(new Set(result.problems.map(({ path }) => path.join('\n'))).size).toBe(28)
+  })
+
+  it('is told ranges, names and the rule book beside its shape', () => {
+    const text = patched({
+      set: {
+        'site.nmae': 'x',
+        'site.position.latitude': '97.3 °',
+        'circuits.K1.fed_from': 'EBB',
+        'report.rulebook': 'atlantis',
+        'readings.with': 'X9',
+      },
+    })
+    const result = check(text, shelf)
+    expect(result.kind === 'misshapen' && result.problems.map(({ code, path }) => `${code} ${path.join('.')}`)).toEqual(
+      [
+        'unknown-key site.nmae',
+        'out-of-range site.position.latitude',
+        'dangling-name circuits.K1.fed_from',
+        'dangling-name readings.with',
+        'not-allowed-value report.rulebook',
+      ],
+    )
+  })
+
+  it.each([
+    ['a section is misspelt', { 'circuit.K9.fed_from': 'EBB', 'circuits.K1.fed_from': 'EBB' }],
+    ['a name cannot be one', { 'boards.1MB.fed_from': 'supply', 'circuits.K1.fed_from': 'EBB' }],
+  ])('is not told that a name leads nowhere where %s', (_, set) => {
+    const result = check(patched({ set }), shelf)
+    expect(result.kind === 'misshapen' && result.problems.map(({ code }) => code)).not.toContain('dangling-name')
+  })
+
+  it('is told at most as many as are shown, and how many more', () => {
+    const many = Array.from({ length: 150 }, (_, index) => `    K${index}: { fed_from: MB, cable: 012 }\n`).join('')
+    const result = check(`skerry: 1\ncircuits:\n${many}`, shelf, readThoroughly)
+    if (result.kind === 'judged') throw new Error('It cannot be judged.')
+    expect(result.problems).toHaveLength(201)
+    expect(result.problems.at(-1)?.message).toMatch(/^\d+ more problems are not shown/)
+  })
+})
+
+describe('whatever is in a file', () => {
+  const sound = readFileSync('examples/heron-ford-dwelling.skerry.yaml', 'utf8')
+
+  it('no value of any kind at any place keeps the others from being looked at, and each place is told once', () => {
+    const mutations = mutants(load(sound))
+    expect(mutations.length).toBeGreaterThan(300)
+    for (const { name, tree } of mutations) {
+      const result = check(JSON.stringify(tree), shelf)
+      if (result.kind === 'judged') continue
+      const places = result.problems.map(({ path }) => path.join('\n'))
+      expect([name, new Set(places).size]).toEqual([name, places.length])
+    }
+  })
+
+  it('spoilt in several places it is told of, never with an exception', () => {
+    const pieces = ['@', '"', ' #', '\t', '1_0', ',5', ': ', '!x ', '&a ', '*a', '>', '\u202e', '{', '- ', '<<: ']
+    let misread = 0
+    fc.assert(
+      fc.property(
+        fc.array(fc.tuple(fc.nat(), fc.constantFrom(...pieces)), { minLength: 1, maxLength: 5 }),
+        (spoils) => {
+          const text = spoils.reduce((now, [place, piece]) => {
+            const at = place % now.length
+            return now.slice(0, at) + piece + now.slice(at)
+          }, sound)
+          const result = check(text, shelf, readThoroughly)
+          if (result.kind === 'judged') return
+          misread++
+          expect(result.problems.length).toBeGreaterThan(0)
+          if (result.kind === 'unreadable') {
+            for (const { range, message } of result.problems) {
+              expect(range).toBeDefined()
+              expect(message).not.toMatch(/[\ue000-\uf8ff]/)
+            }
+          }
+        },
+      ),
+      { numRuns: 150 },
+    )
+    expect(misread).toBeGreaterThan(50)
+  })
 })
