@@ -24,6 +24,20 @@ module.exports = {
       to: { path: '^(server|src|tools|tests|migrations|seeds)/' },
     },
     {
+      name: 'server-leans-on-core-only',
+      comment: 'What server and command line share lives in core.',
+      severity: 'error',
+      from: { path: '^server/' },
+      to: { path: '^(cli|src|tests|migrations|seeds)/' },
+    },
+    {
+      name: 'routes-command-commands-query',
+      comment: 'A query knows no command and no route, a command no route: each can be read and tested from below.',
+      severity: 'error',
+      from: { path: '^server/(queries|commands)/' },
+      to: { path: '^server/routes/' },
+    },
+    {
       name: 'files-and-streams-in-one-place',
       comment:
         'Only cli/io.ts and what starts or runs beside it touch the machine, so that commands can be tested as functions.',
@@ -49,14 +63,14 @@ module.exports = {
       name: 'no-development-tools-in-the-product',
       comment: 'What ships must install without the development dependencies.',
       severity: 'error',
-      from: { path: '^(core|cli)/' },
-      to: { dependencyTypes: ['npm-dev'] },
+      from: { path: '^(core|cli|server)/', pathNot: '\\.d\\.ts$' },
+      to: { dependencyTypes: ['npm-dev'], dependencyTypesNot: ['type-only'] },
     },
     {
       name: 'only-known-licences',
       comment: 'Only licences that allow handing the program on.',
       severity: 'error',
-      from: { path: '^(core|cli)/' },
+      from: { path: '^(core|cli|server)/' },
       to: {
         dependencyTypes: ['npm'],
         licenseNot:

@@ -1,12 +1,30 @@
 import { defineConfig } from 'vitest/config'
 
+const shared = { testTimeout: 30_000, hookTimeout: 120_000 }
+
 export default defineConfig({
   test: {
-    include: ['tests/**/*.test.ts'],
-    globalSetup: ['tests/cli/global-setup.ts'],
-    testTimeout: 30_000,
-    hookTimeout: 120_000,
-    pool: 'threads',
+    projects: [
+      {
+        test: {
+          ...shared,
+          name: 'engine',
+          include: ['tests/**/*.test.ts'],
+          exclude: ['tests/server/**'],
+          globalSetup: ['tests/cli/global-setup.ts'],
+          pool: 'threads',
+        },
+      },
+      {
+        test: {
+          ...shared,
+          name: 'server',
+          include: ['tests/server/**/*.test.ts'],
+          globalSetup: ['tests/server/global-setup.ts'],
+          pool: 'forks',
+        },
+      },
+    ],
     coverage: {
       provider: 'v8',
       include: ['core/**/*.ts'],

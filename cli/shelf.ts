@@ -1,21 +1,9 @@
 import type { Shelf } from '#core/engine.ts'
 import type { BookFolder, BookRecord } from '#core/judge/book.ts'
 import type { RuleRecord } from '#core/judge/rule.ts'
-import { SHIPPED_BOOKS, type ShippedBook, shippedBook } from '#core/judge/shipped.ts'
+import { shippedShelf } from '#core/judge/shelf.ts'
 import { read } from '#core/read/read.ts'
 import { readText } from './io.ts'
-
-/** The shipped rule books, each read once. */
-export function shippedShelf(): Shelf {
-  const kept = new Map<string, ShippedBook | undefined>()
-  return {
-    names: SHIPPED_BOOKS,
-    find: (id) => {
-      if (!kept.has(id)) kept.set(id, shippedBook(id))
-      return kept.get(id)
-    },
-  }
-}
 
 /** The shipped books, with one of the house where a folder is named. */
 export async function shelfFor(folder: string | undefined): Promise<ShelfResult> {

@@ -1,7 +1,7 @@
 import { visible } from '#cli/formats/visible.ts'
 import { asker, endWith, exists, isTerminal, print, say, writeWhole } from '#cli/io.ts'
-import { shippedShelf } from '#cli/shelf.ts'
 import { check } from '#core/engine.ts'
+import { shippedShelf } from '#core/judge/shelf.ts'
 import { SHIPPED_BOOKS } from '#core/judge/shipped.ts'
 import { type StartAnswers, startFile } from '#core/report/start-file.ts'
 

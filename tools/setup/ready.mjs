@@ -45,18 +45,18 @@ const found = (program) => spawnSync('sh', ['-c', `command -v ${program}`]).stat
 
 /** Installs the Debian packages of programs that are missing; without the right to, prints the one command to run. */
 export function needPrograms(packageOf) {
-  const missing = [
-    ...new Set(
-      Object.entries(packageOf)
-        .filter(([program]) => !found(program))
-        .map(([, name]) => name),
-    ),
-  ]
-  if (missing.length === 0) return
-  const command = `apt-get install -y --no-install-recommends ${missing.join(' ')}`
+  const missing = Object.entries(packageOf)
+    .filter(([program]) => !found(program))
+    .map(([, name]) => name)
+  if (missing.length > 0) debianPackage([...new Set(missing)])
+}
+
+/** Installs Debian packages; without the right to, prints the one command to run. */
+export function debianPackage(names) {
+  const command = `apt-get install -y --no-install-recommends ${names.join(' ')}`
   if (process.getuid?.() !== 0)
     stop(`Some programs are missing. Install them with:\n  sudo ${command}\nand start again.`)
-  process.stderr.write(`Installing ${missing.join(', ')} …\n`)
+  process.stderr.write(`Installing ${names.join(', ')} …\n`)
   run('apt-get', ['update', '-qq'], { stdio: ['ignore', 'ignore', 'inherit'] })
   run('sh', ['-c', `DEBIAN_FRONTEND=noninteractive ${command}`], { stdio: ['ignore', 'ignore', 'inherit'] })
 }

@@ -1,0 +1,155 @@
+import { REPORT_STATES } from '#core/policy/states.ts'
+import { judgeSource } from '#server/commands/judge-source.ts'
+import { refuse } from '#server/http/problems.ts'
+import { route } from '#server/http/route.ts'
+import { presentReport, REPORT_SCHEMA } from '#server/presenters/report.ts'
+import { cursorOf, cursorText, listReports } from '#server/queries/report-list.ts'
+import { findReport, findSource, insertReport, insertRevision, type Report } from '#server/queries/reports.ts'
+
+const PAGE = { type: 'integer', minimum: 1, maximum: 100, default: 50 } as const
+
+const about = ({ facts }: Report) => facts
+
+const listRoute = route({
+  id: 'list-reports',
+  method: 'get',
+  path: '/reports',
+  summary: 'Reports of the organisation, newest change first, a page at a time',
+  tag: 'reports',
+  query: {
+    type: 'object',
+    properties: {
+      state: { type: 'string', enum: REPORT_STATES },
+      search: { type: 'string', minLength: 1, maxLength: 100 },
+      after: { type: 'string', maxLength: 200 },
+      limit: PAGE,
+    },
+    additionalProperties: false,
+  },
+  policy: { action: 'report.list' },
+  scope: 'report.read',
+  limit: 'read',
+  answers: {
+    200: {
+      type: 'object',
+      properties: { reports: { type: 'array', items: REPORT_SCHEMA }, next: { type: ['string', 'null'] } },
+      required: ['reports', 'next'],
+    },
+  },
+  async run({ tx, actor, query }) {
+    const { limit = 50, after, state, search } = query
+    const cursor = after === undefined ? undefined : cursorOf(after)
+    if (after !== undefined && cursor === undefined)
+      return refuse('bad-request', undefined, {
+        errors: [{ pointer: '/after', message: 'Take the value of `next` of the page before.' }],
+      })
+    const issuedOnly = actor.roles.every((role) => role === 'auditor')
+    const rows = await listReports(tx, {
+      organisation: actor.organisation,
+      issuedOnly,
+      limit,
+      ...(state === undefined ? {} : { state }),
+      ...(search === undefined ? {} : { search }),
+      ...(cursor === undefined ? {} : { after: cursor }),
+    })
+    const page = rows.slice(0, limit)
+    const last = page.at(-1)
+    const next =
+      rows.length > limit && last !== undefined
+        ? cursorText({ at: last.updated_at.toISOString(), id: last.report_id })
+        : null
+    return { body: { reports: page.map(presentReport), next } }
+  },
+})
+
+const showRoute = route({
+  id: 'show-report',
+  method: 'get',
+  path: '/reports/:report',
+  summary: 'One report',
+  tag: 'reports',
+  policy: { action: 'report.read', about },
+  scope: 'report.read',
+  limit: 'read',
+  load: ({ tx, actor, params }) => findReport(tx, actor.organisation, params['report'] ?? ''),
+  answers: { 200: REPORT_SCHEMA },
+  async run({ subject }) {
+    return { body: presentReport(subject), version: subject.version }
+  },
+})
+
+const createRoute = route({
+  id: 'create-report',
+  method: 'post',
+  path: '/reports',
+  summary: 'A new report from an install file',
+  tag: 'reports',
+  accepts: 'source',
+  query: {
+    type: 'object',
+    properties: { file_name: { type: 'string', minLength: 1, maxLength: 200 } },
+    required: ['file_name'],
+    additionalProperties: false,
+  },
+  policy: { action: 'report.create' },
+  scope: 'report.send',
+  limit: 'write',
+  idempotency: 'required',
+  answers: { 201: REPORT_SCHEMA },
+  async run({ tx, actor, query, body, now }) {
+    const bytes: unknown = body
+    if (!(bytes instanceof Uint8Array) || bytes.length === 0)
+      return refuse('bad-request', 'The body is empty; send the install file.')
+    const judged = judgeSource(bytes)
+    if (!judged.ok) return refuse('file-refused', undefined, { errors: judged.errors })
+    const { organisation, person } = actor
+    const { lifted } = judged
+    const report = await insertReport(tx, { organisation, person, lifted, now })
+    await insertRevision(tx, {
+      organisation,
+      report,
+      revision: 1,
+      person,
+      source: bytes,
+      fileName: query.file_name,
+      lifted,
+      now,
+    })
+    const made = await findReport(tx, organisation, report)
+    if (made === undefined) throw new Error('The new report cannot be read back.')
+    return {
+      status: 201,
+      body: presentReport(made),
+      version: made.version,
+      headers: { location: `/api/reports/${report}` },
+      audit: { report, sha256: lifted.sha256 },
+    }
+  },
+})
+
+const sourceRoute = route({
+  id: 'show-source',
+  method: 'get',
+  path: '/reports/:report/revisions/:revision/source',
+  summary: 'The install file of a revision, byte for byte as it was uploaded',
+  tag: 'reports',
+  policy: { action: 'report.read', about },
+  scope: 'report.read',
+  limit: 'read',
+  load: ({ tx, actor, params }) => findReport(tx, actor.organisation, params['report'] ?? ''),
+  answers: { 200: { media: 'application/yaml' } },
+  async run({ tx, actor, subject, params }) {
+    const revision = Number(params['revision'])
+    const source = Number.isInteger(revision)
+      ? await findSource(tx, actor.organisation, subject.report_id, revision)
+      : undefined
+    if (source === undefined) return refuse('not-found')
+    return {
+      bytes: source.source,
+      type: 'application/yaml; charset=utf-8',
+      headers: { 'content-disposition': 'attachment; filename="source.skerry.yaml"', 'x-sha256': source.sha256 },
+    }
+  },
+})
+
+export const REPORT_ROUTES = [listRoute, showRoute, createRoute, sourceRoute]

@@ -1,0 +1,15 @@
+import type { Knex } from 'knex'
+import type { Logger } from 'pino'
+import type { Env } from './env.ts'
+import type { Jobs } from './jobs/jobs.ts'
+
+/** Everything that routes and jobs lean on besides their transaction; made by `main.ts` and by tests. */
+export interface Services {
+  readonly env: Env
+  readonly db: Knex
+  readonly log: Logger
+  readonly jobs: Jobs
+  readonly clock: () => Date
+  /** What the process still waits for before it can work; empty when it is ready. */
+  readonly ready: () => Promise<readonly string[]>
+}

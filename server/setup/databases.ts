@@ -1,0 +1,83 @@
+import createKnex, { type Knex } from 'knex'
+import { migrate } from '#server/migrate.ts'
+
+/** The roles that sign in at a cluster of our own. The owner migrates, the web serves, the backup reads everything. */
+const OWNER = 'skerry_owner'
+const WEB = 'skerry_web'
+
+export interface Addresses {
+  readonly owner: string
+  readonly web: string
+}
+
+const config = (url: string): Knex.Config => ({
+  client: 'pg',
+  connection: url,
+  pool: { min: 0, max: 2 },
+  migrations: { directory: new URL('../../migrations', import.meta.url).pathname, loadExtensions: ['.ts'] },
+})
+
+async function withKnex<T>(url: string, work: (db: Knex) => Promise<T>): Promise<T> {
+  const db = createKnex(config(url))
+  try {
+    return await work(db)
+  } finally {
+    await db.destroy()
+  }
+}
+
+/** The address of another role or database of the same cluster; roles share the administrator's secret on loopback. */
+export function addressFor(admin: string, database: string, role?: string): string {
+  const url = new URL(admin)
+  url.pathname = `/${database}`
+  if (role !== undefined) url.username = role
+  return url.href
+}
+
+export const addressesOf = (admin: string, database: string): Addresses => ({
+  owner: addressFor(admin, database, OWNER),
+  web: addressFor(admin, database, WEB),
+})
+
+async function ensureRoles(admin: Knex, secret: string): Promise<void> {
+  await admin.raw(`
+    do $$ begin
+      if not exists (select from pg_roles where rolname = 'skerry_app') then create role skerry_app nologin; end if;
+      if not exists (select from pg_roles where rolname = '${OWNER}') then create role ${OWNER} login createrole; end if;
+      if not exists (select from pg_roles where rolname = '${WEB}') then create role ${WEB} login in role skerry_app; end if;
+    end $$`)
+  for (const role of [OWNER, WEB]) await admin.raw(`alter role ${role} password '${secret.replaceAll("'", "''")}'`)
+}
+
+async function ensureDatabase(admin: Knex, database: string): Promise<void> {
+  const { rows } = await admin.raw<{ rows: unknown[] }>('select 1 from pg_database where datname = ?', [database])
+  if (rows.length === 0) await admin.raw('create database ?? owner ??', [database, OWNER])
+}
+
+/**
+ * Makes roles and a database in a cluster of our own, and migrates it.
+ *
+ * @param admin the address of the cluster's administrator
+ */
+export async function prepareDatabase(admin: string, database: string): Promise<Addresses> {
+  await withKnex(admin, async (db) => {
+    await ensureRoles(db, decodeURIComponent(new URL(admin).password))
+    await ensureDatabase(db, database)
+  })
+  const addresses = addressesOf(admin, database)
+  await withKnex(addresses.owner, migrate)
+  return addresses
+}
+
+/** A copy of a database that nobody is connected to. */
+export async function cloneDatabase(admin: string, template: string, database: string): Promise<Addresses> {
+  await withKnex(admin, async (db) => {
+    await db.raw('create database ?? template ?? owner ??', [database, template, OWNER])
+    await db.raw('grant connect on database ?? to skerry_app', [database])
+  })
+  return addressesOf(admin, database)
+}
+
+export async function dropDatabase(admin: string, database: string): Promise<void> {
+  await withKnex(admin, (db) => db.raw('drop database if exists ?? with (force)', [database]))
+}
