@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto'
 import { check, type Judged } from '#core/engine.ts'
 import type { Path } from '#core/glossary.ts'
 import { shippedShelf } from '#core/judge/shelf.ts'
-import { explain } from '#core/read/explain.ts'
+import { readThoroughly } from '#core/read/thorough.ts'
 import { atFailureLevel, type Counts, countVerdicts, type ToldFinding, toldFindings } from '#core/report/told.ts'
 import type { FieldError } from '#server/http/problems.ts'
 import { VERSION } from '#server/version.ts'
@@ -104,7 +104,8 @@ export function judgeSource(source: Uint8Array): JudgedSource {
       ],
     }
   }
-  const checked = check(text, shelf, explain)
+  const quick = check(text, shelf)
+  const checked = quick.kind === 'unreadable' ? check(text, shelf, readThoroughly) : quick
   if (checked.kind === 'judged') return { ok: true, judged: checked, lifted: lift(checked, source), text }
   const told = toldFindings(checked, false)
   return { ok: false, errors: told.slice(0, MOST).map(errorOf) }

@@ -53,6 +53,16 @@ export interface House {
 export const source = (name: string): string =>
   readFileSync(new URL(`../../examples/${name}.skerry.yaml`, import.meta.url), 'utf8')
 
+/** The bytes of an answer, whatever its type. */
+export async function whole(request: Test): Promise<Buffer> {
+  const answer = await request.buffer(true).parse((response, done) => {
+    const chunks: Buffer[] = []
+    response.on('data', (chunk: Buffer) => chunks.push(chunk))
+    response.on('end', () => done(null, Buffer.concat(chunks)))
+  })
+  return answer.body as Buffer
+}
+
 const changing =
   (agent: InstanceType<typeof TestAgent>, method: 'post' | 'put' | 'patch' | 'delete', csrf: string) =>
   (path: string) =>

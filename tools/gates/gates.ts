@@ -20,7 +20,17 @@ export const GATES: readonly Gate[] = [
   { name: 'pure core', command: [bin('tsc'), '-p', 'core', '--extendedDiagnostics'], saw: /^Files:\s+(\d+)/m },
   {
     name: 'arrows and licences',
-    command: [bin('depcruise'), '--config', '.dependency-cruiser.cjs', 'core', 'cli', 'server', 'migrations', 'tools', 'tests'],
+    command: [
+      bin('depcruise'),
+      '--config',
+      '.dependency-cruiser.cjs',
+      'core',
+      'cli',
+      'server',
+      'migrations',
+      'tools',
+      'tests',
+    ],
     saw: /\((\d+) modules/,
   },
   { name: 'dead code', command: ['node', '--import', 'tsx', 'tools/gates/dead-code.ts'], saw: /(\d+) files/ },
