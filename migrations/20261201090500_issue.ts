@@ -127,6 +127,14 @@ export async function up(knex: Knex): Promise<void> {
            or (wanted_sha256 is not null and s.pdf_sha256 = lower(wanted_sha256))
         limit 2
       $$;
+    -- Tells an empty database from one that must not be seeded.
+    create function any_organisation() returns boolean
+      language sql stable security definer set search_path = public
+      as $$ select exists (select from organisations) $$;
+    alter function any_organisation() owner to skerry_gate;
+    revoke all on function any_organisation() from public;
+    grant execute on function any_organisation() to skerry_app;
+
     alter function public_document(text, text) owner to skerry_gate;
     revoke all on function public_document(text, text) from public;
     grant execute on function public_document(text, text) to skerry_app;

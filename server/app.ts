@@ -128,8 +128,7 @@ export function createApp(services: Services): Express {
   app.set('etag', false)
   app.set('query parser', 'simple')
   app.set('trust proxy', services.env.TRUST_PROXY)
-  app.use(headers(services), visits(services))
-  app.use(health(services))
+  app.use(headers(services), health(services), visits(services))
   const limit = limiter(services.db)
   const session = sessions(services.env, services.db)
   const noStore: RequestHandler = (_request, response, next) => {

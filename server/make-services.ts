@@ -22,7 +22,7 @@ function makeLog(env: Env): Logger {
     level: env.LOG_LEVEL,
     timestamp: pino.stdTimeFunctions.isoTime,
     formatters: { level: (level) => ({ level }) },
-    redact: ['*.password', '*.code', '*.token', '*.cookie', '*.authorization', 'err.config', 'err.request'],
+    redact: ['*.password', '*.token', '*.cookie', '*.authorization', 'err.config', 'err.request'],
   })
 }
 

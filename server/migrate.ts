@@ -22,6 +22,7 @@ export async function migrate(owner: Knex): Promise<void> {
     const existing = new Set((await boss.getQueues()).map(({ name }) => name))
     for (const name of QUEUE_NAMES) if (!existing.has(name)) await boss.createQueue(name)
     await owner.raw(`
+      grant select on knex_migrations to ${APP_ROLE};
       grant usage on schema pgboss to ${APP_ROLE};
       grant select, insert, update, delete on all tables in schema pgboss to ${APP_ROLE};
       grant execute on all functions in schema pgboss to ${APP_ROLE};

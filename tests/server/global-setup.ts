@@ -24,6 +24,7 @@ export default async function setup(project: TestProject): Promise<() => void> {
     env: { ...process.env, SKERRY_ADMIN_URL: url },
     encoding: 'utf8',
   })
+  if (prepared.status !== 0) stopCluster(home, 'immediate')
   if (prepared.status !== 0) throw new Error(`The test database could not be made:\n${prepared.stderr}`)
   project.provide('postgres', url)
   return () => {

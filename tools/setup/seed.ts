@@ -1,0 +1,33 @@
+// Fills an empty database with the demonstration, and prints its sign-ins. Anything but an empty database is left alone.
+import { openDatabase } from '#server/db.ts'
+import { readEnv } from '#server/env.ts'
+import { DEMO_PASSWORD, ORGANISATIONS } from '../../seeds/fennmark/people.ts'
+
+const read = readEnv(process.env)
+if (!read.ok) {
+  process.stderr.write(`${read.problems.join('\n')}\n`)
+  process.exit(2)
+}
+const { env } = read
+
+const signIns = (): string =>
+  [
+    `Demonstration sign-ins, password for all: ${DEMO_PASSWORD}`,
+    ...ORGANISATIONS.flatMap(({ name, people }) => [
+      `  ${name}`,
+      ...people.map((person) => `    ${person.email.padEnd(24)} ${person.name}, ${person.roles.join(' and ')}`),
+    ]),
+    '',
+  ].join('\n')
+
+if (env.NODE_ENV !== 'production') {
+  const db = openDatabase({ url: env.DATABASE_URL, pool: 4, name: 'skerry seed', statementTimeout: 120_000 })
+  try {
+    const { rows } = await db.raw<{ rows: { any: boolean }[] }>('select any_organisation() as any')
+    const empty = rows[0]?.any === false
+    if (empty) await db.seed.run({ directory: './seeds', loadExtensions: ['.ts'] })
+    process.stdout.write(signIns())
+  } finally {
+    await db.destroy()
+  }
+}
