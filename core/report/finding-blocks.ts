@@ -4,6 +4,7 @@ import { fieldsOf } from '#core/sheets/plans.ts'
 import { labelOf, STATE_WORDS } from '#core/texts/label.ts'
 import { joined } from '#core/texts/value.ts'
 import { ruleTitle, ruleWordsFor } from '#core/texts/words.ts'
+import { anchorOf } from './anchor.ts'
 import type { FindingBlock } from './blocks.ts'
 import { findingMark, isFailing } from './marks.ts'
 import { capital, dateText, held } from './print.ts'
@@ -97,7 +98,8 @@ export function gatheredBlocks(scene: ReportScene, findings: readonly Finding[])
       anchor: findingAnchor(finding),
       name: finding.state === null ? finding.subject : `${finding.subject} ${STATE_WORDS[finding.state]}`,
     }))
-    const anchor = `rule/${first.rule}/${first.verdict.replaceAll(/[ ,]+/g, '-')}/${first.missing.join('+')}${first.reason ?? ''}`
+    const missing = `${first.missing.join('+')}${first.reason ?? ''}`
+    const anchor = anchorOf('rule', first.rule, first.verdict.replaceAll(/[ ,]+/g, '-'), missing)
     return [{ ...block(scene, first), anchor, about: `${group.length} subjects`, subjects, place: '' }]
   })
 }

@@ -1,6 +1,7 @@
 import type { Finding } from '#core/glossary.ts'
 import { labelOf, STATE_WORDS } from '#core/texts/label.ts'
 import { ruleTitle } from '#core/texts/words.ts'
+import { anchorOf } from '../anchor.ts'
 import { type Block, type Mark, type Notice, type Row, type Section, table } from '../blocks.ts'
 import { findingMark } from '../marks.ts'
 import { capital, few } from '../print.ts'
@@ -85,7 +86,13 @@ function lines(scene: ReportScene, findings: readonly Finding[]): Row[] {
     const [first] = group
     if (!first) return []
     const titles = group.map(({ title }) => `${title}.`).join(' ')
-    return [{ anchor: `summary/${name}`, head: { mark: first.mark }, cells: [{ text: first.where }, { text: titles }] }]
+    return [
+      {
+        anchor: anchorOf('summary', name),
+        head: { mark: first.mark },
+        cells: [{ text: first.where }, { text: titles }],
+      },
+    ]
   })
 }
 
