@@ -69,6 +69,8 @@ export interface Supply {
   /** V line to neutral, count of line conductors, Hz */
   readonly nominal: { readonly voltage: number; readonly phases: 1 | 3; readonly frequency: number }
   readonly main_protection: Device
+  /** A a line, what the operator provides for */
+  readonly rated_current?: number
   /** Ω, external earth-fault loop impedance Ze */
   readonly loop_impedance?: Measured
   /** A, prospective fault current at the origin, the larger of line-neutral and line-earth */

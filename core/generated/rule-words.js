@@ -839,6 +839,44 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Run at least 1.5 mm².";
 },"useData":true})},
+"iec/neutral-is-large-enough":{title:"The neutral is as large as the line conductors, or as large as it has to be",cite:"IEC 60364-5-52:2009, 524.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The neutral of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":23}}})) != null ? stack1 : "")
+    + " has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_size",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":51}}})) != null ? stack1 : "")
+    + " beside "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"line_size",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":59},"end":{"line":1,"column":79}}})) != null ? stack1 : "")
+    + " of line; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_minimum",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":89},"end":{"line":1,"column":115}}})) != null ? stack1 : "")
+    + " is the least.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Run a neutral as large as the lines.";
+},"useData":true})},
+"iec/smaller-neutral-was-thought-about":{title:"A neutral smaller than the lines is as large as its load asks for",cite:"IEC 60364-5-52:2009, 524.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The neutral of "
+    + ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":23}}})) != null ? stack1 : "")
+    + " has "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"neutral_size",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":28},"end":{"line":1,"column":51}}})) != null ? stack1 : "")
+    + " beside "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"line_size",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":59},"end":{"line":1,"column":79}}})) != null ? stack1 : "")
+    + " of line.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Work out what it carries, harmonics included, and protect it against overcurrent; state both as a departure. Or run it as large as the lines.";
+},"useData":true})},
 "iec/protective-conductor-is-continuous":{title:"The continuity of the circuit's conductors was measured",cite:"IEC 60364-6:2016, 6.4.3.2",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1039,6 +1077,54 @@ export default {
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Measure both at the origin, and write them under supply.";
 },"useData":true})},
+"iec/main-protection-suits-the-supply":{title:"The main protection is no larger than what the operator provides for",cite:"common practice",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The main protection is rated "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"main_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":29},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
+    + "; the operator provides for "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":78},"end":{"line":1,"column":102}}})) != null ? stack1 : "")
+    + " a line.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit smaller main protection, or agree on a larger connection with the operator.";
+},"useData":true})},
+"iec/main-protection-carries-the-load":{title:"The main protection carries the load of the building",cite:"IEC 60364-4-43, 433.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The loads that are stated draw "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"through_current",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":31},"end":{"line":1,"column":57}}})) != null ? stack1 : "")
+    + " on the most loaded line, all at once; the main protection is rated "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"main_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":125},"end":{"line":1,"column":146}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Spread the loads over the lines, or state as a departure which of them never run together.";
+},"useData":true})},
+"iec/main-protection-stays-within-its-cables":{title:"The main protection is no larger than the cables behind it bear",cite:"IEC 60364-4-43, 433.1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "The main protection is rated "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"main_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":29},"end":{"line":1,"column":50}}})) != null ? stack1 : "")
+    + "; the weakest cable behind it carries "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"smallest_cable_capacity",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":88},"end":{"line":1,"column":122}}})) != null ? stack1 : "")
+    + ".";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Fit a larger cable, smaller main protection, or an overcurrent device at the start of the cable.";
+},"useData":true})},
 "iec/fault-is-cut-off-on-the-grid":{title:"On the grid something would cut off a fault in time, as designed",cite:"IEC 60364-4-41:2005+A1:2017, 411.3.2, 411.4.4",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -1238,12 +1324,12 @@ export default {
     };
 
   return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
-    + " took "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":30}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":31}}})) != null ? stack1 : "")
     + " at its rated residual current "
-    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":61},"end":{"line":1,"column":70}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":62},"end":{"line":1,"column":71}}})) != null ? stack1 : "")
     + "; "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":72},"end":{"line":1,"column":99}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_rated",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":73},"end":{"line":1,"column":100}}})) != null ? stack1 : "")
     + " is the most.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Replace the device. In the island, prove the link between neutral and earth first.";
@@ -1276,12 +1362,12 @@ export default {
     };
 
   return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
-    + " took "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"double",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":31}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"double",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":32}}})) != null ? stack1 : "")
     + " at twice its rated residual current "
-    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":68},"end":{"line":1,"column":77}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":69},"end":{"line":1,"column":78}}})) != null ? stack1 : "")
     + "; "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_double",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":79},"end":{"line":1,"column":107}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_double",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":80},"end":{"line":1,"column":108}}})) != null ? stack1 : "")
     + " is the most.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Replace the device.";
@@ -1314,12 +1400,12 @@ export default {
     };
 
   return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
-    + " took "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":14},"end":{"line":1,"column":35}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":36}}})) != null ? stack1 : "")
     + " at five times its rated residual current "
-    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":77},"end":{"line":1,"column":86}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":78},"end":{"line":1,"column":87}}})) != null ? stack1 : "")
     + "; "
-    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":88},"end":{"line":1,"column":120}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":89},"end":{"line":1,"column":121}}})) != null ? stack1 : "")
     + " is the most.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Replace the device.";
@@ -2906,6 +2992,44 @@ export default {
     + " system.";
 },"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     return "Fit a device that opens the neutral too.";
+},"useData":true})},
+"gb/five-times-the-residual-current-trips-at-once":{title:"Where it was read, the device trips at once at five times its rated residual current",cite:"IEC 61008-1, Table 1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " reads "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":15},"end":{"line":1,"column":36}}})) != null ? stack1 : "")
+    + " at five times its rated residual current "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":78},"end":{"line":1,"column":87}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_limit_five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":89},"end":{"line":1,"column":121}}})) != null ? stack1 : "")
+    + " is the most.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Replace the device.";
+},"useData":true})},
+"gb/delayed-device-waits-at-five-times":{title:"Where it was read, the time-delayed device waits long enough at five times its rated residual current",cite:"IEC 61008-1, Table 1",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"name").call(alias1,{"name":"name","hash":{},"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":8}}})) != null ? stack1 : "")
+    + " took only "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":19},"end":{"line":1,"column":40}}})) != null ? stack1 : "")
+    + " at five times its rated residual current "
+    + ((stack1 = lookupProperty(helpers,"state").call(alias1,{"name":"state","hash":{},"data":data,"loc":{"start":{"line":1,"column":82},"end":{"line":1,"column":91}}})) != null ? stack1 : "")
+    + "; "
+    + ((stack1 = lookupProperty(helpers,"show").call(alias1,"time_minimum_five_times",{"name":"show","hash":{},"data":data,"loc":{"start":{"line":1,"column":93},"end":{"line":1,"column":127}}})) != null ? stack1 : "")
+    + " is the least.";
+},"useData":true}),do:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    return "Check that the device is time-delayed.";
 },"useData":true})},
 "gb/battery-keeps-out-of-forbidden-places":{title:"The battery keeps out of sleeping rooms, escape routes and roof spaces",cite:"PAS 63100:2024",says:()=>({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {

@@ -3,6 +3,7 @@ import { circuitDisconnectionQuantities } from './circuit-disconnection.ts'
 import { circuitDropQuantities } from './circuit-drop.ts'
 import type { CircuitItem } from './circuit-item.ts'
 import { circuitLoopQuantities } from './circuit-loop.ts'
+import { circuitNeutralQuantities } from './circuit-neutral.ts'
 import { circuitProtectiveQuantities } from './circuit-protective.ts'
 import type { Family } from './quantity.ts'
 
@@ -15,5 +16,6 @@ export const circuitFamily: Family<CircuitItem> = {
     ...circuitLoopQuantities,
     ...circuitDisconnectionQuantities,
     ...circuitProtectiveQuantities,
+    ...circuitNeutralQuantities,
   ],
 }

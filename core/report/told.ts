@@ -1,6 +1,6 @@
 import type { Checked, Judged } from '#core/engine.ts'
 import type { Departure, Finding, Path, Problem, Range, Severity, Sheet, State, Verdict } from '#core/glossary.ts'
-import { fieldsOf } from '#core/sheets/plans.ts'
+import { lacking } from '#core/sheets/lacking.ts'
 import { joined } from '#core/texts/value.ts'
 import { ruleCite, ruleTitle, ruleWordsFor } from '#core/texts/words.ts'
 
@@ -90,10 +90,15 @@ function toldProblem(
   }
 }
 
-/** What is missing, by the names that the sheet gives its fields. */
-function missingWords({ missing }: Finding, sheet: Sheet): string {
-  const fields = fieldsOf(sheet.subject)
-  return joined(missing.map((name) => fields.get(name)?.title.toLowerCase() ?? name))
+/** What is missing, by the names that the sheet gives its fields: what has to be entered or read, not what follows from it. */
+function missingWords({ missing, state }: Finding, sheet: Sheet): string {
+  const titles = missing.flatMap((name) => lacking(sheet, name, state))
+  return joined([...new Set(titles)].map(insideSentence))
+}
+
+/** `Length of the cable` inside a sentence; signs of quantities such as `Ze` stay as they are. */
+function insideSentence(title: string): string {
+  return /^[A-Z][a-z]/.test(title) ? title.charAt(0).toLowerCase() + title.slice(1) : title
 }
 
 function messageOf(finding: Finding, sheet: Sheet, key: string, judged: Judged): { message: string; remedy: string } {

@@ -30,6 +30,7 @@ export const supplyPlan: SheetPlan<Supply> = {
       ['main_protection'],
       (supply) => supply.main_protection.rated,
     ),
+    entered('rated_current', 'A', 'Rated current of the supply', ['rated_current'], (supply) => supply.rated_current),
     entered(
       'main_breaking',
       'A',

@@ -11,7 +11,7 @@ import type { ReportScene } from '../scene.ts'
 import { plainPoints } from './plain.ts'
 import { type Point, pointCell, wordCell } from './points.ts'
 
-const WIDTH = { loop: 26, residual: 21, rotation: 26 } as const
+const WIDTH = { loop: 26, device: 16, rotation: 26 } as const
 
 function originPoints({ install }: ReportScene): Point[] {
   const { loop_impedance, fault_current } = install.supply
@@ -136,12 +136,34 @@ function loops(scene: ReportScene, state: State): Block[] {
   return tables(`point/loop/${state}`, columns, groups, 'Fault loop at the far end of each circuit')
 }
 
-const TIMES = [
-  ['rated', '1 × IΔ_n', 'time_limit_rated'],
-  ['five_times', '5 × IΔ_n', 'time_limit_five_times'],
-] as const
+interface TimeColumn {
+  readonly name: 'rated' | 'double' | 'five_times'
+  readonly label: string
+}
 
-function residualRow(scene: ReportScene, id: string, state: State): Row {
+/** Times by multiple of the rated residual current. Twice it is asked of time-delayed devices only, and kept where it was read. */
+function timeColumns(scene: ReportScene, ids: readonly string[], state: State): readonly TimeColumn[] {
+  const double = ids.some((id) => asksForDouble(scene, id, state))
+  return [
+    { name: 'rated', label: '1 × IΔ_n' },
+    ...(double ? [{ name: 'double', label: '2 × IΔ_n' } as const] : []),
+    { name: 'five_times', label: '5 × IΔ_n' },
+  ]
+}
+
+function asksForDouble({ install }: ReportScene, id: string, state: State): boolean {
+  const found = install.readings?.residual_current?.[id]?.[state]
+  return install.residual_current?.[id]?.delay === 'S' || (found !== undefined && 'double' in found)
+}
+
+/** `≤ 300`, or `130 to 500` where the device has to wait. */
+function timeLimit(scene: ReportScene, id: string, name: TimeColumn['name']): string {
+  const most = rounded(scene.number(id, `time_limit_${name}`), 0)
+  const least = scene.number(id, `time_minimum_${name}`)
+  return least === undefined ? `≤ ${most}` : `${rounded(least, 0)} to ${most}`
+}
+
+function residualRow(scene: ReportScene, id: string, state: State, times: readonly TimeColumn[], width: number): Row {
   const device = scene.install.residual_current?.[id]
   const readings = scene.install.readings?.residual_current?.[id]
   const found =
@@ -159,14 +181,18 @@ function residualRow(scene: ReportScene, id: string, state: State): Row {
         measured: test[name] ?? reason,
         least: 0,
       },
-      WIDTH.residual,
+      width,
     )
+  const time = ({ name }: TimeColumn) =>
+    name === 'double' && !asksForDouble(scene, id, state)
+      ? { text: '–' }
+      : point(name, 'ms', timeLimit(scene, id, name))
   return {
     anchor: `point/residual/${id}/${state}`,
     head: { text: id, note: device ? residualName(device) : '' },
     cells: [
       point('half', 'ms', 'no trip'),
-      ...TIMES.map(([name, , limit]) => point(name, 'ms', `≤ ${rounded(scene.number(id, limit), 0)}`)),
+      ...times.map(time),
       point('ramp', 'mA', rampBand(scene, id) ?? 'write it down'),
     ],
   }
@@ -175,13 +201,15 @@ function residualRow(scene: ReportScene, id: string, state: State): Row {
 function residual(scene: ReportScene, state: State): Block[] {
   const ids = Object.keys(scene.install.residual_current ?? {}).filter((id) => scene.topology.live(id, state))
   if (ids.length === 0) return []
+  const times = timeColumns(scene, ids, state)
+  const width = (100 - WIDTH.device) / (times.length + 2)
   const columns = [
-    { label: 'Device', width: 16 },
-    { label: '½ IΔ_n', unit: 'ms', width: WIDTH.residual },
-    ...TIMES.map(([, label]) => ({ label, unit: 'ms', width: WIDTH.residual })),
-    { label: 'Ramp', unit: 'mA', width: WIDTH.residual },
+    { label: 'Device', width: WIDTH.device },
+    { label: '½ IΔ_n', unit: 'ms', width },
+    ...times.map(({ label }) => ({ label, unit: 'ms', width })),
+    { label: 'Ramp', unit: 'mA', width },
   ]
-  const rows = ids.map((id) => residualRow(scene, id, state))
+  const rows = ids.map((id) => residualRow(scene, id, state, times, width))
   return [table(`point/residual/${state}`, columns, [{ rows }], 'Residual-current devices')]
 }
 

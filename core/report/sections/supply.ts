@@ -20,6 +20,9 @@ function supplyEntries(scene: ReportScene): Entry[] {
     { anchor: 'supply/earthing', term: 'Earthing system', detail: supply.earthing, note: SYSTEMS[supply.earthing] },
     { anchor: 'supply/nominal', term: 'Nominal', detail: `${voltage}, ${amount(nominal.frequency, 'Hz')}` },
     { anchor: 'supply/main-protection', term: 'Main protection', detail: deviceText(supply.main_protection) },
+    ...(supply.rated_current === undefined
+      ? []
+      : [{ anchor: 'supply/rated', term: 'Rated current', detail: `${amount(supply.rated_current, 'A')} a line` }]),
     { anchor: 'supply/loop', term: 'External loop Z_e', detail: readingWithUnit(supply.loop_impedance, 'Ω', 2) },
     {
       anchor: 'supply/fault-current',

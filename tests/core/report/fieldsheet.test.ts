@@ -71,6 +71,20 @@ describe('the field sheet', () => {
     expect(textsOf(fieldsheetModel(judgedExample('reed-hall-design')))).toContain('195.5 to 253.0')
   })
 
+  it('asks a time-delayed device for its time at twice the residual current, with the time that it has to wait', () => {
+    const sheet = sheetOf(judgedBase({ remove: ['readings.residual_current'] }))
+    expect(sheet.get('point/residual/RCD0/rated/grid')?.note).toBe('130 to 500')
+    expect(sheet.get('point/residual/RCD0/double/grid')).toMatchObject({ note: '60 to 200', box: true })
+    expect(sheet.get('point/residual/RCD0/five_times/grid')?.note).toBe('50 to 150')
+    expect(sheet.has('point/residual/RCD1/double/grid')).toBe(false)
+    expect(sheet.has('point/residual/RCD1/double/island')).toBe(false)
+  })
+
+  it('keeps a reading at twice the residual current that was taken of a general device', () => {
+    const sheet = sheetOf(judgedBase())
+    expect(sheet.get('point/residual/RCD1/double/island')).toMatchObject({ note: '≤ 150', box: false })
+  })
+
   it('puts the cautions first', () => {
     const [first] = fieldsheetModel(judgedExample('reed-hall-design')).sections
     expect(first?.blocks[0]).toMatchObject({ kind: 'notice', box: 'box-caution' })
