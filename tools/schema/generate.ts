@@ -1,6 +1,7 @@
-import { mkdir, writeFile } from 'node:fs/promises'
+import { mkdir, readFile, writeFile } from 'node:fs/promises'
 import { dirname } from 'node:path'
 import { pathToFileURL } from 'node:url'
+import type { SchemaNode } from '#core/shape/schema-node.ts'
 import { bundle } from './bundle.ts'
 import { compileValidator, VALIDATOR_TYPES } from './compile.ts'
 import { makeDraft07 } from './make-draft07.ts'
@@ -12,11 +13,12 @@ import { writePlan } from './write-plan.ts'
 
 const QUANTITIES = 'quantities'
 
-/** Everything that is generated from the install file's schema: path in the project, and content. Writes nothing. */
+/** Everything that is generated from the schemas: path in the project, and content. Writes nothing. */
 export async function generateSchemas(): Promise<Record<string, string>> {
   const written = await readParts()
   const quantities = quantitiesPart(written)
   const bundled = bundle({ top: written.top, parts: new Map(written.parts).set(QUANTITIES, quantities) })
+  const proof: SchemaNode = JSON.parse(await readFile(`${PROJECT}schemas/proof.schema.json`, 'utf8'))
   return {
     [`schemas/parts/${QUANTITIES}.schema.json`]: printJson(quantities),
     'schemas/install.draft-07.schema.json': printJson(makeDraft07(bundled)),
@@ -25,6 +27,8 @@ export async function generateSchemas(): Promise<Record<string, string>> {
     'core/generated/install-schema.d.ts': TEXT_TYPES,
     'core/generated/install-validator.js': await compileValidator(bundled),
     'core/generated/install-validator.d.ts': VALIDATOR_TYPES,
+    'core/generated/proof-validator.js': await compileValidator(proof),
+    'core/generated/proof-validator.d.ts': PROOF_TYPES,
     'core/generated/install-plan.ts': writePlan(makePlan(bundled)),
   }
 }
@@ -32,6 +36,13 @@ export async function generateSchemas(): Promise<Record<string, string>> {
 const TEXT_TYPES = `/** The bundled schema as JSON text: it is parsed only where a file has errors to explain. */
 declare const text: () => string
 export default text
+`
+
+const PROOF_TYPES = `import type { Proof } from '#core/register/proof.ts'
+
+/** Whether a value is a proof of a place in a register, as schemas/proof.schema.json has it. */
+declare const validate: (value: unknown) => value is Proof
+export default validate
 `
 
 async function main(): Promise<void> {
