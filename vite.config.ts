@@ -20,7 +20,7 @@ export default defineConfig({
           ...shared,
           name: 'server',
           include: ['tests/server/**/*.test.ts'],
-          globalSetup: ['tests/server/global-setup.ts'],
+          globalSetup: ['tests/cli/global-setup.ts', 'tests/server/global-setup.ts'],
           pool: 'forks',
         },
       },

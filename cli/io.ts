@@ -13,7 +13,8 @@ import {
   writeFileSync,
   writeSync,
 } from 'node:fs'
-import { dirname, join, relative, resolve } from 'node:path'
+import { homedir } from 'node:os'
+import { basename, dirname, join, relative, resolve } from 'node:path'
 import { decode } from '#core/read/guard.ts'
 
 /** What went wrong with a file, in words for the person at the terminal. */
@@ -117,6 +118,8 @@ export const isFolder = (file: string): boolean => existsSync(file) && statSync(
 
 /** The folder that a file is in, and a path from the root: by these, two spellings of one place are the same. */
 export const folderOf = (file: string): string => dirname(file)
+export const baseName = (file: string): string => (file === '-' ? 'standard-input.skerry.yaml' : basename(file))
+export const homeFolder = (): string => homedir()
 export const wholePath = (path: string): string => resolve(path)
 
 /** Whether a file is one by its name; any file is that is named itself. */

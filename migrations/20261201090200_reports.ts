@@ -39,6 +39,7 @@ export async function up(knex: Knex): Promise<void> {
     );
     create index reports_by_update on reports (organisation_id, updated_at desc, report_id desc) where discarded_at is null;
     create index reports_by_state on reports (organisation_id, state, updated_at desc, report_id desc) where discarded_at is null;
+    create index reports_by_reference on reports (organisation_id, reference);
     create index reports_by_due on reports (organisation_id, due_on) where state = 'issued';
     create index reports_by_search on reports using gin (search gin_trgm_ops);
     create index reports_by_corrected on reports (organisation_id, corrects) where corrects is not null;

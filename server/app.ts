@@ -4,6 +4,7 @@ import helmet from 'helmet'
 import { sendFailure, sendProblem } from './http/answer.ts'
 import { health } from './http/health.ts'
 import { limiter } from './http/limits.ts'
+import { openapi } from './http/openapi.ts'
 import { handler } from './http/pipeline.ts'
 import { type Refused, refuse } from './http/problems.ts'
 import type { BodyKind, Route } from './http/route.ts'
@@ -148,6 +149,10 @@ export function createApp(services: Services): Express {
       ),
     )
   }
+  const document = JSON.stringify(openapi(ROUTES, services.env.BASE_URL))
+  app.get('/api/openapi.json', (_request, response) => {
+    response.type('application/json').send(document)
+  })
   app.use('/api', (_request, response) => sendProblem(response, refuse('not-found'), response.locals['request']))
   app.use(parseErrors(services))
   return app

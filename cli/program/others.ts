@@ -93,6 +93,18 @@ export function addOthers(skerry: Command): void {
       )
   }
   skerry
+    .command('send')
+    .summary('send files to a server, each as a report or as the next revision of one')
+    .description(
+      'Sends install files to a server. What was sent already is not sent twice, so a broken line does no harm: send again. The token comes from SKERRY_TOKEN, --token-file, or the file skerry/token in your configuration folder.',
+    )
+    .argument('<file...>', 'install files')
+    .option('--server <address>', 'the server; otherwise SKERRY_SERVER')
+    .option('--token-file <file>', 'a file with the token')
+    .action(async (files: readonly string[], options: { server?: string; tokenFile?: string }) =>
+      (await import('#cli/commands/send.ts')).send(files, options),
+    )
+  skerry
     .command('schema')
     .summary('print the JSON Schema of the install file')
     .option('--draft-07', 'the twin for editors')

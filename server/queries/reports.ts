@@ -166,3 +166,12 @@ export async function findSource(
     .where({ organisation_id: organisation, report_id: report, revision })
     .first<StoredSource | undefined>('source', 'sha256', 'file_name', 'revision')
 }
+
+/** The newest report that is not discarded with this reference. */
+export async function findByReference(tx: Tx, organisation: string, reference: string): Promise<string | undefined> {
+  const row = await tx('reports')
+    .where({ organisation_id: organisation, reference, discarded_at: null })
+    .orderBy('created_at', 'desc')
+    .first<{ report_id: string } | undefined>('report_id')
+  return row?.report_id
+}

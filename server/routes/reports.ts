@@ -1,10 +1,19 @@
-import { REPORT_STATES } from '#core/policy/states.ts'
-import { judgeSource } from '#server/commands/judge-source.ts'
-import { refuse } from '#server/http/problems.ts'
-import { route } from '#server/http/route.ts'
+import type { Actor } from '#core/policy/roles.ts'
+import { REPORT_STATES, WRITABLE } from '#core/policy/states.ts'
+import { judgeSource, type Lifted } from '#server/commands/judge-source.ts'
+import type { Tx } from '#server/db.ts'
+import { type Refused, refuse } from '#server/http/problems.ts'
+import { type Answer, route } from '#server/http/route.ts'
 import { presentReport, REPORT_SCHEMA } from '#server/presenters/report.ts'
 import { cursorOf, cursorText, listReports } from '#server/queries/report-list.ts'
-import { findReport, findSource, insertReport, insertRevision, type Report } from '#server/queries/reports.ts'
+import {
+  findByReference,
+  findReport,
+  findSource,
+  insertReport,
+  insertRevision,
+  type Report,
+} from '#server/queries/reports.ts'
 
 const PAGE = { type: 'integer', minimum: 1, maximum: 100, default: 50 } as const
 
@@ -78,6 +87,23 @@ const showRoute = route({
   },
 })
 
+/** The answer for a file that was sent before, or whose reference is taken; nothing for one that is new. */
+async function knownReport(tx: Tx, { organisation }: Actor, lifted: Lifted): Promise<Answer | Refused | undefined> {
+  const id = await findByReference(tx, organisation, lifted.reference)
+  const report = id === undefined ? undefined : await findReport(tx, organisation, id)
+  if (report === undefined) return undefined
+  const newest = await findSource(tx, organisation, report.report_id, report.revision)
+  if (newest?.sha256 === lifted.sha256) return { status: 200, body: presentReport(report), version: report.version }
+  if (WRITABLE.includes(report.state))
+    return refuse('conflict', `There is a report ${report.reference} already: send the file as its next revision.`, {
+      more: { existing: presentReport(report) },
+    })
+  return refuse(
+    'conflict',
+    `There is a report ${report.reference} already, and it is ${report.state}. Have it returned, correct it by a new one, or give this file another reference.`,
+  )
+}
+
 const createRoute = route({
   id: 'create-report',
   method: 'post',
@@ -87,7 +113,15 @@ const createRoute = route({
   accepts: 'source',
   query: {
     type: 'object',
-    properties: { file_name: { type: 'string', minLength: 1, maxLength: 200 } },
+    properties: {
+      file_name: { type: 'string', minLength: 1, maxLength: 200 },
+      same_reference: {
+        type: 'string',
+        enum: ['new', 'refuse'],
+        default: 'new',
+        description: 'What to do when a report with the reference of the file is there already.',
+      },
+    },
     required: ['file_name'],
     additionalProperties: false,
   },
@@ -95,7 +129,7 @@ const createRoute = route({
   scope: 'report.send',
   limit: 'write',
   idempotency: 'required',
-  answers: { 201: REPORT_SCHEMA },
+  answers: { 200: REPORT_SCHEMA, 201: REPORT_SCHEMA },
   async run({ tx, actor, query, body, now }) {
     const bytes: unknown = body
     if (!(bytes instanceof Uint8Array) || bytes.length === 0)
@@ -104,6 +138,10 @@ const createRoute = route({
     if (!judged.ok) return refuse('file-refused', undefined, { errors: judged.errors })
     const { organisation, person } = actor
     const { lifted } = judged
+    if (query.same_reference === 'refuse') {
+      const known = await knownReport(tx, actor, lifted)
+      if (known !== undefined) return known
+    }
     const report = await insertReport(tx, { organisation, person, lifted, now })
     await insertRevision(tx, {
       organisation,
