@@ -10,6 +10,7 @@ export const ACTIONS = {
   'report.create': ['installer', 'reviewer'],
   'report.revise': ['installer', 'reviewer'],
   'report.attach': ['installer', 'reviewer'],
+  'report.assign': ['installer', 'reviewer', 'administrator'],
   'report.submit': ['installer', 'reviewer'],
   'report.recall': ['installer', 'reviewer'],
   'report.discard': ['installer', 'reviewer'],

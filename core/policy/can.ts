@@ -76,6 +76,9 @@ const CONDITIONS: Readonly<Partial<Record<Action, readonly Condition[]>>> = {
   'report.read': [visible],
   'report.revise': [stateAmong(WRITABLE, 'its file can be changed only while it is a draft or returned.')],
   'report.attach': [stateAmong(WRITABLE, 'attachments can be changed only while it is a draft or returned.')],
+  'report.assign': [
+    stateAmong(['draft', 'in review', 'returned', 'approved'], 'a reviewer is chosen before it is issued.'),
+  ],
   'report.submit': [inStep('submit')],
   'report.recall': [inStep('recall')],
   'report.discard': [stateAmong(WRITABLE, 'only a draft or a returned report can be discarded.')],
@@ -90,6 +93,12 @@ const CONDITIONS: Readonly<Partial<Record<Action, readonly Condition[]>>> = {
 }
 
 const ROLE_WORDS = new Intl.ListFormat('en-GB', { type: 'disjunction' })
+
+/** Whether a person could be the second one on a report: a reviewer without a hand in it. */
+export function canReview(actor: Actor, report: ReportFacts): Decision {
+  const decision = can(actor, 'report.annotate')
+  return decision.allowed ? secondPerson(actor, report) : decision
+}
 
 /**
  * Whether a person may do something: by role first, then by what the report's state and the hands in it allow.

@@ -1,4 +1,4 @@
-import type { ReportRow } from '#server/queries/reports.ts'
+import type { Report, ReportRow } from '#server/queries/reports.ts'
 
 /** The shape of a report in answers; the OpenAPI document shows it. */
 export const REPORT_SCHEMA = {
@@ -48,4 +48,27 @@ export function presentReport(row: ReportRow) {
     created_at: row.created_at.toISOString(),
     updated_at: row.updated_at.toISOString(),
   }
+}
+
+/** One report with everybody who had a hand in it: what the policy decides by, so that the browser can tell the reason. */
+export const REPORT_WITH_HANDS_SCHEMA = {
+  ...REPORT_SCHEMA,
+  properties: {
+    ...REPORT_SCHEMA.properties,
+    uploaders: { type: 'array', items: { type: 'string', format: 'uuid' } },
+    workers: {
+      type: 'array',
+      items: {
+        type: 'object',
+        properties: { name: { type: 'string' }, licence: { type: ['string', 'null'] } },
+        required: ['name', 'licence'],
+      },
+    },
+  },
+  required: [...REPORT_SCHEMA.required, 'uploaders', 'workers'],
+} as const
+
+export function presentReportWithHands(report: Report) {
+  const { uploaders, workers } = report.facts
+  return { ...presentReport(report), uploaders, workers }
 }

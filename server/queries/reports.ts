@@ -56,17 +56,24 @@ interface Hands {
   workers: Worker[] | null
 }
 
-export async function findReport(tx: Tx, organisation: string, report: string): Promise<Report | undefined> {
-  const row = await tx('reports')
+/** Everybody who had a hand in any revision: what a later file leaves out does not undo who did the work. */
+async function handsIn(tx: Tx, organisation: string, report: string): Promise<Hands> {
+  return await tx('revisions as r')
+    .joinRaw('left join lateral jsonb_array_elements(r.workers) as w on true')
+    .where({ 'r.organisation_id': organisation, 'r.report_id': report })
+    .first<Hands>(
+      tx.raw('array_agg(distinct r.uploaded_by::text) as uploaders'),
+      tx.raw('jsonb_agg(distinct w) filter (where w is not null) as workers'),
+    )
+}
+
+async function find(tx: Tx, organisation: string, report: string, lock: boolean): Promise<Report | undefined> {
+  const query = tx('reports')
     .where({ organisation_id: organisation, report_id: report, discarded_at: null })
     .first<ReportRow | undefined>(...REPORT_COLUMNS)
+  const row = await (lock ? query.forUpdate() : query)
   if (row === undefined) return undefined
-  const hands = await tx('revisions')
-    .where({ organisation_id: organisation, report_id: report })
-    .first<Hands>(
-      tx.raw('array_agg(distinct uploaded_by::text) as uploaders'),
-      tx.raw('(array_agg(workers order by revision desc))[1] as workers'),
-    )
+  const hands = await handsIn(tx, organisation, report)
   return {
     ...row,
     facts: {
@@ -79,6 +86,18 @@ export async function findReport(tx: Tx, organisation: string, report: string): 
   }
 }
 
+export async function findReport(tx: Tx, organisation: string, report: string): Promise<Report | undefined> {
+  return await find(tx, organisation, report, false)
+}
+
+/**
+ * The same, its row locked until the transaction ends: what is decided on it then still holds when it is written. Whoever
+ * locks a second report locks the newer one first.
+ */
+export async function lockReport(tx: Tx, organisation: string, report: string): Promise<Report | undefined> {
+  return await find(tx, organisation, report, true)
+}
+
 export interface NewReport {
   readonly organisation: string
   readonly person: string
@@ -87,7 +106,7 @@ export interface NewReport {
   readonly corrects?: { readonly report: string; readonly reason: string }
 }
 
-const liftedColumns = (lifted: Lifted) => ({
+export const liftedColumns = (lifted: Lifted) => ({
   reference: lifted.reference,
   title: lifted.title,
   place: lifted.place,
@@ -147,24 +166,6 @@ export async function insertRevision(
     counts: JSON.stringify(lifted.counts),
     workers: JSON.stringify(lifted.workers),
   })
-}
-
-export interface StoredSource {
-  readonly source: Buffer
-  readonly sha256: string
-  readonly file_name: string
-  readonly revision: number
-}
-
-export async function findSource(
-  tx: Tx,
-  organisation: string,
-  report: string,
-  revision: number,
-): Promise<StoredSource | undefined> {
-  return await tx('revisions')
-    .where({ organisation_id: organisation, report_id: report, revision })
-    .first<StoredSource | undefined>('source', 'sha256', 'file_name', 'revision')
 }
 
 /** The newest report that is not discarded with this reference. */

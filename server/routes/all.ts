@@ -1,6 +1,17 @@
 import type { Route } from '#server/http/route.ts'
+import { CHECK_ROUTES } from './check.ts'
+import { REPORT_STEP_ROUTES } from './report-steps.ts'
+import { VIEW_ROUTES } from './report-views.ts'
 import { REPORT_ROUTES } from './reports.ts'
+import { REVISION_ROUTES } from './revisions.ts'
 import { SESSION_ROUTES } from './session.ts'
 
 /** Every route of the API. What is not here does not exist; the OpenAPI document and the access matrix are made from it. */
-export const ROUTES: readonly Route[] = [...SESSION_ROUTES, ...REPORT_ROUTES]
+export const ROUTES: readonly Route[] = [
+  ...SESSION_ROUTES,
+  ...REPORT_ROUTES,
+  ...REVISION_ROUTES,
+  ...VIEW_ROUTES,
+  ...REPORT_STEP_ROUTES,
+  ...CHECK_ROUTES,
+]

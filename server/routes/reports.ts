@@ -4,16 +4,16 @@ import { judgeSource, type Lifted } from '#server/commands/judge-source.ts'
 import type { Tx } from '#server/db.ts'
 import { type Refused, refuse } from '#server/http/problems.ts'
 import { type Answer, route } from '#server/http/route.ts'
-import { presentReport, REPORT_SCHEMA } from '#server/presenters/report.ts'
-import { cursorOf, cursorText, listReports } from '#server/queries/report-list.ts'
+import { NO_SOURCE, sourceBytes } from '#server/http/source-body.ts'
 import {
-  findByReference,
-  findReport,
-  findSource,
-  insertReport,
-  insertRevision,
-  type Report,
-} from '#server/queries/reports.ts'
+  presentReport,
+  presentReportWithHands,
+  REPORT_SCHEMA,
+  REPORT_WITH_HANDS_SCHEMA,
+} from '#server/presenters/report.ts'
+import { cursorOf, cursorText, listReports } from '#server/queries/report-list.ts'
+import { findByReference, findReport, insertReport, insertRevision, type Report } from '#server/queries/reports.ts'
+import { findSource } from '#server/queries/revisions.ts'
 
 const PAGE = { type: 'integer', minimum: 1, maximum: 100, default: 50 } as const
 
@@ -81,9 +81,9 @@ const showRoute = route({
   scope: 'report.read',
   limit: 'read',
   load: ({ tx, actor, params }) => findReport(tx, actor.organisation, params['report'] ?? ''),
-  answers: { 200: REPORT_SCHEMA },
+  answers: { 200: REPORT_WITH_HANDS_SCHEMA },
   async run({ subject }) {
-    return { body: presentReport(subject), version: subject.version }
+    return { body: presentReportWithHands(subject), version: subject.version }
   },
 })
 
@@ -131,9 +131,8 @@ const createRoute = route({
   idempotency: 'required',
   answers: { 200: REPORT_SCHEMA, 201: REPORT_SCHEMA },
   async run({ tx, actor, query, body, now }) {
-    const bytes: unknown = body
-    if (!(bytes instanceof Uint8Array) || bytes.length === 0)
-      return refuse('bad-request', 'The body is empty; send the install file.')
+    const bytes = sourceBytes(body)
+    if (bytes === undefined) return NO_SOURCE
     const judged = judgeSource(bytes)
     if (!judged.ok) return refuse('file-refused', undefined, { errors: judged.errors })
     const { organisation, person } = actor
@@ -165,29 +164,4 @@ const createRoute = route({
   },
 })
 
-const sourceRoute = route({
-  id: 'show-source',
-  method: 'get',
-  path: '/reports/:report/revisions/:revision/source',
-  summary: 'The install file of a revision, byte for byte as it was uploaded',
-  tag: 'reports',
-  policy: { action: 'report.read', about },
-  scope: 'report.read',
-  limit: 'read',
-  load: ({ tx, actor, params }) => findReport(tx, actor.organisation, params['report'] ?? ''),
-  answers: { 200: { media: 'application/yaml' } },
-  async run({ tx, actor, subject, params }) {
-    const revision = Number(params['revision'])
-    const source = Number.isInteger(revision)
-      ? await findSource(tx, actor.organisation, subject.report_id, revision)
-      : undefined
-    if (source === undefined) return refuse('not-found')
-    return {
-      bytes: source.source,
-      type: 'application/yaml; charset=utf-8',
-      headers: { 'content-disposition': 'attachment; filename="source.skerry.yaml"', 'x-sha256': source.sha256 },
-    }
-  },
-})
-
-export const REPORT_ROUTES = [listRoute, showRoute, createRoute, sourceRoute]
+export const REPORT_ROUTES = [listRoute, showRoute, createRoute]

@@ -1,0 +1,47 @@
+import type { Response } from 'supertest'
+import type { Browser } from './house.ts'
+
+/** What a person does with a report, each step with the version that the server has told last. */
+export const key = (): string => crypto.randomUUID()
+
+/** Fails with the server's own words when a step that the story needs is refused. */
+export function well<R extends Pick<Response, 'status' | 'text'>>(answer: R): R {
+  if (answer.status >= 300) throw new Error(`Refused with ${answer.status}: ${answer.text}`)
+  return answer
+}
+
+export async function upload(browser: Browser, text: string, idempotency = key()): Promise<Response> {
+  return await browser
+    .post('/api/reports?file_name=site.skerry.yaml')
+    .set('content-type', 'application/yaml')
+    .set('idempotency-key', idempotency)
+    .send(text)
+}
+
+export async function etagOf(browser: Browser, report: string): Promise<string> {
+  return well(await browser.get(`/api/reports/${report}`)).headers['etag'] ?? ''
+}
+
+export async function revise(browser: Browser, report: string, text: string): Promise<Response> {
+  return await browser
+    .post(`/api/reports/${report}/revisions?file_name=site.skerry.yaml`)
+    .set('content-type', 'application/yaml')
+    .set('idempotency-key', key())
+    .set('if-match', await etagOf(browser, report))
+    .send(text)
+}
+
+/** A step that changes the report: `submit`, `recall`, `review`, `issue` … */
+export async function act(
+  browser: Browser,
+  report: string,
+  step: string,
+  body: object = {},
+  idempotency = key(),
+): Promise<Response> {
+  return await browser
+    .post(`/api/reports/${report}/${step}`)
+    .set('if-match', await etagOf(browser, report))
+    .set('idempotency-key', idempotency)
+    .send(body)
+}
