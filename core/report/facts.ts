@@ -20,6 +20,11 @@ type AnyQuantity = Pick<Quantity<never>, 'name' | 'unit' | 'formula' | 'source' 
 const quantitiesOf = (subject: string): readonly AnyQuantity[] =>
   PLANS.find((plan) => plan.subject === subject)?.quantities ?? []
 
+/** The quantities as they are embedded in a report: the text whose hash stands in the register. */
+export function factsText(judged: Pick<Judged, 'sheets'>): string {
+  return `${JSON.stringify(factsOf(judged), null, 2)}\n`
+}
+
 /** Every quantity that could be computed from a file. One whose inputs are missing is left out: nothing is guessed. */
 export function factsOf({ sheets }: Pick<Judged, 'sheets'>): Facts {
   const facts = sheets.map(({ subject, id, values }) => {

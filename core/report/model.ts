@@ -1,6 +1,7 @@
 import type { Judged } from '#core/engine.ts'
 import type { Block, Section } from './blocks.ts'
-import { capital, daysText } from './print.ts'
+import type { Issue } from './issue.ts'
+import { capital, daysText, timeText } from './print.ts'
 import { type ReportContext, type ReportScene, reportScene } from './scene.ts'
 import { arrays } from './sections/arrays.ts'
 import { boards } from './sections/boards.ts'
@@ -16,6 +17,7 @@ import { inspection } from './sections/inspection.ts'
 import { instruments } from './sections/instruments.ts'
 import { inverters } from './sections/inverters.ts'
 import { island } from './sections/island.ts'
+import { issued } from './sections/issue.ts'
 import { metering } from './sections/metering.ts'
 import { method } from './sections/method.ts'
 import { people } from './sections/people.ts'
@@ -38,6 +40,8 @@ export interface ReportModel {
   readonly site: string
   readonly subtitle: string
   readonly titleLines: readonly string[]
+  /** Of a report that takes the place of another: which, and why. */
+  readonly replaces?: string
   readonly front: readonly Block[]
   readonly sections: readonly NumberedSection[]
   readonly end: string
@@ -45,6 +49,7 @@ export interface ReportModel {
 
 const SECTIONS: readonly ((scene: ReportScene, standing: Standing) => Section)[] = [
   summary,
+  issued,
   cautions,
   extent,
   supply,
@@ -73,6 +78,14 @@ export function numbered(sections: readonly Section[]): NumberedSection[] {
   return sections.filter(({ blocks }) => blocks.length > 0).map((section, index) => ({ ...section, number: index + 1 }))
 }
 
+function issueLines(issue: Issue | undefined): string[] {
+  return issue ? [`Issued: ${timeText(issue.issued_at)}, by ${issue.organisation.name}`] : []
+}
+
+function replacesText({ number, reason }: { readonly number: string; readonly reason: string }): string {
+  return `This report replaces ${number}: ${reason}`
+}
+
 /**
  * The report on a judged file: blocks with anchors that name what they are about, whatever their place on the page.
  *
@@ -83,14 +96,16 @@ export function reportModel(judged: Judged, context: ReportContext): ReportModel
   const scene = reportScene(judged, context)
   const standing = standingOf(judged)
   const { report, site } = judged.install
+  const { issue } = context
   return {
-    reference: report.reference,
+    reference: issue?.number ?? report.reference,
     purpose: capital(report.purpose),
     site: site.name,
     subtitle: 'Test report: photovoltaics, battery and automatic changeover',
-    titleLines: [site.address.join(', '), `Inspected: ${daysText(report.inspected)}`],
+    titleLines: [site.address.join(', '), `Inspected: ${daysText(report.inspected)}`, ...issueLines(issue)],
+    ...(issue?.replaces && { replaces: replacesText(issue.replaces) }),
     front: [frontTiles(scene, standing), identity(scene)],
     sections: numbered(SECTIONS.map((section) => section(scene, standing))),
-    end: `End of report ${report.reference}`,
+    end: `End of report ${issue?.number ?? report.reference}`,
   }
 }

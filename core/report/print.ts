@@ -87,6 +87,11 @@ export function dateText(iso: string): string {
   return `${day}${JOIN}${MONTHS[Number(month) - 1]}${JOIN}${year}`
 }
 
+/** `2026-10-21T09:30:00Z` as `21 October 2026, 09:30 UTC`. */
+export function timeText(iso: string): string {
+  return `${dateText(iso)}, ${iso.slice(11, 16)}${JOIN}UTC`
+}
+
 /** The days of an inspection in words: `12 to 13 October 2026`. */
 export function daysText(days: { readonly from: string; readonly to?: string } | undefined): string {
   if (days === undefined) return 'not yet inspected'

@@ -4,8 +4,9 @@ import type { Install } from '#core/install.ts'
 import type { Attachment, FontName, PaperOptions } from '#core/paper/options.ts'
 import { typeset } from '#core/paper/paper.ts'
 import { sha256 } from '#core/paper/sha256.ts'
-import { factsOf } from './facts.ts'
+import { factsText } from './facts.ts'
 import { fieldsheetModel } from './fieldsheet.ts'
+import { EMBEDDED, type Issue, type IssueRecord, misfit } from './issue.ts'
 import { reportModel } from './model.ts'
 import { fillPage } from './page.ts'
 
@@ -19,6 +20,8 @@ export interface RenderOptions {
   readonly created: string
   /** Prints DRAFT across each page. */
   readonly draft: boolean
+  /** Makes it an issued report: no draft, dated by its issue, with room for the seal. */
+  readonly issue?: Issue
 }
 
 /** The date of a file without dates: it must print the same bytes on every day. */
@@ -31,7 +34,30 @@ export function createdFrom({ report }: Install): string {
 
 const hex = (bytes: Uint8Array): string => Array.from(bytes, (byte) => byte.toString(16).padStart(2, '0')).join('')
 
-function attachments(judged: Judged, { text, file, created }: RenderOptions): Attachment[] {
+/** The record of the issue and its place in the register travel with an issued report. */
+function issueAttachments({ register, ...record }: Issue, created: string): Attachment[] {
+  const json = (value: object): Uint8Array => strToU8(`${JSON.stringify(value, null, 2)}\n`)
+  return [
+    {
+      name: EMBEDDED.issue,
+      type: 'application/json',
+      bytes: json(record satisfies IssueRecord),
+      relationship: 'Data',
+      description: 'What is printed beyond the file: number, names, accepted words',
+      created,
+    },
+    {
+      name: EMBEDDED.register,
+      type: 'application/json',
+      bytes: json(register),
+      relationship: 'Supplement',
+      description: 'Place in the register: entry, proof, signed checkpoint',
+      created,
+    },
+  ]
+}
+
+function attachments(judged: Judged, { text, file, created, issue }: RenderOptions): Attachment[] {
   return [
     {
       name: file,
@@ -42,42 +68,62 @@ function attachments(judged: Judged, { text, file, created }: RenderOptions): At
       created,
     },
     {
-      name: 'facts.json',
+      name: EMBEDDED.facts,
       type: 'application/json',
-      bytes: strToU8(`${JSON.stringify(factsOf(judged), null, 2)}\n`),
+      bytes: strToU8(factsText(judged)),
       relationship: 'Data',
       description: 'Every computed quantity, with its formula and source',
       created,
     },
+    ...(issue ? issueAttachments(issue, created) : []),
   ]
 }
 
-function paperOptions({ install, book }: Judged, { fonts, created, draft }: RenderOptions, kind: string): PaperOptions {
+function paperOptions(
+  { install, book }: Judged,
+  { fonts, created, draft, issue }: RenderOptions,
+  kind: string,
+): PaperOptions {
   const { report, site, people } = install
+  const name = issue?.number ?? report.reference
   return {
     fonts,
-    title: `${kind} ${report.reference}: ${site.name}`,
-    author: people?.tested_by?.name ?? people?.installed_by?.name ?? 'not named',
+    title: `${kind} ${name}: ${site.name}`,
+    author: issue?.organisation.name ?? people?.tested_by?.name ?? people?.installed_by?.name ?? 'not named',
     subject: report.purpose,
     language: 'en',
     created,
-    header: { left: `${report.reference} · ${site.name}`, right: kind },
-    footer: { left: `Rule book ${book.id} ${book.version}`, right: 'page {page} of {pages}' },
+    header: { left: `${name} · ${site.name}`, right: kind },
+    footer: {
+      left: `Rule book ${book.id} ${book.version}`,
+      right: `${issue ? `${name} · ` : ''}page {page} of {pages}`,
+    },
     ...(draft && { watermark: 'DRAFT' }),
   }
+}
+
+/** An issued report is dated by its issue, and refuses to be printed with an entry that is about something else. */
+function settled(judged: Judged, options: RenderOptions, hash: string): RenderOptions {
+  const { issue } = options
+  if (!issue) return options
+  const wrong = misfit(issue, { source: hash, facts: hex(sha256(strToU8(factsText(judged)))) })
+  if (wrong !== undefined) throw new RangeError(`Report ${issue.number} cannot be issued. ${wrong}`)
+  return { ...options, created: issue.issued_at, draft: false }
 }
 
 /**
  * The report as PDF/A-3, with the file and every computed quantity embedded. The same input gives the same bytes.
  *
- * @throws PaperError where a text holds a character that no font has
+ * @throws PaperError where a text holds a character that no font has; RangeError where the entry of an issue is not about it
  */
 export function renderReport(judged: Judged, options: RenderOptions): Uint8Array {
-  const { text, file, draft } = options
-  const model = reportModel(judged, { file, hash: hex(sha256(strToU8(text))), draft })
+  const { text, file, issue } = options
+  const hash = hex(sha256(strToU8(text)))
+  const plan = settled(judged, options, hash)
+  const model = reportModel(judged, { file, hash, draft: plan.draft, ...(issue && { issue }) })
   return typeset(fillPage('report', model), {
-    ...paperOptions(judged, options, 'Test report'),
-    attachments: attachments(judged, options),
+    ...paperOptions(judged, plan, 'Test report'),
+    attachments: attachments(judged, plan),
   })
 }
 

@@ -3,6 +3,7 @@ import type { Sheet, SheetValue, State } from '#core/glossary.ts'
 import type { Install } from '#core/install.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
 import type { Topology } from '#core/topology/topology.ts'
+import type { Issue } from './issue.ts'
 import { Verdicts } from './verdicts.ts'
 
 /** What a report is told beside the judged file. */
@@ -13,6 +14,8 @@ export interface ReportContext {
   readonly hash: string
   /** Whether the report is not issued yet. */
   readonly draft: boolean
+  /** Of an issued report: what is printed beyond the file. */
+  readonly issue?: Issue
 }
 
 /** Everything that the sections draw on. */

@@ -11,6 +11,8 @@ const GROUPS: readonly {
   >
   readonly title: string
   readonly lead: string
+  /** The same in an issued report, where the reviewer has decided. */
+  readonly decided?: string
   readonly tell: (scene: ReportScene, findings: readonly Finding[]) => FindingBlock[]
 }[] = [
   { name: 'failing', title: 'Not met', lead: 'Each of these keeps the report from being issued.', tell: findingBlocks },
@@ -18,6 +20,7 @@ const GROUPS: readonly {
     name: 'departing',
     title: 'Departures',
     lead: 'Not met on purpose. The reviewer accepts or refuses each.',
+    decided: 'Not met on purpose, and accepted by the reviewer.',
     tell: findingBlocks,
   },
   {
@@ -30,6 +33,7 @@ const GROUPS: readonly {
     name: 'limited',
     title: 'Limited',
     lead: 'Missing for a stated reason, which the reviewer accepts or refuses.',
+    decided: 'Missing for a stated reason, which the reviewer accepted.',
     tell: gatheredBlocks,
   },
   {
@@ -49,11 +53,19 @@ const GROUPS: readonly {
 
 /** Every finding that is not simply met, in words, with what to do and the source. */
 export function findings(scene: ReportScene, standing: Standing): Section {
-  const blocks = GROUPS.flatMap(({ name, title, lead, tell }): Block[] => {
+  const blocks = GROUPS.flatMap(({ name, title, lead, decided = lead, tell }): Block[] => {
     const found = standing[name]
     return found.length === 0
       ? []
-      : [{ kind: 'findings', anchor: `findings/${name}`, title, lead, findings: tell(scene, found) }]
+      : [
+          {
+            kind: 'findings',
+            anchor: `findings/${name}`,
+            title,
+            lead: scene.context.issue ? decided : lead,
+            findings: tell(scene, found),
+          },
+        ]
   })
   const none: Block = { kind: 'prose', anchor: 'findings/none', paragraphs: ['Every rule that applies is met.'] }
   return { anchor: 'findings', title: 'Findings', blocks: blocks.length === 0 ? [none] : blocks }

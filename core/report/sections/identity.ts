@@ -1,6 +1,7 @@
 import type { Entry, Particulars } from '../blocks.ts'
-import { capital, dateText, daysText } from '../print.ts'
+import { capital, dateText, daysText, timeText } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
+import { signatoryText } from './signatory.ts'
 
 const entry = (anchor: string, term: string, detail: string | undefined, note?: string): readonly Entry[] =>
   detail === undefined ? [] : [{ anchor, term, detail, ...(note !== undefined && { note }) }]
@@ -13,6 +14,20 @@ function place({ install: { site } }: ReportScene): string | undefined {
   const north = `${Math.abs(latitude)}° ${latitude < 0 ? 'S' : 'N'}`
   const east = `${Math.abs(longitude)}° ${longitude < 0 ? 'W' : 'E'}`
   return `${north}, ${east}${height}`
+}
+
+/** Number, issuer and predecessor of an issued report; of a draft, that it is one. */
+function issueEntries({ context: { issue, draft } }: ReportScene): readonly Entry[] {
+  if (!issue) return entry('report/issue', 'Issued', draft ? 'not issued: a draft' : undefined)
+  const { number, issued_at, organisation, issued_by, reviewed_by, replaces } = issue
+  return [
+    ...entry('report/number', 'Report', number),
+    ...entry('report/issue', 'Issued', timeText(issued_at)),
+    ...entry('report/organisation', 'Issuing body', organisation.name, organisation.address.join(', ')),
+    ...entry('report/reviewed', 'Reviewed by', signatoryText(reviewed_by)),
+    ...entry('report/authorised', 'Authorised by', signatoryText(issued_by)),
+    ...entry('report/replaces', 'Replaces', replaces?.number, replaces?.reason),
+  ]
 }
 
 /** Who, where, when, and by which rules: what identifies the report. */
@@ -39,11 +54,11 @@ export function identity(scene: ReportScene): Particulars {
       },
       {
         entries: [
+          ...issueEntries(scene),
           ...entry('report/reference', 'Reference', report.reference),
           ...entry('report/purpose', 'Purpose', capital(report.purpose)),
           ...entry('report/inspected', 'Inspected', daysText(report.inspected)),
           ...entry('report/next-due', 'Next due', report.next_due && dateText(report.next_due)),
-          ...entry('report/issue', 'Issued', context.draft ? 'not issued: a draft' : undefined),
           ...entry(
             'report/rulebook',
             'Rule book',

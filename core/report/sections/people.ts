@@ -1,6 +1,7 @@
-import { type Block, type Section, table } from '../blocks.ts'
-import { capital, dateText } from '../print.ts'
-import type { ReportScene } from '../scene.ts'
+import { type Block, type Row, type Section, table } from '../blocks.ts'
+import type { Issue } from '../issue.ts'
+import { dateText } from '../print.ts'
+import type { ReportContext, ReportScene } from '../scene.ts'
 
 const ROLES = [
   ['designed_by', 'Designed by'],
@@ -8,8 +9,29 @@ const ROLES = [
   ['tested_by', 'Tested by'],
 ] as const
 
+const SIGNING = [
+  ['reviewed_by', 'Reviewed by'],
+  ['issued_by', 'Authorised by'],
+] as const satisfies readonly (readonly [keyof Issue, string])[]
+
+function signingRow(role: (typeof SIGNING)[number][0], title: string, { draft, issue }: ReportContext): Row {
+  const signatory = issue?.[role]
+  const name = signatory?.name ?? (draft ? 'not yet: this is a draft' : '')
+  const cells = [{ text: name }, { text: signatory?.licence ?? '–' }, { text: issue?.organisation.name ?? '–' }]
+  return { anchor: `person/${title.toLowerCase().replace(' ', '_')}`, head: { text: title }, cells }
+}
+
+/** Readings of another company are marked as such: the issuing body answers for them, but did not take them. */
+function foreignReadings({ install, context: { issue } }: ReportScene): Block[] {
+  const company = install.people?.tested_by?.company
+  if (!issue || company === undefined || company === issue.organisation.name) return []
+  const words = `The readings were taken by ${company}, not by the issuing body ${issue.organisation.name}.`
+  return [{ kind: 'prose', anchor: 'people/readings', paragraphs: [words] }]
+}
+
 /** Who did what, who has still to sign, and what was handed over. */
-export function people({ install, context }: ReportScene): Section {
+export function people(scene: ReportScene): Section {
+  const { install, context } = scene
   const named = ROLES.flatMap(([role, title]) => {
     const person = install.people?.[role]
     if (!person) return []
@@ -22,12 +44,7 @@ export function people({ install, context }: ReportScene): Section {
       },
     ]
   })
-  const open = { text: context.draft ? 'not yet: this is a draft' : '' }
-  const signing = ['reviewed by', 'authorised by'].map((role) => ({
-    anchor: `person/${role.replace(' ', '_')}`,
-    head: { text: capital(role) },
-    cells: [open, { text: '–' }, { text: '–' }],
-  }))
+  const signing = SIGNING.map(([role, title]) => signingRow(role, title, context))
   const columns = [
     { label: 'Role', width: 22 },
     { label: 'Name', width: 30 },
@@ -69,6 +86,6 @@ export function people({ install, context }: ReportScene): Section {
   return {
     anchor: 'people',
     title: 'People',
-    blocks: [table('people/list', columns, [{ rows: [...named, ...signing] }]), ...told],
+    blocks: [table('people/list', columns, [{ rows: [...named, ...signing] }]), ...foreignReadings(scene), ...told],
   }
 }

@@ -5,7 +5,7 @@ import { anchorOf } from '../anchor.ts'
 import { type Block, type Mark, type Notice, type Row, type Section, table } from '../blocks.ts'
 import { findingMark } from '../marks.ts'
 import { capital, few } from '../print.ts'
-import type { ReportScene } from '../scene.ts'
+import type { ReportContext, ReportScene } from '../scene.ts'
 import type { Standing } from '../standing.ts'
 
 const count = (number: number, one: string, many: string): readonly string[] =>
@@ -21,13 +21,36 @@ function obstacles({ failing, notShown, limited, departing }: Standing): string[
   ]
 }
 
+/** What stood in the way of an issued report, now that the reviewer has decided. */
+function accepted({ limited, departing }: Standing): string[] {
+  return [
+    ...count(limited.length, 'limitation was accepted by the reviewer.', 'limitations were accepted by the reviewer.'),
+    ...count(departing.length, 'departure was accepted by the reviewer.', 'departures were accepted by the reviewer.'),
+  ]
+}
+
+function issuedNotice(standing: Standing, number: string): Notice {
+  const meets = standing.word === 'meets'
+  return {
+    kind: 'notice',
+    anchor: 'report/standing',
+    box: meets ? 'box-note' : 'box-caution',
+    title: meets
+      ? `Issued under number ${number}: nothing fails and nothing is missing`
+      : `Issued under number ${number}, which this rule book would not allow`,
+    paragraphs: [],
+    items: meets ? accepted(standing) : obstacles(standing),
+  }
+}
+
 function titleOf({ word }: Standing, items: readonly string[]): string {
   if (word !== 'meets') return 'It cannot be issued as it stands'
   if (items.length === 0) return 'It can be issued: nothing fails and nothing is missing'
   return 'Nothing fails and nothing is missing; the reviewer decides on what is listed here'
 }
 
-function standingNotice(standing: Standing): Notice {
+function standingNotice(standing: Standing, { issue }: ReportContext): Notice {
+  if (issue) return issuedNotice(standing, issue.number)
   const items = obstacles(standing)
   return {
     kind: 'notice',
@@ -121,7 +144,7 @@ export function summary(scene: ReportScene, standing: Standing): Section {
   const beside = asides(standing)
   const words = `Besides: ${beside.join(' ')} Each stands in full under Findings.`
   const blocks: Block[] = [
-    standingNotice(standing),
+    standingNotice(standing, scene.context),
     ...(rows.length > 0 ? [table('summary/list', COLUMNS, [{ rows }])] : []),
     ...(beside.length > 0 ? [{ kind: 'prose' as const, anchor: 'summary/asides', paragraphs: [words] }] : []),
   ]
