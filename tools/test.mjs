@@ -4,7 +4,16 @@ import { readFileSync, rmSync } from 'node:fs'
 import { needPrograms, ready, run } from './setup/ready.mjs'
 
 ready()
-needPrograms({ pdftotext: 'poppler-utils', qpdf: 'qpdf', ngspice: 'ngspice', xmllint: 'libxml2-utils' })
+needPrograms({
+  pdftotext: 'poppler-utils',
+  qpdf: 'qpdf',
+  ngspice: 'ngspice',
+  xmllint: 'libxml2-utils',
+  exiftool: 'libimage-exiftool-perl',
+  'heif-enc': 'libheif-examples',
+  unzip: 'unzip',
+  python3: 'python3',
+})
 run('npm', ['run', '--silent', 'build'])
 
 const gates = spawnSync('npm', ['run', '--silent', 'check'], { stdio: 'inherit' })

@@ -50,11 +50,15 @@ export function diskStore({ root, newId, limit }: DiskStoreOptions): DiskStore {
   }
 
   async function writeAside(key: ObjectKey, body: Uint8Array | Readable, file: FileHandle): Promise<Stored> {
-    const stored = await takeIn(key, body, limit, (chunk) => file.writeFile(chunk))
-    if (!stored.ok) return stored
-    await file.chmod(0o440)
-    await file.sync()
-    return stored
+    try {
+      const stored = await takeIn(key, body, limit, (chunk) => file.writeFile(chunk))
+      if (!stored.ok) return stored
+      await file.chmod(0o440)
+      await file.sync()
+      return stored
+    } finally {
+      await file.close()
+    }
   }
 
   return {
@@ -64,7 +68,7 @@ export function diskStore({ root, newId, limit }: DiskStoreOptions): DiskStore {
       const aside = join(await makeInside(root, [PARTIAL]), newId())
       const handle = await open(aside, 'wx', 0o600)
       try {
-        const stored = await writeAside(key, body, handle).finally(() => handle.close())
+        const stored = await writeAside(key, body, handle)
         if (!stored.ok) return stored
         await rename(aside, join(folder, sha256))
         await syncFolder(folder)
