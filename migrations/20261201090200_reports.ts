@@ -42,7 +42,8 @@ export async function up(knex: Knex): Promise<void> {
     create index reports_by_reference on reports (organisation_id, reference);
     create index reports_by_due on reports (organisation_id, due_on) where state = 'issued';
     create index reports_by_search on reports using gin (search gin_trgm_ops);
-    create index reports_by_corrected on reports (organisation_id, corrects) where corrects is not null;
+    -- One correction at a time.
+    create unique index reports_by_corrected on reports (organisation_id, corrects) where corrects is not null and discarded_at is null;
     call fence('reports');
     grant select, insert on reports to skerry_app;
     grant update (state, reference, title, place, purpose, inspected_on, due_on, outcome, revision, number, reviewer_id, discarded_at, version, updated_at)

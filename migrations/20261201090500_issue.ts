@@ -42,6 +42,39 @@ export async function up(knex: Knex): Promise<void> {
     call fence('documents');
     call append_only('documents');
 
+    -- Who issues is a reviewer without a hand in the work, and so was whoever approved that revision.
+    create function check_issue() returns trigger language plpgsql as $$
+    begin
+      if had_a_hand(new.organisation_id, new.report_id, new.issued_by) or not exists (
+        select from people p
+        where p.organisation_id = new.organisation_id and p.person_id = new.issued_by and p.active and 'reviewer' = any(p.roles)
+      ) then
+        raise exception 'a report is issued by a reviewer without a hand in it' using errcode = 'check_violation';
+      end if;
+      if not exists (
+        select from reviews v
+        where v.organisation_id = new.organisation_id and v.report_id = new.report_id and v.revision = new.revision
+          and v.decision = 'approved' and not had_a_hand(v.organisation_id, v.report_id, v.reviewer_id)
+      ) then
+        raise exception 'a report is issued after its revision was approved' using errcode = 'check_violation';
+      end if;
+      return new;
+    end $$;
+    create trigger check_issue before insert on documents for each row execute function check_issue();
+
+    create function check_issued() returns trigger language plpgsql as $$
+    begin
+      if new.state = 'issued' and old.state <> 'issued' and not exists (
+        select from documents d
+        where d.organisation_id = new.organisation_id and d.report_id = new.report_id and d.revision = new.revision
+          and d.number = new.number
+      ) then
+        raise exception 'an issued report has a document' using errcode = 'check_violation';
+      end if;
+      return new;
+    end $$;
+    create trigger check_issued before update on reports for each row execute function check_issued();
+
     -- The sealed PDF of a document. Rendering may run many times; the first seal that is written down is the one.
     create table seals (
       organisation_id uuid not null,
@@ -75,6 +108,17 @@ export async function up(knex: Knex): Promise<void> {
     create index register_entries_by_document on register_entries (organisation_id, document_id);
     call fence('register_entries');
     call append_only('register_entries');
+
+    -- Full subtrees of the register's Merkle tree, so that a proof reads a handful of rows however long the register is.
+    create table register_nodes (
+      organisation_id uuid not null references organisations,
+      level integer not null check (level between 0 and 50),
+      index bigint not null check (index >= 0),
+      hash text not null check (hash ~ '^[0-9a-f]{64}$'),
+      primary key (organisation_id, level, index)
+    );
+    call fence('register_nodes');
+    call append_only('register_nodes');
 
     -- How far the register has come: locked by whoever appends. Peaks are the Merkle tree's roots of full subtrees.
     create table register_heads (

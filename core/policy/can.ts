@@ -28,12 +28,15 @@ type Condition = (actor: Actor, report: ReportFacts) => Decision
 
 const fold = (text: string): string => text.normalize('NFKC').trim().toLowerCase().replaceAll(/\s+/g, ' ')
 
-const isActor = (actor: Actor, worker: { readonly name: string; readonly licence: string | null }): boolean =>
+const isActor = (
+  actor: Pick<Actor, 'name' | 'licence'>,
+  worker: { readonly name: string; readonly licence: string | null },
+): boolean =>
   (worker.licence !== null && actor.licence !== null && fold(worker.licence) === fold(actor.licence)) ||
   fold(worker.name) === fold(actor.name)
 
 /** Four eyes: who uploaded, installed or tested cannot be the second person. */
-const secondPerson: Condition = (actor, report) => {
+export function secondPerson(actor: Pick<Actor, 'person' | 'name' | 'licence'>, report: ReportFacts): Decision {
   if (report.uploaders.includes(actor.person))
     return no('hands', 'You uploaded a revision of this report. A second competent person must decide on it.')
   if (report.workers.some((worker) => isActor(actor, worker)))

@@ -1,10 +1,13 @@
 import type { Route } from '#server/http/route.ts'
 import { CHECK_ROUTES } from './check.ts'
+import { REMARK_ROUTES } from './remarks.ts'
 import { REPORT_STEP_ROUTES } from './report-steps.ts'
 import { VIEW_ROUTES } from './report-views.ts'
 import { REPORT_ROUTES } from './reports.ts'
+import { REVIEW_ROUTES } from './review.ts'
 import { REVISION_ROUTES } from './revisions.ts'
 import { SESSION_ROUTES } from './session.ts'
+import { THREAD_ROUTES } from './threads.ts'
 
 /** Every route of the API. What is not here does not exist; the OpenAPI document and the access matrix are made from it. */
 export const ROUTES: readonly Route[] = [
@@ -13,5 +16,8 @@ export const ROUTES: readonly Route[] = [
   ...REVISION_ROUTES,
   ...VIEW_ROUTES,
   ...REPORT_STEP_ROUTES,
+  ...THREAD_ROUTES,
+  ...REMARK_ROUTES,
+  ...REVIEW_ROUTES,
   ...CHECK_ROUTES,
 ]

@@ -45,3 +45,26 @@ export async function act(
     .set('idempotency-key', idempotency)
     .send(body)
 }
+
+/** Accepts (or refuses) everything that the newest revision asks the reviewer to decide. */
+export async function decideAll(reviewer: Browser, report: string, accepted = true): Promise<number> {
+  const { decisions } = well(await reviewer.get(`/api/reports/${report}/review`)).body
+  for (const { anchor, words_sha256 } of decisions)
+    well(
+      await reviewer
+        .post(`/api/reports/${report}/acceptances`)
+        .send({ anchor, words_sha256, accepted, reason: 'as agreed on site' }),
+    )
+  return decisions.length
+}
+
+export async function remark(
+  reviewer: Browser,
+  report: string,
+  kind: 'remark' | 'question' | 'correction',
+  anchor = 'site/customer',
+): Promise<Response> {
+  return await reviewer
+    .post(`/api/reports/${report}/threads`)
+    .send({ anchor, kind, body: `A ${kind} of the reviewer.` })
+}
