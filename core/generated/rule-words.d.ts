@@ -1,3 +1,5 @@
-/** Precompiled templates by rule key, each behind a function so that only the ones that are printed are made. */
-declare const words: Readonly<Record<string, { readonly title: string; readonly cite: string; readonly says: () => TemplateSpecification; readonly do: () => TemplateSpecification }>>
+/** What is printed of a rule: `says` and `do` are templates, which `core/texts/fill.ts` fills. */
+export interface RuleWords { readonly title: string; readonly cite: string; readonly says: string; readonly do: string }
+/** By rule key. */
+declare const words: Readonly<Record<string, RuleWords>>
 export default words

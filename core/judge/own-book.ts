@@ -1,7 +1,5 @@
 import { Ajv2020 } from 'ajv/dist/2020.js'
-import Handlebars from 'handlebars'
 import { fieldsOf, stateFieldsOf } from '#core/sheets/plans.ts'
-import { registerHelpers } from '#core/texts/helpers.ts'
 import { learnWords } from '#core/texts/words.ts'
 import ruleSchema from '#schemas/rule.schema.json' with { type: 'json' }
 import { AJV_RULE_SETTINGS } from './ajv-settings.ts'
@@ -58,20 +56,9 @@ function resolvedParent(id: string): ResolvedBook | undefined {
 }
 
 function teach(rules: readonly PlacedRule[]): void {
-  const engine = Handlebars.create()
-  registerHelpers(engine)
-  const settings = {
-    noEscape: true,
-    knownHelpersOnly: true,
-    knownHelpers: { name: true, state: true, show: true, list: true },
-  }
   for (const rule of rules) {
-    learnWords(keyOf(rule), {
-      title: rule.record.title,
-      cite: firstCite(rule.record),
-      says: engine.compile(rule.record.says, settings),
-      do: engine.compile(rule.record.do, settings),
-    })
+    const { title, says, do: what } = rule.record
+    learnWords(keyOf(rule), { title, cite: firstCite(rule.record), says, do: what })
   }
 }
 

@@ -89,7 +89,6 @@ const paperBeside: Plugin = {
 const SELDOM = {
   yaml: 'skerry-yaml.cjs',
   'ajv/dist/2020.js': 'skerry-ajv.cjs',
-  handlebars: 'skerry-handlebars.cjs',
 } as const
 
 async function bundleSeldom(): Promise<void> {
@@ -100,7 +99,7 @@ async function bundleSeldom(): Promise<void> {
 const seldomBeside: Plugin = {
   name: 'seldom-beside',
   setup(setup) {
-    setup.onResolve({ filter: /^(?:yaml|ajv\/dist\/2020\.js|handlebars)$/ }, ({ path }) => ({
+    setup.onResolve({ filter: /^(?:yaml|ajv\/dist\/2020\.js)$/ }, ({ path }) => ({
       path: `./${SELDOM[path as keyof typeof SELDOM]}`,
       external: true,
     }))

@@ -1,11 +1,10 @@
 import { mkdir, writeFile } from 'node:fs/promises'
 import { dirname } from 'node:path'
 import { pathToFileURL } from 'node:url'
-import { type ResolvedBook, resolveBook } from '#core/judge/book.ts'
+import { type PlacedRule, type ResolvedBook, resolveBook } from '#core/judge/book.ts'
 import type { SheetSchema } from '#core/judge/rule.ts'
-import { keyOf, storedBook, storedRule } from '#core/judge/stored.ts'
+import { firstCite, keyOf, storedBook, storedRule } from '#core/judge/stored.ts'
 import { compileChecks } from './compile-checks.ts'
-import { precompileWords } from './precompile-words.ts'
 import { readBooks } from './read-books.ts'
 
 const PROJECT = new URL('../../', import.meta.url).pathname
@@ -55,7 +54,7 @@ export async function generateRules(root = ROOT): Promise<Record<string, string>
     'core/generated/books.d.ts': BOOK_TYPES,
     'core/generated/rule-checks.js': await compileChecks(named),
     'core/generated/rule-checks.d.ts': checkTypes(named.keys()),
-    'core/generated/rule-words.js': precompileWords(rules),
+    'core/generated/rule-words.js': wordsOf(rules),
     'core/generated/rule-words.d.ts': WORD_TYPES,
     'core/generated/rule-pages.js': `export default ${lazyJson({ ...pages, books: books.map(({ rules: own, ...book }) => ({ ...book, keys: own.map(keyOf) })) })}\n`,
     'core/generated/rule-pages.d.ts': PAGE_TYPES,
@@ -71,8 +70,19 @@ export declare const RULES: () => readonly StoredRule[]
 export declare const BOOKS: Readonly<Record<string, () => StoredBook>>
 `
 
-const WORD_TYPES = `/** Precompiled templates by rule key, each behind a function so that only the ones that are printed are made. */
-declare const words: Readonly<Record<string, { readonly title: string; readonly cite: string; readonly says: () => TemplateSpecification; readonly do: () => TemplateSpecification }>>
+/** The rules' words as one object by rule key. */
+function wordsOf(rules: readonly PlacedRule[]): string {
+  const entries = rules.map((rule) => {
+    const { title, says, do: what } = rule.record
+    return `${JSON.stringify(keyOf(rule))}:${JSON.stringify({ title, cite: firstCite(rule.record), says, do: what })}`
+  })
+  return `export default {\n${entries.join(',\n')}\n}\n`
+}
+
+const WORD_TYPES = `/** What is printed of a rule: \`says\` and \`do\` are templates, which \`core/texts/fill.ts\` fills. */
+export interface RuleWords { readonly title: string; readonly cite: string; readonly says: string; readonly do: string }
+/** By rule key. */
+declare const words: Readonly<Record<string, RuleWords>>
 export default words
 `
 

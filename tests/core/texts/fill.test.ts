@@ -1,8 +1,9 @@
 import Handlebars from 'handlebars'
 import { describe, expect, it } from 'vitest'
+import ruleWords from '#core/generated/rule-words.js'
 import type { Sheet } from '#core/glossary.ts'
 import { shippedBook } from '#core/judge/shipped.ts'
-import { registerHelpers, type WordScene } from '#core/texts/helpers.ts'
+import { printerOf, type WordScene } from '#core/texts/fill.ts'
 import { ruleWordsFor } from '#core/texts/words.ts'
 
 const book = shippedBook('iec')
@@ -26,11 +27,21 @@ const scene = (state: WordScene['state']): WordScene => ({
   units: book.units,
 })
 
-function filled(template: string, state: WordScene['state'] = 'grid'): string {
+const filled = (template: string, state: WordScene['state'] = 'grid'): string => printerOf(template)(scene(state))
+
+/** The same words filled by a templating engine that knows nothing of ours. */
+function filledElsewhere(template: string, given: WordScene): string {
   const engine = Handlebars.create()
-  registerHelpers(engine)
-  return engine.compile(template, { noEscape: true })(scene(state))
+  const show = (field: string): string => printerOf(`{{show "${field}"}}`)(given)
+  engine.registerHelper({
+    name: () => printerOf('{{name}}')(given),
+    state: () => printerOf('{{state}}')(given),
+    show,
+    list: show,
+  })
+  return engine.compile(template, { noEscape: true, knownHelpersOnly: true, knownHelpers: KNOWN })({})
 }
+const KNOWN = { name: true, state: true, show: true, list: true }
 
 describe('the words of a rule', () => {
   it.each([
@@ -54,6 +65,25 @@ describe('the words of a rule', () => {
       expect(words.says.length).toBeGreaterThan(0)
       expect(words.do.length).toBeGreaterThan(0)
     }
+  })
+
+  it('come out as a templating engine would fill them, for every shipped rule', () => {
+    const keys = Object.keys(ruleWords)
+    expect(keys.length).toBeGreaterThan(150)
+    for (const key of keys) {
+      for (const state of ['grid', 'island', null] as const) {
+        const given = scene(state)
+        const { says, do: what } = ruleWords[key] ?? { says: '', do: '' }
+        expect(ruleWordsFor(key, given)).toEqual({
+          says: filledElsewhere(says, given),
+          do: filledElsewhere(what, given),
+        })
+      }
+    }
+  })
+
+  it('that ask for what nothing fills are a fault of the book', () => {
+    expect(() => printerOf('{{loop}} Ω')).toThrow('{{loop}}')
   })
 
   it('of an unknown rule are a fault of the build', () => {
