@@ -1,11 +1,3 @@
-import type { Knex } from 'knex'
+import { ownerConfig } from './server/setup/owner.ts'
 
-const config: Knex.Config = {
-  client: 'pg',
-  connection: process.env['DATABASE_OWNER_URL'] ?? process.env['DATABASE_URL'] ?? '',
-  pool: { min: 0, max: 1 },
-  migrations: { directory: './migrations', extension: 'ts', loadExtensions: ['.ts'] },
-  seeds: { directory: './seeds', extension: 'ts', loadExtensions: ['.ts'] },
-}
-
-export default config
+export default ownerConfig(process.env['DATABASE_OWNER_URL'] ?? process.env['DATABASE_URL'] ?? '')

@@ -1,5 +1,6 @@
 import createKnex, { type Knex } from 'knex'
 import { migrate } from '#server/migrate.ts'
+import { ownerConfig } from './owner.ts'
 
 /** The roles that sign in at a cluster of our own. The owner migrates, the web serves, the backup reads everything. */
 const OWNER = 'skerry_owner'
@@ -10,15 +11,8 @@ export interface Addresses {
   readonly web: string
 }
 
-const config = (url: string): Knex.Config => ({
-  client: 'pg',
-  connection: url,
-  pool: { min: 0, max: 2 },
-  migrations: { directory: new URL('../../migrations', import.meta.url).pathname, loadExtensions: ['.ts'] },
-})
-
 async function withKnex<T>(url: string, work: (db: Knex) => Promise<T>): Promise<T> {
-  const db = createKnex(config(url))
+  const db = createKnex(ownerConfig(url))
   try {
     return await work(db)
   } finally {
