@@ -42,7 +42,7 @@ describe.skipIf(!existsSync(SQUAWK))('each migration', () => {
         '--exclude',
         Object.keys(LEFT_OUT).join(','),
         '--stdin-filepath',
-        file,
+        name,
       ],
       { input: sql, encoding: 'utf8' },
     )
