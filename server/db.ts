@@ -61,9 +61,21 @@ const codeOf = (error: unknown): string | undefined =>
     ? error.code
     : undefined
 
+const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/
+
+/** An id as it stands in a statement without parameters, which alone can be sent together with others. */
+export function uuidLiteral(id: string): string {
+  if (!UUID.test(id)) throw new TypeError('This is not the id of anything.')
+  return `'${id}'::uuid`
+}
+
+/** The statement that shows a transaction one organisation's rows. */
+export const showing = (organisation: string): string =>
+  `select set_config('app.organisation', (${uuidLiteral(organisation)})::text, true)`
+
 async function once<T>(db: Knex, organisation: string | null, work: (tx: Tx) => Promise<T>): Promise<T> {
   return await db.transaction(async (tx) => {
-    if (organisation !== null) await tx.raw(`select set_config('app.organisation', ?, true)`, [organisation])
+    if (organisation !== null) await tx.raw(showing(organisation))
     return await work(tx)
   })
 }
@@ -76,6 +88,25 @@ async function once<T>(db: Knex, organisation: string | null, work: (tx: Tx) => 
  */
 export async function inOrganisation<T>(db: Knex, organisation: string, work: (tx: Tx) => Promise<T>): Promise<T> {
   return await retried(() => once(db, organisation, work))
+}
+
+/**
+ * Reads in one transaction. Nothing depends on how it ends, so nobody waits for that.
+ *
+ * @param failed is told when ending it went wrong; the pool replaces the connection
+ */
+export async function reading<T>(db: Knex, work: (tx: Tx) => Promise<T>, failed: (error: unknown) => void): Promise<T> {
+  const tx = await db.transaction({ readOnly: true })
+  try {
+    return await work(tx)
+  } finally {
+    tx.rollback().catch(failed)
+  }
+}
+
+/** Runs work in a transaction that may be started again; what it may see, it chooses itself. */
+export async function writing<T>(db: Knex, work: (tx: Tx) => Promise<T>): Promise<T> {
+  return await retried(() => db.transaction(work))
 }
 
 /** Runs work in a transaction that sees no organisation's rows: only what the gate functions hand out. */

@@ -15,6 +15,11 @@ export type AnyCall = Call<unknown, unknown, unknown>
 export class Attempt {
   constructor(readonly route: Route) {}
 
+  /** Whether nothing is written, not even an audit event. */
+  get onlyReads(): boolean {
+    return this.route.method === 'get' && this.route.audited !== true
+  }
+
   async run(call: AnyCall, request: Request): Promise<Answer | Refused> {
     const { route } = this
     const subject = await route.load?.(call as never)

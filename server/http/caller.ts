@@ -1,6 +1,5 @@
 import { createHash } from 'node:crypto'
 import type { Request } from 'express'
-import { outside } from '#server/db.ts'
 import type { Services } from '#server/services.ts'
 import { ABSOLUTE_MS } from './session.ts'
 
@@ -28,9 +27,7 @@ interface Holder {
 export async function findCaller(request: Request, services: Services): Promise<Caller | undefined> {
   const bearer = /^Bearer (skerry_[\w-]{20,100})$/.exec(request.get('authorization') ?? '')?.[1]
   if (bearer !== undefined) {
-    const { rows } = await outside(services.db, (tx) =>
-      tx.raw<{ rows: Holder[] }>('select * from token_holder(?)', [tokenHash(bearer)]),
-    )
+    const { rows } = await services.db.raw<{ rows: Holder[] }>('select * from token_holder(?)', [tokenHash(bearer)])
     const [holder] = rows
     if (holder === undefined) return undefined
     return {

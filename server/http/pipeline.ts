@@ -1,8 +1,8 @@
 import { randomUUID } from 'node:crypto'
 import type { Request, RequestHandler, Response } from 'express'
 import type { Actor } from '#core/policy/roles.ts'
-import { inOrganisation, outside, type Tx } from '#server/db.ts'
-import { findActor } from '#server/queries/actor.ts'
+import { outside, reading, type Tx, writing } from '#server/db.ts'
+import { enterAs } from '#server/queries/actor.ts'
 import type { Services } from '#server/services.ts'
 import { type Ready, ready, send, sendBytes, sendFailure, sendProblem } from './answer.ts'
 import { type AnyCall, Attempt } from './attempt.ts'
@@ -105,22 +105,25 @@ class Pipeline {
       return await orRefused(outside(services.db, (tx) => this.#unknown({ ...base, tx, actor: NOBODY }, request)))
     const key = RequestKey.of(request, caller)
     const refused: { call?: AnyCall } = {}
-    const outcome = await orRefused(
-      inOrganisation(services.db, caller.organisation, async (tx) => {
-        const actor = await this.#actor(tx, caller)
-        const call = { ...base, tx, actor }
-        refused.call = call
-        return await this.#once(call, request, key)
-      }),
-    )
+    const work = async (tx: Tx): Promise<Outcome> => {
+      const actor = await this.#actor(tx, caller)
+      const call = { ...base, tx, actor }
+      refused.call = call
+      return await this.#once(call, request, key)
+    }
+    const only = this.#attempt.onlyReads
+    const outcome = await orRefused(only ? reading(services.db, work, this.#lost) : writing(services.db, work))
     // What refused was rolled back, its event with it: a denied access leaves one of its own.
     if (isRefused(outcome) && outcome.refused === 'not-allowed' && refused.call !== undefined)
       await this.#attempt.denied(services.db, refused.call, outcome)
     return outcome
   }
 
+  readonly #lost = (error: unknown): void =>
+    this.services.log.warn({ event: 'unavailable', err: error }, 'a reading transaction did not end well')
+
   async #actor(tx: Tx, { organisation, person }: Caller): Promise<Actor> {
-    const actor = await findActor(tx, organisation, person)
+    const actor = await enterAs(tx, organisation, person)
     if (actor === undefined) throw new RolledBack(refuse('not-signed-in'))
     return actor
   }
