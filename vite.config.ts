@@ -28,7 +28,7 @@ export default defineConfig({
     coverage: {
       provider: 'v8',
       include: ['core/**/*.ts'],
-      exclude: ['core/generated/**', 'core/**/*.d.ts'],
+      exclude: ['core/generated/**', 'core/**/*.d.ts', 'tests/**'],
       reporter: ['text-summary', 'json-summary', 'json'],
       reportsDirectory: 'coverage',
       reportOnFailure: true,
