@@ -1,6 +1,7 @@
 import type { Judged } from '#core/engine.ts'
 import type { Sheet, SheetValue, State, Verdict } from '#core/glossary.ts'
 import { fieldsOf } from '#core/sheets/plans.ts'
+import { sure } from './sure.ts'
 
 /** A value that differs between two files. */
 export interface ValueChange {
@@ -43,15 +44,13 @@ function changesIn(
       subject: subject.id,
       state,
       name,
-      unit: fields.get(name)?.unit ?? '',
+      unit: sure(fields.get(name), `The field ${name}`).unit,
       before: before[name],
       after: after[name],
     }))
 }
 
-function sheetChanges(before: Sheet | undefined, after: Sheet | undefined): ValueChange[] {
-  const either = after ?? before
-  if (!either) return []
+function sheetChanges(either: Sheet, before: Sheet | undefined, after: Sheet | undefined): ValueChange[] {
   return [
     ...changesIn(either, null, before?.values, after?.values),
     ...changesIn(either, 'grid', before?.inState.grid, after?.inState.grid),
@@ -64,22 +63,22 @@ function verdictChanges(before: Judged, after: Judged): VerdictChange[] {
     `${rule}\n${subject}\n${state ?? ''}`
   const old = new Map(before.findings.map((finding) => [key(finding), finding]))
   const made = new Map(after.findings.map((finding) => [key(finding), finding]))
-  return [...new Set([...old.keys(), ...made.keys()])].flatMap((name) => {
+  return [...new Map([...old, ...made])].flatMap(([name, either]) => {
     const [was, is] = [old.get(name), made.get(name)]
-    const either = is ?? was
-    if (!either || was?.verdict === is?.verdict) return []
+    if (was?.verdict === is?.verdict) return []
     return [
       { rule: either.rule, subject: either.subject, state: either.state, before: was?.verdict, after: is?.verdict },
     ]
   })
 }
 
+const sheetsById = ({ sheets }: Judged) => new Map(sheets.map((sheet) => [sheet.id, sheet]))
+
 /** Compares two judged files by subject, value and verdict. */
 export function compare(before: Judged, after: Judged): Comparison {
-  const [old, made] = [before, after].map(({ sheets }) => new Map(sheets.map((sheet) => [sheet.id, sheet])))
-  const ids = [...new Set([...(old?.keys() ?? []), ...(made?.keys() ?? [])])]
+  const [old, made] = [sheetsById(before), sheetsById(after)]
   return {
     verdicts: verdictChanges(before, after),
-    values: ids.flatMap((id) => sheetChanges(old?.get(id), made?.get(id))),
+    values: [...new Map([...old, ...made])].flatMap(([id, sheet]) => sheetChanges(sheet, old.get(id), made.get(id))),
   }
 }

@@ -6,9 +6,11 @@ import { joined } from '#core/texts/value.ts'
 import { ruleTitle, ruleWordsFor } from '#core/texts/words.ts'
 import { anchorOf } from './anchor.ts'
 import type { FindingBlock } from './blocks.ts'
+import { groupedBy } from './grouped-by.ts'
 import { findingMark, isFailing } from './marks.ts'
 import { capital, dateText, held } from './print.ts'
 import type { ReportScene } from './scene.ts'
+import { sure } from './sure.ts'
 
 /** A source as printed: `IEC 60364-4-41:2005+A1:2017, 411.4.4`. */
 export function citesText(cites: readonly Citation[]): string {
@@ -26,27 +28,26 @@ export function findingAnchor({ rule, subject, state }: Pick<Finding, 'rule' | '
 }
 
 function missingWords({ sheet }: ReportScene, { subject, missing }: Finding): string {
-  const found = sheet(subject)
-  const fields = found ? fieldsOf(found.subject) : undefined
-  return joined(missing.map((name) => fields?.get(name)?.title ?? name))
+  const fields = fieldsOf(sheet(subject).subject)
+  return joined(missing.map((name) => sure(fields.get(name), `The field ${name}`).title))
 }
 
 function saysOf(scene: ReportScene, finding: Finding, key: string): { readonly says: string; readonly remedy: string } {
-  const sheet = scene.sheet(finding.subject)
   const { parameters, units } = scene.judged.book
-  if (isFailing(finding.verdict) && sheet) {
+  if (isFailing(finding.verdict)) {
+    const sheet = scene.sheet(finding.subject)
     const words = ruleWordsFor(key, { sheet, state: finding.state, parameters, units })
     const inside = finding.verdict === 'fails' ? '' : ' The limit lies inside the uncertainty of the reading.'
     return { says: held(capital(`${words.says}${inside}`)), remedy: held(words.do) }
   }
   if (finding.verdict === 'not shown') return { says: `Missing: ${missingWords(scene, finding)}.`, remedy: '' }
-  if (finding.verdict === 'limited') return { says: `Not tested: ${finding.reason ?? ''}.`, remedy: '' }
+  if (finding.reason !== undefined) return { says: `Not tested: ${finding.reason}.`, remedy: '' }
   return { says: 'It holds as read, but not over the whole uncertainty of the reading.', remedy: '' }
 }
 
-function about({ sheet }: ReportScene, { subject, state }: Finding): string {
-  const found = sheet(subject)
-  const name = capital(found ? labelOf(found) : subject)
+/** What a finding is about, in words: `Circuit K1 (Cold store), in the island`. */
+export function about({ sheet }: ReportScene, { subject, state }: Finding): string {
+  const name = capital(labelOf(sheet(subject)))
   return state === null ? name : `${name}, ${STATE_WORDS[state]}`
 }
 
@@ -57,7 +58,7 @@ function departureText({ departure }: Finding): string | undefined {
 }
 
 function block(scene: ReportScene, finding: Finding): FindingBlock {
-  const key = scene.judged.book.rules.find(({ id }) => id === finding.rule)?.key ?? finding.rule
+  const key = scene.ruleKey(finding.rule)
   const departure = departureText(finding)
   return {
     anchor: findingAnchor(finding),
@@ -83,23 +84,15 @@ const sameWords = ({ rule, verdict, missing, reason = '' }: Finding): string =>
 
 /** Findings that would say the same, once for all their subjects. */
 export function gatheredBlocks(scene: ReportScene, findings: readonly Finding[]): FindingBlock[] {
-  const groups = new Map<string, Finding[]>()
-  for (const finding of findings) {
-    const key = sameWords(finding)
-    const group = groups.get(key)
-    if (group) group.push(finding)
-    else groups.set(key, [finding])
-  }
-  return [...groups.values()].flatMap((group) => {
+  return [...groupedBy(findings, sameWords).values()].map((group) => {
     const [first] = group
-    if (!first) return []
-    if (group.length === 1) return [block(scene, first)]
+    if (group.length === 1) return block(scene, first)
     const subjects = group.map((finding) => ({
       anchor: findingAnchor(finding),
       name: finding.state === null ? finding.subject : `${finding.subject} ${STATE_WORDS[finding.state]}`,
     }))
     const missing = `${first.missing.join('+')}${first.reason ?? ''}`
     const anchor = anchorOf('rule', first.rule, first.verdict.replaceAll(/[ ,]+/g, '-'), missing)
-    return [{ ...block(scene, first), anchor, about: `${group.length} subjects`, subjects, place: '' }]
+    return { ...block(scene, first), anchor, about: `${group.length} subjects`, subjects, place: '' }
   })
 }

@@ -14,9 +14,14 @@ const REACH = 12
 const place = (percent: number): number =>
   LEFT + ((Math.max(-REACH, Math.min(REACH, percent)) + REACH) / (2 * REACH)) * (RIGHT - LEFT)
 
-function row(scene: ReportScene, id: string, index: number): string {
+interface ReadString {
+  readonly id: string
+  /** % off the datasheet. */
+  readonly voltage: number
+}
+
+function row(scene: ReportScene, { id, voltage }: ReadString, index: number): string {
   const y = TOP + index * ROW + ROW / 2
-  const voltage = scene.number(id, 'voc_from_expected')
   const current = scene.number(id, 'isc_from_expected')
   const x = current === undefined ? 0 : place(current)
   return [
@@ -29,7 +34,7 @@ function row(scene: ReportScene, id: string, index: number): string {
           stroke: COLOUR.ink,
           'stroke-width': 1,
         }),
-    voltage === undefined ? '' : circle(place(voltage), y, 2.8, { fill: COLOUR.ink }),
+    circle(place(voltage), y, 2.8, { fill: COLOUR.ink }),
   ].join('')
 }
 
@@ -39,7 +44,10 @@ function row(scene: ReportScene, id: string, index: number): string {
  */
 export function stringPlot(scene: ReportScene, arrayId: string, count: number): string | undefined {
   const ids = Array.from({ length: Math.min(count, MOST + 1) }, (_, index) => `${arrayId}/${index + 1}`)
-  const read = ids.filter((id) => scene.number(id, 'voc_from_expected') !== undefined)
+  const read = ids.flatMap((id): ReadString[] => {
+    const voltage = scene.number(id, 'voc_from_expected')
+    return voltage === undefined ? [] : [{ id, voltage }]
+  })
   if (read.length < 2 || ids.length > MOST) return undefined
   const band = scene.judged.book.parameters.string_spread
   const bottom = TOP + read.length * ROW
@@ -59,7 +67,7 @@ export function stringPlot(scene: ReportScene, arrayId: string, count: number): 
   return drawing(520, bottom + 28, label, [
     rect(place(-band), TOP - 4, place(band) - place(-band), bottom - TOP + 6, { fill: COLOUR.depth }),
     line(place(0), TOP - 4, place(0), bottom + 2, { stroke: COLOUR.rule, 'stroke-width': 0.7 }),
-    ...read.map((id, index) => row(scene, id, index)),
+    ...read.map((string, index) => row(scene, string, index)),
     ...ticks,
     circle(LEFT + 4, 8, 2.8, { fill: COLOUR.ink }),
     text(LEFT + 11, 11, 'voltage', { 'font-size': 8, fill: COLOUR.muted }),

@@ -3,6 +3,7 @@ import type { Departure, Finding, Path, Problem, Range, Severity, Sheet, State, 
 import { lacking } from '#core/sheets/lacking.ts'
 import { joined } from '#core/texts/value.ts'
 import { ruleCite, ruleTitle, ruleWordsFor } from '#core/texts/words.ts'
+import { sure } from './sure.ts'
 
 /** A place in the file. */
 export interface Place {
@@ -104,6 +105,7 @@ function insideSentence(title: string): string {
 function messageOf(finding: Finding, sheet: Sheet, key: string, judged: Judged): { message: string; remedy: string } {
   const title = ruleTitle(key)
   const { book } = judged
+  if (finding.reason !== undefined) return { message: `${title}. Not tested: ${finding.reason}.`, remedy: '' }
   switch (finding.verdict) {
     case 'fails':
     case 'fails, inside the uncertainty': {
@@ -114,8 +116,6 @@ function messageOf(finding: Finding, sheet: Sheet, key: string, judged: Judged):
       return { message: `${title}. It holds as read, but not over the whole uncertainty of the reading.`, remedy: '' }
     case 'not shown':
       return { message: `${title}. Not shown without: ${missingWords(finding, sheet)}.`, remedy: '' }
-    case 'limited':
-      return { message: `${title}. Not tested: ${finding.reason ?? ''}.`, remedy: '' }
     default:
       return { message: `${title}.`, remedy: '' }
   }
@@ -135,26 +135,23 @@ function toldJudged(judged: Judged, all: boolean): ToldFinding[] {
   }
   return findings
     .filter(({ verdict }) => all || (verdict !== 'meets' && verdict !== 'not applicable'))
-    .flatMap((finding) => {
-      const sheet = bySubject.get(finding.subject)
-      const key = keys.get(finding.rule)
-      if (!sheet || key === undefined) return []
+    .map((finding) => {
       const { rule, subject, state, verdict, severity, departure } = finding
-      return [
-        {
-          rule,
-          key,
-          subject,
-          state,
-          verdict,
-          severity,
-          ...messageOf(finding, sheet, key, judged),
-          cite: ruleCite(key),
-          ...place(finding.path),
-          related: finding.related.map(place),
-          ...(departure && { departure }),
-        },
-      ]
+      const sheet = sure(bySubject.get(subject), `The sheet of ${subject}`)
+      const key = sure(keys.get(rule), `The rule ${rule}`)
+      return {
+        rule,
+        key,
+        subject,
+        state,
+        verdict,
+        severity,
+        ...messageOf(finding, sheet, key, judged),
+        cite: ruleCite(key),
+        ...place(finding.path),
+        related: finding.related.map(place),
+        ...(departure && { departure }),
+      }
     })
 }
 

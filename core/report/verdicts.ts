@@ -1,7 +1,9 @@
 import type { Judged } from '#core/engine.ts'
 import type { Finding, State, Verdict } from '#core/glossary.ts'
 import type { Cell } from './blocks.ts'
+import { groupedBy } from './grouped-by.ts'
 import { DEPARTS, isFailing, markOf, WORST_FIRST } from './marks.ts'
+import { sure } from './sure.ts'
 
 /** Which findings a row or a reading stands for. */
 export interface Wanted {
@@ -14,16 +16,12 @@ export interface Wanted {
 
 /** Findings by subject, to be asked for those behind a row. */
 export class Verdicts {
-  readonly #bySubject = new Map<string, Finding[]>()
+  readonly #bySubject: ReadonlyMap<string, readonly Finding[]>
   readonly #reads: ReadonlyMap<string, readonly string[]>
 
   constructor({ findings, book }: Pick<Judged, 'findings' | 'book'>) {
     this.#reads = new Map(book.rules.map(({ id, reads }) => [id, reads]))
-    for (const finding of findings) {
-      const known = this.#bySubject.get(finding.subject)
-      if (known) known.push(finding)
-      else this.#bySubject.set(finding.subject, [finding])
-    }
+    this.#bySubject = groupedBy(findings, ({ subject }) => subject)
   }
 
   /** The findings about a subject that are wanted, those that do not apply left out. */
@@ -31,7 +29,7 @@ export class Verdicts {
     return (this.#bySubject.get(subject) ?? []).filter((finding) => {
       if (finding.verdict === 'not applicable') return false
       if (state !== undefined && finding.state !== state) return false
-      const reads = this.#reads.get(finding.rule) ?? []
+      const reads = sure(this.#reads.get(finding.rule), `The rule ${finding.rule}`)
       if (fields && !reads.some((name) => fields.includes(name))) return false
       return !without || !reads.some((name) => without.includes(name))
     })

@@ -4,6 +4,7 @@ import { COLOUR } from '#core/paper/style.ts'
 import type { Topology } from '#core/topology/topology.ts'
 import { cableName, deviceName } from '../devices.ts'
 import { amount } from '../print.ts'
+import { sure } from '../sure.ts'
 import type { PartKind } from './parts.ts'
 import { leadsOn, type Placed, RAISED } from './place.ts'
 import { group, line, rect, text } from './svg.ts'
@@ -29,9 +30,9 @@ const UPSTREAM: ReadonlySet<PartKind> = new Set(['supply', 'meter', 'main protec
 function isLive({ part }: Placed, { topology, install, state }: DiagramScene): boolean {
   if (state === 'grid') return true
   if (UPSTREAM.has(part.kind)) return false
-  if (part.kind === 'array') return topology.live(install.arrays?.[part.id]?.into ?? '', state)
-  if (part.kind === 'battery') return topology.live(install.batteries?.[part.id]?.into ?? '', state)
-  if (part.kind === 'link') return topology.live(install.links?.[part.id]?.from ?? '', state)
+  if (part.kind === 'array') return topology.live(sure(install.arrays?.[part.id], part.id).into, state)
+  if (part.kind === 'battery') return topology.live(sure(install.batteries?.[part.id], part.id).into, state)
+  if (part.kind === 'link') return topology.live(sure(install.links?.[part.id], part.id).from, state)
   return topology.live(part.id, state)
 }
 
@@ -80,9 +81,9 @@ function changeover({ x, y, part }: Placed, scene: DiagramScene): string {
 
 function board(placed: Placed, scene: DiagramScene): string {
   const { x, y, part, children } = placed
-  const found = scene.install.boards?.[part.id]
+  const found = sure(scene.install.boards?.[part.id], part.id)
   const last = children.at(-1)?.y ?? y
-  const name = [`${part.id} ${found?.name ?? ''}`.trim(), ...cabled(found?.cable)].join(' · ')
+  const name = [`${part.id} ${found.name}`.trim(), ...cabled(found.cable)].join(' · ')
   const live = isLive(placed, scene)
   return [
     line(x + 2, y - 7, x + 2, Math.max(last, y) + 7, {
@@ -102,8 +103,7 @@ function board(placed: Placed, scene: DiagramScene): string {
 }
 
 function circuit({ x, y, part }: Placed, scene: DiagramScene, live: boolean): string {
-  const found = scene.install.circuits?.[part.id]
-  if (!found) return ''
+  const found = sure(scene.install.circuits?.[part.id], part.id)
   const { words, width } = scene
   const device = found.residual_current
     ? symbol.residualBreaker(x, y)
@@ -129,8 +129,8 @@ function circuit({ x, y, part }: Placed, scene: DiagramScene, live: boolean): st
   ].join('')
 }
 
-function circuits({ x, y, part }: Placed, { words, width }: DiagramScene, live: boolean): string {
-  const shown = cut(part.words ?? '', width - words, 8.4)
+function circuits({ x, y }: Placed, told: string, { words, width }: DiagramScene, live: boolean): string {
+  const shown = cut(told, width - words, 8.4)
   return [
     symbol.breaker(x, y),
     line(x + 30, y, words - 12, y),
@@ -144,16 +144,13 @@ function beside({ x, y }: Placed, words: string, live: boolean): string {
 }
 
 function arrayWords(id: string, { arrays }: Install): string {
-  const found = arrays?.[id]
-  if (!found) return id
-  const { strings, modules_in_series, module } = found
+  const { strings, modules_in_series, module } = sure(arrays?.[id], id)
   const power = module.pmax === undefined ? '' : ` · ${amount(strings * modules_in_series * module.pmax, 'W')}`
   return `${id} · ${strings} × ${modules_in_series} modules${power}`
 }
 
 function link(placed: Placed, { install }: DiagramScene, live: boolean): string {
-  const found = install.links?.[placed.part.id]
-  if (!found) return ''
+  const found = sure(install.links?.[placed.part.id], placed.part.id)
   const words = `${placed.part.id} to ${found.to} · ${found.position} · ${found.interlocked ? 'interlocked' : 'not interlocked'}`
   return symbol.contact(placed.x, placed.y, found.position === 'closed') + beside(placed, words, live)
 }
@@ -191,8 +188,9 @@ function figure(placed: Placed, scene: DiagramScene, live: boolean): string {
       return board(placed, scene)
     case 'overcurrent device':
       return (
-        (install.overcurrent?.[part.id]?.device.kind === 'breaker' ? symbol.breaker(x, y) : symbol.fuse(x, y)) +
-        line(x + 30, y, out, y)
+        (sure(install.overcurrent?.[part.id], part.id).device.kind === 'breaker'
+          ? symbol.breaker(x, y)
+          : symbol.fuse(x, y)) + line(x + 30, y, out, y)
       )
     case 'residual-current device':
       return symbol.residualDevice(x, y) + line(x + 34, y, out, y)
@@ -206,16 +204,13 @@ function figure(placed: Placed, scene: DiagramScene, live: boolean): string {
     case 'array':
       return symbol.array(x, y) + beside(placed, arrayWords(part.id, install), live)
     case 'battery': {
-      const usable = install.batteries?.[part.id]?.usable
-      return (
-        symbol.battery(x, y) +
-        beside(placed, usable === undefined ? part.id : `${part.id} · ${amount(usable, 'Wh')}`, live)
-      )
+      const { usable } = sure(install.batteries?.[part.id], part.id)
+      return symbol.battery(x, y) + beside(placed, `${part.id} · ${amount(usable, 'Wh')}`, live)
     }
     case 'link':
       return link(placed, scene, live)
     case 'circuits':
-      return circuits(placed, scene, live)
+      return circuits(placed, part.words, scene, live)
     case 'circuit':
       return circuit(placed, scene, live)
   }

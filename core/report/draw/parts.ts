@@ -3,16 +3,25 @@ import type { Topology, TopologyNode } from '#core/topology/topology.ts'
 import { cableName, deviceName } from '../devices.ts'
 
 /** One thing of the diagram with what hangs on it. */
-export interface Part {
+export type Part = Single | Gathered
+
+interface Single extends Common {
+  readonly kind: Exclude<PartKind, 'circuits'>
+}
+
+/** Several circuits in one row. */
+interface Gathered extends Common {
+  readonly kind: 'circuits'
+  readonly words: string
+}
+
+interface Common {
   readonly id: string
-  readonly kind: PartKind
   readonly children: readonly Part[]
   /** Carries a link between neutral and earth of its own, which hangs below it. */
   readonly linked?: true
   /** A cable of its own is named below its ratings. */
   readonly cabled?: true
-  /** For several circuits in one row. */
-  readonly words?: string
 }
 
 export type PartKind = TopologyNode['kind'] | 'meter' | 'main protection' | 'array' | 'battery' | 'link' | 'circuits'

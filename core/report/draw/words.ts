@@ -1,6 +1,7 @@
 import type { Cable, Install } from '#core/install.ts'
 import { cableName, deviceName, residualName } from '../devices.ts'
 import { amount } from '../print.ts'
+import { sure } from '../sure.ts'
 import type { Part } from './parts.ts'
 
 /** Part of its size that a letter is wide, on average and a little more. */
@@ -33,22 +34,20 @@ export function told({ id, kind }: Part, install: Install): Told {
     case 'main protection':
       return { below: [deviceName(supply.main_protection)] }
     case 'overcurrent device': {
-      const found = install.overcurrent?.[id]
-      if (!found) return { above: id }
+      const found = sure(install.overcurrent?.[id], id)
       const breaking = found.breaking ?? found.device.breaking
       const breaks = breaking === undefined ? [] : [amount(breaking, 'A')]
       return { above: id, below: [deviceName(found.device), ...breaks, ...cabled(found.cable)] }
     }
     case 'residual-current device': {
-      const found = install.residual_current?.[id]
-      if (!found) return { above: id }
+      const found = sure(install.residual_current?.[id], id)
       return { above: id, below: [residualName(found), amount(found.rated_current, 'A'), ...cabled(found.cable)] }
     }
     case 'changeover':
       return { above: `${id} · ${changeover.poles} poles · ${amount(changeover.rated_current, 'A')}` }
     case 'inverter': {
-      const found = install.inverters?.[id]
-      return { above: [id, amount(found?.rated_power ?? 0, 'VA'), ...cabled(found?.cable)].join(' · ') }
+      const { rated_power, cable } = sure(install.inverters?.[id], id)
+      return { above: [id, amount(rated_power, 'VA'), ...cabled(cable)].join(' · ') }
     }
     default:
       return {}

@@ -2,12 +2,13 @@ import { LINES, type State } from '#core/glossary.ts'
 import type { Measured, ResidualTest } from '#core/install.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import { type Block, type Row, table, tables } from '../blocks.ts'
-import { rowsByFeeder } from '../by-board.ts'
+import { circuitsByFeeder } from '../by-board.ts'
 import { clearedBy, loopYardstick } from '../clearing.ts'
 import { residualName } from '../devices.ts'
 import { rounded } from '../print.ts'
 import { rampBand } from '../ramp.ts'
 import type { ReportScene } from '../scene.ts'
+import { sure } from '../sure.ts'
 import { plainPoints } from './plain.ts'
 import { type Point, pointCell, wordCell } from './points.ts'
 
@@ -119,12 +120,12 @@ function loopRow(scene: ReportScene, id: string, serves: string, state: State): 
 }
 
 function loops(scene: ReportScene, state: State): Block[] {
-  const groups = rowsByFeeder(scene, (id, { serves }) => loopRow(scene, id, serves, state)).map(
-    ({ title = '', rows }) => ({
-      title,
-      rows: rows.filter(({ head }) => scene.topology.live(head.text ?? '', state)),
-    }),
-  )
+  const groups = circuitsByFeeder(scene).map(({ title, circuits }) => ({
+    title,
+    rows: circuits
+      .filter(([id]) => scene.topology.live(id, state))
+      .map(([id, { serves }]) => loopRow(scene, id, serves, state)),
+  }))
   const columns = [
     { label: 'Circuit', width: 9 },
     { label: 'Serves', width: 25 },
@@ -164,7 +165,7 @@ function timeLimit(scene: ReportScene, id: string, name: TimeColumn['name']): st
 }
 
 function residualRow(scene: ReportScene, id: string, state: State, times: readonly TimeColumn[], width: number): Row {
-  const device = scene.install.residual_current?.[id]
+  const device = sure(scene.install.residual_current?.[id], id)
   const readings = scene.install.readings?.residual_current?.[id]
   const found =
     readings?.[state] ?? (readings?.not_tested === undefined ? undefined : { not_tested: readings.not_tested })
@@ -189,12 +190,8 @@ function residualRow(scene: ReportScene, id: string, state: State, times: readon
       : point(name, 'ms', timeLimit(scene, id, name))
   return {
     anchor: `point/residual/${id}/${state}`,
-    head: { text: id, note: device ? residualName(device) : '' },
-    cells: [
-      point('half', 'ms', 'no trip'),
-      ...times.map(time),
-      point('ramp', 'mA', rampBand(scene, id) ?? 'write it down'),
-    ],
+    head: { text: id, note: residualName(device) },
+    cells: [point('half', 'ms', 'no trip'), ...times.map(time), point('ramp', 'mA', rampBand(scene, id))],
   }
 }
 

@@ -3,6 +3,7 @@ import type { Transfer } from '#core/install.ts'
 import type { Block } from '../blocks.ts'
 import { rounded } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
+import { sure } from '../sure.ts'
 import { plainPoints } from './plain.ts'
 import type { Point } from './points.ts'
 
@@ -78,7 +79,7 @@ function steps(scene: ReportScene): Point[] {
     done.length > 0
       ? []
       : starting.length > 0
-        ? starting.map((id) => `${install.circuits?.[id]?.serves ?? id} started`)
+        ? starting.map((id) => `${sure(install.circuits?.[id], id).serves} started`)
         : ['Largest load started']
   const step = (anchor: string, name: string, read: (typeof done)[number] | undefined): Point[] => {
     const reason = read?.not_tested === undefined ? undefined : { not_tested: read.not_tested }

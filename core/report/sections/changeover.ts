@@ -69,7 +69,7 @@ function neutral(scene: ReportScene): Entry[] {
       anchor: `changeover/${id}/links/grid`,
       term: 'Links on the grid',
       detail: `${links.grid.length}`,
-      note: links.grid.join(', ') || 'none',
+      note: links.grid.join(', '),
     },
     {
       anchor: `changeover/${id}/links/island`,

@@ -2,6 +2,7 @@ import type { Mark, Tiles } from '../blocks.ts'
 import { amount, few, hoursText } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 import type { Standing } from '../standing.ts'
+import { sure } from '../sure.ts'
 
 type Tile = Tiles['tiles'][number]
 
@@ -39,7 +40,7 @@ function circuitsTile({ install, topology }: ReportScene): Tile {
   const { backedUp, gridOnly } = topology.circuits
   const names = (ids: readonly string[]) =>
     few(
-      ids.map((id) => install.circuits?.[id]?.serves ?? id),
+      ids.map((id) => sure(install.circuits?.[id], id).serves),
       4,
     )
   const total = backedUp.length + gridOnly.length

@@ -74,5 +74,5 @@ export function identity(scene: ReportScene): Particulars {
 
 /** A hash in groups of eight, so that it can be read out and broken between lines. */
 export function grouped(hash: string): string {
-  return hash.match(/.{1,8}/g)?.join(' ') ?? ''
+  return hash.replace(/.{8}(?=.)/g, '$& ')
 }

@@ -1,9 +1,10 @@
+import type { InspectionItem } from '#core/install.ts'
 import { type Mark, type Section, table } from '../blocks.ts'
 import { distinct } from '../names.ts'
 import { capital } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
 
-const RESULTS: Readonly<Record<string, Mark>> = {
+const RESULTS: Readonly<Record<InspectionItem['result'], Mark>> = {
   good: { word: 'good', shape: 'verdict-meets' },
   defect: { word: 'defect', shape: 'verdict-fails' },
   'not inspected': { word: 'not inspected', shape: 'verdict-not-shown' },
@@ -14,15 +15,12 @@ const RESULTS: Readonly<Record<string, Mark>> = {
 export function inspection({ install }: ReportScene): Section {
   const items = install.inspection ?? []
   const names = distinct(items.map(({ item }) => item))
-  const rows = items.map(({ item, result, note, photo }, index) => {
-    const mark = RESULTS[result]
-    return {
-      anchor: `inspection/${names[index]}`,
-      ...(result === 'defect' && { look: 'row-fails' as const }),
-      head: { text: capital(item) },
-      cells: [mark ? { mark } : { text: result }, { text: note ?? '–' }, { text: photo ?? '–' }],
-    }
-  })
+  const rows = items.map(({ item, result, note, photo }, index) => ({
+    anchor: `inspection/${names[index]}`,
+    ...(result === 'defect' && { look: 'row-fails' as const }),
+    head: { text: capital(item) },
+    cells: [{ mark: RESULTS[result] }, { text: note ?? '–' }, { text: photo ?? '–' }],
+  }))
   const columns = [
     { label: 'Item', width: 32 },
     { label: 'Result', width: 17 },

@@ -6,13 +6,13 @@ import { budgetCurve } from '../curve.ts'
 import { verdictEntry } from '../entries.ts'
 import { amount, hoursText, printed } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
+import { sure } from '../sure.ts'
 
 function batteryEntries(
   scene: ReportScene,
   id: string,
 ): readonly { readonly title: string; readonly entries: readonly Entry[] }[] {
-  const battery = scene.install.batteries?.[id]
-  if (!battery) return []
+  const battery = sure(scene.install.batteries?.[id], id)
   const hours = (name: string) => {
     const value = scene.number(id, name)
     return value === undefined ? 'not known' : hoursText(value)

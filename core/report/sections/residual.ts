@@ -7,6 +7,7 @@ import { residualName } from '../devices.ts'
 import { capital, readingText, rounded } from '../print.ts'
 import { rampBand } from '../ramp.ts'
 import type { ReportScene } from '../scene.ts'
+import { sure } from '../sure.ts'
 
 const TIMES = [
   ['half', undefined],
@@ -32,7 +33,7 @@ function timeCell(
   const text = readingText(test[name], 0)
   const most = limit === undefined ? undefined : scene.number(id, limit)
   const value = scene.number(id, name, state)
-  const span = scene.sheet(id)?.spansInState[state][name]
+  const span = scene.sheet(id).spansInState[state][name]
   const anchor = `residual/${id}/${name}/${state}`
   if (most === undefined || value === undefined || !Number.isFinite(value)) return { anchor, text }
   const bar = {
@@ -46,24 +47,23 @@ function timeCell(
   return { anchor, text, note: `≤ ${rounded(most, 0)}`, svg: limitBar(bar) }
 }
 
-function rampCell(scene: ReportScene, id: string, state: State, test: ResidualTest): Cell {
-  const band = rampBand(scene, id)
+function rampCell(scene: ReportScene, id: string, state: State, { ramp }: ResidualTest): Cell {
   return {
     anchor: `residual/${id}/ramp/${state}`,
-    text: readingText(test.ramp, 0),
-    ...(band !== undefined && test.ramp !== undefined && { note: band }),
+    text: readingText(ramp, 0),
+    ...(ramp !== undefined && { note: rampBand(scene, id) }),
   }
 }
 
 function testRow(scene: ReportScene, id: string, state: State): Row {
   const { verdicts, install } = scene
-  const device = install.residual_current?.[id]
+  const device = sure(install.residual_current?.[id], id)
   const test = testOf(scene, id, state)
   const taken = typeof test === 'object' ? test : {}
   return {
     anchor: `residual/${id}/${state}`,
     ...(verdicts.fails(id, { state }) && { look: 'row-fails' as const }),
-    head: { text: id, note: device ? residualName(device) : '' },
+    head: { text: id, note: residualName(device) },
     cells: [
       ...TIMES.map((time) => timeCell(scene, id, state, taken, time)),
       rampCell(scene, id, state, taken),

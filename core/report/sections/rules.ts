@@ -4,23 +4,15 @@ import type { ShippedRule } from '#core/judge/shipped.ts'
 import { ruleTitle } from '#core/texts/words.ts'
 import { type Names, type Row, type RowGroup, type Section, tables } from '../blocks.ts'
 import { citesText } from '../finding-blocks.ts'
+import { groupedBy } from '../grouped-by.ts'
 import { WORST_FIRST } from '../marks.ts'
 import { capital, few } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
+import { sure } from '../sure.ts'
 
 const MOST = 10
 
 type ByRule = ReadonlyMap<string, readonly Finding[]>
-
-function findingsByRule(findings: readonly Finding[]): ByRule {
-  const byRule = new Map<string, Finding[]>()
-  for (const finding of findings) {
-    const known = byRule.get(finding.rule)
-    if (known) known.push(finding)
-    else byRule.set(finding.rule, [finding])
-  }
-  return byRule
-}
 
 /** Each verdict with its count and what it is about: `2 meets: K1, K2; 1 not applicable`. */
 function verdictsText(findings: readonly Finding[]): string {
@@ -48,14 +40,7 @@ interface Chapter {
 }
 
 function byChapter(rules: readonly ShippedRule[]): Chapter[] {
-  const chapters = new Map<string, ShippedRule[]>()
-  for (const rule of rules) {
-    const { chapter } = rulePage(rule.key)
-    const known = chapters.get(chapter)
-    if (known) known.push(rule)
-    else chapters.set(chapter, [rule])
-  }
-  return [...chapters].map(([chapter, members]) => ({
+  return [...groupedBy(rules, ({ key }) => rulePage(key).chapter)].map(([chapter, members]) => ({
     title: capital(chapter.replaceAll('-', ' ')),
     rules: members,
   }))
@@ -64,7 +49,7 @@ function byChapter(rules: readonly ShippedRule[]): Chapter[] {
 function chapterGroups(rules: readonly ShippedRule[], byRule: ByRule): RowGroup[] {
   return byChapter(rules).map(({ title, rules: members }) => ({
     title,
-    rows: members.map((rule) => ruleRow(rule, byRule.get(rule.id) ?? [])),
+    rows: members.map((rule) => ruleRow(rule, sure(byRule.get(rule.id), rule.id))),
   }))
 }
 
@@ -86,7 +71,7 @@ const COLUMNS = [
 
 /** Every rule that was judged, with its verdicts and its source; last those that apply to nothing here. */
 export function rules({ judged }: ReportScene): Section {
-  const byRule = findingsByRule(judged.findings)
+  const byRule = groupedBy(judged.findings, ({ rule }) => rule)
   const applies = ({ id }: ShippedRule) => byRule.get(id)?.some(({ verdict }) => verdict !== 'not applicable') ?? false
   const judgedRules = judged.book.rules.filter(applies)
   const others = judged.book.rules.filter((rule) => !applies(rule))

@@ -1,10 +1,12 @@
 import type { Finding } from '#core/glossary.ts'
-import { labelOf, STATE_WORDS } from '#core/texts/label.ts'
+import { STATE_WORDS } from '#core/texts/label.ts'
 import { ruleTitle } from '#core/texts/words.ts'
 import { anchorOf } from '../anchor.ts'
 import { type Block, type Mark, type Notice, type Row, type Section, table } from '../blocks.ts'
+import { about } from '../finding-blocks.ts'
+import { groupedBy } from '../grouped-by.ts'
 import { findingMark } from '../marks.ts'
-import { capital, few } from '../print.ts'
+import { few } from '../print.ts'
 import type { ReportContext, ReportScene } from '../scene.ts'
 import type { Standing } from '../standing.ts'
 
@@ -62,25 +64,7 @@ function standingNotice(standing: Standing, { issue }: ReportContext): Notice {
   }
 }
 
-function about({ sheet }: ReportScene, { subject, state }: Finding): string {
-  const found = sheet(subject)
-  const name = capital(found ? labelOf(found) : subject)
-  return state === null ? name : `${name}, ${STATE_WORDS[state]}`
-}
-
 const short = ({ subject, state }: Finding): string => (state === null ? subject : `${subject} ${STATE_WORDS[state]}`)
-
-/** Findings by a name that is made of each. */
-function groupedBy<Item>(items: readonly Item[], name: (item: Item) => string): (readonly [string, Item[]])[] {
-  const groups = new Map<string, Item[]>()
-  for (const item of items) {
-    const key = name(item)
-    const group = groups.get(key)
-    if (group) group.push(item)
-    else groups.set(key, [item])
-  }
-  return [...groups]
-}
 
 interface Line {
   readonly mark: Mark
@@ -91,31 +75,27 @@ interface Line {
 
 /** One line for each rule, its subjects together. */
 function ruleLines(scene: ReportScene, findings: readonly Finding[]): Line[] {
-  const keys = new Map(scene.judged.book.rules.map(({ id, key }) => [id, key]))
-  return groupedBy(findings, (finding) => `${finding.rule}/${findingMark(finding).word}`).flatMap(([, group]) => {
+  const groups = groupedBy(findings, (finding) => `${finding.rule}/${findingMark(finding).word}`)
+  return [...groups.values()].map((group) => {
     const [first] = group
-    const key = first && keys.get(first.rule)
-    if (!first || key === undefined) return []
     const subjects = group.map(short)
     const where = group.length === 1 ? about(scene, first) : few(subjects, 8)
-    return [{ mark: findingMark(first), where, name: subjects.toSorted().join('+'), title: ruleTitle(key) }]
+    const title = ruleTitle(scene.ruleKey(first.rule))
+    return { mark: findingMark(first), where, name: subjects.toSorted().join('+'), title }
   })
 }
 
 /** Lines about the same subjects and of the same verdict become one row. */
 function lines(scene: ReportScene, findings: readonly Finding[]): Row[] {
   const rows = groupedBy(ruleLines(scene, findings), ({ mark, name }) => `${mark.word}/${name}`)
-  return rows.flatMap(([name, group]) => {
+  return [...rows].map(([name, group]) => {
     const [first] = group
-    if (!first) return []
     const titles = group.map(({ title }) => `${title}.`).join(' ')
-    return [
-      {
-        anchor: anchorOf('summary', name),
-        head: { mark: first.mark },
-        cells: [{ text: first.where }, { text: titles }],
-      },
-    ]
+    return {
+      anchor: anchorOf('summary', name),
+      head: { mark: first.mark },
+      cells: [{ text: first.where }, { text: titles }],
+    }
   })
 }
 

@@ -72,7 +72,7 @@ function earthingEntries(scene: ReportScene): Entry[] {
     {
       anchor: 'earthing/links',
       term: 'Neutral–earth links',
-      detail: `${scene.topology.neutralEarthLinks.grid.join(', ') || 'none'} on the grid; ${scene.topology.neutralEarthLinks.island.join(', ') || 'none'} in the island`,
+      detail: `${scene.topology.neutralEarthLinks.grid.join(', ')} on the grid; ${scene.topology.neutralEarthLinks.island.join(', ') || 'none'} in the island`,
     },
     verdictEntry('earthing/verdict', scene.verdicts.of('earthing')),
   ]

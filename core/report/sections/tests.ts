@@ -58,7 +58,7 @@ function loopBar(scene: ReportScene, id: string, state: State): string | undefin
   const value = scene.number(id, 'loop', state)
   const most = decides(scene, id, state) ? scene.number(id, 'loop_limit_measured') : undefined
   if (value === undefined || most === undefined || !Number.isFinite(value)) return undefined
-  const span = scene.sheet(id)?.spansInState[state]['loop']
+  const span = scene.sheet(id).spansInState[state]['loop']
   return limitBar({ value, most, unit: 'Ω', name: `loop of ${id} ${STATE_WORDS[state]}`, ...(span && { span }) })
 }
 
