@@ -58,8 +58,10 @@ export async function up(knex: Knex): Promise<void> {
       taken_at timestamptz,
       sha256 text not null check (sha256 ~ '^[0-9a-f]{64}$'),
       size bigint not null check (size between 1 and 15728640),
-      received bigint not null default 0,
-      state text not null default 'receiving' check (state in ('receiving', 'received', 'refused')),
+      -- The hash of each part that has come, by its place; null for those that are missing.
+      parts jsonb not null,
+      -- open: parts are missing; complete: all of it is here; attached: the photo is part of the report; refused: it is none.
+      state text not null default 'open' check (state in ('open', 'complete', 'attached', 'refused')),
       refusal text,
       attachment_id uuid,
       expires_at timestamptz not null,
@@ -67,9 +69,12 @@ export async function up(knex: Knex): Promise<void> {
       primary key (organisation_id, upload_id),
       foreign key (organisation_id, person_id) references people,
       foreign key (organisation_id, report_id) references reports,
-      check (received between 0 and size)
+      foreign key (organisation_id, attachment_id) references attachments,
+      check ((state = 'attached') = (attachment_id is not null)),
+      check ((state = 'refused') = (refusal is not null))
     );
-    create index uploads_by_expiry on uploads (expires_at) where state = 'receiving';
+    create index uploads_by_report on uploads (organisation_id, report_id, created_at);
+    create index uploads_by_expiry on uploads (expires_at) where state = 'open';
     call fence('uploads');
     grant select, insert, update, delete on uploads to skerry_app;
   `)

@@ -28,6 +28,51 @@ CREATE FUNCTION public.chain_audit_event() RETURNS trigger
       update audit_heads set last = new.sequence, hash = new.hash where organisation_id = new.organisation_id;
       return new;
     end $$;
+CREATE FUNCTION public.check_approval() RETURNS trigger
+    LANGUAGE plpgsql
+    AS $$
+    begin
+      if new.state = 'approved' and old.state <> 'approved' and not exists (
+        select from reviews v
+        where v.organisation_id = new.organisation_id and v.report_id = new.report_id and v.revision = new.revision
+          and v.decision = 'approved'
+      ) then
+        raise exception 'a report is approved by a review of its newest revision' using errcode = 'check_violation';
+      end if;
+      return new;
+    end $$;
+CREATE FUNCTION public.check_issue() RETURNS trigger
+    LANGUAGE plpgsql
+    AS $$
+    begin
+      if had_a_hand(new.organisation_id, new.report_id, new.issued_by) or not exists (
+        select from people p
+        where p.organisation_id = new.organisation_id and p.person_id = new.issued_by and p.active and 'reviewer' = any(p.roles)
+      ) then
+        raise exception 'a report is issued by a reviewer without a hand in it' using errcode = 'check_violation';
+      end if;
+      if not exists (
+        select from reviews v
+        where v.organisation_id = new.organisation_id and v.report_id = new.report_id and v.revision = new.revision
+          and v.decision = 'approved' and not had_a_hand(v.organisation_id, v.report_id, v.reviewer_id)
+      ) then
+        raise exception 'a report is issued after its revision was approved' using errcode = 'check_violation';
+      end if;
+      return new;
+    end $$;
+CREATE FUNCTION public.check_issued() RETURNS trigger
+    LANGUAGE plpgsql
+    AS $$
+    begin
+      if new.state = 'issued' and old.state <> 'issued' and not exists (
+        select from documents d
+        where d.organisation_id = new.organisation_id and d.report_id = new.report_id and d.revision = new.revision
+          and d.number = new.number
+      ) then
+        raise exception 'an issued report has a document' using errcode = 'check_violation';
+      end if;
+      return new;
+    end $$;
 CREATE FUNCTION public.check_report_step() RETURNS trigger
     LANGUAGE plpgsql
     AS $$
@@ -46,6 +91,16 @@ CREATE FUNCTION public.check_report_step() RETURNS trigger
       end if;
       return new;
     end $$;
+CREATE FUNCTION public.check_second_person() RETURNS trigger
+    LANGUAGE plpgsql
+    AS $$
+    declare who uuid := (to_jsonb(new) ->> tg_argv[0])::uuid;
+    begin
+      if had_a_hand(new.organisation_id, new.report_id, who) then
+        raise exception 'who uploaded, installed or tested cannot decide on the report' using errcode = 'check_violation';
+      end if;
+      return new;
+    end $$;
 CREATE FUNCTION public.current_organisation() RETURNS uuid
     LANGUAGE sql STABLE
     AS $$ select nullif(current_setting('app.organisation', true), '')::uuid $$;
@@ -57,6 +112,23 @@ CREATE PROCEDURE public.fence(IN subject regclass)
       execute format('alter table %s force row level security', subject);
       execute format('create policy own_organisation on %s to skerry_app using (organisation_id = current_organisation()) with check (organisation_id = current_organisation())', subject);
     end $$;
+CREATE FUNCTION public.folded(words text) RETURNS text
+    LANGUAGE sql IMMUTABLE
+    AS $$ select lower(regexp_replace(btrim(normalize(words, nfkc)), '\s+', ' ', 'g')) $$;
+CREATE FUNCTION public.had_a_hand(in_organisation uuid, in_report uuid, who uuid) RETURNS boolean
+    LANGUAGE sql STABLE
+    AS $$
+      select exists (
+        select from revisions r
+        where r.organisation_id = in_organisation and r.report_id = in_report and r.uploaded_by = who
+      ) or exists (
+        select from revisions r
+        cross join lateral jsonb_array_elements(r.workers) as w
+        join people p on p.organisation_id = r.organisation_id and p.person_id = who
+        where r.organisation_id = in_organisation and r.report_id = in_report
+          and (folded(w ->> 'name') = folded(p.name) or folded(w ->> 'licence') = folded(p.licence))
+      )
+    $$;
 CREATE FUNCTION public.keep_published() RETURNS trigger
     LANGUAGE plpgsql
     AS $$
@@ -116,17 +188,27 @@ CREATE TABLE public.acceptances (
     report_id uuid NOT NULL,
     revision integer NOT NULL,
     anchor text NOT NULL,
+    sequence bigint NOT NULL,
+    words text NOT NULL,
     words_sha256 text NOT NULL,
     accepted boolean NOT NULL,
     reason text DEFAULT ''::text NOT NULL,
     decided_by uuid NOT NULL,
     decided_at timestamp with time zone DEFAULT now() NOT NULL,
     CONSTRAINT acceptances_anchor_check CHECK (((length(anchor) >= 1) AND (length(anchor) <= 300))),
-    CONSTRAINT acceptances_check CHECK ((accepted OR (reason <> ''::text))),
-    CONSTRAINT acceptances_reason_check CHECK ((length(reason) <= 2000)),
-    CONSTRAINT acceptances_words_sha256_check CHECK ((words_sha256 ~ '^[0-9a-f]{64}$'::text))
+    CONSTRAINT acceptances_check CHECK ((words_sha256 = encode(sha256(convert_to(words, 'UTF8'::name)), 'hex'::text))),
+    CONSTRAINT acceptances_check1 CHECK ((accepted OR (reason <> ''::text))),
+    CONSTRAINT acceptances_reason_check CHECK ((length(reason) <= 2000))
 );
 ALTER TABLE ONLY public.acceptances FORCE ROW LEVEL SECURITY;
+ALTER TABLE public.acceptances ALTER COLUMN sequence ADD GENERATED ALWAYS AS IDENTITY (
+    SEQUENCE NAME public.acceptances_sequence_seq
+    START WITH 1
+    INCREMENT BY 1
+    NO MINVALUE
+    NO MAXVALUE
+    CACHE 1
+);
 CREATE TABLE public.attachments (
     organisation_id uuid NOT NULL,
     attachment_id uuid DEFAULT gen_random_uuid() NOT NULL,
@@ -372,10 +454,21 @@ CREATE TABLE public.register_heads (
     peaks jsonb DEFAULT '[]'::jsonb NOT NULL
 );
 ALTER TABLE ONLY public.register_heads FORCE ROW LEVEL SECURITY;
+CREATE TABLE public.register_nodes (
+    organisation_id uuid NOT NULL,
+    level integer NOT NULL,
+    index bigint NOT NULL,
+    hash text NOT NULL,
+    CONSTRAINT register_nodes_hash_check CHECK ((hash ~ '^[0-9a-f]{64}$'::text)),
+    CONSTRAINT register_nodes_index_check CHECK ((index >= 0)),
+    CONSTRAINT register_nodes_level_check CHECK (((level >= 0) AND (level <= 50)))
+);
+ALTER TABLE ONLY public.register_nodes FORCE ROW LEVEL SECURITY;
 CREATE TABLE public.remarks (
     organisation_id uuid NOT NULL,
     remark_id uuid DEFAULT gen_random_uuid() NOT NULL,
     thread_id uuid NOT NULL,
+    sequence bigint NOT NULL,
     author_id uuid NOT NULL,
     body text NOT NULL,
     review_id uuid,
@@ -384,6 +477,14 @@ CREATE TABLE public.remarks (
     CONSTRAINT remarks_body_check CHECK (((length(body) >= 1) AND (length(body) <= 4000)))
 );
 ALTER TABLE ONLY public.remarks FORCE ROW LEVEL SECURITY;
+ALTER TABLE public.remarks ALTER COLUMN sequence ADD GENERATED ALWAYS AS IDENTITY (
+    SEQUENCE NAME public.remarks_sequence_seq
+    START WITH 1
+    INCREMENT BY 1
+    NO MINVALUE
+    NO MAXVALUE
+    CACHE 1
+);
 CREATE TABLE public.reports (
     organisation_id uuid NOT NULL,
     report_id uuid DEFAULT gen_random_uuid() NOT NULL,
@@ -520,18 +621,19 @@ CREATE TABLE public.uploads (
     taken_at timestamp with time zone,
     sha256 text NOT NULL,
     size bigint NOT NULL,
-    received bigint DEFAULT 0 NOT NULL,
-    state text DEFAULT 'receiving'::text NOT NULL,
+    parts jsonb NOT NULL,
+    state text DEFAULT 'open'::text NOT NULL,
     refusal text,
     attachment_id uuid,
     expires_at timestamp with time zone NOT NULL,
     created_at timestamp with time zone DEFAULT now() NOT NULL,
     CONSTRAINT uploads_anchor_check CHECK ((length(anchor) <= 300)),
-    CONSTRAINT uploads_check CHECK (((received >= 0) AND (received <= size))),
+    CONSTRAINT uploads_check CHECK (((state = 'attached'::text) = (attachment_id IS NOT NULL))),
+    CONSTRAINT uploads_check1 CHECK (((state = 'refused'::text) = (refusal IS NOT NULL))),
     CONSTRAINT uploads_name_check CHECK (((length(name) >= 1) AND (length(name) <= 120))),
     CONSTRAINT uploads_sha256_check CHECK ((sha256 ~ '^[0-9a-f]{64}$'::text)),
     CONSTRAINT uploads_size_check CHECK (((size >= 1) AND (size <= 15728640))),
-    CONSTRAINT uploads_state_check CHECK ((state = ANY (ARRAY['receiving'::text, 'received'::text, 'refused'::text])))
+    CONSTRAINT uploads_state_check CHECK ((state = ANY (ARRAY['open'::text, 'complete'::text, 'attached'::text, 'refused'::text])))
 );
 ALTER TABLE ONLY public.uploads FORCE ROW LEVEL SECURITY;
 ALTER TABLE ONLY public.acceptances
@@ -594,6 +696,8 @@ ALTER TABLE ONLY public.register_entries
     ADD CONSTRAINT register_entries_pkey PRIMARY KEY (organisation_id, sequence);
 ALTER TABLE ONLY public.register_heads
     ADD CONSTRAINT register_heads_pkey PRIMARY KEY (organisation_id);
+ALTER TABLE ONLY public.register_nodes
+    ADD CONSTRAINT register_nodes_pkey PRIMARY KEY (organisation_id, level, index);
 ALTER TABLE ONLY public.remarks
     ADD CONSTRAINT remarks_pkey PRIMARY KEY (organisation_id, remark_id);
 ALTER TABLE ONLY public.reports
@@ -616,7 +720,7 @@ ALTER TABLE ONLY public.tokens
     ADD CONSTRAINT tokens_pkey PRIMARY KEY (organisation_id, token_id);
 ALTER TABLE ONLY public.uploads
     ADD CONSTRAINT uploads_pkey PRIMARY KEY (organisation_id, upload_id);
-CREATE INDEX acceptances_by_report ON public.acceptances USING btree (organisation_id, report_id, anchor, decided_at DESC);
+CREATE INDEX acceptances_by_report ON public.acceptances USING btree (organisation_id, report_id, sequence);
 CREATE INDEX audit_events_by_person ON public.audit_events USING btree (organisation_id, person_id, sequence DESC);
 CREATE INDEX audit_events_by_subject ON public.audit_events USING btree (organisation_id, subject, sequence DESC);
 CREATE INDEX documents_by_issue ON public.documents USING btree (organisation_id, issued_at DESC, document_id DESC);
@@ -633,8 +737,8 @@ CREATE UNIQUE INDEX one_open_review ON public.reviews USING btree (organisation_
 CREATE INDEX people_by_email ON public.people USING btree (email);
 CREATE INDEX people_by_id ON public.people USING btree (person_id);
 CREATE INDEX register_entries_by_document ON public.register_entries USING btree (organisation_id, document_id);
-CREATE INDEX remarks_by_thread ON public.remarks USING btree (organisation_id, thread_id, created_at);
-CREATE INDEX reports_by_corrected ON public.reports USING btree (organisation_id, corrects) WHERE (corrects IS NOT NULL);
+CREATE INDEX remarks_by_thread ON public.remarks USING btree (organisation_id, thread_id, sequence);
+CREATE UNIQUE INDEX reports_by_corrected ON public.reports USING btree (organisation_id, corrects) WHERE ((corrects IS NOT NULL) AND (discarded_at IS NULL));
 CREATE INDEX reports_by_due ON public.reports USING btree (organisation_id, due_on) WHERE (state = 'issued'::text);
 CREATE INDEX reports_by_reference ON public.reports USING btree (organisation_id, reference);
 CREATE INDEX reports_by_search ON public.reports USING gin (search public.gin_trgm_ops);
@@ -649,8 +753,12 @@ CREATE INDEX threads_by_assignee ON public.threads USING btree (organisation_id,
 CREATE INDEX threads_by_report ON public.threads USING btree (organisation_id, report_id, created_at);
 CREATE INDEX tokens_by_hash ON public.tokens USING btree (token_hash);
 CREATE INDEX tokens_by_person ON public.tokens USING btree (organisation_id, person_id);
-CREATE INDEX uploads_by_expiry ON public.uploads USING btree (expires_at) WHERE (state = 'receiving'::text);
+CREATE INDEX uploads_by_expiry ON public.uploads USING btree (expires_at) WHERE (state = 'open'::text);
+CREATE INDEX uploads_by_report ON public.uploads USING btree (organisation_id, report_id, created_at);
 CREATE TRIGGER chain BEFORE INSERT ON public.audit_events FOR EACH ROW EXECUTE FUNCTION public.chain_audit_event();
+CREATE TRIGGER check_approval BEFORE UPDATE ON public.reports FOR EACH ROW EXECUTE FUNCTION public.check_approval();
+CREATE TRIGGER check_issue BEFORE INSERT ON public.documents FOR EACH ROW EXECUTE FUNCTION public.check_issue();
+CREATE TRIGGER check_issued BEFORE UPDATE ON public.reports FOR EACH ROW EXECUTE FUNCTION public.check_issued();
 CREATE TRIGGER check_step BEFORE UPDATE ON public.reports FOR EACH ROW EXECUTE FUNCTION public.check_report_step();
 CREATE TRIGGER keep_published BEFORE DELETE OR UPDATE ON public.remarks FOR EACH ROW EXECUTE FUNCTION public.keep_published();
 CREATE TRIGGER keep_published BEFORE DELETE OR UPDATE ON public.threads FOR EACH ROW EXECUTE FUNCTION public.keep_published();
@@ -662,6 +770,7 @@ CREATE TRIGGER no_change BEFORE DELETE OR UPDATE ON public.documents FOR EACH RO
 CREATE TRIGGER no_change BEFORE DELETE OR UPDATE ON public.files FOR EACH ROW EXECUTE FUNCTION public.refuse_change();
 CREATE TRIGGER no_change BEFORE DELETE OR UPDATE ON public.instrument_versions FOR EACH ROW EXECUTE FUNCTION public.refuse_change();
 CREATE TRIGGER no_change BEFORE DELETE OR UPDATE ON public.register_entries FOR EACH ROW EXECUTE FUNCTION public.refuse_change();
+CREATE TRIGGER no_change BEFORE DELETE OR UPDATE ON public.register_nodes FOR EACH ROW EXECUTE FUNCTION public.refuse_change();
 CREATE TRIGGER no_change BEFORE DELETE OR UPDATE ON public.revisions FOR EACH ROW EXECUTE FUNCTION public.refuse_change();
 CREATE TRIGGER no_change BEFORE DELETE OR UPDATE ON public.seals FOR EACH ROW EXECUTE FUNCTION public.refuse_change();
 CREATE TRIGGER no_truncate BEFORE TRUNCATE ON public.acceptances FOR EACH STATEMENT EXECUTE FUNCTION public.refuse_change();
@@ -672,8 +781,11 @@ CREATE TRIGGER no_truncate BEFORE TRUNCATE ON public.documents FOR EACH STATEMEN
 CREATE TRIGGER no_truncate BEFORE TRUNCATE ON public.files FOR EACH STATEMENT EXECUTE FUNCTION public.refuse_change();
 CREATE TRIGGER no_truncate BEFORE TRUNCATE ON public.instrument_versions FOR EACH STATEMENT EXECUTE FUNCTION public.refuse_change();
 CREATE TRIGGER no_truncate BEFORE TRUNCATE ON public.register_entries FOR EACH STATEMENT EXECUTE FUNCTION public.refuse_change();
+CREATE TRIGGER no_truncate BEFORE TRUNCATE ON public.register_nodes FOR EACH STATEMENT EXECUTE FUNCTION public.refuse_change();
 CREATE TRIGGER no_truncate BEFORE TRUNCATE ON public.revisions FOR EACH STATEMENT EXECUTE FUNCTION public.refuse_change();
 CREATE TRIGGER no_truncate BEFORE TRUNCATE ON public.seals FOR EACH STATEMENT EXECUTE FUNCTION public.refuse_change();
+CREATE TRIGGER second_person BEFORE INSERT ON public.acceptances FOR EACH ROW EXECUTE FUNCTION public.check_second_person('decided_by');
+CREATE TRIGGER second_person BEFORE INSERT OR UPDATE ON public.reviews FOR EACH ROW EXECUTE FUNCTION public.check_second_person('reviewer_id');
 ALTER TABLE ONLY public.acceptances
     ADD CONSTRAINT acceptances_organisation_id_decided_by_fkey FOREIGN KEY (organisation_id, decided_by) REFERENCES public.people(organisation_id, person_id);
 ALTER TABLE ONLY public.acceptances
@@ -734,6 +846,8 @@ ALTER TABLE ONLY public.register_entries
     ADD CONSTRAINT register_entries_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
 ALTER TABLE ONLY public.register_heads
     ADD CONSTRAINT register_heads_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
+ALTER TABLE ONLY public.register_nodes
+    ADD CONSTRAINT register_nodes_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
 ALTER TABLE ONLY public.remarks
     ADD CONSTRAINT remarks_organisation_id_author_id_fkey FOREIGN KEY (organisation_id, author_id) REFERENCES public.people(organisation_id, person_id);
 ALTER TABLE ONLY public.remarks
@@ -768,6 +882,8 @@ ALTER TABLE ONLY public.threads
     ADD CONSTRAINT threads_organisation_id_review_id_fkey FOREIGN KEY (organisation_id, review_id) REFERENCES public.reviews(organisation_id, review_id);
 ALTER TABLE ONLY public.tokens
     ADD CONSTRAINT tokens_organisation_id_person_id_fkey FOREIGN KEY (organisation_id, person_id) REFERENCES public.people(organisation_id, person_id);
+ALTER TABLE ONLY public.uploads
+    ADD CONSTRAINT uploads_organisation_id_attachment_id_fkey FOREIGN KEY (organisation_id, attachment_id) REFERENCES public.attachments(organisation_id, attachment_id);
 ALTER TABLE ONLY public.uploads
     ADD CONSTRAINT uploads_organisation_id_fkey FOREIGN KEY (organisation_id) REFERENCES public.organisations(organisation_id);
 ALTER TABLE ONLY public.uploads
@@ -818,6 +934,7 @@ CREATE POLICY own_organisation ON public.organisations TO skerry_app USING ((org
 CREATE POLICY own_organisation ON public.people TO skerry_app USING ((organisation_id = public.current_organisation())) WITH CHECK ((organisation_id = public.current_organisation()));
 CREATE POLICY own_organisation ON public.register_entries TO skerry_app USING ((organisation_id = public.current_organisation())) WITH CHECK ((organisation_id = public.current_organisation()));
 CREATE POLICY own_organisation ON public.register_heads TO skerry_app USING ((organisation_id = public.current_organisation())) WITH CHECK ((organisation_id = public.current_organisation()));
+CREATE POLICY own_organisation ON public.register_nodes TO skerry_app USING ((organisation_id = public.current_organisation())) WITH CHECK ((organisation_id = public.current_organisation()));
 CREATE POLICY own_organisation ON public.remarks TO skerry_app USING ((organisation_id = public.current_organisation())) WITH CHECK ((organisation_id = public.current_organisation()));
 CREATE POLICY own_organisation ON public.reports TO skerry_app USING ((organisation_id = public.current_organisation())) WITH CHECK ((organisation_id = public.current_organisation()));
 CREATE POLICY own_organisation ON public.reviews TO skerry_app USING ((organisation_id = public.current_organisation())) WITH CHECK ((organisation_id = public.current_organisation()));
@@ -829,6 +946,7 @@ CREATE POLICY own_organisation ON public.uploads TO skerry_app USING ((organisat
 ALTER TABLE public.people ENABLE ROW LEVEL SECURITY;
 ALTER TABLE public.register_entries ENABLE ROW LEVEL SECURITY;
 ALTER TABLE public.register_heads ENABLE ROW LEVEL SECURITY;
+ALTER TABLE public.register_nodes ENABLE ROW LEVEL SECURITY;
 ALTER TABLE public.remarks ENABLE ROW LEVEL SECURITY;
 ALTER TABLE public.reports ENABLE ROW LEVEL SECURITY;
 ALTER TABLE public.reviews ENABLE ROW LEVEL SECURITY;
@@ -922,6 +1040,7 @@ GRANT SELECT,INSERT ON TABLE public.register_heads TO skerry_app;
 GRANT UPDATE(size) ON TABLE public.register_heads TO skerry_app;
 GRANT UPDATE(chain_hash) ON TABLE public.register_heads TO skerry_app;
 GRANT UPDATE(peaks) ON TABLE public.register_heads TO skerry_app;
+GRANT SELECT,INSERT ON TABLE public.register_nodes TO skerry_app;
 GRANT SELECT,INSERT,DELETE ON TABLE public.remarks TO skerry_app;
 GRANT UPDATE(body) ON TABLE public.remarks TO skerry_app;
 GRANT UPDATE(published_at) ON TABLE public.remarks TO skerry_app;

@@ -4,6 +4,7 @@ import type PgBoss from 'pg-boss'
 import pino, { type Logger } from 'pino'
 import { openDatabase } from './db.ts'
 import type { Env } from './env.ts'
+import { openStore } from './files/open-store.ts'
 import { jobsThrough, openBoss } from './jobs/jobs.ts'
 import { isMigrated } from './migrate.ts'
 import type { Services } from './services.ts'
@@ -51,6 +52,7 @@ export function openServices(
     db,
     log,
     jobs: jobsThrough(boss),
+    store: openStore(env),
     clock,
     ready: async () => (stopping ? ['stopping'] : await waitingFor(db, known)),
   }

@@ -1,6 +1,7 @@
 import type { Knex } from 'knex'
 import type { Logger } from 'pino'
 import type { Env } from './env.ts'
+import type { ObjectStore } from './files/store.ts'
 import type { Jobs } from './jobs/jobs.ts'
 
 /** Everything that routes and jobs lean on besides their transaction; made by `main.ts` and by tests. */
@@ -9,6 +10,8 @@ export interface Services {
   readonly db: Knex
   readonly log: Logger
   readonly jobs: Jobs
+  /** Photos, attachments and issued reports, by the hash of their bytes. */
+  readonly store: ObjectStore
   readonly clock: () => Date
   /** What the process still waits for before it can work; empty when it is ready. */
   readonly ready: () => Promise<readonly string[]>

@@ -20,12 +20,18 @@ export class Attempt {
     return this.route.method === 'get' && this.route.audited !== true
   }
 
+  /** The call with what its path names; nothing where that is not to be seen. */
+  async load(call: AnyCall): Promise<AnyCall | undefined> {
+    const { load } = this.route
+    if (load === undefined) return call
+    const subject = await load(call as never)
+    return subject === undefined ? undefined : { ...call, subject }
+  }
+
   async run(call: AnyCall, request: Request): Promise<Answer | Refused> {
-    const { route } = this
-    const subject = await route.load?.(call as never)
-    if (route.load !== undefined && subject === undefined) return refuse('not-found')
-    const refused = this.#policy(call.actor, subject) ?? this.#version(request, subject) ?? (await this.#again(call))
-    return refused ?? (await route.run({ ...call, subject } as never))
+    const { actor, subject } = call
+    const refused = this.#policy(actor, subject) ?? this.#version(request, subject) ?? (await this.#again(call))
+    return refused ?? (await this.route.run(call as never))
   }
 
   #policy(actor: Actor, subject: unknown): Refused | undefined {

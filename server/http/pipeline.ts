@@ -107,7 +107,9 @@ class Pipeline {
     const refused: { call?: AnyCall } = {}
     const work = async (tx: Tx): Promise<Outcome> => {
       const actor = await this.#actor(tx, caller)
-      const call = { ...base, tx, actor }
+      const kept = await this.#kept(tx, key)
+      if (kept !== undefined) return kept
+      const call = await this.#loaded({ ...base, tx, actor })
       refused.call = call
       return await this.#once(call, request, key)
     }
@@ -128,19 +130,26 @@ class Pipeline {
     return actor
   }
 
+  async #loaded(call: AnyCall): Promise<AnyCall> {
+    const loaded = await this.#attempt.load(call)
+    if (loaded === undefined) throw new RolledBack(refuse('not-found'))
+    return loaded
+  }
+
   async #unknown(call: AnyCall, request: Request): Promise<Outcome> {
-    const answer = await this.#attempt.run(call, request)
+    const answer = await this.#attempt.run(await this.#loaded(call), request)
     if (isRefused(answer)) throw new RolledBack(answer)
     return answer.bytes === undefined ? ready(answer) : answer
   }
 
   /** Under a key the same request is done once, and answered the same ever after. */
+  async #kept(tx: Tx, key: RequestKey | undefined): Promise<Ready | undefined> {
+    const kept = await key?.find(tx)
+    if (kept !== undefined && isRefused(kept)) throw new RolledBack(kept)
+    return kept
+  }
+
   async #once(call: AnyCall, request: Request, key: RequestKey | undefined): Promise<Outcome> {
-    const kept = await key?.find(call.tx)
-    if (kept !== undefined) {
-      if (isRefused(kept)) throw new RolledBack(kept)
-      return kept
-    }
     const answer = await this.#attempt.run(call, request)
     if (isRefused(answer)) throw new RolledBack(answer)
     await this.#attempt.audit(call, answer)

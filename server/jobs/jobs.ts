@@ -8,6 +8,7 @@ import { plainQuery, type Tx } from '#server/db.ts'
  */
 export const QUEUES = {
   'seal-document': { retryLimit: 8, retryDelay: 5, retryBackoff: true, expireInSeconds: 120, deadLetter: 'dead' },
+  'develop-photo': { retryLimit: 5, retryDelay: 5, retryBackoff: true, expireInSeconds: 120, deadLetter: 'dead' },
   'send-mail': { retryLimit: 12, retryDelay: 20, retryBackoff: true, expireInSeconds: 60, deadLetter: 'dead' },
   'send-checkpoint': { retryLimit: 8, retryDelay: 30, retryBackoff: true, expireInSeconds: 60, deadLetter: 'dead' },
   remind: { retryLimit: 5, retryDelay: 60, retryBackoff: true, expireInSeconds: 300, deadLetter: 'dead' },
@@ -20,6 +21,7 @@ export type Queue = keyof typeof QUEUES
 /** What each queue's jobs carry. */
 export interface JobData {
   'seal-document': { readonly organisation: string; readonly document: string }
+  'develop-photo': { readonly organisation: string; readonly upload: string }
   'send-mail': { readonly organisation: string; readonly mail: string }
   'send-checkpoint': { readonly organisation: string }
   remind: Record<string, never>

@@ -1,4 +1,5 @@
 import type { Route } from '#server/http/route.ts'
+import { ATTACHMENT_ROUTES } from './attachments.ts'
 import { CHECK_ROUTES } from './check.ts'
 import { REMARK_ROUTES } from './remarks.ts'
 import { REPORT_STEP_ROUTES } from './report-steps.ts'
@@ -8,6 +9,7 @@ import { REVIEW_ROUTES } from './review.ts'
 import { REVISION_ROUTES } from './revisions.ts'
 import { SESSION_ROUTES } from './session.ts'
 import { THREAD_ROUTES } from './threads.ts'
+import { UPLOAD_ROUTES } from './uploads.ts'
 
 /** Every route of the API. What is not here does not exist; the OpenAPI document and the access matrix are made from it. */
 export const ROUTES: readonly Route[] = [
@@ -20,4 +22,6 @@ export const ROUTES: readonly Route[] = [
   ...REMARK_ROUTES,
   ...REVIEW_ROUTES,
   ...CHECK_ROUTES,
+  ...UPLOAD_ROUTES,
+  ...ATTACHMENT_ROUTES,
 ]
