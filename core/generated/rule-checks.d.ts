@@ -279,3 +279,6 @@ export declare const c277: (values: object) => boolean
 export declare const c278: (values: object) => boolean
 export declare const c279: (values: object) => boolean
 export declare const c280: (values: object) => boolean
+export declare const c281: (values: object) => boolean
+export declare const c282: (values: object) => boolean
+export declare const c283: (values: object) => boolean

@@ -29,12 +29,13 @@ export const circuitLoopQuantities: readonly Quantity<CircuitItem>[] = [
     name: 'operating_current',
     unit: 'A',
     title: 'Operating current of the device Ia',
-    formula: 'B 5 · In, C 10 · In, D 20 · In; fuse gG by table for 0.4 s or 5 s',
-    source: 'IEC 60898-1; IEC 60269-1 as printed in the manual of a loop tester, p. 28',
-    from: ['device', 'disconnection_time'],
-    compute: ({ circuit }, _scene, known) => {
+    formula: 'B 5 · In, C 10 · In, D 20 · In; fuse gG by the rule book’s table for 0.4 s or 5 s',
+    source:
+      'IEC 60898-1; IEC 60269-1 as printed in the manual of a loop tester, p. 28; BS 88-2 by BS 7671:2018, Tables 41.2 and 41.4',
+    from: ['device', 'disconnection_time', 'book.fuse_currents'],
+    compute: ({ circuit }, { parameters }, known) => {
       const time = knownNumber(known, 'disconnection_time')
-      return time === undefined ? undefined : operatingCurrent(circuit.device, time)
+      return time === undefined ? undefined : operatingCurrent(circuit.device, time, parameters.fuse_currents)
     },
   },
   {

@@ -45,10 +45,12 @@ export const overcurrentFaultQuantities: readonly Quantity<OvercurrentItem>[] = 
     name: 'operating_current',
     unit: 'A',
     title: 'Operating current of the device Ia',
-    formula: 'B 5 · In, C 10 · In, D 20 · In; fuse gG by table for 5 s',
-    source: 'IEC 60898-1; IEC 60269-1 as printed in the manual of a loop tester, p. 28',
-    from: ['device', 'disconnection_time'],
-    compute: ({ device }, { install }) => operatingCurrent(device.device, distributionTime(install.supply.earthing)),
+    formula: 'B 5 · In, C 10 · In, D 20 · In; fuse gG by the rule book’s table for 5 s',
+    source:
+      'IEC 60898-1; IEC 60269-1 as printed in the manual of a loop tester, p. 28; BS 88-2 by BS 7671:2018, Table 41.4',
+    from: ['device', 'disconnection_time', 'book.fuse_currents'],
+    compute: ({ device }, { install, parameters }) =>
+      operatingCurrent(device.device, distributionTime(install.supply.earthing), parameters.fuse_currents),
   },
   {
     name: 'loop_limit',

@@ -1,20 +1,29 @@
 import type { Device } from '#core/install.ts'
 import breakers from '#schemas/tables/breaker-bands.json' with { type: 'json' }
 import fuses from '#schemas/tables/fuse-currents.json' with { type: 'json' }
+import british from '#schemas/tables/fuse-impedances-bs88.json' with { type: 'json' }
+import type { Parameters } from './parameters.ts'
 
-const FUSE_ROWS: Readonly<Record<string, Readonly<Record<string, number>> | undefined>> = fuses.rows
+type Rows = Readonly<Record<string, Readonly<Record<string, number>> | undefined>>
+
+const FUSE_ROWS: Rows = fuses.rows
+const BRITISH_ROWS: Rows = british.rows
 
 /**
  * Current Ia in A that operates a device within a time: for a breaker the upper end of its instantaneous band, whatever
- * the time; for a fuse gG the table.
+ * the time; for a fuse gG the table of the rule book.
  *
- * @param time required disconnection time in s; the fuse table holds 0.4 s and 5 s only
+ * @param time required disconnection time in s; the fuse tables hold 0.4 s and 5 s only
+ * @param table the rule book's `fuse_currents`
  * @returns undefined for a fuse at another time or of a rating that the table does not hold
- * @source IEC 60898-1 (B 5, C 10, D 20 times the rating); gG by a loop tester's manual, p. 28, after IEC 60269-1
+ * @source IEC 60898-1 (B 5, C 10, D 20 times the rating); gG by a loop tester's manual, p. 28, after IEC 60269-1; BS
+ *   88-2 from the impedances of BS 7671:2018, Tables 41.2 and 41.4, as read on a reference page
  */
-export function operatingCurrent(device: Device, time: number): number | undefined {
+export function operatingCurrent(device: Device, time: number, table: Parameters['fuse_currents']): number | undefined {
   if (device.kind === 'breaker') return breakers.instantaneous[device.curve] * device.rated
-  return FUSE_ROWS[String(time)]?.[String(device.rated)]
+  if (table === 'IEC 60269-1') return FUSE_ROWS[String(time)]?.[String(device.rated)]
+  const impedance = BRITISH_ROWS[String(time)]?.[String(device.rated)]
+  return impedance === undefined ? undefined : (british.factor * british.voltage) / impedance
 }
 
 /**

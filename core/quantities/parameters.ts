@@ -7,6 +7,8 @@ export interface Parameters {
   readonly loop_voltage_factor: number
   /** Factor on the loop limit before a cold reading is held against it */
   readonly loop_reading_factor: number
+  /** Which publication's fuses stand behind `gG` */
+  readonly fuse_currents: 'IEC 60269-1' | 'BS 88-2'
   /** Ω·mm²/m at operating temperature, copper and aluminium, for the voltage drop */
   readonly copper_resistivity: number
   readonly aluminium_resistivity: number

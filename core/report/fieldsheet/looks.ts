@@ -1,4 +1,4 @@
-import { INSPECTION_ITEMS } from '#core/sheets/inspection.ts'
+import { INSPECTION_ITEMS, itemField } from '#core/sheets/inspection.ts'
 import { type Block, table } from '../blocks.ts'
 import { capital } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
@@ -8,11 +8,16 @@ const RESULT = 26
 const NOTE = 38
 const ON_SITE = 76
 
+/** Items that the file's rule book asks for. */
+function asked({ judged }: ReportScene): readonly string[] {
+  const fields = new Set(judged.book.rules.flatMap(({ reads }) => reads))
+  return INSPECTION_ITEMS.filter((item) => fields.has(itemField(item)))
+}
+
 /** Things to look at, with the result where there is one. */
-export function looks({ install }: ReportScene): Block[] {
-  const known = new Map((install.inspection ?? []).map(({ item, result }) => [item, result]))
-  const own = [...known.keys()].filter((item) => !(INSPECTION_ITEMS as readonly string[]).includes(item))
-  const rows = [...INSPECTION_ITEMS, ...own].map((item) => ({
+export function looks(scene: ReportScene): Block[] {
+  const known = new Map((scene.install.inspection ?? []).map(({ item, result }) => [item, result]))
+  const rows = [...new Set([...asked(scene), ...known.keys()])].map((item) => ({
     anchor: `point/inspection/${item}/row`,
     head: { text: capital(item) },
     cells: [

@@ -16,13 +16,13 @@ describe('our formulas against a circuit simulator', () => {
     const ours = faultCurrent(230, 0.35 + conductors)
     expect(simulated).toBeCloseTo(289.4538, 3)
     expect(ours).toBeCloseTo(simulated ?? 0, 4)
-    expect(ours).toBeGreaterThan(operatingCurrent(b16, 0.4) ?? 0)
+    expect(ours).toBeGreaterThan(operatingCurrent(b16, 0.4, 'IEC 60269-1') ?? 0)
   })
 
   test('the same circuit behind 5 kVA at twice their rating: 43.48 A leave the B16 closed', () => {
     const [simulated] = solve(['I1 0 m dc 0 ac 43.478 0', 'R2 m e 0.2223', 'Vm e 0 dc 0 ac 0 0'], ['mag(i(Vm))'])
     expect(simulated).toBeCloseTo(2 * (5000 / 230), 2)
-    expect(simulated).toBeLessThan(operatingCurrent(b16, 0.4) ?? 0)
+    expect(simulated).toBeLessThan(operatingCurrent(b16, 0.4, 'IEC 60269-1') ?? 0)
   })
 
   test('voltage drop: 16 A over 30 m of 2.5 mm² at 7.41 mΩ/m drop 7.114 V, 3.093 %', () => {

@@ -28,6 +28,7 @@ export const parameters: Parameters = {
   interface_f_low: null,
   reconnect_after: null,
   unbalance: null,
+  fuse_currents: 'IEC 60269-1',
   array_band: 'factor',
   array_band_factor: 1.25,
   string_fuse_floor: 1.5,

@@ -12,7 +12,7 @@ const breaker = (curve: 'B' | 'C' | 'D', rated: number): Device => ({ kind: 'bre
 const fuse = (rated: number): Device => ({ kind: 'fuse', curve: 'gG', rated })
 
 function limit(device: Device, factor: number, time = 0.4): number {
-  return loopLimit(230, factor, operatingCurrent(device, time) ?? Number.NaN)
+  return loopLimit(230, factor, operatingCurrent(device, time, 'IEC 60269-1') ?? Number.NaN)
 }
 
 describe('longest disconnection time, IEC 60364-4-41', () => {
@@ -135,7 +135,9 @@ describe('highest fault-loop impedance', () => {
     const ceiling = loopLimitMeasured(limit(breaker('C', 16), 1), 2 / 3)
     expect(ceiling).toBeCloseTo(0.9583, 4)
     expect(0.954).toBeLessThanOrEqual(ceiling)
-    expect(faultCurrent(230, 0.954) / 1.3 / 1.24).toBeLessThan(operatingCurrent(breaker('C', 16), 0.4) ?? 0)
+    expect(faultCurrent(230, 0.954) / 1.3 / 1.24).toBeLessThan(
+      operatingCurrent(breaker('C', 16), 0.4, 'IEC 60269-1') ?? 0,
+    )
   })
 
   test('Ze 0.35 Ω and R1 + R2 1.446 Ω drive 128 A; a rod of 50 Ω only 4.6 A, too little for 5 A (published examples)', () => {
@@ -146,15 +148,15 @@ describe('highest fault-loop impedance', () => {
 
 describe('operating currents', () => {
   test('type C takes 10 times its rating, not the 5 times that one newsletter writes; D takes 20 times', () => {
-    expect(operatingCurrent(breaker('C', 32), 0.4)).toBe(320)
-    expect(operatingCurrent(breaker('D', 10), 5)).toBe(200)
+    expect(operatingCurrent(breaker('C', 32), 0.4, 'IEC 60269-1')).toBe(320)
+    expect(operatingCurrent(breaker('D', 10), 5, 'IEC 60269-1')).toBe(200)
   })
 
   test('a fuse is known for 0.4 s and 5 s only, and for the ratings of the table', () => {
-    expect(operatingCurrent(fuse(32), 0.4)).toBe(275)
-    expect(operatingCurrent(fuse(32), 5)).toBe(150)
-    expect(operatingCurrent(fuse(32), 0.2)).toBeUndefined()
-    expect(operatingCurrent(fuse(35), 5)).toBeUndefined()
+    expect(operatingCurrent(fuse(32), 0.4, 'IEC 60269-1')).toBe(275)
+    expect(operatingCurrent(fuse(32), 5, 'IEC 60269-1')).toBe(150)
+    expect(operatingCurrent(fuse(32), 0.2, 'IEC 60269-1')).toBeUndefined()
+    expect(operatingCurrent(fuse(35), 5, 'IEC 60269-1')).toBeUndefined()
   })
 
   test('I2: 1.45 times a breaker, 1.6 times a fuse from 16 A, 1.9 times from 6 A, unknown below', () => {

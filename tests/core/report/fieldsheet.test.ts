@@ -85,6 +85,13 @@ describe('the field sheet', () => {
     expect(sheet.get('point/residual/RCD1/double/island')).toMatchObject({ note: '≤ 150', box: false })
   })
 
+  it('asks for what the rule book wants looked at, and for nothing of another country', () => {
+    const item = 'point/inspection/emergency services sign'
+    expect(sheetOf(judgedBase({ set: { 'report.rulebook': 'au' } })).get(item)?.box).toBe(true)
+    expect(sheetOf(judgedBase()).has(item)).toBe(false)
+    expect(sheetOf(judgedBase()).has('point/inspection/terminals tight')).toBe(true)
+  })
+
   it('puts the cautions first', () => {
     const [first] = fieldsheetModel(judgedExample('reed-hall-design')).sections
     expect(first?.blocks[0]).toMatchObject({ kind: 'notice', box: 'box-caution' })
