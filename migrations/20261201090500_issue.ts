@@ -136,6 +136,8 @@ export async function up(knex: Knex): Promise<void> {
       size bigint not null,
       root text not null check (root ~ '^[0-9a-f]{64}$'),
       signed text not null,
+      -- PEM of whoever signed: a later key does not take the proof away from an older checkpoint.
+      certificate text not null,
       made_at timestamptz not null,
       primary key (organisation_id, size)
     );

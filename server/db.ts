@@ -23,6 +23,10 @@ interface Connection {
   query(sql: string, done: (error: Error | null) => void): void
 }
 
+const nothing = (): void => undefined
+/** What Knex would print beside our log lines is thrown as well, and told where it is caught. */
+const QUIET = { warn: nothing, error: nothing, debug: nothing, deprecate: nothing }
+
 /**
  * A pool whose every connection acts as the group role of the running server, whatever role it signed in as.
  *
@@ -38,6 +42,7 @@ export function openDatabase({
   const settings = `set role ${APP_ROLE}; set statement_timeout = ${statementTimeout}; set lock_timeout = 5000; set idle_in_transaction_session_timeout = 15000; set timezone = 'UTC'`
   return createKnex({
     client: 'pg',
+    log: QUIET,
     connection: { connectionString: url, application_name: name, connectionTimeoutMillis: acquireTimeout },
     pool: {
       min: 0,

@@ -7,6 +7,7 @@ import type { Env } from './env.ts'
 import { openStore } from './files/open-store.ts'
 import { jobsThrough, openBoss } from './jobs/jobs.ts'
 import { isMigrated } from './migrate.ts'
+import { openSigner, type Signer } from './seal/signer.ts'
 import type { Services } from './services.ts'
 
 /** Services with what must be closed at the end. */
@@ -36,6 +37,20 @@ async function waitingFor(db: Knex, known: readonly string[]): Promise<string[]>
   }
 }
 
+/** Opens the key once; a failure is tried again by whoever needs it next. */
+function signerOf(env: Env, clock: () => Date): () => Promise<Signer> {
+  let opened: Promise<Signer> | undefined
+  return async () => {
+    opened ??= openSigner(env.KEY_DIR, new URL(env.BASE_URL).hostname, clock())
+    try {
+      return await opened
+    } catch (error) {
+      opened = undefined
+      throw error
+    }
+  }
+}
+
 /** Opens what a process of the server needs: the web and the worker differ in nothing but what they do with it. */
 export function openServices(
   env: Env,
@@ -53,6 +68,7 @@ export function openServices(
     log,
     jobs: jobsThrough(boss),
     store: openStore(env),
+    signer: signerOf(env, clock),
     clock,
     ready: async () => (stopping ? ['stopping'] : await waitingFor(db, known)),
   }

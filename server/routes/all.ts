@@ -1,6 +1,7 @@
 import type { Route } from '#server/http/route.ts'
 import { ATTACHMENT_ROUTES } from './attachments.ts'
 import { CHECK_ROUTES } from './check.ts'
+import { ISSUE_ROUTES } from './issue.ts'
 import { REMARK_ROUTES } from './remarks.ts'
 import { REPORT_STEP_ROUTES } from './report-steps.ts'
 import { VIEW_ROUTES } from './report-views.ts'
@@ -21,6 +22,7 @@ export const ROUTES: readonly Route[] = [
   ...THREAD_ROUTES,
   ...REMARK_ROUTES,
   ...REVIEW_ROUTES,
+  ...ISSUE_ROUTES,
   ...CHECK_ROUTES,
   ...UPLOAD_ROUTES,
   ...ATTACHMENT_ROUTES,

@@ -1,5 +1,5 @@
 import type { Response } from 'supertest'
-import type { Browser } from './house.ts'
+import { type Browser, PASSWORD } from './house.ts'
 
 /** What a person does with a report, each step with the version that the server has told last. */
 export const key = (): string => crypto.randomUUID()
@@ -19,7 +19,7 @@ export async function upload(browser: Browser, text: string, idempotency = key()
 }
 
 export async function etagOf(browser: Browser, report: string): Promise<string> {
-  return well(await browser.get(`/api/reports/${report}`)).headers['etag'] ?? ''
+  return well(await patiently(async () => await browser.get(`/api/reports/${report}`))).headers['etag'] ?? ''
 }
 
 export async function revise(browser: Browser, report: string, text: string): Promise<Response> {
@@ -67,4 +67,26 @@ export async function remark(
   return await reviewer
     .post(`/api/reports/${report}/threads`)
     .send({ anchor, kind, body: `A ${kind} of the reviewer.` })
+}
+
+/** Brings a file through review: sent, everything accepted, approved. */
+export async function approved(installer: Browser, reviewer: Browser, text: string): Promise<string> {
+  const report = well(await upload(installer, text)).body.id
+  well(await act(installer, report, 'submit'))
+  await decideAll(reviewer, report)
+  well(await act(reviewer, report, 'approve'))
+  return report
+}
+
+export async function issue(reviewer: Browser, report: string, idempotency = key()): Promise<Response> {
+  return await act(reviewer, report, 'issue', { password: PASSWORD }, idempotency)
+}
+
+/** Sends again with the same key while the server says that it is busy, as a patient client does. */
+export async function patiently(send: () => Promise<Response>): Promise<Response> {
+  for (let left = 40; ; left--) {
+    const answer = await send()
+    if (answer.status !== 503 || left === 0) return answer
+    await new Promise((resolve) => setTimeout(resolve, 250))
+  }
 }
