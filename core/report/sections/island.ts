@@ -1,5 +1,5 @@
-import { LINES } from '#core/glossary.ts'
 import { islandBudget } from '#core/quantities/budget.ts'
+import { phaseLoads } from '#core/quantities/inverter-load.ts'
 import { limitBar } from '../bars.ts'
 import { type Block, type Entry, type Row, type Section, table } from '../blocks.ts'
 import { budgetCurve } from '../curve.ts'
@@ -60,44 +60,35 @@ function batteryEntries(
 const roundedLoad = (load: number): string => amount(Number(load.toPrecision(3)), 'VA')
 
 function lineRows(scene: ReportScene, id: string): Row[] {
-  const loads = scene.value(id, 'phase_load')
-  const limit = scene.number(id, 'phase_limit')
-  if (typeof loads !== 'object' || limit === undefined) return []
-  return LINES.flatMap((line) => {
-    const load = (loads as Readonly<Record<string, unknown>>)[line]
-    if (typeof load !== 'number') return []
+  const limit = sure(scene.number(id, 'phase_limit'), `The limit of ${id}`)
+  return Object.entries(phaseLoads(scene.quantities)).map(([line, load]) => {
     const bar = limitBar({ value: Math.round(load), most: limit, unit: 'VA', name: `load on ${line}`, size: 'wide' })
-    return [
-      {
-        anchor: `inverter/${id}/phase_load/${line}`,
-        ...(load > limit && { look: 'row-fails' as const }),
-        head: { text: `${id} ${line}` },
-        cells: [{ text: roundedLoad(load) }, { text: roundedLoad(limit) }, { svg: bar }],
-      },
-    ]
+    return {
+      anchor: `inverter/${id}/phase_load/${line}`,
+      ...(load > limit && { look: 'row-fails' as const }),
+      head: { text: `${id} ${line}` },
+      cells: [{ text: roundedLoad(load) }, { text: roundedLoad(limit) }, { svg: bar }],
+    }
   })
 }
 
-function startRow(scene: ReportScene, id: string): Row[] {
-  const start = scene.number(id, 'starting_current')
+function startRow(scene: ReportScene, id: string): Row {
+  const start = sure(scene.number(id, 'starting_current'), `The start at ${id}`)
   const limit = scene.number(id, 'phase_peak_limit')
-  if (start === undefined) return []
   const bar =
     limit === undefined
       ? undefined
       : limitBar({ value: Number(start.toFixed(1)), most: limit, unit: 'A', name: 'starting current', size: 'wide' })
-  return [
-    {
-      anchor: `inverter/${id}/starting_current`,
-      ...(limit !== undefined && start > limit && { look: 'row-fails' as const }),
-      head: { text: `${id} largest start` },
-      cells: [
-        { text: printed(start, 'A') },
-        { text: limit === undefined ? 'not stated' : printed(limit, 'A') },
-        bar === undefined ? { text: '' } : { svg: bar },
-      ],
-    },
-  ]
+  return {
+    anchor: `inverter/${id}/starting_current`,
+    ...(limit !== undefined && start > limit && { look: 'row-fails' as const }),
+    head: { text: `${id} largest start` },
+    cells: [
+      { text: printed(start, 'A') },
+      { text: limit === undefined ? 'not stated' : printed(limit, 'A') },
+      bar === undefined ? { text: '' } : { svg: bar },
+    ],
+  }
 }
 
 function curve(scene: ReportScene): Block[] {
@@ -111,7 +102,7 @@ function curve(scene: ReportScene): Block[] {
 export function island(scene: ReportScene): Section {
   const { install, topology } = scene
   const batteries = Object.keys(install.batteries ?? {})
-  const rows = topology.inverters.island.flatMap((id) => [...lineRows(scene, id), ...startRow(scene, id)])
+  const rows = topology.inverters.island.flatMap((id) => [...lineRows(scene, id), startRow(scene, id)])
   const columns = [
     { label: 'In the island', width: 26 },
     { label: 'Load', width: 17, align: 'num' as const },

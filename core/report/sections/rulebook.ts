@@ -11,7 +11,7 @@ export function rulebook({ judged }: ReportScene): Section {
   const page = sure(bookPage(book.id), `The page of the book ${book.id}`)
   const parameters = Object.entries(page.parameters).map(([name, { value, unit = '', title, source }]) => ({
     anchor: `parameter/${name}`,
-    head: { text: title ?? name },
+    head: { text: sure(title, `The title of ${name}`) },
     cells: [{ text: value === null ? 'none set' : printed(value, unit) }, { text: capital(source) }],
   }))
   const off = page.off.map(({ rule, reason, by }) => ({
@@ -29,7 +29,7 @@ export function rulebook({ judged }: ReportScene): Section {
       kind: 'prose',
       anchor: 'rulebook/identity',
       paragraphs: [
-        `${book.title}: ${page.lineage.join(', then ')}, version ${book.version}, ${book.rules.length} rules. ${page.note ?? ''}`.trim(),
+        `${book.title}: ${page.lineage.join(', then ')}, version ${book.version}, ${book.rules.length} rules. ${page.note}`.trim(),
         `SHA-256 of the book: ${grouped(book.hash)}`,
       ],
     },

@@ -112,6 +112,26 @@ describe('the single-line diagram', () => {
     expect(wordsOf(drawn(singleLine(link('closed', false), 'island')))).toContain('Q9 to EB · closed · not interlocked')
   })
 
+  it('draws a breaker above the circuits as one, with its breaking current only where one is stated', () => {
+    const drawing = (set: Record<string, unknown>, remove: readonly string[] = []) =>
+      partOf(drawn(singleLine(sceneOf(judgedBase({ set, remove: [...remove] })), 'grid')), 'F35')
+    const breaker = drawing({ 'overcurrent.F35.device': { breaker: 'C35', breaking: '6 kA' } }, [
+      'overcurrent.F35.breaking',
+    ])
+    const bare = drawing({ 'overcurrent.F35.device': { breaker: 'C35' } }, ['overcurrent.F35.breaking'])
+    expect(wordsOf(breaker)).toEqual(['F35', 'C35', '6\u00a0kA'])
+    expect(wordsOf(bare)).toEqual(['F35', 'C35'])
+    expect(wordsOf(drawing({}))).toEqual(['F35', 'gG 35', '50\u00a0kA'])
+    const shape = (svg: string): string => svg.replaceAll(/<text.*?<\/text>/g, '')
+    expect(shape(breaker)).toBe(shape(bare))
+    expect(shape(breaker)).not.toBe(shape(drawing({})))
+  })
+
+  it('draws a board on which nothing hangs yet', () => {
+    const scene = sceneOf(judgedBase({ set: { 'boards.SB': { name: 'Spare board', fed_from: 'MB' } } }))
+    expect(wordsOf(partOf(drawn(singleLine(scene, 'grid')), 'SB'))).toEqual(['SB Spare board'])
+  })
+
   it('keeps names literal that look like markup', () => {
     const judged = judgedBase({ set: { 'circuits.K1.serves': '<b>&"x', 'supply.operator': '<script>' } })
     const svg = drawn(singleLine(judged, 'grid'))
