@@ -379,6 +379,7 @@ export type UncertaintyKind =
   | 'time'
   | 'array_voltage'
   | 'array_current'
+  | 'bus_resistance'
 
 export interface InspectionItem {
   readonly item: string

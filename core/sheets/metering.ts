@@ -55,7 +55,7 @@ export const busPlan: SheetPlan<{ readonly meter: Meter; readonly bus: Bus }> = 
       name: 'measured_across',
       unit: 'Ω',
       title: 'Resistance across the pair',
-      kind: 'continuity',
+      kind: 'bus_resistance',
       path: () => ['meter', 'link', 'measured_across'],
       reading: ({ bus }) => bus.measured_across,
     },

@@ -72,6 +72,17 @@ describe('the examples', () => {
     },
   )
 
+  it.each(names.filter((name) => name !== 'wrong-in-shape.skerry.yaml'))(
+    '%s names each inspection item once, and none beside the name that rules know',
+    (name) => {
+      const result = check(readFileSync(`examples/${name}`, 'utf8'), shelf)
+      if (result.kind !== 'judged') throw new Error('It cannot be judged.')
+      const items = (result.install.inspection ?? []).map(({ item }) => item)
+      expect(new Set(items).size).toBe(items.length)
+      for (const old of ['identification of conductors', 'connections tight']) expect(items).not.toContain(old)
+    },
+  )
+
   it('that is wrong in twenty ways fails in at least twenty', () => {
     const result = check(readFileSync('examples/wrong-in-twenty-ways.skerry.yaml', 'utf8'), shelf)
     if (result.kind !== 'judged') throw new Error('It cannot be judged.')
