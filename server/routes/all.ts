@@ -1,6 +1,10 @@
 import type { Route } from '#server/http/route.ts'
 import { ATTACHMENT_ROUTES } from './attachments.ts'
 import { CHECK_ROUTES } from './check.ts'
+import { CLAIM_ROUTES } from './claims.ts'
+import { CONDITION_ROUTES } from './conditions.ts'
+import { INSTRUMENT_WRITE_ROUTES } from './instrument-writes.ts'
+import { INSTRUMENT_ROUTES } from './instruments.ts'
 import { ISSUE_ROUTES } from './issue.ts'
 import { REMARK_ROUTES } from './remarks.ts'
 import { REPORT_STEP_ROUTES } from './report-steps.ts'
@@ -26,4 +30,8 @@ export const ROUTES: readonly Route[] = [
   ...CHECK_ROUTES,
   ...UPLOAD_ROUTES,
   ...ATTACHMENT_ROUTES,
+  ...CLAIM_ROUTES,
+  ...INSTRUMENT_ROUTES,
+  ...INSTRUMENT_WRITE_ROUTES,
+  ...CONDITION_ROUTES,
 ]
