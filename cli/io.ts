@@ -9,7 +9,6 @@ import {
   renameSync,
   rmSync,
   statSync,
-  watch,
   writeFileSync,
   writeSync,
 } from 'node:fs'
@@ -121,6 +120,7 @@ export const folderOf = (file: string): string => dirname(file)
 export const baseName = (file: string): string => (file === '-' ? 'standard-input.skerry.yaml' : basename(file))
 export const homeFolder = (): string => homedir()
 export const wholePath = (path: string): string => resolve(path)
+export const pathFromHere = (path: string): string => relative('', path)
 
 /** Whether a file is one by its name; any file is that is named itself. */
 export const isInstallFile = (path: string): boolean => path.endsWith('.skerry.yaml')
@@ -230,30 +230,6 @@ export function endWith(code: number): void {
 /** Ends now: all that was to be written is, and tidying up memory that goes away as a whole would only take time. */
 export function leave(): never {
   process.exit()
-}
-
-/**
- * From now on, calls back with a path after it changed and all was quiet for a moment. Folders are watched, for many editors put a
- * new file in the place of the old one.
- *
- * @param wanted whether a path, from the root, is of interest
- * @param changed is given the path from where the command runs
- */
-export function watchFolders(
-  folders: readonly string[],
-  wanted: (path: string) => boolean,
-  changed: (path: string) => void,
-): void {
-  const QUIET = 120
-  let timer: NodeJS.Timeout | undefined
-  for (const folder of folders) {
-    watch(folder, (_, name) => {
-      const path = resolve(folder, name ?? '')
-      if (name !== null && !wanted(path)) return
-      clearTimeout(timer)
-      timer = setTimeout(() => changed(relative('', path)), QUIET)
-    })
-  }
 }
 
 /** Keeps the details of a failure that should not have happened, and says where; undefined where no place takes them. */

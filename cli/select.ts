@@ -1,4 +1,5 @@
-import { exists, filesBelow, isFolder } from './io.ts'
+import { exists, filesBelow, folderOf, isFolder, isInstallFile, pathFromHere, wholePath } from './io.ts'
+import type { Watched } from './watching.ts'
 
 /** The files that the words on the command line mean, and the words that mean none. */
 export interface Selection {
@@ -50,6 +51,21 @@ function expand(word: string): readonly string[] {
   if (!isFolder(root)) return []
   const pattern = globPattern(word.replace(/^\.\//, ''))
   return filesBelow(root, (path) => pattern.test(path))
+}
+
+/** Where files can come up that the words mean: folders with all below them, the folder of a file for that file alone. */
+export function watchedFor(words: readonly string[]): readonly Watched[] {
+  return words.flatMap((word): Watched[] => {
+    if (word === '-') return []
+    if (isFolder(word)) return [{ folder: word, deep: true, wanted: isInstallFile }]
+    if (exists(word) || !MAGIC.test(word)) {
+      const whole = wholePath(word)
+      return [{ folder: folderOf(whole), deep: false, wanted: (path) => path === whole }]
+    }
+    const [root, pattern] = [rootOf(word), globPattern(word.replace(/^\.\//, ''))]
+    const matches = (path: string): boolean => pattern.test(word.startsWith('/') ? path : pathFromHere(path))
+    return isFolder(root) ? [{ folder: root, deep: true, wanted: matches }] : []
+  })
 }
 
 /** Expands files, folders and globs, each file once and in the order of the words. */

@@ -6,19 +6,15 @@ import {
   endWith,
   environment,
   expectShortRun,
-  folderOf,
-  isInstallFile,
   isTerminal,
   print,
   readText,
   say,
   terminalWidth,
-  watchFolders,
-  wholePath,
   writeWhole,
 } from '#cli/io.ts'
 import { checkFile, exitCode, type FileResult, unopened } from '#cli/result.ts'
-import { select } from '#cli/select.ts'
+import { select, watchedFor } from '#cli/select.ts'
 import { shelfFor } from '#cli/shelf.ts'
 import { VERSION } from '#cli/version.ts'
 import type { Shelf } from '#core/engine.ts'
@@ -155,30 +151,26 @@ async function run(words: readonly string[], options: CheckOptions): Promise<rea
 }
 
 /** Checks again after each change; a change during a check is looked at after it. It goes on until it is interrupted. */
-function watch(words: readonly string[], files: readonly string[], options: CheckOptions): Promise<never> {
-  const known = new Set(files.map(wholePath))
-  const book = options.rulebook === undefined ? undefined : wholePath(options.rulebook)
-  const folders = new Set([...[...known].map(folderOf), ...(book === undefined ? [] : [book])])
-  const isOfBook = (path: string): boolean => folderOf(path) === book && path.endsWith('.yaml')
+async function watch(words: readonly string[], options: CheckOptions): Promise<never> {
+  const { watchFolders } = await import('#cli/watching.ts')
+  const book = options.rulebook
+  const ofBook =
+    book === undefined ? [] : [{ folder: book, deep: false, wanted: (path: string) => path.endsWith('.yaml') }]
   let last: Promise<unknown> = Promise.resolve()
   say('Watching for changes; Ctrl-C ends.\n')
-  watchFolders(
-    [...folders],
-    (path) => known.has(path) || isInstallFile(path) || isOfBook(path),
-    (path) => {
-      last = last.then(() => {
-        say(`\n${path} changed.\n`)
-        return run(words, options)
-      })
-    },
-  )
+  watchFolders([...watchedFor(words), ...ofBook], (path) => {
+    last = last.then(() => {
+      say(`\n${path} changed.\n`)
+      return run(words, options)
+    })
+  })
   return new Promise<never>(() => undefined)
 }
 
 /** Validates, computes and judges files. */
 export async function check(words: readonly string[], options: CheckOptions): Promise<void> {
   const files = await run(words, options)
-  if (files && options.watch) await watch(words, files, options)
+  if (files && options.watch) await watch(words, options)
 }
 
 /** The format where none is asked for: annotations on a build service, words elsewhere. */

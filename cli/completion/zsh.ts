@@ -41,5 +41,10 @@ ${words.map(({ name, about }) => `    ${quoted(`${name}:${plain(about)}`)}`).joi
 ${words.map(command).join('\n')}
   esac
 }
-_skerry "$@"
+# Sourced, it registers itself; found on the fpath, it is called.
+if [[ $funcstack[1] == _skerry ]]; then
+  _skerry "$@"
+else
+  compdef _skerry skerry
+fi
 `

@@ -1,5 +1,6 @@
 import { spawn, spawnSync } from 'node:child_process'
 import {
+  appendFileSync,
   chmodSync,
   copyFileSync,
   cpSync,
@@ -114,35 +115,93 @@ describe('the bundle', () => {
 })
 
 describe('watching', () => {
+  interface Watching {
+    /** Output of the run of that number, once it is there. */
+    readonly run: (number: number) => Promise<string>
+    readonly said: () => string
+    readonly end: () => Promise<string | null>
+  }
+
+  function watching(...words: string[]): Watching {
+    const child = spawn(process.execPath, [SKERRY, 'check', ...words, '-q', '--watch', '--json'], { cwd: folder })
+    let [outputs, talk] = ['', '']
+    child.stdout.on('data', (chunk: Buffer) => {
+      outputs += chunk.toString()
+    })
+    child.stderr.on('data', (chunk: Buffer) => {
+      talk += chunk.toString()
+    })
+    const pause = (time: number): Promise<void> => new Promise((resolve) => setTimeout(resolve, time))
+    return {
+      async run(number) {
+        for (;;) {
+          const found = outputs.split('\n}\n').filter(Boolean)[number - 1]
+          if (found !== undefined && talk.includes('Watching')) {
+            await pause(150)
+            return found
+          }
+          await pause(30)
+        }
+      },
+      said: () => talk,
+      async end() {
+        child.kill('SIGINT')
+        const [, signal] = await new Promise<[number | null, string | null]>((resolve) =>
+          child.on('close', (...how) => resolve(how)),
+        )
+        return signal
+      },
+    }
+  }
+
   it('checks again when a file is changed, replaced or new, and ends by Ctrl-C', async () => {
     const sites = join(folder, 'sites')
     mkdirSync(sites)
     const file = join(sites, 'a.skerry.yaml')
     copyFileSync(SOUND, file)
-    const child = spawn(process.execPath, [SKERRY, 'check', sites, '-q', '--watch', '--json'], { cwd: folder })
-    let outputs = ''
-    child.stdout.on('data', (chunk: Buffer) => {
-      outputs += chunk.toString()
-    })
-    const runs = async (count: number): Promise<string[]> => {
-      for (;;) {
-        const found = outputs.split('\n}\n').filter(Boolean)
-        if (found.length >= count) return found
-        await new Promise((resolve) => setTimeout(resolve, 30))
-      }
-    }
-    await runs(1)
-    await new Promise((resolve) => setTimeout(resolve, 150))
+    const { run, end } = watching(sites)
+    await run(1)
     writeFileSync(join(folder, 'draft'), 'skerry: [')
     renameSync(join(folder, 'draft'), file)
-    expect((await runs(2))[1]).toContain('"outcome": "unreadable"')
+    expect(await run(2)).toContain('"outcome": "unreadable"')
     copyFileSync(SOUND, join(sites, 'b.skerry.yaml'))
-    expect((await runs(3))[2]).toContain('b.skerry.yaml')
-    child.kill('SIGINT')
-    const [, signal] = await new Promise<[number | null, string | null]>((resolve) =>
-      child.on('close', (...how) => resolve(how)),
-    )
-    expect(signal).toBe('SIGINT')
+    expect(await run(3)).toContain('b.skerry.yaml')
+    expect(await end()).toBe('SIGINT')
     expect(readdirSync(sites)).toEqual(['a.skerry.yaml', 'b.skerry.yaml'])
+  }, 15_000)
+
+  it('notices files in folders below, in folders made later, and their going away; not what is no install file', async () => {
+    const valley = join(folder, 'valley')
+    mkdirSync(join(valley, 'north'), { recursive: true })
+    copyFileSync(SOUND, join(valley, 'a.skerry.yaml'))
+    const { run, said, end } = watching(valley)
+    await run(1)
+    writeFileSync(join(valley, 'north', 'notes.txt'), 'nothing')
+    copyFileSync(SOUND, join(valley, 'north', 'b.skerry.yaml'))
+    expect(await run(2)).toContain('north/b.skerry.yaml')
+    expect(said()).toContain('north/b.skerry.yaml changed.')
+    expect(said()).not.toContain('notes.txt')
+    mkdirSync(join(valley, 'south', 'lower'), { recursive: true })
+    copyFileSync(SOUND, join(valley, 'south', 'lower', 'c.skerry.yaml'))
+    expect(await run(3)).toContain('south/lower/c.skerry.yaml')
+    rmSync(join(valley, 'south'), { recursive: true })
+    expect(await run(4)).not.toContain('c.skerry.yaml')
+    expect(await end()).toBe('SIGINT')
+  }, 15_000)
+
+  it('looks at what a glob means, and at a file that is named whatever its name', async () => {
+    const mixed = join(folder, 'mixed')
+    mkdirSync(mixed)
+    for (const name of ['one.yaml', 'two.yml', 'odd.txt']) copyFileSync(SOUND, join(mixed, name))
+    const { run, said, end } = watching('mixed/*.yaml', 'mixed/odd.txt')
+    await run(1)
+    appendFileSync(join(mixed, 'two.yml'), '# not meant\n')
+    copyFileSync(SOUND, join(mixed, 'three.yaml'))
+    expect(await run(2)).toContain('three.yaml')
+    appendFileSync(join(mixed, 'odd.txt'), '# meant\n')
+    await run(3)
+    expect(said()).toContain('odd.txt changed.')
+    expect(said()).not.toContain('two.yml')
+    expect(await end()).toBe('SIGINT')
   }, 15_000)
 })
