@@ -3,6 +3,7 @@ import type { Tx } from '#server/db.ts'
 import type { Colleague } from '#server/queries/colleagues.ts'
 import { insertMail } from '#server/queries/mails.ts'
 import type { Services } from '#server/services.ts'
+import { escapeHtml, oneLine } from './mail-text.ts'
 
 /** Kinds of mail that the record sends; each person may switch each off. */
 export type MailKind = 'review asked' | 'review submitted' | 'report issued' | 'report ended'
@@ -21,12 +22,6 @@ export interface News {
   readonly path: string
   readonly now: Date
 }
-
-const escaped = (text: string): string =>
-  text.replaceAll('&', '&amp;').replaceAll('<', '&lt;').replaceAll('>', '&gt;').replaceAll('"', '&quot;')
-
-/** A header is one line: whatever a file or a name brings along, it stays one. */
-const oneLine = (text: string): string => text.replaceAll(/[\u0000-\u001f\u007f\u2028\u2029]+/g, ' ').slice(0, 200)
 
 /** Writes one mail to each person who wants that kind, and puts it on the queue in the same transaction. */
 export async function tell(
@@ -51,8 +46,8 @@ export async function tell(
       subject: oneLine(news.subject),
       text: [...lines, '', link, ''].join('\n'),
       html: [
-        ...lines.map((line) => `<p>${escaped(line)}</p>`),
-        `<p><a href="${escaped(link)}">${escaped(link)}</a></p>`,
+        ...lines.map((line) => `<p>${escapeHtml(line)}</p>`),
+        `<p><a href="${escapeHtml(link)}">${escapeHtml(link)}</a></p>`,
       ].join('\n'),
       now,
     })

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto'
 import type { Request } from 'express'
 import type { Services } from '#server/services.ts'
-import { ABSOLUTE_MS } from './session.ts'
+import { stillSignedIn } from './session.ts'
 
 /** Who calls, before the database has been asked for the person. */
 export interface Caller {
@@ -37,8 +37,8 @@ export async function findCaller(request: Request, services: Services): Promise<
       scopes: holder.scopes,
     }
   }
-  const { person, organisation, signedInAt } = request.session
-  if (person === undefined || organisation === undefined || signedInAt === undefined) return undefined
-  if (services.clock().getTime() - signedInAt > ABSOLUTE_MS) return undefined
+  const { person, organisation } = request.session
+  if (person === undefined || organisation === undefined) return undefined
+  if (!stillSignedIn(request.session, services.clock())) return undefined
   return { person, organisation, token: null, scopes: null }
 }

@@ -3,6 +3,7 @@ import type { Request, RequestHandler, Response } from 'express'
 import type { Actor } from '#core/policy/roles.ts'
 import { outside, reading, type Tx, writing } from '#server/db.ts'
 import { enterAs } from '#server/queries/actor.ts'
+import { noteTokenUse } from '#server/queries/tokens.ts'
 import type { Services } from '#server/services.ts'
 import { type Ready, ready, send, sendBytes, sendFailure, sendProblem } from './answer.ts'
 import { type AnyCall, Attempt } from './attempt.ts'
@@ -105,15 +106,16 @@ class Pipeline {
       return await orRefused(outside(services.db, (tx) => this.#unknown({ ...base, tx, actor: NOBODY }, request)))
     const key = RequestKey.of(request, caller)
     const refused: { call?: AnyCall } = {}
+    const only = this.#attempt.onlyReads
     const work = async (tx: Tx): Promise<Outcome> => {
       const actor = await this.#actor(tx, caller)
+      if (!only && caller.token !== null) await noteTokenUse(tx, caller.organisation, caller.token, base.now)
       const kept = await this.#kept(tx, key)
       if (kept !== undefined) return kept
       const call = await this.#loaded({ ...base, tx, actor })
       refused.call = call
       return await this.#once(call, request, key)
     }
-    const only = this.#attempt.onlyReads
     const outcome = await orRefused(only ? reading(services.db, work, this.#lost) : writing(services.db, work))
     // What refused was rolled back, its event with it: a denied access leaves one of its own.
     if (isRefused(outcome) && outcome.refused === 'not-allowed' && refused.call !== undefined)

@@ -1,6 +1,6 @@
 import { createHash, createHmac, randomBytes } from 'node:crypto'
 import connectPgSimple from 'connect-pg-simple'
-import type { RequestHandler } from 'express'
+import type { Request, RequestHandler } from 'express'
 import session from 'express-session'
 import type { Knex } from 'knex'
 import type { Pool } from 'pg'
@@ -14,13 +14,18 @@ declare module 'express-session' {
     organisation?: string
     /** When the person last showed the password, in ms since 1970. */
     signedInAt?: number
+    /** When it was last used, to within some minutes, in ms since 1970. */
+    seenAt?: number
+    /** Shown to the person in the list of sessions. */
+    browser?: string
+    address?: string
   }
 }
 
 /** An idle session ends after eight hours: a day on site with long gaps. Issuing asks for the password again anyway. */
-export const IDLE_MS = 8 * 60 * 60 * 1000
+const IDLE_MS = 8 * 60 * 60 * 1000
 /** No session lives longer than this. */
-export const ABSOLUTE_MS = 12 * 60 * 60 * 1000
+const ABSOLUTE_MS = 12 * 60 * 60 * 1000
 
 const hash = (sid: string): string => createHash('sha256').update(sid).digest('hex')
 
@@ -60,6 +65,8 @@ export function sessions(env: Env, db: Knex): RequestHandler {
       tableName: 'sessions',
       createTableIfMissing: false,
       pruneSessionInterval: false,
+      // Written once in some minutes instead of at each request: see `stillSignedIn`.
+      disableTouch: true,
       ttl: IDLE_MS / 1000,
     }),
     genid: () => randomBytes(32).toString('base64url'),
@@ -70,6 +77,18 @@ export function sessions(env: Env, db: Knex): RequestHandler {
   })
 }
 
+const SEEN_EVERY_MS = 5 * 60 * 1000
+
+/** Whether a session is still good, by our own clock; notes now and then that it is in use. */
+export function stillSignedIn(session: Partial<session.SessionData>, now: Date): boolean {
+  const { signedInAt, seenAt } = session
+  if (signedInAt === undefined || seenAt === undefined) return false
+  const moment = now.getTime()
+  if (moment - signedInAt > ABSOLUTE_MS || moment - seenAt > IDLE_MS) return false
+  if (moment - seenAt > SEEN_EVERY_MS) session.seenAt = moment
+  return true
+}
+
 /** A token that only pages of this session can know, made from its id and never stored. */
 export const csrfToken = (env: Env, sid: string): string =>
   createHmac('sha256', env.SESSION_SECRET).update(`csrf ${sid}`).digest('base64url')
@@ -77,7 +96,7 @@ export const csrfToken = (env: Env, sid: string): string =>
 /** What routes may do with a session, without seeing the framework's object. */
 export function sessionHandle(
   env: Env,
-  request: { session: session.Session & Partial<session.SessionData>; sessionID: string },
+  request: Pick<Request, 'session' | 'sessionID' | 'get' | 'ip'>,
   now: Date,
 ): SessionHandle {
   const settle = (work: (done: Done) => void): Promise<void> =>
@@ -93,6 +112,9 @@ export function sessionHandle(
       request.session.person = person
       request.session.organisation = organisation
       request.session.signedInAt = now.getTime()
+      request.session.seenAt = now.getTime()
+      request.session.browser = (request.get('user-agent') ?? '').slice(0, 200)
+      request.session.address = request.ip ?? ''
       await settle((done) => request.session.save(done))
     },
     async signOut() {

@@ -6,19 +6,27 @@ import { CONDITION_ROUTES } from './conditions.ts'
 import { INSTRUMENT_WRITE_ROUTES } from './instrument-writes.ts'
 import { INSTRUMENT_ROUTES } from './instruments.ts'
 import { ISSUE_ROUTES } from './issue.ts'
+import { PASSWORD_ROUTES } from './passwords.ts'
+import { PEOPLE_ROUTES } from './people.ts'
 import { REMARK_ROUTES } from './remarks.ts'
 import { REPORT_STEP_ROUTES } from './report-steps.ts'
 import { VIEW_ROUTES } from './report-views.ts'
 import { REPORT_ROUTES } from './reports.ts'
 import { REVIEW_ROUTES } from './review.ts'
 import { REVISION_ROUTES } from './revisions.ts'
+import { SECOND_FACTOR_ROUTES } from './second-factor.ts'
 import { SESSION_ROUTES } from './session.ts'
 import { THREAD_ROUTES } from './threads.ts'
+import { TOKEN_ROUTES } from './tokens.ts'
 import { UPLOAD_ROUTES } from './uploads.ts'
 
 /** Every route of the API. What is not here does not exist; the OpenAPI document and the access matrix are made from it. */
 export const ROUTES: readonly Route[] = [
   ...SESSION_ROUTES,
+  ...PASSWORD_ROUTES,
+  ...SECOND_FACTOR_ROUTES,
+  ...TOKEN_ROUTES,
+  ...PEOPLE_ROUTES,
   ...REPORT_ROUTES,
   ...REVISION_ROUTES,
   ...VIEW_ROUTES,

@@ -1,32 +1,23 @@
-import { ACTIONS, type Action } from '#core/policy/actions.ts'
-import { can } from '#core/policy/can.ts'
-import { signIn } from '#server/commands/sign-in.ts'
-import { inOrganisation } from '#server/db.ts'
-import { refuse } from '#server/http/problems.ts'
-import { route } from '#server/http/route.ts'
-import { findActor } from '#server/queries/actor.ts'
+import { enter } from '#server/commands/enter.ts'
+import { type Refused, refuse } from '#server/http/problems.ts'
+import { type Answer, route } from '#server/http/route.ts'
+import { SignInThrottle } from '#server/http/sign-in-throttle.ts'
+import { presentSession, SESSION_SCHEMA } from '#server/presenters/actor.ts'
+import { endSessions, listSessions } from '#server/queries/sessions.ts'
 
 const CREDENTIALS = {
   type: 'object',
   properties: {
     email: { type: 'string', minLength: 3, maxLength: 254 },
     password: { type: 'string', minLength: 1, maxLength: 256 },
-    code: { type: 'string', minLength: 6, maxLength: 20 },
+    code: { type: 'string', minLength: 6, maxLength: 40, description: 'Of the second factor, or a recovery code.' },
+    organisation: { type: 'string', format: 'uuid', description: 'For an address that belongs to people of several.' },
   },
   required: ['email', 'password'],
   additionalProperties: false,
 } as const
 
-const SESSION = {
-  type: 'object',
-  properties: {
-    csrf: { type: 'string' },
-    person: { type: ['object', 'null'] },
-  },
-  required: ['csrf', 'person'],
-} as const
-
-export const showSession = route({
+const showRoute = route({
   id: 'show-session',
   method: 'get',
   path: '/session',
@@ -34,28 +25,13 @@ export const showSession = route({
   tag: 'session',
   policy: 'public',
   limit: 'read',
-  answers: { 200: SESSION },
+  answers: { 200: SESSION_SCHEMA },
   async run({ actor, visit }) {
-    if (visit.session === null || actor.person === '')
-      return { body: { csrf: visit.session?.csrf ?? '', person: null } }
-    const actions = (Object.keys(ACTIONS) as Action[]).filter((action) => can(actor, action).allowed)
-    return {
-      body: {
-        csrf: visit.session.csrf,
-        person: {
-          id: actor.person,
-          name: actor.name,
-          licence: actor.licence,
-          roles: actor.roles,
-          organisation: actor.organisation,
-          actions,
-        },
-      },
-    }
+    return { body: presentSession(visit.session, actor.person === '' ? undefined : actor) }
   },
 })
 
-export const createSession = route({
+const signInRoute = route({
   id: 'sign-in',
   method: 'post',
   path: '/session',
@@ -65,25 +41,35 @@ export const createSession = route({
   policy: 'public',
   limit: 'sign-in',
   audited: false,
-  answers: { 200: SESSION },
-  async run({ body, services, visit }) {
-    const found = await signIn(services.db, body)
-    if (found === undefined || visit.session === null) return refuse('sign-in-failed')
-    const actor = await inOrganisation(services.db, found.organisation, (tx) =>
-      findActor(tx, found.organisation, found.person),
-    )
-    if (actor === undefined) return refuse('sign-in-failed')
-    await visit.session.signIn(found)
-    return {
-      body: {
-        csrf: visit.session.csrf,
-        person: { id: actor.person, name: actor.name, roles: actor.roles, organisation: actor.organisation },
+  answers: {
+    200: {
+      ...SESSION_SCHEMA,
+      properties: {
+        ...SESSION_SCHEMA.properties,
+        choose: {
+          type: 'array',
+          items: {
+            type: 'object',
+            properties: { id: { type: 'string', format: 'uuid' }, name: { type: 'string' } },
+            required: ['id', 'name'],
+          },
+          description: 'Organisations to choose from; nobody is signed in yet.',
+        },
       },
-    }
+    },
+  },
+  async run({ body, services, visit }): Promise<Answer | Refused> {
+    if (visit.session === null) return refuse('bad-request', 'An API token needs no sign-in.')
+    const entered = await enter(services, new SignInThrottle(services.db), body, visit)
+    if (entered.kind === 'refused') return entered.refused
+    if (entered.kind === 'choose')
+      return { body: { ...presentSession(null, undefined), choose: entered.organisations } }
+    await visit.session.signIn(entered.membership)
+    return { body: presentSession(visit.session, entered.actor) }
   },
 })
 
-export const deleteSession = route({
+const signOutRoute = route({
   id: 'sign-out',
   method: 'delete',
   path: '/session',
@@ -91,6 +77,7 @@ export const deleteSession = route({
   tag: 'session',
   policy: 'signed in',
   limit: 'write',
+  about: ({ actor }) => `person/${actor.person}`,
   answers: { 204: null },
   async run({ visit }) {
     await visit.session?.signOut()
@@ -98,4 +85,82 @@ export const deleteSession = route({
   },
 })
 
-export const SESSION_ROUTES = [showSession, createSession, deleteSession]
+const listRoute = route({
+  id: 'list-sessions',
+  method: 'get',
+  path: '/sessions',
+  summary: 'Where the caller is signed in',
+  tag: 'session',
+  policy: { action: 'self.manage' },
+  limit: 'read',
+  answers: {
+    200: {
+      type: 'object',
+      properties: {
+        sessions: {
+          type: 'array',
+          items: {
+            type: 'object',
+            properties: {
+              id: { type: 'string', description: 'Names the session; opens nothing.' },
+              current: { type: 'boolean' },
+              signed_in_at: { type: 'string', format: 'date-time' },
+              browser: { type: 'string' },
+              address: { type: 'string' },
+            },
+            required: ['id', 'current', 'signed_in_at', 'browser', 'address'],
+          },
+        },
+      },
+      required: ['sessions'],
+    },
+  },
+  async run({ tx, actor, visit, now }) {
+    const rows = await listSessions(tx, actor.person, now)
+    return {
+      body: {
+        sessions: rows.map(({ sid, signed_in_at, browser, address }) => ({
+          id: sid,
+          current: sid === visit.session?.id,
+          signed_in_at: signed_in_at.toISOString(),
+          browser,
+          address,
+        })),
+      },
+    }
+  },
+})
+
+const endOneRoute = route({
+  id: 'end-session',
+  method: 'delete',
+  path: '/sessions/:sha256',
+  summary: 'Ends one session of the caller',
+  tag: 'session',
+  policy: { action: 'self.manage' },
+  limit: 'write',
+  about: ({ actor }) => `person/${actor.person}`,
+  answers: { 204: null },
+  async run({ tx, actor, params }) {
+    const ended = await endSessions(tx, actor.person, { only: params['sha256'] ?? '' })
+    return ended === 0 ? refuse('not-found') : {}
+  },
+})
+
+const endOthersRoute = route({
+  id: 'end-other-sessions',
+  method: 'delete',
+  path: '/sessions',
+  summary: 'Ends all sessions of the caller but this one',
+  tag: 'session',
+  policy: { action: 'self.manage' },
+  limit: 'write',
+  about: ({ actor }) => `person/${actor.person}`,
+  answers: { 204: null },
+  async run({ tx, actor, visit }) {
+    const ended = await endSessions(tx, actor.person, { but: visit.session?.id ?? '' })
+    return { audit: { ended } }
+  },
+})
+
+export const SESSION_ROUTES = [showRoute, signInRoute, signOutRoute, listRoute, endOneRoute, endOthersRoute]
