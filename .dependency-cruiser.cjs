@@ -74,7 +74,7 @@ module.exports = {
       to: {
         dependencyTypes: ['npm'],
         licenseNot:
-          '^\\(?(MIT|ISC|BSD-2-Clause|BSD-3-Clause|Apache-2\\.0|0BSD|BlueOak-1\\.0\\.0|MIT AND OFL-1\\.1|MIT AND Zlib|MIT AND SIL.*)\\)?$',
+          '^\\(?(MIT|MIT-0|ISC|BSD-2-Clause|BSD-3-Clause|Apache-2\\.0|0BSD|BlueOak-1\\.0\\.0|MIT AND OFL-1\\.1|MIT AND Zlib|MIT AND SIL.*)\\)?$',
       },
     },
     {

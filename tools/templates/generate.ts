@@ -2,6 +2,8 @@ import { readdir, readFile, writeFile } from 'node:fs/promises'
 import { pathToFileURL } from 'node:url'
 import Handlebars from 'handlebars'
 
+type PrecompileOptions = Parameters<typeof Handlebars.precompile>[1]
+
 const PROJECT = new URL('../../', import.meta.url).pathname
 const ROOT = `${PROJECT}templates`
 
@@ -10,11 +12,21 @@ declare const templates: Readonly<Record<'pages' | 'partials', Readonly<Record<s
 export default templates
 `
 
-async function compiled(folder: string): Promise<string> {
+/** Mails name only fields that their views have: with `strict`, a missing one is an error instead of a gap. */
+const MAILS = {
+  strict: true,
+  knownHelpersOnly: true,
+  knownHelpers: { address: true, count: true, day: true, line: true, list: true, moment: true },
+}
+
+async function compiled(
+  folder: string,
+  settings: PrecompileOptions = { knownHelpersOnly: true, knownHelpers: { words: true } },
+): Promise<string> {
   const names = (await readdir(folder)).filter((name) => name.endsWith('.hbs')).sort()
   const entries = names.map(async (name) => {
     const source = await readFile(`${folder}/${name}`, 'utf8')
-    const specification = Handlebars.precompile(source, { knownHelpersOnly: true, knownHelpers: { words: true } })
+    const specification = Handlebars.precompile(source, settings)
     return `${JSON.stringify(name.slice(0, -'.hbs'.length))}: () => (${specification}),\n`
   })
   return (await Promise.all(entries)).join('')
@@ -24,9 +36,13 @@ async function compiled(folder: string): Promise<string> {
 export async function generateTemplates(root = ROOT): Promise<Record<string, string>> {
   const pages = await compiled(root)
   const partials = await compiled(`${root}/partials`)
+  const mails = await compiled(`${root}/mails`, MAILS)
+  const mailPartials = await compiled(`${root}/mails/partials`, MAILS)
   return {
     'core/generated/templates.js': `export default {\npages: {\n${pages}},\npartials: {\n${partials}},\n}\n`,
     'core/generated/templates.d.ts': TYPES,
+    'server/generated/mails.js': `export default {\npages: {\n${mails}},\npartials: {\n${mailPartials}},\n}\n`,
+    'server/generated/mails.d.ts': TYPES,
   }
 }
 
