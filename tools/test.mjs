@@ -13,6 +13,7 @@ needPrograms({
   'heif-enc': 'libheif-examples',
   unzip: 'unzip',
   python3: 'python3',
+  openssl: 'openssl',
 })
 run('npm', ['run', '--silent', 'build'])
 
