@@ -111,7 +111,8 @@ export class Canvas {
     let open: Piece[] = []
     let start = x
     const flush = () => {
-      if (open.length > 0) this.#group(open, start, baseline)
+      const [first] = open
+      if (first) this.#group(first, open, start, baseline)
       open = []
     }
     for (const piece of pieces) {
@@ -127,15 +128,14 @@ export class Canvas {
   #shapes(pieces: Line['pieces'], x: number, baseline: number): void {
     let at = x
     for (const piece of pieces) {
-      if (piece.shape)
-        this.saved(() => this.write(BADGE_SHAPES[piece.shape ?? 'dash'](at, baseline, piece.size, piece.colour)))
-      at += piece.width
+      const { shape, size, colour, width } = piece
+      if (shape) this.saved(() => this.write(BADGE_SHAPES[shape](at, baseline, size, colour)))
+      at += width
     }
   }
 
-  #group(pieces: readonly Piece[], x: number, baseline: number): void {
-    const first = pieces[0]
-    if (!first) return
+  /** Writes pieces that look like the first of them. */
+  #group(first: Piece, pieces: readonly Piece[], x: number, baseline: number): void {
     const face = this.#faces[first.face]
     this.doc.page.fonts[face.id] ??= face.reference
     this.#setColour(first.colour)

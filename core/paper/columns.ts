@@ -2,7 +2,7 @@ import type { Flow } from './flow.ts'
 import { styled } from './flow.ts'
 import { extent } from './lines.ts'
 import { BLOCK, CELL, LIST, type TextStyle } from './style.ts'
-import type { Block, Cell, Row, Table } from './tree.ts'
+import type { Block, Cell, Column, Row, Table } from './tree.ts'
 
 interface Extent {
   readonly least: number
@@ -40,43 +40,57 @@ const widest = (blocks: readonly Block[], setting: Setting, flow: Flow): Extent 
     { least: 0, most: 0 },
   )
 
-/** Each cell that alone fills a column without a width, with the column's number. */
-const deciding = (table: Table, row: Row): readonly { readonly cell: Cell; readonly column: number }[] => {
+/** Each cell that alone fills a column without a width, with the column and its number. */
+const deciding = (
+  table: Table,
+  row: Row,
+): readonly { readonly cell: Cell; readonly column: Column; readonly index: number }[] => {
   let at = 0
   return row.cells.flatMap((cell) => {
-    const column = at
+    const index = at
     at += cell.span
-    return cell.span === 1 && table.columns[column]?.share === undefined ? [{ cell, column }] : []
+    const column = table.columns[index]
+    return cell.span === 1 && column && column.share === undefined ? [{ cell, column, index }] : []
   })
 }
 
-/** What each column's own cells ask for, cells over several columns left out. */
-const asked = (table: Table, flow: Flow): readonly Extent[] => {
-  const extents = table.columns.map((): Extent => ({ least: 0, most: 0 }))
-  for (const row of [...table.head, ...table.bodies.flat()]) {
-    for (const { cell, column } of deciding(table, row)) {
-      const classes = [...flow.inherited, ...(table.columns[column]?.classes ?? []), ...row.classes, ...cell.classes]
+/** What a column asks for by its own cells, cells over several columns left out. */
+interface Asked extends Extent {
+  readonly share: number | undefined
+}
+
+const asked = (table: Table, flow: Flow): readonly Asked[] => {
+  const cells = [...table.head, ...table.bodies.flat()].flatMap((row) =>
+    deciding(table, row).map(({ cell, column, index }) => {
+      const classes = [...flow.inherited, ...column.classes, ...row.classes, ...cell.classes]
       const style = cell.header ? BLOCK.rowHeader.text : BLOCK.cell.text
       const { least, most } = widest(cell.blocks, { style, classes }, flow)
-      const before = extents[column] ?? { least: 0, most: 0 }
-      extents[column] = {
-        least: Math.max(before.least, least + 2 * CELL.x),
-        most: Math.max(before.most, most + 2 * CELL.x),
-      }
+      return { index, least: least + 2 * CELL.x, most: most + 2 * CELL.x }
+    }),
+  )
+  return table.columns.map(({ share }, index) => {
+    const own = cells.filter((cell) => cell.index === index)
+    return {
+      share,
+      least: Math.max(0, ...own.map(({ least }) => least)),
+      most: Math.max(0, ...own.map(({ most }) => most)),
     }
-  }
-  return extents
+  })
 }
 
 const total = (values: readonly number[]): number => values.reduce((sum, value) => sum + value, 0)
 
-/** Shares out `room` among columns: the least to each, the rest by what they would like, and what is left over by their size. */
-const shared = (extents: readonly Extent[], room: number): readonly number[] => {
-  const least = total(extents.map((column) => column.least))
-  const most = total(extents.map((column) => column.most))
-  if (most <= room) return extents.map((column) => column.most + ((room - most) * column.most) / (most || 1))
-  if (least >= room) return extents.map((column) => (column.least * room) / least)
-  return extents.map((column) => column.least + ((room - least) * (column.most - column.least)) / (most - least))
+/**
+ * Shares out `room` among columns: the least to each, the rest by what they would like, and what is left over by their
+ * size; evenly where no column has a cell of its own.
+ */
+const sharing = (columns: readonly Extent[], room: number): ((column: Extent) => number) => {
+  const least = total(columns.map((column) => column.least))
+  const most = total(columns.map((column) => column.most))
+  if (most === 0) return () => room / columns.length
+  if (most <= room) return (column) => column.most + ((room - most) * column.most) / most
+  if (least >= room) return (column) => (column.least * room) / least
+  return (column) => column.least + ((room - least) * (column.most - column.least)) / (most - least)
 }
 
 /**
@@ -86,11 +100,11 @@ const shared = (extents: readonly Extent[], room: number): readonly number[] => 
  * @param flow where the table stands
  */
 export const columnWidths = (table: Table, flow: Flow): readonly number[] => {
-  const shares = table.columns.map(({ share }) => share)
-  const given = total(shares.map((share) => share ?? 0))
-  const free = shares.some((share) => share === undefined)
-  if (!free) return shares.map((share) => ((share ?? 0) / given) * flow.width)
-  const extents = asked(table, flow).filter((_, index) => shares[index] === undefined)
-  const widths = [...shared(extents, Math.max(0, 1 - given / 100) * flow.width)]
-  return shares.map((share) => (share === undefined ? (widths.shift() ?? 0) : (share / 100) * flow.width))
+  const shares = table.columns.flatMap(({ share }) => share ?? [])
+  const given = total(shares)
+  if (shares.length === table.columns.length) return shares.map((share) => (share / given) * flow.width)
+  const columns = asked(table, flow)
+  const open = columns.filter(({ share }) => share === undefined)
+  const width = sharing(open, Math.max(0, 1 - given / 100) * flow.width)
+  return columns.map((column) => (column.share === undefined ? width(column) : (column.share / 100) * flow.width))
 }

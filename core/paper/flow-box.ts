@@ -83,17 +83,19 @@ export const flowGrid = (group: Group, columns: number, flow: Flow): Laid => {
 
 /** Cuts strips into columns no taller than `height`, never behind a strip that holds on to the next. */
 const poured = (strips: readonly Strip[], height: number): readonly (readonly Strip[])[] => {
-  const columns: Strip[][] = [[]]
+  let open: Strip[] = []
+  const columns = [open]
   let chunk: Strip[] = []
   for (const one of strips) {
     chunk.push(one)
     if (one.hold > 0) continue
-    const open = columns.at(-1) ?? []
-    if (open.length > 0 && stackHeight([...open, ...chunk]) > height) columns.push(chunk)
-    else open.push(...chunk)
+    if (open.length > 0 && stackHeight([...open, ...chunk]) > height) {
+      open = chunk
+      columns.push(open)
+    } else open.push(...chunk)
     chunk = []
   }
-  columns.at(-1)?.push(...chunk)
+  open.push(...chunk)
   return columns
 }
 

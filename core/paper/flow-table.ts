@@ -56,7 +56,8 @@ class Rows {
   #cell(cell: Cell, row: Row, parent: StructureElement, column: number, inHead: boolean): readonly Strip[] {
     const left = this.#widths.slice(0, column).reduce((sum, width) => sum + width, 0)
     const width = this.#widths.slice(column, column + cell.span).reduce((sum, one) => sum + one, 0)
-    const classes = cell.span === 1 ? (this.#table.columns[column]?.classes ?? []) : []
+    const alone = this.#table.columns.slice(column, cell.span === 1 ? column + 1 : column)
+    const classes = alone.flatMap((one) => one.classes)
     const inner: Flow = {
       ...this.#flow,
       x: this.#flow.x + left + CELL.x,

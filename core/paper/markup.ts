@@ -11,9 +11,13 @@ const isComment = (node: Node): boolean => node.nodeName === '#comment'
 
 const START: Place = { line: 1, column: 1 }
 
-/** Where a node starts in the HTML. */
+/** Where a node was written; for one that only follows from what it holds, where that was. */
+const writtenAt = (node: Node): Node['sourceCodeLocation'] =>
+  node.sourceCodeLocation ?? ('childNodes' in node ? node.childNodes.map(writtenAt).find((found) => found) : undefined)
+
+/** Where a node starts in the HTML; the start of the page for one that stands nowhere in it. */
 export const placeOf = (node: Node): Place => {
-  const location = node.sourceCodeLocation
+  const location = writtenAt(node)
   return location ? { line: location.startLine, column: location.startCol } : START
 }
 
@@ -25,7 +29,7 @@ const FLOW = ['h1', 'h2', 'h3', 'h4', 'p', 'ul', 'ol', 'dl', 'table', 'figure', 
 const PHRASING = ['strong', 'em', 'sub', 'sup', 'br', 'span', 'small'] as const
 
 /** What may stand inside each tag. `#text` stands for words outside any tag. */
-const CONTENT: Readonly<Record<string, readonly string[]>> = {
+const CONTENT = {
   root: FLOW,
   section: FLOW,
   div: FLOW,
@@ -59,7 +63,11 @@ const CONTENT: Readonly<Record<string, readonly string[]>> = {
   figure: ['svg', 'img', 'figcaption'],
   figcaption: [...PHRASING, '#text'],
   img: [],
-}
+} satisfies Readonly<Record<string, readonly string[]>>
+
+type Tag = keyof typeof CONTENT
+
+const isTag = (name: string): name is Tag => Object.hasOwn(CONTENT, name)
 
 const ATTRIBUTES: Readonly<Record<string, readonly string[]>> = {
   col: ['width', 'style', 'span'],
@@ -71,7 +79,7 @@ const EVERYWHERE = ['class', 'id', 'lang', 'title']
 const VOID = new Set(['br', 'col', 'img'])
 
 const listed = (words: readonly string[]): string =>
-  words.map((word) => (word === '#text' ? 'text' : `<${word}>`)).join(', ') || 'nothing'
+  words.map((word) => (word === '#text' ? 'text' : `<${word}>`)).join(', ')
 
 const checkAttributes = (element: Element): void => {
   const allowed = [...EVERYWHERE, ...(ATTRIBUTES[element.tagName] ?? [])]
@@ -101,9 +109,9 @@ const checkText = (node: TextNode, parent: string, allowed: readonly string[]): 
   )
 }
 
-const checkElement = (element: Element, parent: string, allowed: readonly string[]): void => {
+const checkElement = (element: Element, parent: string, allowed: readonly string[]): Tag | 'svg' => {
   const { tagName } = element
-  if (!(tagName in CONTENT) && tagName !== 'svg') {
+  if (tagName !== 'svg' && !isTag(tagName)) {
     throw problem(
       'unknown-tag',
       element,
@@ -112,11 +120,7 @@ const checkElement = (element: Element, parent: string, allowed: readonly string
   }
   if (!element.sourceCodeLocation) {
     const where = tagName === 'tbody' ? 'A row' : `The content of ${parent}`
-    throw new PaperError(
-      'misplaced-tag',
-      `${where} stands outside <${tagName}>. Write <${tagName}> around it.`,
-      firstPlace(element),
-    )
+    throw problem('misplaced-tag', element, `${where} stands outside <${tagName}>. Write <${tagName}> around it.`)
   }
   if (!allowed.includes(tagName)) {
     throw problem(
@@ -125,24 +129,20 @@ const checkElement = (element: Element, parent: string, allowed: readonly string
       `<${tagName}> may not stand in ${parent}. Allowed there: ${listed(allowed)}.`,
     )
   }
+  return tagName
 }
 
-const firstPlace = (element: Element): Place => {
-  const inner = element.childNodes.find((node) => node.sourceCodeLocation)
-  return inner ? placeOf(inner) : START
-}
-
-const check = (nodes: readonly Node[], name: string): void => {
+const check = (nodes: readonly Node[], name: Tag): void => {
   const parent = name === 'root' ? 'the page' : `<${name}>`
-  const allowed = CONTENT[name] ?? []
+  const allowed: readonly string[] = CONTENT[name]
   for (const node of nodes) {
     if (isText(node)) checkText(node, parent, allowed)
     if (!isElement(node)) continue
-    checkElement(node, parent, allowed)
-    if (node.tagName === 'svg') continue
+    const tag = checkElement(node, parent, allowed)
+    if (tag === 'svg') continue
     checkAttributes(node)
     checkClosed(node)
-    check(node.childNodes, node.tagName)
+    check(node.childNodes, tag)
   }
 }
 

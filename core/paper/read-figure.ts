@@ -22,7 +22,7 @@ const readPhoto = (element: Element, reading: Reading) => {
 
 const titleOf = (element: Element): string | undefined => {
   const title = elements(element).find(({ tagName }) => tagName === 'title')
-  const text = title && readRuns(content(title)).map((run) => (run.kind === 'text' ? run.text : ''))
+  const text = title && readRuns(content(title)).map((run) => (run.kind === 'text' ? run.text : ' '))
   return text?.join('').trim()
 }
 

@@ -53,11 +53,9 @@ const missing = (sign: string, codePoint: number, source: Source | undefined, ht
 const placeIn = (html: string, sign: string, { place, from, to }: Source): Place => {
   const at = html.indexOf(sign, from)
   if (at < 0 || at >= to) return place
-  const before = html.slice(from, at).split('\n')
-  const last = before.at(-1)?.length ?? 0
-  return before.length === 1
-    ? { line: place.line, column: place.column + last }
-    : { line: place.line + before.length - 1, column: last + 1 }
+  const lines = html.slice(from, at).split('\n').length - 1
+  if (lines === 0) return { line: place.line, column: place.column + at - from }
+  return { line: place.line + lines, column: at - html.lastIndexOf('\n', at) }
 }
 
 /** Turns runs of text into words that know their widths. */
@@ -113,7 +111,7 @@ export class Shaper {
       face = needed
       part += sign
     }
-    return part === '' ? found : [...found, this.#piece(part, look, face)]
+    return [...found, this.#piece(part, look, face)]
   }
 
   #faceFor(sign: string, face: FaceName, source: Source | undefined): FaceName {

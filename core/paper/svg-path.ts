@@ -37,7 +37,7 @@ const commands = (data: string, refuse: Refuse): readonly Command[] => {
   let letter = ''
   take(BETWEEN)
   while (at < data.length) {
-    const next = /[A-Za-z]/.exec(data[at] ?? '')?.[0]
+    const next = /[A-Za-z]/.exec(data.charAt(at))?.[0]
     if (next) at++
     letter = next ?? letter.replace('M', 'L').replace('m', 'l')
     const count = COUNTS[letter.toUpperCase()]

@@ -1,4 +1,6 @@
+import { parseFragment } from 'parse5'
 import { describe, expect, test } from 'vitest'
+import { placeOf } from '#core/paper/markup.ts'
 import type { PaperOptions } from '#core/paper/options.ts'
 import { PaperError } from '#core/paper/problems.ts'
 import { page } from './page.ts'
@@ -28,6 +30,22 @@ const CASES: readonly [name: string, html: string, code: string, line: number, c
   ['an unclosed tag', '<div><p>a</div>', 'unclosed-tag', 1, 6, /<p> is not closed/],
   ['broken HTML', '<p>a</p\n', 'broken-html', 2, 1, /eof in tag/],
   ['a row outside a group', table(row), 'misplaced-tag', 1, 8, /Write <tbody> around it/],
+  [
+    'a cell outside a row and a group, told where the cell stands',
+    table('\n<td>1</td>'),
+    'misplaced-tag',
+    2,
+    1,
+    /A row stands outside <tbody>/,
+  ],
+  [
+    'a tag with a name of the language',
+    '<constructor>a</constructor>',
+    'unknown-tag',
+    1,
+    1,
+    /<constructor> is not part/,
+  ],
   ['a col outside a colgroup', table('<col><tbody></tbody>'), 'misplaced-tag', 1, 8, /stands outside <colgroup>/],
   ['a first heading that is not h1', '<h2>a</h2>', 'heading-jump', 1, 1, /first heading must be <h1>/],
   [
@@ -132,8 +150,12 @@ const CASES: readonly [name: string, html: string, code: string, line: number, c
   ['a length with a unit', svg('<circle r="1em"/>'), 'svg-value', 1, 58, /plain number/],
   ['an unknown line cap', svg('<path stroke-linecap="flat" d=""/>'), 'svg-value', 1, 58, /butt, round, square/],
   ['an unknown transform', svg('<g transform="skewX(3)"></g>'), 'svg-value', 1, 58, /rotate\(degrees x y\)/],
+  ['a shift without numbers', svg('<g transform="translate()"></g>'), 'svg-value', 1, 58, /translate\(\)/],
+  ['a scale without numbers', svg('<g transform="scale()"></g>'), 'svg-value', 1, 58, /scale\(\)/],
+  ['a turn by a word', svg('<g transform="rotate(left)"></g>'), 'svg-value', 1, 58, /rotate\(left\)/],
   ['a transform without numbers', svg('<g transform="rotate()"></g>'), 'svg-value', 1, 58, /rotate/],
   ['a character that no font has', '<p>one</p>\n<p>two\nthree ⏚</p>', 'unknown-character', 3, 7, /“⏚” \(U\+23DA\)/],
+  ['a character that no font has, in its first line', '<p>two ⏚</p>', 'unknown-character', 1, 8, /“⏚”/],
   ['a character written as an entity', '<p>a &#x23DA;</p>', 'unknown-character', 1, 4, /U\+23DA/],
   ['a character in a drawing', svg('<text>⏚</text>'), 'unknown-character', 1, 58, /⏚/],
   ['a picture that is no JPEG', '<figure><img src="c.jpg" alt="c"></figure>', 'picture-format', 0, 0, /not a JPEG/],
@@ -162,6 +184,11 @@ describe('what is refused, and where', () => {
 
   test('PDF/A-1b with attachments', () => {
     expect(refusal('<p>a</p>', { attachments, flavour: 'PDF/A-1b' }).code).toBe('flavour')
+  })
+
+  test('what stands nowhere in the HTML is told at its start', () => {
+    const [node] = parseFragment('<p>a</p>').childNodes
+    expect(node && placeOf(node)).toEqual({ line: 1, column: 1 })
   })
 
   test('a date that is none', () => {

@@ -77,6 +77,16 @@ describe('tables', () => {
     expect(wordsOf(page(html))).toContain('a')
   })
 
+  test('columns that only cells across them fill are equally wide, and their words stand on the page', () => {
+    const across = '<tr><td colspan="2">words that go across</td><td>end</td></tr>'
+    const spots = spotsOf(
+      `<table><colgroup><col><col><col width="50%"></colgroup><tbody>${across}${across}</tbody></table>`,
+    )
+    const [words, end] = [spot(spots, 'words'), spot(spots, 'end')]
+    expect(end.left - words.left).toBeCloseTo((595.28 - (35 * 72) / 25.4) / 2, 0)
+    expect(spot(spots, 'across').top).toBeCloseTo(words.top, 1)
+  })
+
   test('text in the middle of its cell', () => {
     const spots = spotsOf('<table><tbody><tr><td class="centre">mid</td></tr></tbody></table>')
     const middle = (spot(spots, 'mid').left + spot(spots, 'mid').right) / 2
@@ -98,6 +108,13 @@ describe('boxes and columns', () => {
       '<section class="box columns-2"><div><p>left</p></div><section class="box-note"><p>right</p></section></section>',
     )
     expect(spot(spots, 'right').left).toBeGreaterThan(spot(spots, 'left').left + 200)
+  })
+
+  test('a drawing may stand beside a box', () => {
+    const drawing =
+      '<figure><svg role="img" aria-label="dot" viewBox="0 0 4 4"><circle r="1"/></svg><figcaption>dot</figcaption></figure>'
+    const spots = spotsOf(`<div class="grid-2">${drawing}<div class="box"><p>beside</p></div></div>`)
+    expect(spot(spots, 'beside').left).toBeGreaterThan(spot(spots, 'dot').left + 200)
   })
 
   test('a box in balanced columns is drawn in its own column', () => {
@@ -148,6 +165,16 @@ describe('text', () => {
   test('a hyphen between letters ends a line, one before a number does not', () => {
     const html = `<table><colgroup><col width="10%"><col width="90%"></colgroup><tbody>${row('change-over 5 −20', 'b')}</tbody></table>`
     expect(spotsOf(html).map(({ word }) => word)).toEqual(expect.arrayContaining(['change-', 'over', '−20']))
+  })
+
+  test('a line may end behind a dash, but a dash is never the start of one', () => {
+    const lines = new Map<number, string[]>()
+    for (const { word, top } of spotsOf(`<p>${'grid—island—'.repeat(30)}end</p>`))
+      lines.set(top, [...(lines.get(top) ?? []), word])
+    const texts = [...lines.values()].map((words) => words.join(''))
+    expect(texts.length).toBeGreaterThan(1)
+    for (const text of texts) expect(text).toMatch(/^(?:grid|island|end)/)
+    expect(wordsOf(page('<p>ends in a dash—</p>'))).toContain('dash—')
   })
 
   test('a drawing may be as wide as asked', () => {

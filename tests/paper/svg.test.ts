@@ -4,6 +4,7 @@ import { readPath as read } from '#core/paper/svg-path.ts'
 import { rectangle } from '#core/paper/svg-shapes.ts'
 import { page } from './page.ts'
 import { Objects } from './pdf-objects.ts'
+import { wordsOf } from './tools.ts'
 
 const readPath = (data: string) => read(data, (sentence) => new Error(sentence))
 
@@ -116,6 +117,18 @@ describe('what is drawn', () => {
       drawn('<rect width="1" height="1" class="faint unknown"/>', { svgStyles: { faint: { opacity: 0.25 } } }),
     ).toMatch(/Gs\d gs/)
     expect(onPaper('#000000', 0.25)).toBe('#bfbfbf')
+  })
+
+  test('a shape without its geometry, and a text without words, are nothing', () => {
+    const strokes = (inner: string) => drawn(inner).match(/ (?:m|l|c)$| TJ/gm)?.length ?? 0
+    for (const empty of ['<polygon fill="#102030"/>', '<path fill="#102030"/>', '<text fill="#102030"></text>'])
+      expect(strokes(empty), empty).toBe(strokes(''))
+  })
+
+  test('a comment in a text is not printed, and a line break in a title parts its words', () => {
+    const figure = (inner: string) => page(`<figure><svg role="img" viewBox="0 0 90 90">${inner}</svg></figure>`)
+    expect(wordsOf(figure('<title>Flow<br>of power</title><text x="2" y="9">a<!-- b -->c</text>'))).toContain('ac')
+    expect(Buffer.from(figure('<title>Flow<br>of power</title>')).toString('latin1')).toContain('Flow of power')
   })
 
   test('transforms apply from right to left', () => {
