@@ -115,6 +115,15 @@ export class PaperDocument extends PDFDocument {
     this._root.data.OutputIntents = [intent]
   }
 
+  /** Puts the room for a seal into the catalog: the form with its field, and the permissions that the seal gives. */
+  sealWith(form: PdfReference, signature: PdfReference): void {
+    this._root.data.AcroForm = form
+    this._root.data.Perms = { DocMDP: signature }
+  }
+
+  /** The only form that there can be is the seal's, which is written already; PDFKit would ask it for fonts. */
+  override endAcroForm(): void {}
+
   override endMetadata(): void {
     const packet = this.ref({ Type: 'Metadata', Subtype: 'XML' })
     packet.compress = false

@@ -1,3 +1,4 @@
+import type { SealRoom } from './seal-room.ts'
 import type { FaceName, SvgStyle } from './style.ts'
 
 /** The five fonts that a page is set in, as the bytes of TrueType files. */
@@ -37,6 +38,8 @@ export interface PaperOptions {
   readonly header?: Running
   readonly footer?: Running
   readonly attachments?: readonly Attachment[]
+  /** Keeps room for a seal in the name of whoever will put it there. */
+  readonly seal?: SealRoom
   /** JPEG files by the name that `<img src>` uses. */
   readonly pictures?: Readonly<Record<string, Uint8Array>>
   /** What a class means inside `<svg>`. */

@@ -27,6 +27,7 @@
  * - any text: `lead`, `muted`, `small-label`, `figure` (a large number), `medium`, `right`, `island`, `alarm`
  * - span: `verdict-meets`, `verdict-meets-inside`, `verdict-fails-inside`, `verdict-fails`, `verdict-not-shown`, `verdict-limited`, `verdict-not-applicable` put a shape in front of the word inside
  */
+import type { StructureElement } from 'pdfkit'
 import { Canvas } from './canvas.ts'
 import { PaperDocument } from './document.ts'
 import { openFaces } from './faces.ts'
@@ -39,6 +40,7 @@ import { type Page, paginate } from './paginate.ts'
 import { photoShelf } from './photos.ts'
 import { PaperError } from './problems.ts'
 import { readBlocks } from './read-blocks.ts'
+import { keepRoomForSeal } from './seal-room.ts'
 import { Shaper } from './shape.ts'
 import { paintPlaced } from './strips.ts'
 import { BLOCK, CONTENT, PAGE, SVG_CLASS } from './style.ts'
@@ -75,9 +77,21 @@ const attach = (doc: PaperDocument, { attachments = [], flavour }: PaperOptions)
   }
 }
 
-const paintPages = (canvas: Canvas, shaper: Shaper, pages: readonly Page[], options: PaperOptions): void => {
+interface Desk {
+  readonly doc: PaperDocument
+  readonly shaper: Shaper
+  readonly parent: StructureElement
+}
+
+const paintPages = (
+  canvas: Canvas,
+  { doc, shaper, parent }: Desk,
+  pages: readonly Page[],
+  options: PaperOptions,
+): void => {
   pages.forEach(({ repeated, placed }, index) => {
     canvas.addPage()
+    if (index === 0 && options.seal) keepRoomForSeal(doc, parent, options.seal)
     paintFurniture(canvas, shaper, options, { page: index + 1, pages: pages.length })
     if (repeated.length > 0) canvas.artifact('/Type /Pagination', () => paintPlaced(canvas, 0, repeated))
     paintPlaced(canvas, 0, placed)
@@ -114,6 +128,6 @@ export const typeset = (html: string, options: PaperOptions): Uint8Array => {
   }
   const pages = paginate(flowBlocks(blocks, flow), PAGE.top, CONTENT.bottom)
   attach(doc, options)
-  paintPages(new Canvas(doc, faces, options.flavour === 'PDF/A-1b'), shaper, pages, options)
+  paintPages(new Canvas(doc, faces, options.flavour === 'PDF/A-1b'), { doc, shaper, parent }, pages, options)
   return doc.finish()
 }

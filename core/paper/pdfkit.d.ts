@@ -39,6 +39,7 @@ declare module 'pdfkit' {
     readonly height: number
     readonly dictionary: PdfReference
     readonly fonts: Record<string, PdfReference>
+    readonly annotations: PdfReference[]
   }
 
   export interface StructureContent {
@@ -104,7 +105,15 @@ declare module 'pdfkit' {
         modifiedDate: Date
       },
     ): PdfReference
+    annotate(
+      x: number,
+      y: number,
+      width: number,
+      height: number,
+      options: Record<string, unknown> & { structParent: StructureElement },
+    ): this
     end(): void
+    endAcroForm(): void
     endOutline(): void
     endMetadata(): void
     endSubset(): void

@@ -99,6 +99,7 @@ function paperOptions(
       right: `${issue ? `${name} · ` : ''}page {page} of {pages}`,
     },
     ...(draft && { watermark: 'DRAFT' }),
+    ...(issue && { seal: { name: issue.organisation.name, reason: `Issue of report ${name}` } }),
   }
 }
 
