@@ -75,15 +75,18 @@ export type Subject =
   | 'load step'
   | 'person'
 
+/** Values by field; undefined, or not there at all, where the file does not tell. */
+export type SheetValues = Readonly<Record<string, SheetValue | undefined>>
+
 /** Values of one subject, flat, as the rules see them. */
 export interface Sheet {
   readonly subject: Subject
   /** `K1`, `A1/1`, `CO`, `installation`: unique over all subjects of a file. */
   readonly id: string
   /** Entered, computed and measured values that do not depend on the state. */
-  readonly values: Readonly<Record<string, SheetValue>>
+  readonly values: SheetValues
   /** Values that hold in one state only, under the same names for both. */
-  readonly inState: Readonly<Record<State, Readonly<Record<string, SheetValue>>>>
+  readonly inState: Readonly<Record<State, SheetValues>>
   /** For measured fields: the interval in which the true value lies (common fields, then per state). */
   readonly spans: Readonly<Record<string, Span>>
   readonly spansInState: Readonly<Record<State, Readonly<Record<string, Span>>>>

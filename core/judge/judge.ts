@@ -1,4 +1,4 @@
-import type { Departure, Finding, Sheet, Span, State, Verdict } from '#core/glossary.ts'
+import type { Departure, Finding, Sheet, Span, State, Subject, Verdict } from '#core/glossary.ts'
 import { STATES } from '#core/glossary.ts'
 import { limitationAt } from './limitation.ts'
 import type { Rule, RuleBook } from './rule.ts'
@@ -51,30 +51,47 @@ function verdictOf(rule: Rule, view: View): Verdict {
   return ends.some ? 'fails, inside the uncertainty' : 'fails'
 }
 
-function judgeOne(rule: Rule, sheet: Sheet, state: State | null, view: View, { tree, departures }: Case): Finding {
-  const shown = rule.needs.every((name) => view.values[name] !== undefined)
-  const missing = shown ? NONE : rule.needs.filter((name) => view.values[name] === undefined)
-  const reason = missing.map((name) => limitationAt(tree, view.pathOf(name))).find((found) => found !== undefined)
-  const verdict = shown ? verdictOf(rule, view) : reason === undefined ? 'not shown' : 'limited'
-  const departure =
-    verdict === 'meets'
-      ? undefined
-      : departures.find((candidate) => candidate.rule === rule.id && candidate.subject === sheet.id)
-  return {
-    ...plainly(rule, sheet, state, verdict),
-    ...(verdict !== 'meets' && placesOf(shown || rule.at.length === 0 ? rule.at : missing, sheet, view)),
-    ...(!shown && { missing }),
-    ...(reason !== undefined && { reason }),
-    ...(departure && { departure }),
-  }
+/** One judgement to be made: a rule, in one of the states that it is about. */
+interface Turn {
+  readonly rule: Rule
+  readonly state: State | null
 }
 
 const NONE: readonly never[] = []
 
 /** A finding that nobody needs to be led to: it points to its subject. */
-function plainly(rule: Rule, sheet: Sheet, state: State | null, verdict: Verdict): Finding {
+function plainly({ rule, state }: Turn, sheet: Sheet, verdict: Verdict): Finding {
   const { id, severity } = rule
   return { rule: id, subject: sheet.id, state, verdict, severity, path: sheet.path, related: NONE, missing: NONE }
+}
+
+function judgeOne(turn: Turn, sheet: Sheet, view: View, facts: Case): Finding {
+  const { rule } = turn
+  const { values } = view
+  if (rule.when && !rule.when(values)) return plainly(turn, sheet, 'not applicable')
+  if (rule.needs.some((name) => values[name] === undefined)) return notShown(turn, sheet, view, facts)
+  const verdict = verdictOf(rule, view)
+  if (verdict === 'meets') return plainly(turn, sheet, verdict)
+  return { ...plainly(turn, sheet, verdict), ...placesOf(rule.at, sheet, view), ...departed(rule, sheet, facts) }
+}
+
+/** A needed field is missing, with a stated reason or without. */
+function notShown(turn: Turn, sheet: Sheet, view: View, facts: Case): Finding {
+  const { rule } = turn
+  const missing = rule.needs.filter((name) => view.values[name] === undefined)
+  const reason = missing.map((name) => limitationAt(facts.tree, view.pathOf(name))).find((found) => found !== undefined)
+  return {
+    ...plainly(turn, sheet, reason === undefined ? 'not shown' : 'limited'),
+    ...placesOf(rule.at.length === 0 ? rule.at : missing, sheet, view),
+    missing,
+    ...(reason !== undefined && { reason }),
+    ...departed(rule, sheet, facts),
+  }
+}
+
+function departed(rule: Rule, sheet: Sheet, { departures }: Case): Pick<Finding, 'departure'> {
+  const departure = departures.find((candidate) => candidate.rule === rule.id && candidate.subject === sheet.id)
+  return departure ? { departure } : {}
 }
 
 function placesOf(names: readonly string[], sheet: Sheet, view: View): Pick<Finding, 'path' | 'related'> {
@@ -83,8 +100,24 @@ function placesOf(names: readonly string[], sheet: Sheet, view: View): Pick<Find
   return { path, related: others.filter((other) => other.join('/') !== same) }
 }
 
-const statesOf = (rule: Rule): readonly (State | null)[] =>
-  rule.state === 'each' ? STATES : rule.state === 'none' ? [null] : [rule.state]
+const statesOf = ({ state }: Rule): readonly (State | null)[] =>
+  state === 'each' ? STATES : state === 'none' ? [null] : [state]
+
+const prepared = new WeakMap<RuleBook, ReadonlyMap<Subject, readonly Turn[]>>()
+
+/** What a sheet of each kind is judged by, in the order of the book; worked out once for each book. */
+function turnsOf(book: RuleBook): ReadonlyMap<Subject, readonly Turn[]> {
+  const known = prepared.get(book)
+  if (known) return known
+  const turns = new Map<Subject, Turn[]>()
+  for (const rule of book.rules) {
+    const own = turns.get(rule.subject) ?? []
+    turns.set(rule.subject, own)
+    for (const state of statesOf(rule)) own.push({ rule, state })
+  }
+  prepared.set(book, turns)
+  return turns
+}
 
 /**
  * Judges every sheet by every rule of its subject.
@@ -94,40 +127,15 @@ const statesOf = (rule: Rule): readonly (State | null)[] =>
  * finding `not applicable`, so that the counts add up to all that was looked at.
  */
 export function judge(book: RuleBook, facts: Case): Finding[] {
-  const bySubject = rulesBySubject(book)
-  return facts.sheets.flatMap((sheet) => {
+  const turns = turnsOf(book)
+  const findings: Finding[] = []
+  for (const sheet of facts.sheets) {
     const views = new Map<State | null, View>()
-    const view = (state: State | null): View => {
-      const made = views.get(state) ?? viewOf(sheet, state, book.parameters)
-      views.set(state, made)
-      return made
+    for (const turn of turns.get(sheet.subject) ?? []) {
+      const view = views.get(turn.state) ?? viewOf(sheet, turn.state, book.parameters)
+      views.set(turn.state, view)
+      findings.push(judgeOne(turn, sheet, view, facts))
     }
-    return (bySubject.get(sheet.subject) ?? []).flatMap((rule) =>
-      statesOf(rule).map((state) => {
-        const seen = view(state)
-        if (!applies(rule, seen)) return plainly(rule, sheet, state, 'not applicable')
-        return judgeOne(rule, sheet, state, seen, facts)
-      }),
-    )
-  })
-}
-
-function applies({ when }: Rule, view: View): boolean {
-  if (!when) return true
-  const known = view.applies.get(when)
-  if (known !== undefined) return known
-  const holds = when(view.values)
-  view.applies.set(when, holds)
-  return holds
-}
-
-/** Rules by the subject that they are about. */
-function rulesBySubject({ rules }: RuleBook): Map<Rule['subject'], Rule[]> {
-  const groups = new Map<Rule['subject'], Rule[]>()
-  for (const rule of rules) {
-    const group = groups.get(rule.subject)
-    if (group) group.push(rule)
-    else groups.set(rule.subject, [rule])
   }
-  return groups
+  return findings
 }

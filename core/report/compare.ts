@@ -30,6 +30,8 @@ export interface Comparison {
 
 const same = (a: unknown, b: unknown): boolean => JSON.stringify(a) === JSON.stringify(b)
 
+const stated = (values: Sheet['values']): string[] => Object.keys(values).filter((name) => values[name] !== undefined)
+
 function changesIn(
   subject: Sheet,
   state: State | null,
@@ -37,7 +39,7 @@ function changesIn(
   after: Sheet['values'] = {},
 ): ValueChange[] {
   const fields = fieldsOf(subject.subject)
-  const names = [...new Set([...Object.keys(before), ...Object.keys(after)])]
+  const names = [...new Set([...stated(before), ...stated(after)])]
   return names
     .filter((name) => !same(before[name], after[name]))
     .map((name) => ({

@@ -1,3 +1,4 @@
+import shapes from '#core/generated/sheet-shapes.js'
 import type { NotTested, Path, Sheet, SheetValue, Span, State } from '#core/glossary.ts'
 import type { Measured } from '#core/install.ts'
 import type { Known, Scene } from '#core/quantities/quantity.ts'
@@ -6,19 +7,17 @@ import { placesOf } from './places.ts'
 import type { SheetPlan } from './plan.ts'
 import { PLANS } from './plans.ts'
 
+type Values = Record<string, SheetValue | undefined>
+
 interface Columns {
-  readonly values: Record<string, SheetValue>
+  readonly values: Values
   readonly spans: Record<string, Span>
 }
 
 type Instrument = Parameters<typeof spanOf>[2]
 type Kind = Parameters<typeof spanOf>[1]
 
-const columns = (): Columns => ({ values: {}, spans: {} })
-
-function put(into: Columns, name: string, value: SheetValue | undefined): void {
-  if (value !== undefined) into.values[name] = value
-}
+const columns = (values: Values): Columns => ({ values, spans: {} })
 
 const taken = (measured: Measured | undefined): measured is Exclude<Measured, NotTested> =>
   measured !== undefined && 'value' in measured
@@ -43,8 +42,8 @@ function fillState<Item>(
   state: State,
   instrument: Instrument,
 ): Columns {
-  const into = columns()
-  for (const field of plan.inState ?? []) put(into, field.name, field.value(item, scene, state))
+  const into = columns(shapes[plan.subject].inState())
+  for (const field of plan.inState ?? []) into.values[field.name] = field.value(item, scene, state)
   for (const { name, kind, reading } of plan.measuredInState ?? [])
     measure(into, name, kind, reading(item, scene, state), instrument)
   return into
@@ -52,15 +51,15 @@ function fillState<Item>(
 
 function compute<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene, into: Columns): void {
   const known: Known = into.values
-  for (const quantity of plan.quantities ?? []) put(into, quantity.name, quantity.compute(item, scene, known))
+  for (const quantity of plan.quantities ?? []) into.values[quantity.name] = quantity.compute(item, scene, known)
 }
 
 function sheetOf<Item>(plan: SheetPlan<Item>, item: Item, scene: Scene): Sheet {
   const named = plan.instrument?.(item, scene) ?? scene.install.readings?.with
   const instrument = named === undefined ? undefined : scene.install.instruments?.[named]
   const path = plan.path(item, scene)
-  const common = columns()
-  for (const field of plan.entered) put(common, field.name, field.value(item, scene))
+  const common = columns(shapes[plan.subject].common())
+  for (const field of plan.entered) common.values[field.name] = field.value(item, scene)
   for (const { name, kind, reading } of plan.measured ?? [])
     measure(common, name, kind, reading(item, scene), instrument)
   compute(plan, item, scene, common)

@@ -1,6 +1,7 @@
 import { readFile } from 'node:fs/promises'
 import { generateRules } from '#tools/rules/generate.ts'
 import { generateSchemas } from '#tools/schema/generate.ts'
+import { generateSheets } from '#tools/sheets/generate.ts'
 import { generateTemplates } from '#tools/templates/generate.ts'
 
 /** What lies in the working tree under a path; nothing where there is no such file. */
@@ -13,7 +14,12 @@ async function present(path: string): Promise<string | undefined> {
   }
 }
 
-const wanted = { ...(await generateSchemas()), ...(await generateRules()), ...(await generateTemplates()) }
+const wanted = {
+  ...(await generateSchemas()),
+  ...(await generateRules()),
+  ...generateSheets(),
+  ...(await generateTemplates()),
+}
 const stale: string[] = []
 for (const [path, content] of Object.entries(wanted)) {
   if ((await present(path)) !== content) stale.push(path)

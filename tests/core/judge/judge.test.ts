@@ -9,8 +9,7 @@ const LIMIT = 1
 
 interface Values {
   readonly loop?: number
-  readonly other?: number
-  readonly live?: boolean
+  readonly backed_up?: boolean
 }
 
 const loopRule = (more: Partial<Rule> = {}): Rule => ({
@@ -109,17 +108,17 @@ describe('a rule with several readings', () => {
   const both = loopRule({
     state: 'none',
     needs: [],
-    reads: ['a', 'b'],
+    reads: ['continuity', 'insulation'],
     at: [],
     must: (values) => {
-      const { a, b } = values as { a: number; b: number }
-      return a <= b
+      const { continuity, insulation } = values as { continuity: number; insulation: number }
+      return continuity <= insulation
     },
   })
   const pair = (a: Span, b: Span): Sheet => ({
     ...sheet(undefined),
-    values: { a: (a.low + a.high) / 2, b: (b.low + b.high) / 2 },
-    spans: { a, b },
+    values: { continuity: (a.low + a.high) / 2, insulation: (b.low + b.high) / 2 },
+    spans: { continuity: a, insulation: b },
   })
 
   it('meets only when every corner of the intervals does', () => {
@@ -139,7 +138,7 @@ describe('a rule with several readings', () => {
 
 describe('where a rule applies', () => {
   it('does not judge a sheet that its condition leaves out, and says so', () => {
-    const rule = loopRule({ when: (values) => (values as Values).live === true })
+    const rule = loopRule({ when: (values) => (values as Values).backed_up === true })
     expect(verdict(rule, sheet(2)).verdict).toBe('not applicable')
   })
 
