@@ -3,6 +3,7 @@ import { catcher } from '#server/mail/catcher.ts'
 import { type DeliverOptions, deliver, type MailLog, type StoredMail } from '#server/mail/deliver.ts'
 import type { Delivery, MailSender, OutgoingMail } from '#server/mail/delivery.ts'
 import { mailRenderer } from '#server/mail/mail.ts'
+import { openSender } from '#server/mail/open-sender.ts'
 import { compose } from '#server/mail/outbox.ts'
 import { smtpSender } from '#server/mail/transport.ts'
 import { readUnsubscribeToken } from '#server/mail/unsubscribe.ts'
@@ -132,5 +133,31 @@ describe('a mail of the outbox', () => {
     const log = logWith(storedMail())
     expect(await deliver(options(log, catcher), 'fennmark', '1')).toMatchObject({ outcome: 'kept' })
     expect(log.row().state).toBe('kept')
+  })
+})
+
+describe('the way out for mails', () => {
+  it('keeps them where no server is named', () => {
+    expect(openSender({ SMTP_URL: '', MAIL_FROM: '' }, () => AT)).toBe(catcher)
+  })
+
+  it('sends them where one is', async () => {
+    const server = await localServer()
+    const { port } = server.settings
+    const sender = openSender(
+      { SMTP_URL: `smtp://127.0.0.1:${port}`, MAIL_FROM: 'Skerry <skerry@fennmark.example>' },
+      () => AT,
+    )
+    expect(await deliver(options(logWith(storedMail()), sender), 'fennmark', '1')).toMatchObject({ outcome: 'sent' })
+    expect(server.received[0]?.mail.from?.text).toBe('"Skerry" <skerry@fennmark.example>')
+    sender.close()
+    await server.close()
+  })
+
+  it.each([
+    ['https://mail.example', 'Skerry <skerry@fennmark.example>', 'SMTP_URL'],
+    ['smtp://mail.example', 'Skerry', 'MAIL_FROM'],
+  ])('does not open with %s and %s', (SMTP_URL, MAIL_FROM, name) => {
+    expect(() => openSender({ SMTP_URL, MAIL_FROM }, () => AT)).toThrow(name)
   })
 })
