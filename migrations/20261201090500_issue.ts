@@ -173,6 +173,14 @@ export async function up(knex: Knex): Promise<void> {
            or (wanted_sha256 is not null and s.pdf_sha256 = lower(wanted_sha256))
         limit 2
       $$;
+    -- What the nightly check and the sweeper go through; each organisation's rows are then read in its own transaction.
+    create function organisation_ids() returns setof uuid
+      language sql stable security definer set search_path = public
+      as $$ select organisation_id from organisations order by organisation_id $$;
+    alter function organisation_ids() owner to skerry_gate;
+    revoke all on function organisation_ids() from public;
+    grant execute on function organisation_ids() to skerry_app;
+
     -- Tells an empty database from one that must not be seeded.
     create function any_organisation() returns boolean
       language sql stable security definer set search_path = public

@@ -3,8 +3,11 @@ import PgBoss from 'pg-boss'
 import { APP_ROLE } from './db.ts'
 import { QUEUES, type Queue, through } from './jobs/jobs.ts'
 
+/** Where pg-boss puts what its timetable calls for; it would make it itself, but the running server may make nothing. */
+const TIMETABLE = '__pgboss__send-it'
+
 /** Queue names in the order in which they must be made: a queue's dead letters need somewhere to go. */
-const QUEUE_NAMES = ['dead', ...(Object.keys(QUEUES) as Queue[])] as const
+const QUEUE_NAMES = [TIMETABLE, 'dead', ...(Object.keys(QUEUES) as Queue[])] as const
 
 /**
  * Brings a database to this version: our migrations, the job queue's own tables, and its queues.

@@ -1,4 +1,5 @@
 import { readEnv } from './env.ts'
+import { handlers, work } from './jobs/work.ts'
 import { openServices } from './make-services.ts'
 import { stopOnSignal } from './stop.ts'
 
@@ -15,5 +16,6 @@ const { services, boss, close } = openServices(read.env, {
   clock: () => new Date(),
 })
 await boss.start()
+await work(services, boss, handlers())
 services.log.info({ event: 'working' }, 'working')
 stopOnSignal(services.log, close)

@@ -60,7 +60,7 @@ export async function withdrawReport(stage: Stage, reason: string): Promise<Answ
     services,
     {
       organisation,
-      kind: 'report ended',
+      kind: 'report withdrawn',
       event: `withdraw/${subject.report_id}`,
       actor: actor.person,
       subject: `${number} is withdrawn`,

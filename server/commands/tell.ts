@@ -6,7 +6,7 @@ import type { Services } from '#server/services.ts'
 import { escapeHtml, oneLine } from './mail-text.ts'
 
 /** Kinds of mail that the record sends; each person may switch each off. */
-export type MailKind = 'review asked' | 'review submitted' | 'report issued' | 'report ended'
+export type MailKind = 'review asked' | 'review submitted' | 'report issued' | 'report withdrawn' | 'checkpoint'
 
 /** What people are told, and of which event. */
 export interface News {

@@ -87,6 +87,11 @@ export const PROBLEMS = {
     title: 'Something went wrong here',
     help: 'The fault is ours and has been logged under `request`. Nothing half-done was kept.',
   },
+  damaged: {
+    status: 500,
+    title: 'The record is damaged',
+    help: 'What is stored is not what was written: it was changed or lost outside the server. It is not handed out; the nightly check tells the administrator where.',
+  },
   unavailable: {
     status: 503,
     title: 'Not available right now',

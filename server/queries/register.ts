@@ -144,3 +144,10 @@ export async function newestCheckpoint(tx: Tx, organisation: string): Promise<Ch
     .orderBy('size', 'desc')
     .first<CheckpointRow | undefined>(...CHECKPOINT_COLUMNS)
 }
+
+export async function listCheckpoints(tx: Tx, organisation: string): Promise<CheckpointRow[]> {
+  return await tx('checkpoints')
+    .where('organisation_id', organisation)
+    .orderBy('size')
+    .select<CheckpointRow[]>(...CHECKPOINT_COLUMNS)
+}

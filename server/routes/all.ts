@@ -3,9 +3,11 @@ import { ATTACHMENT_ROUTES } from './attachments.ts'
 import { CHECK_ROUTES } from './check.ts'
 import { CLAIM_ROUTES } from './claims.ts'
 import { CONDITION_ROUTES } from './conditions.ts'
+import { DOCUMENT_ROUTES } from './documents.ts'
 import { INSTRUMENT_WRITE_ROUTES } from './instrument-writes.ts'
 import { INSTRUMENT_ROUTES } from './instruments.ts'
 import { ISSUE_ROUTES } from './issue.ts'
+import { JOB_ROUTES } from './jobs.ts'
 import { PASSWORD_ROUTES } from './passwords.ts'
 import { PEOPLE_ROUTES } from './people.ts'
 import { REMARK_ROUTES } from './remarks.ts'
@@ -35,6 +37,8 @@ export const ROUTES: readonly Route[] = [
   ...REMARK_ROUTES,
   ...REVIEW_ROUTES,
   ...ISSUE_ROUTES,
+  ...DOCUMENT_ROUTES,
+  ...JOB_ROUTES,
   ...CHECK_ROUTES,
   ...UPLOAD_ROUTES,
   ...ATTACHMENT_ROUTES,

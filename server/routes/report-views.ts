@@ -1,6 +1,7 @@
 import { compare } from '#core/report/compare.ts'
 import { countVerdicts, toldFindings } from '#core/report/told.ts'
 import { draftModel, judgedRevision } from '#server/commands/judged-revision.ts'
+import { noteRead } from '#server/commands/note-read.ts'
 import { renderDraft } from '#server/commands/render-draft.ts'
 import { isRefused, refuse } from '#server/http/problems.ts'
 import { route } from '#server/http/route.ts'
@@ -34,9 +35,11 @@ const modelRoute = route({
       required: ['revision', 'sha256', 'model'],
     },
   },
-  async run({ tx, actor, query, subject }) {
+  async run(call) {
+    const { tx, actor, query, subject } = call
     const found = await judgedRevision(tx, actor.organisation, subject.report_id, query.revision ?? subject.revision)
     if (found === undefined) return refuse('not-found')
+    await noteRead(call, 'model')
     return { body: { revision: found.revision, sha256: found.sha256, model: draftModel(found) } }
   },
 })
