@@ -1,13 +1,7 @@
-import { endWith, isTerminal, ownFile, say, writeWhole } from '#cli/io.ts'
+import { ownFonts } from '#cli/fonts.ts'
+import { endWith, isTerminal, say, writeWhole } from '#cli/io.ts'
 import { judgedFile } from '#cli/judged.ts'
-import type { FontName } from '#core/paper/options.ts'
 import { createdFrom, renderFieldsheet, renderReport } from '#core/report/render.ts'
-
-const FACES = ['regular', 'italic', 'medium', 'semibold', 'fallback'] as const satisfies readonly FontName[]
-
-function fonts(): Record<FontName, Uint8Array> {
-  return Object.fromEntries(FACES.map((name) => [name, ownFile(`fonts/${name}.ttf`)])) as Record<FontName, Uint8Array>
-}
 
 type Made = { readonly ok: true; readonly bytes: Uint8Array } | { readonly ok: false; readonly message: string }
 
@@ -43,7 +37,7 @@ export async function render(
   const options = {
     text,
     file: file.split(/[\\/]/).at(-1) ?? file,
-    fonts: fonts(),
+    fonts: ownFonts(),
     created: createdFrom(judged.install),
     draft: true,
   }

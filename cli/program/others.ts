@@ -6,9 +6,16 @@ interface FileOptions {
   readonly rulebook?: string
 }
 
+interface VerifyOptions extends FileOptions {
+  readonly proof?: string
+  readonly trust?: readonly string[]
+}
+
 const textOrJson = (): Option =>
   new Option('-f, --format <name>', 'how to print it').choices(['text', 'json']).default('text')
 const ownBook = (): Option => new Option('--rulebook <folder>', 'a rule book of your own, which extends one that ships')
+const VERIFY_EXAMPLE =
+  '\nExample:\n  skerry verify FEN-2026-0012.pdf --proof FEN-2026-0012.proof.json --trust root.pem\n'
 const CSV_EXAMPLE = '\nExample:\n  skerry fill site.skerry.yaml readings.csv --dry-run\n'
 
 function help(skerry: Command, name: string | undefined): void {
@@ -92,6 +99,24 @@ export function addOthers(skerry: Command): void {
         (await import('#cli/commands/render.ts')).render(name, file, options),
       )
   }
+  skerry
+    .command('verify')
+    .summary('whether an issued report is genuine, with no server and no network')
+    .description(
+      'Verifies an issued report: its seal over every byte, the certificate, the file and the quantities inside, its place in the register; then computes, judges and renders the file inside anew and compares. Ends with 0 when all holds, 1 when something does not, 2 when a file cannot be read.',
+    )
+    .argument('<file>', 'an issued report, as PDF')
+    .option('--proof <file>', 'the proof file that was handed out with it')
+    .option(
+      '--trust <file...>',
+      'certificates that you trust, as PEM; get them from the issuer by another way than the report',
+    )
+    .addOption(textOrJson())
+    .addOption(ownBook())
+    .addHelpText('after', VERIFY_EXAMPLE)
+    .action(async (file: string, options: VerifyOptions) =>
+      (await import('#cli/commands/verify.ts')).verify(file, options),
+    )
   skerry
     .command('send')
     .summary('send files to a server, each as a report or as the next revision of one')

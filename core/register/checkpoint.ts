@@ -1,4 +1,4 @@
-import { utf8ToBytes } from '@noble/hashes/utils.js'
+import { strToU8 } from 'fflate'
 import { base64Of, bytesFrom } from './base64.ts'
 import { derFromRaw, rawFromDer } from './ecdsa.ts'
 import type { Sign, Verify } from './signing.ts'
@@ -45,7 +45,7 @@ export function checkpointBody({ origin, size, root, at }: Checkpoint): string {
  */
 export async function signCheckpoint(checkpoint: Checkpoint, sign: Sign): Promise<string> {
   const body = checkpointBody(checkpoint)
-  const text = `${body}signature ${base64Of(derFromRaw(await sign(utf8ToBytes(body))))}\n`
+  const text = `${body}signature ${base64Of(derFromRaw(await sign(strToU8(body))))}\n`
   const read = parseCheckpoint(text)
   if (!read.ok) throw new RangeError(read.message)
   return text
@@ -67,5 +67,5 @@ export function parseCheckpoint(text: string): CheckpointResult {
 
 /** Whether the checkpoint was signed with the key that `verify` was made for. */
 export async function verifyCheckpoint({ body, signature }: SignedCheckpoint, verify: Verify): Promise<boolean> {
-  return verify(utf8ToBytes(body), signature)
+  return verify(strToU8(body), signature)
 }

@@ -14,4 +14,6 @@ export interface Check {
   readonly id: string
   readonly holds: boolean
   readonly says: string
+  /** It could not be settled, and counts neither way: the words say what is missing. */
+  readonly open?: true
 }

@@ -42,6 +42,13 @@ export interface Issue {
 /** What of an issue stands in `issue.json`: the register's proof has a file of its own beside it. */
 export type IssueRecord = Omit<Issue, 'register'>
 
+/** What `issue.json` holds: the record, and how the file was judged, for whoever judges it again. */
+export interface IssueFile extends IssueRecord {
+  readonly rulebook: { readonly id: string; readonly version: string; readonly hash: string }
+  /** Each verdict by the anchor of its finding. */
+  readonly verdicts: Readonly<Record<string, string>>
+}
+
 /** Names under which the files of an issued report are embedded, beside the install file itself. */
 export const EMBEDDED = { facts: 'facts.json', register: 'register.json', issue: 'issue.json' } as const
 

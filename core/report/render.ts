@@ -6,9 +6,10 @@ import { typeset } from '#core/paper/paper.ts'
 import { sha256 } from '#core/paper/sha256.ts'
 import { factsText } from './facts.ts'
 import { fieldsheetModel } from './fieldsheet.ts'
-import { EMBEDDED, type Issue, type IssueRecord, misfit } from './issue.ts'
+import { EMBEDDED, type Issue, type IssueFile, misfit } from './issue.ts'
 import { reportModel } from './model.ts'
 import { fillPage } from './page.ts'
+import { verdictsOf } from './verdict-list.ts'
 
 export interface RenderOptions {
   /** The file as it was entered, to be embedded. */
@@ -35,13 +36,17 @@ export function createdFrom({ report }: Install): string {
 const hex = (bytes: Uint8Array): string => Array.from(bytes, (byte) => byte.toString(16).padStart(2, '0')).join('')
 
 /** The record of the issue and its place in the register travel with an issued report. */
-function issueAttachments({ register, ...record }: Issue, created: string): Attachment[] {
+function issueAttachments({ book, findings }: Judged, { register, ...record }: Issue, created: string): Attachment[] {
   const json = (value: object): Uint8Array => strToU8(`${JSON.stringify(value, null, 2)}\n`)
   return [
     {
       name: EMBEDDED.issue,
       type: 'application/json',
-      bytes: json(record satisfies IssueRecord),
+      bytes: json({
+        ...record,
+        rulebook: { id: book.id, version: book.version, hash: book.hash },
+        verdicts: verdictsOf(findings),
+      } satisfies IssueFile),
       relationship: 'Data',
       description: 'What is printed beyond the file: number, names, accepted words',
       created,
@@ -75,7 +80,7 @@ function attachments(judged: Judged, { text, file, created, issue }: RenderOptio
       description: 'Every computed quantity, with its formula and source',
       created,
     },
-    ...(issue ? issueAttachments(issue, created) : []),
+    ...(issue ? issueAttachments(judged, issue, created) : []),
   ]
 }
 

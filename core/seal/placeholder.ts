@@ -18,6 +18,8 @@ export interface Placeholder {
  */
 export function placeholderOf(file: PdfFile): Placeholder {
   const { catalog } = file
+  if (!catalog.entries.has('AcroForm'))
+    throw new PdfError('The PDF carries no seal: it is a draft, or no report of Skerry.')
   const fields = file.follow(file.dictionary(catalog, 'AcroForm').entries.get('Fields'))
   const [field, ...others] = fields?.kind === 'list' ? fields.values : []
   const described = file.follow(field)

@@ -22,6 +22,8 @@ export interface ChainAnswer {
   readonly holds: boolean
   /** Whether the way leads to a certificate that was named as trusted. */
   readonly trusted: boolean
+  /** Nobody was named as trusted. */
+  readonly open?: true
   /** What is wrong, or how far the trust goes, in one sentence. */
   readonly says: string
 }
@@ -103,6 +105,7 @@ export async function followChain<Key>(question: ChainQuestion<Key>): Promise<Ch
     return {
       holds: true,
       trusted: false,
+      open: true,
       says: `The certificate is that of ${own.subject}, issued by ${own.issuer} (SHA-256 ${own.fingerprint}). Nobody was named as trusted: it is only as trustworthy as where it came from.`,
     }
   }

@@ -101,8 +101,8 @@ async function certificateCheck<Key>(
     return { id, holds: false, says: `The certificate of ${own.subject} is not for sealing documents.` }
   }
   const trusted = certificates?.flatMap((der) => readCertificate(der) ?? [])
-  const { holds, says } = await followChain({ own, others, trusted, at, subtle })
-  return { id, holds, says }
+  const { holds, says, open } = await followChain({ own, others, trusted, at, subtle })
+  return { id, holds, says, ...(open && { open }) }
 }
 
 async function timestampCheck<Key>(
@@ -118,7 +118,13 @@ async function timestampCheck<Key>(
   const trusted = certificates?.flatMap((der) => readCertificate(der) ?? []) ?? []
   const rooted = await followChain({ ...chain, trusted })
   const words = rooted.trusted ? 'Its authority is trusted here.' : 'Its authority is not among those named as trusted.'
-  return { check: { id: 'time-stamp', holds: true, says: `${says} ${words}` }, at }
+  const check: Check = {
+    id: 'time-stamp',
+    holds: true,
+    says: `${says} ${words}`,
+    ...(!rooted.trusted && { open: true }),
+  }
+  return { check, at }
 }
 
 async function signedChecks<Key>(

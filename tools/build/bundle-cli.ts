@@ -85,6 +85,30 @@ const paperBeside: Plugin = {
   },
 }
 
+const VERIFY = 'skerry-verify.cjs'
+/** What only verifying takes; the engine and the press are handed in. */
+const VERIFYING = ['core/verify/verify-report.ts', 'core/seal/pem.ts'] as const
+
+/** Seals and registers stand beside the rest: only one command looks at them. */
+async function bundleVerify(): Promise<void> {
+  const contents = VERIFYING.map((file) => `export * from './${file}'`).join('\n')
+  await build({
+    ...SHARED,
+    stdin: { contents, resolveDir: PROJECT, loader: 'ts' },
+    outfile: `${DIST}/${VERIFY}`,
+  })
+}
+
+const verifyBeside: Plugin = {
+  name: 'verify-beside',
+  setup(setup) {
+    setup.onResolve({ filter: /core\/(?:verify\/verify-report|seal\/pem)\.ts$/ }, () => ({
+      path: `./${VERIFY}`,
+      external: true,
+    }))
+  },
+}
+
 /** Packages that only files with faults and books of one's own call for stand beside the bundle, each in a file. */
 const SELDOM = {
   yaml: 'skerry-yaml.cjs',
@@ -132,7 +156,7 @@ async function bundle(): Promise<void> {
     // The launcher calls the whole bundle as one function, so it need not copy it to put a head before it.
     banner: { js: '(function (exports, require, module, __filename, __dirname) {' },
     footer: { js: '})' },
-    plugins: [plainParserState, childProcessOnCall, paperBeside, seldomBeside, textsBeside],
+    plugins: [plainParserState, childProcessOnCall, paperBeside, verifyBeside, seldomBeside, textsBeside],
   })
 }
 
@@ -160,6 +184,7 @@ function link(): void {
 mkdirSync(DIST, { recursive: true })
 rmSync(`${DIST}/skerry-main.cache`, { force: true })
 await bundlePaper()
+await bundleVerify()
 await bundleSeldom()
 await bundle()
 copyFileSync(`${PROJECT}tools/build/launcher.cjs`, `${DIST}/skerry.cjs`)

@@ -18,7 +18,7 @@ export async function generateSchemas(): Promise<Record<string, string>> {
   const written = await readParts()
   const quantities = quantitiesPart(written)
   const bundled = bundle({ top: written.top, parts: new Map(written.parts).set(QUANTITIES, quantities) })
-  const proof: SchemaNode = JSON.parse(await readFile(`${PROJECT}schemas/proof.schema.json`, 'utf8'))
+  const [proof, issue] = [await readSchema('proof'), await readSchema('issue')]
   return {
     [`schemas/parts/${QUANTITIES}.schema.json`]: printJson(quantities),
     'schemas/install.draft-07.schema.json': printJson(makeDraft07(bundled)),
@@ -29,6 +29,8 @@ export async function generateSchemas(): Promise<Record<string, string>> {
     'core/generated/install-validator.d.ts': VALIDATOR_TYPES,
     'core/generated/proof-validator.js': await compileValidator(proof),
     'core/generated/proof-validator.d.ts': PROOF_TYPES,
+    'core/generated/issue-validator.js': await compileValidator(issue),
+    'core/generated/issue-validator.d.ts': ISSUE_TYPES,
     'core/generated/install-plan.ts': writePlan(makePlan(bundled)),
   }
 }
@@ -36,6 +38,17 @@ export async function generateSchemas(): Promise<Record<string, string>> {
 const TEXT_TYPES = `/** The bundled schema as JSON text: it is parsed only where a file has errors to explain. */
 declare const text: () => string
 export default text
+`
+
+async function readSchema(name: string): Promise<SchemaNode> {
+  return JSON.parse(await readFile(`${PROJECT}schemas/${name}.schema.json`, 'utf8'))
+}
+
+const ISSUE_TYPES = `import type { IssueFile } from '#core/report/issue.ts'
+
+/** Whether a value is the record of an issue, as schemas/issue.schema.json has it. */
+declare const validate: (value: unknown) => value is IssueFile
+export default validate
 `
 
 const PROOF_TYPES = `import type { Proof } from '#core/register/proof.ts'
