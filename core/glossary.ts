@@ -52,6 +52,9 @@ export interface NotTested {
   readonly not_tested: string
 }
 
+/** What stands in the place of a reading: the reading, or why there is none. */
+export type Measured = Reading | NotTested
+
 /** What a sheet field can hold. */
 export type SheetValue = string | number | boolean | readonly SheetValue[] | { readonly [key: string]: SheetValue }
 

@@ -2,10 +2,16 @@
  * The install file after normalising: shorthand expanded, every quantity a plain number in the unit that the schema
  * names for its place (given here in brackets). The schema under `schemas/` is the norm; this is its shape in TypeScript.
  */
-import type { Line, NotTested, Reading, State } from './glossary.ts'
+import type { Line, Measured } from './glossary.ts'
+import type { Battery } from './install/battery.ts'
+import type { EarthingArrangement } from './install/earthing.ts'
+import type { Meter } from './install/meter.ts'
+import type { Readings } from './install/readings.ts'
+import type { Handover, InspectionItem, Instrument, People } from './install/record.ts'
+import type { ReportHead, Site } from './install/site.ts'
 
-export type Measured = Reading | NotTested
 export type Earthing = 'TN-S' | 'TN-C-S' | 'TT'
+
 export type NeutralLink = 'closes in island' | 'fixed' | 'none'
 
 export interface Install {
@@ -38,31 +44,6 @@ export interface Install {
   readonly handover?: Handover
 }
 
-export interface ReportHead {
-  readonly reference: string
-  readonly purpose: 'initial verification' | 'periodic verification' | 'alteration'
-  /** A book's id; `iec` when left out. */
-  readonly rulebook?: string
-  readonly inspected?: { readonly from: string; readonly to?: string }
-  readonly next_due?: string
-  /** What the report covers, and what it leaves out. */
-  readonly extent?: string
-  readonly remarks?: string
-}
-
-export interface Site {
-  readonly name: string
-  readonly address: readonly string[]
-  readonly customer?: string
-  /** degrees, degrees, m above sea level */
-  readonly position?: { readonly latitude: number; readonly longitude: number; readonly altitude?: number }
-  /** °C, lowest ambient temperature expected */
-  readonly lowest_temperature?: number
-  /** °C, highest module cell temperature expected */
-  readonly highest_cell_temperature?: number
-  readonly premises?: 'dwelling' | 'commercial' | 'industrial' | 'agricultural' | 'public'
-}
-
 export interface Supply {
   readonly operator: string
   readonly earthing: Earthing
@@ -78,44 +59,6 @@ export interface Supply {
   readonly separation?: { readonly required: 'all poles' | 'line poles'; readonly stated_in?: string }
 }
 
-export interface EarthingArrangement {
-  readonly electrode?: {
-    readonly kind: 'foundation' | 'rod' | 'ring' | 'plate' | 'strip' /** Ω */
-    readonly resistance?: Measured
-  }
-  /** mm² */
-  readonly earthing_conductor?: number
-  /** mm², Ω */
-  readonly bonding?: readonly { readonly to: string; readonly size: number; readonly continuity?: Measured }[]
-  readonly lightning_protection?: boolean
-}
-
-export interface Meter {
-  readonly id: string
-  readonly at: 'connection point' | 'generation' | 'consumption'
-  /** A */
-  readonly rated_current?: number
-  readonly direction?: 'checked' | 'not checked' | 'reversed'
-  readonly neutral_reference?: string
-  readonly link?: Bus
-}
-
-export interface Bus {
-  readonly kind: 'RS-485' | 'Ethernet' | 'wireless'
-  readonly address?: number
-  /** Addresses of the other devices on the same bus. */
-  readonly other_addresses?: readonly number[]
-  readonly terminated_at?: readonly string[]
-  /** Ω, across the pair with the power off */
-  readonly measured_across?: Measured
-  /** m */
-  readonly length?: number
-  /** m, the longest that the device's datasheet allows */
-  readonly length_limit?: number
-  /** V, Ω each, count of receivers in unit loads */
-  readonly bias?: { readonly voltage: number; readonly resistors: number; readonly unit_loads?: number }
-}
-
 export interface Board {
   readonly name: string
   readonly fed_from: string
@@ -123,8 +66,8 @@ export interface Board {
   readonly neutral_link?: NeutralLink
 }
 
-/** An overcurrent protective device. Ratings in A. */
 export type Device = Breaker | Fuse
+
 export interface Breaker {
   readonly kind: 'breaker'
   readonly curve: 'B' | 'C' | 'D'
@@ -134,6 +77,7 @@ export interface Breaker {
   /** A²s let through at the prospective fault current */
   readonly let_through?: number
 }
+
 export interface Fuse {
   readonly kind: 'fuse'
   readonly curve: 'gG'
@@ -200,6 +144,7 @@ export interface Signal {
 }
 
 export type ResidualType = 'AC' | 'A' | 'F' | 'B'
+
 export interface ResidualProtection {
   readonly type: ResidualType
   /** mA */
@@ -207,6 +152,7 @@ export interface ResidualProtection {
   /** `S`: time-delayed (selective) */
   readonly delay?: 'S'
 }
+
 export interface ResidualCurrentDevice extends ResidualProtection {
   readonly fed_from: string
   /** A */
@@ -214,7 +160,6 @@ export interface ResidualCurrentDevice extends ResidualProtection {
   readonly cable?: Cable
 }
 
-/** A second way of supply beside the tree, such as a service bypass. */
 export interface SupplyLink {
   readonly from: string
   readonly to: string
@@ -307,29 +252,6 @@ export interface PvModule {
   readonly max_fuse?: number
 }
 
-export interface Battery {
-  readonly into: string
-  readonly chemistry:
-    | 'lithium iron phosphate'
-    | 'lithium nickel manganese cobalt'
-    | 'lead-acid, vented'
-    | 'lead-acid, valve-regulated'
-    | 'sodium-ion'
-  /** Wh */
-  readonly usable: number
-  /** W */
-  readonly max_discharge: number
-  /** %, charge to a.c. output */
-  readonly efficiency: number
-  readonly place: string
-  /** m, to the nearest door, window or vent, for a battery outdoors */
-  readonly distance_to_opening?: number
-  /** lead-acid: count of cells in series, Ah, mA per Ah at the end of charge (IEC 62485-2) */
-  readonly cells?: number
-  readonly capacity?: number
-  readonly gas_current?: number
-}
-
 export interface Circuit {
   readonly serves: string
   readonly fed_from: string
@@ -355,142 +277,4 @@ export interface Load {
   readonly must_run?: boolean
   /** Wh */
   readonly daily_energy?: number
-}
-
-export interface Instrument {
-  readonly kind: string
-  readonly serial: string
-  readonly calibrated: string
-  readonly due: string
-  /** % of the reading, by kind of measurement */
-  readonly uncertainty?: Readonly<Partial<Record<UncertaintyKind, number>>>
-}
-export type UncertaintyKind =
-  | 'insulation'
-  | 'loop'
-  | 'continuity'
-  | 'electrode'
-  | 'residual_time'
-  | 'residual_current'
-  | 'voltage'
-  | 'frequency'
-  | 'current'
-  | 'irradiance'
-  | 'time'
-  | 'array_voltage'
-  | 'array_current'
-  | 'bus_resistance'
-
-export interface InspectionItem {
-  readonly item: string
-  readonly result: 'good' | 'defect' | 'not applicable' | 'not inspected'
-  readonly note?: string
-  readonly photo?: string
-}
-
-export interface Readings {
-  readonly with?: string
-  readonly circuits?: Readonly<Record<string, CircuitReadings>>
-  readonly residual_current?: Readonly<Record<string, ResidualReadings>>
-  readonly arrays?: Readonly<Record<string, ArrayReadings>>
-  readonly states?: Readonly<Partial<Record<State, StateReadings | NotTested>>>
-  readonly transfers?: readonly Transfer[]
-  readonly load_steps?: readonly LoadStep[]
-}
-
-export interface CircuitReadings {
-  readonly with?: string
-  readonly not_tested?: string
-  /** Ω, R1 + R2 */
-  readonly continuity?: Measured
-  /** MΩ */
-  readonly insulation?: Measured
-  readonly polarity?: 'correct' | 'reversed'
-  /** Ω */
-  readonly loop?: Readonly<Partial<Record<State, Measured>>>
-}
-
-export interface ResidualReadings {
-  readonly with?: string
-  readonly not_tested?: string
-  readonly grid?: ResidualTest | NotTested
-  readonly island?: ResidualTest | NotTested
-}
-export interface ResidualTest {
-  /** ms */
-  readonly half?: Measured
-  readonly rated?: Measured
-  readonly double?: Measured
-  readonly five_times?: Measured
-  /** mA */
-  readonly ramp?: Measured
-}
-
-export interface ArrayReadings {
-  readonly with?: string
-  readonly not_tested?: string
-  readonly strings?: readonly (StringReadings | NotTested)[]
-}
-export interface StringReadings {
-  /** V, A, W/m², °C, MΩ */
-  readonly voc?: Measured
-  readonly isc?: Measured
-  readonly irradiance?: Measured
-  readonly cell_temperature?: Measured
-  readonly insulation?: Measured
-  readonly polarity?: 'correct' | 'reversed'
-  /** Local date and time, ISO 8601 with offset */
-  readonly taken?: string
-}
-
-export interface StateReadings {
-  /** V */
-  readonly voltage?: Readonly<Partial<Record<Line, Measured>>>
-  /** Hz */
-  readonly frequency?: Measured
-  readonly rotation?: 'clockwise' | 'counter-clockwise'
-  /** V */
-  readonly neutral_to_earth?: Measured
-  /** Ω, of the neutral-earth link */
-  readonly link_resistance?: Measured
-}
-
-export interface Transfer {
-  readonly to: State
-  readonly cause?: string
-  /** s, from the loss of the grid to dead terminals, and to restored supply */
-  readonly dark_after?: Measured
-  readonly restored_after?: Measured
-  /** V to earth at the grid side with the island running */
-  readonly grid_terminals?: Readonly<Partial<Record<Line | 'N', Measured>>>
-  /** s, from the grid's return to the transfer back; s of interruption */
-  readonly observed?: Measured
-  readonly gap?: Measured
-  readonly not_tested?: string
-}
-
-export interface LoadStep {
-  readonly step: string
-  /** V, Hz */
-  readonly lowest_voltage?: Measured
-  readonly lowest_frequency?: Measured
-  readonly tripped?: boolean
-  readonly not_tested?: string
-}
-
-export interface Person {
-  readonly name: string
-  readonly licence?: string
-  readonly company?: string
-}
-export interface People {
-  readonly designed_by?: Person
-  readonly installed_by?: Person
-  readonly tested_by?: Person
-}
-
-export interface Handover {
-  readonly explained_to?: string
-  readonly on?: string
-  readonly documents?: readonly string[]
 }

@@ -1,4 +1,5 @@
-import type { Battery, Circuit } from '#core/install.ts'
+import type { Battery } from '#core/install/battery.ts'
+import type { Circuit } from '#core/install.ts'
 import { circuitPower } from './circuit-design-current.ts'
 import { nominalVoltage } from './circuit-item.ts'
 import { backedUpCircuits } from './inverter-load.ts'

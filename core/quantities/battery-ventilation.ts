@@ -1,4 +1,4 @@
-import type { Battery } from '#core/install.ts'
+import type { Battery } from '#core/install/battery.ts'
 
 /** cm² of opening for each m³/h. */
 const OPENING = 28

@@ -1,4 +1,5 @@
-import type { Battery, Circuit } from '#core/install.ts'
+import type { Battery } from '#core/install/battery.ts'
+import type { Circuit } from '#core/install.ts'
 import { autonomy, feedsIsland, heldBackEnergy, meanLoad } from './battery-energy.ts'
 import { dischargeTogether, powerTogether } from './battery-power.ts'
 import { ventilation, ventOpening } from './battery-ventilation.ts'

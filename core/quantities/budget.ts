@@ -1,4 +1,4 @@
-import type { Battery } from '#core/install.ts'
+import type { Battery } from '#core/install/battery.ts'
 import { feedsIsland, heldBackEnergy, meanLoad } from './battery-energy.ts'
 import { type Course, courseOf, type Store } from './budget-charge.ts'
 import { islandSun } from './budget-sun.ts'

@@ -1,4 +1,4 @@
-import type { Bus } from '#core/install.ts'
+import type { Bus } from '#core/install/meter.ts'
 import values from '#schemas/tables/bus-values.json' with { type: 'json' }
 import type { Quantity } from './quantity.ts'
 

@@ -1,4 +1,4 @@
-import type { Bus } from '#core/install.ts'
+import type { Bus } from '#core/install/meter.ts'
 import { busQuantities } from './bus-electrical.ts'
 import type { Family } from './quantity.ts'
 

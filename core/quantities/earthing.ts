@@ -1,4 +1,4 @@
-import type { EarthingArrangement } from '#core/install.ts'
+import type { EarthingArrangement } from '#core/install/earthing.ts'
 import { knownNumber } from './circuit-item.ts'
 import { bondingMinimum, earthingConductorMinimum, electrodeLimit } from './earthing-minimum.ts'
 import type { Family, Scene } from './quantity.ts'

@@ -1,4 +1,5 @@
-import type { Install, StringReadings } from '#core/install.ts'
+import type { StringReadings } from '#core/install/readings.ts'
+import type { Install } from '#core/install.ts'
 import { inverterFaultCurrent } from './disconnection-island.ts'
 import { faultCurrent } from './loop-impedance.ts'
 import { usable } from './loop-reading.ts'

@@ -1,4 +1,4 @@
-import type { Measured } from '#core/install.ts'
+import type { Measured } from '#core/glossary.ts'
 
 /**
  * The number of a reading that formulas may go on from: positive and inside the instrument's range. Undefined for a

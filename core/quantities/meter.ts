@@ -1,4 +1,4 @@
-import type { Meter } from '#core/install.ts'
+import type { Meter } from '#core/install/meter.ts'
 import { busQuantities } from './bus-electrical.ts'
 import type { Family } from './quantity.ts'
 

@@ -1,4 +1,5 @@
-import type { PvArray, StringReadings } from '#core/install.ts'
+import type { StringReadings } from '#core/install/readings.ts'
+import type { PvArray } from '#core/install.ts'
 import { usable } from './loop-reading.ts'
 import type { Scene } from './quantity.ts'
 import { currentAtStc, voltageAtStc } from './string-translation.ts'

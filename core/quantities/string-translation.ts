@@ -1,4 +1,6 @@
-import type { Measured, PvArray, StringReadings } from '#core/install.ts'
+import type { Measured } from '#core/glossary.ts'
+import type { StringReadings } from '#core/install/readings.ts'
+import type { PvArray } from '#core/install.ts'
 import { temperatureFactor } from './array-voltage.ts'
 import { usable } from './loop-reading.ts'
 

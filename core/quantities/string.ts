@@ -1,4 +1,5 @@
-import type { PvArray, StringReadings } from '#core/install.ts'
+import type { StringReadings } from '#core/install/readings.ts'
+import type { PvArray } from '#core/install.ts'
 import { arrayInsulationQuantities } from './array-insulation-quantities.ts'
 import { knownNumber } from './circuit-item.ts'
 import { usable } from './loop-reading.ts'

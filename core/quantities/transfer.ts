@@ -1,4 +1,5 @@
-import type { Measured, Transfer } from '#core/install.ts'
+import type { Measured } from '#core/glossary.ts'
+import type { Transfer } from '#core/install/readings.ts'
 import table from '#schemas/tables/changeover-classes.json' with { type: 'json' }
 import type { Family } from './quantity.ts'
 

@@ -1,5 +1,5 @@
 import type { Reading, Span } from '#core/glossary.ts'
-import type { Instrument, UncertaintyKind } from '#core/install.ts'
+import type { Instrument, UncertaintyKind } from '#core/install/record.ts'
 import table from '#schemas/tables/uncertainty.json' with { type: 'json' }
 
 /** A relative uncertainty and where it comes from. */

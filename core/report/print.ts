@@ -1,5 +1,4 @@
-import type { SheetValue } from '#core/glossary.ts'
-import type { Measured } from '#core/install.ts'
+import type { Measured, SheetValue } from '#core/glossary.ts'
 import { shown } from '#core/texts/value.ts'
 
 /** Holds a number and its unit on one line. */

@@ -1,4 +1,4 @@
-import type { Battery } from '#core/install.ts'
+import type { Battery } from '#core/install/battery.ts'
 import { batteryFamily } from '#core/quantities/battery.ts'
 import { powerTogether } from '#core/quantities/battery-power.ts'
 import { entered, type SheetPlan } from './plan.ts'

@@ -1,6 +1,5 @@
 import shapes from '#core/generated/sheet-shapes.js'
-import type { NotTested, Path, Sheet, SheetValue, Span, State } from '#core/glossary.ts'
-import type { Measured } from '#core/install.ts'
+import type { Measured, NotTested, Path, Sheet, SheetValue, Span, State } from '#core/glossary.ts'
 import type { Known, Scene } from '#core/quantities/quantity.ts'
 import { spanOf } from '#core/quantities/uncertainty.ts'
 import { placesOf } from './places.ts'

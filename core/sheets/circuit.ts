@@ -1,4 +1,5 @@
-import type { Circuit, CircuitReadings } from '#core/install.ts'
+import type { CircuitReadings } from '#core/install/readings.ts'
+import type { Circuit } from '#core/install.ts'
 import { circuitFamily } from '#core/quantities/circuit.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
 import { fromTree } from './place.ts'

@@ -1,5 +1,6 @@
 import type { State } from '#core/glossary.ts'
-import type { OvercurrentDevice, ResidualCurrentDevice, ResidualTest } from '#core/install.ts'
+import type { ResidualTest } from '#core/install/readings.ts'
+import type { OvercurrentDevice, ResidualCurrentDevice } from '#core/install.ts'
 import { overcurrentFamily } from '#core/quantities/overcurrent.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
 import { residualCurrentFamily } from '#core/quantities/residual-current.ts'

@@ -1,5 +1,6 @@
 import { LINES, type Line, type State } from '#core/glossary.ts'
-import type { Install, StateReadings } from '#core/install.ts'
+import type { StateReadings } from '#core/install/readings.ts'
+import type { Install } from '#core/install.ts'
 import { installationFamily } from '#core/quantities/installation.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
 import { inspectionFields } from './inspection.ts'

@@ -1,4 +1,4 @@
-import type { Bus, Meter } from '#core/install.ts'
+import type { Bus, Meter } from '#core/install/meter.ts'
 import { busFamily } from '#core/quantities/bus.ts'
 import { meterFamily } from '#core/quantities/meter.ts'
 import { entered, type SheetPlan } from './plan.ts'

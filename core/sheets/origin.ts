@@ -1,4 +1,6 @@
-import type { EarthingArrangement, Measured, Supply } from '#core/install.ts'
+import type { Measured } from '#core/glossary.ts'
+import type { EarthingArrangement } from '#core/install/earthing.ts'
+import type { Supply } from '#core/install.ts'
 import { earthingFamily } from '#core/quantities/earthing.ts'
 import { supplyFamily } from '#core/quantities/supply.ts'
 import { entered, type SheetPlan } from './plan.ts'

@@ -1,5 +1,5 @@
-import type { Path, SheetValue, State, Subject } from '#core/glossary.ts'
-import type { Measured, UncertaintyKind } from '#core/install.ts'
+import type { Measured, Path, SheetValue, State, Subject } from '#core/glossary.ts'
+import type { UncertaintyKind } from '#core/install/record.ts'
 import type { Quantity, Scene } from '#core/quantities/quantity.ts'
 
 /** How a sheet field is printed and explained. */

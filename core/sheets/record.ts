@@ -1,5 +1,6 @@
 import { LINES } from '#core/glossary.ts'
-import type { Instrument, LoadStep, Person, Transfer } from '#core/install.ts'
+import type { LoadStep, Transfer } from '#core/install/readings.ts'
+import type { Instrument, Person } from '#core/install/record.ts'
 import { entered, type MeasuredField, type SheetPlan } from './plan.ts'
 
 export interface InstrumentItem {

@@ -1,4 +1,5 @@
-import type { PvArray, StringReadings } from '#core/install.ts'
+import type { StringReadings } from '#core/install/readings.ts'
+import type { PvArray } from '#core/install.ts'
 import type { Scene } from '#core/quantities/quantity.ts'
 import { stringFamily } from '#core/quantities/string.ts'
 import { entered, type MeasuredField, type SheetPlan } from './plan.ts'

@@ -1,5 +1,6 @@
+import type { Measured } from '#core/glossary.ts'
 import { LINES, type State } from '#core/glossary.ts'
-import type { Measured, ResidualTest } from '#core/install.ts'
+import type { ResidualTest } from '#core/install/readings.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import { type Block, type Row, table, tables } from '../blocks.ts'
 import { circuitsByFeeder } from '../by-board.ts'

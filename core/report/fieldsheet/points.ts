@@ -1,4 +1,4 @@
-import type { Measured } from '#core/install.ts'
+import type { Measured } from '#core/glossary.ts'
 import { CELL, COLOUR, CONTENT } from '#core/paper/style.ts'
 import type { Cell } from '../blocks.ts'
 import { drawing, rect } from '../draw/svg.ts'

@@ -1,5 +1,6 @@
 import type { NotTested } from '#core/glossary.ts'
-import type { PvArray, StringReadings } from '#core/install.ts'
+import type { StringReadings } from '#core/install/readings.ts'
+import type { PvArray } from '#core/install.ts'
 import { type Block, type Row, table } from '../blocks.ts'
 import { rounded } from '../print.ts'
 import type { ReportScene } from '../scene.ts'

@@ -1,5 +1,5 @@
 import { LINES } from '#core/glossary.ts'
-import type { Transfer } from '#core/install.ts'
+import type { Transfer } from '#core/install/readings.ts'
 import type { Block } from '../blocks.ts'
 import { rounded } from '../print.ts'
 import type { ReportScene } from '../scene.ts'

@@ -1,4 +1,5 @@
-import type { PvArray, StringReadings } from '#core/install.ts'
+import type { StringReadings } from '#core/install/readings.ts'
+import type { PvArray } from '#core/install.ts'
 import { type Block, type Entry, type Row, type Section, table } from '../blocks.ts'
 import { verdictEntry } from '../entries.ts'
 import { amount, amountOr, printed, readingText, rounded } from '../print.ts'

@@ -1,4 +1,4 @@
-import type { InspectionItem } from '#core/install.ts'
+import type { InspectionItem } from '#core/install/record.ts'
 import { type Mark, type Section, table } from '../blocks.ts'
 import { distinct } from '../names.ts'
 import { capital } from '../print.ts'

@@ -1,4 +1,4 @@
-import type { Instrument, UncertaintyKind } from '#core/install.ts'
+import type { Instrument, UncertaintyKind } from '#core/install/record.ts'
 import { uncertaintyOf } from '#core/quantities/uncertainty.ts'
 import { type Section, table } from '../blocks.ts'
 import { amount, dateText } from '../print.ts'

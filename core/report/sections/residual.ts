@@ -1,5 +1,5 @@
 import { STATES, type State } from '#core/glossary.ts'
-import type { ResidualTest } from '#core/install.ts'
+import type { ResidualTest } from '#core/install/readings.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import { limitBar } from '../bars.ts'
 import { type Cell, type Row, type Section, tables } from '../blocks.ts'

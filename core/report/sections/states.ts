@@ -1,5 +1,6 @@
+import type { Measured } from '#core/glossary.ts'
 import { LINES, STATES, type State } from '#core/glossary.ts'
-import type { LoadStep, Measured, StateReadings, Transfer } from '#core/install.ts'
+import type { LoadStep, StateReadings, Transfer } from '#core/install/readings.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import { type Block, type Row, type Section, table } from '../blocks.ts'
 import { capital, readingText, rounded } from '../print.ts'

@@ -1,5 +1,6 @@
 import { STATES, type State } from '#core/glossary.ts'
-import type { Circuit, CircuitReadings } from '#core/install.ts'
+import type { CircuitReadings } from '#core/install/readings.ts'
+import type { Circuit } from '#core/install.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
 import { limitBar } from '../bars.ts'
 import { type Cell, type Row, type RowGroup, type Section, tables } from '../blocks.ts'

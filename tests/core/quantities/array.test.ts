@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import type { PvArray, PvModule, Site } from '#core/install.ts'
+import type { Site } from '#core/install/site.ts'
+import type { PvArray, PvModule } from '#core/install.ts'
 import { arrayFamily } from '#core/quantities/array.ts'
 import { fuseMaximum, fuseNeeded } from '#core/quantities/array-fuse.ts'
 import { altitudeFactor, arrayInsulationTest } from '#core/quantities/array-insulation.ts'

@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import type { Battery, Circuit, Install, Inverter } from '#core/install.ts'
+import type { Battery } from '#core/install/battery.ts'
+import type { Circuit, Install, Inverter } from '#core/install.ts'
 import { batteryFamily } from '#core/quantities/battery.ts'
 import { autonomy } from '#core/quantities/battery-energy.ts'
 import { ventilation } from '#core/quantities/battery-ventilation.ts'

@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import type { Battery, Install, PvArray } from '#core/install.ts'
+import type { Battery } from '#core/install/battery.ts'
+import type { Install, PvArray } from '#core/install.ts'
 import { islandBudget } from '#core/quantities/budget.ts'
 import { courseOf } from '#core/quantities/budget-charge.ts'
 import { islandSun } from '#core/quantities/budget-sun.ts'

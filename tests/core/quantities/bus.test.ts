@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import type { Bus, Meter } from '#core/install.ts'
+import type { Bus, Meter } from '#core/install/meter.ts'
 import { busFamily } from '#core/quantities/bus.ts'
 import { biasVoltage, terminationExpected } from '#core/quantities/bus-electrical.ts'
 import { meterFamily } from '#core/quantities/meter.ts'

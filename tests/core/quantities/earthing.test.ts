@@ -1,5 +1,6 @@
 import { expect, test } from 'vitest'
-import type { EarthingArrangement, Install } from '#core/install.ts'
+import type { EarthingArrangement } from '#core/install/earthing.ts'
+import type { Install } from '#core/install.ts'
 import { earthingFamily } from '#core/quantities/earthing.ts'
 import { bakery, plainCircuit } from '../topology/bakery.ts'
 import { compute, sceneOf } from './circuit-scene.ts'

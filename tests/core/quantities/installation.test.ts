@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest'
-import type { Install, StringReadings } from '#core/install.ts'
+import type { StringReadings } from '#core/install/readings.ts'
+import type { Install } from '#core/install.ts'
 import { installationFamily } from '#core/quantities/installation.ts'
 import { solarNoon, sunPosition } from '#core/quantities/sun.ts'
 import { bakery } from '../topology/bakery.ts'

@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { expect, test } from 'vitest'
-import type { Transfer } from '#core/install.ts'
+import type { Transfer } from '#core/install/readings.ts'
 import { changeoverClass, transferFamily } from '#core/quantities/transfer.ts'
 import { bakery } from '../topology/bakery.ts'
 import { compute, sceneOf } from './circuit-scene.ts'

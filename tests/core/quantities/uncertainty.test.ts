@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import type { Instrument, UncertaintyKind } from '#core/install.ts'
+import type { Instrument, UncertaintyKind } from '#core/install/record.ts'
 import { spanOf, uncertaintyOf } from '#core/quantities/uncertainty.ts'
 
 const plain: Instrument = { kind: 'tester', serial: '1', calibrated: '2026-03-02', due: '2027-03-02' }

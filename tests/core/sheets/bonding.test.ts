@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest'
-import type { EarthingArrangement } from '#core/install.ts'
+import type { EarthingArrangement } from '#core/install/earthing.ts'
 import { earthingPlan } from '#core/sheets/origin.ts'
 import { sceneOf } from '../quantities/circuit-scene.ts'
 import { bakery } from '../topology/bakery.ts'
