@@ -99,7 +99,7 @@ export async function up(knex: Knex): Promise<void> {
     create policy gate on tokens to skerry_gate using (true);
     grant select (organisation_id, person_id, email, password_hash, totp_secret, active) on people to skerry_gate;
     grant select (organisation_id, token_hash, person_id, purpose, expires_at, used_at) on links to skerry_gate;
-    grant select (organisation_id, token_id, person_id, token_hash, scopes, expires_at, revoked_at) on tokens to skerry_gate;
+    grant select (organisation_id, token_id, person_id, token_hash, scopes, expires_at, revoked_at, last_used_at) on tokens to skerry_gate;
 
     create function sign_in_candidates(address text)
       returns table (organisation_id uuid, person_id uuid, password_hash text)
@@ -107,27 +107,27 @@ export async function up(knex: Knex): Promise<void> {
       as $$ select p.organisation_id, p.person_id, p.password_hash from people p
             where p.email = lower(address) and p.active and p.password_hash is not null
             order by p.person_id limit 5 $$;
-    create function link_holder(hash text)
+    create function link_holder(hash text, moment timestamptz)
       returns table (organisation_id uuid, person_id uuid, purpose text)
       language sql stable security definer set search_path = public
       as $$ select l.organisation_id, l.person_id, l.purpose from links l
-            where l.token_hash = hash and l.used_at is null and l.expires_at > now() $$;
-    create function token_holder(hash text)
-      returns table (organisation_id uuid, person_id uuid, token_id uuid, scopes text[])
+            where l.token_hash = hash and l.used_at is null and l.expires_at > moment $$;
+    create function token_holder(hash text, moment timestamptz)
+      returns table (organisation_id uuid, person_id uuid, token_id uuid, scopes text[], last_used_at timestamptz)
       language sql stable security definer set search_path = public
-      as $$ select t.organisation_id, t.person_id, t.token_id, t.scopes from tokens t
-            where t.token_hash = hash and t.revoked_at is null and t.expires_at > now() $$;
+      as $$ select t.organisation_id, t.person_id, t.token_id, t.scopes, t.last_used_at from tokens t
+            where t.token_hash = hash and t.revoked_at is null and t.expires_at > moment $$;
     create function people_with_address(address text)
       returns table (organisation_id uuid, person_id uuid)
       language sql stable security definer set search_path = public
       as $$ select p.organisation_id, p.person_id from people p
             where p.email = lower(address) and p.active order by p.person_id limit 5 $$;
     alter function sign_in_candidates(text) owner to skerry_gate;
-    alter function link_holder(text) owner to skerry_gate;
-    alter function token_holder(text) owner to skerry_gate;
+    alter function link_holder(text, timestamptz) owner to skerry_gate;
+    alter function token_holder(text, timestamptz) owner to skerry_gate;
     alter function people_with_address(text) owner to skerry_gate;
-    revoke all on function sign_in_candidates(text), link_holder(text), token_holder(text), people_with_address(text) from public;
-    grant execute on function sign_in_candidates(text), link_holder(text), token_holder(text), people_with_address(text) to skerry_app;
+    revoke all on function sign_in_candidates(text), link_holder(text, timestamptz), token_holder(text, timestamptz), people_with_address(text) from public;
+    grant execute on function sign_in_candidates(text), link_holder(text, timestamptz), token_holder(text, timestamptz), people_with_address(text) to skerry_app;
   `)
 }
 

@@ -138,11 +138,11 @@ CREATE FUNCTION public.keep_published() RETURNS trigger
       end if;
       return coalesce(new, old);
     end $$;
-CREATE FUNCTION public.link_holder(hash text) RETURNS TABLE(organisation_id uuid, person_id uuid, purpose text)
+CREATE FUNCTION public.link_holder(hash text, moment timestamp with time zone) RETURNS TABLE(organisation_id uuid, person_id uuid, purpose text)
     LANGUAGE sql STABLE SECURITY DEFINER
     SET search_path TO 'public'
     AS $$ select l.organisation_id, l.person_id, l.purpose from links l
-            where l.token_hash = hash and l.used_at is null and l.expires_at > now() $$;
+            where l.token_hash = hash and l.used_at is null and l.expires_at > moment $$;
 CREATE FUNCTION public.people_with_address(address text) RETURNS TABLE(organisation_id uuid, person_id uuid)
     LANGUAGE sql STABLE SECURITY DEFINER
     SET search_path TO 'public'
@@ -177,11 +177,11 @@ CREATE FUNCTION public.sign_in_candidates(address text) RETURNS TABLE(organisati
     AS $$ select p.organisation_id, p.person_id, p.password_hash from people p
             where p.email = lower(address) and p.active and p.password_hash is not null
             order by p.person_id limit 5 $$;
-CREATE FUNCTION public.token_holder(hash text) RETURNS TABLE(organisation_id uuid, person_id uuid, token_id uuid, scopes text[])
+CREATE FUNCTION public.token_holder(hash text, moment timestamp with time zone) RETURNS TABLE(organisation_id uuid, person_id uuid, token_id uuid, scopes text[], last_used_at timestamp with time zone)
     LANGUAGE sql STABLE SECURITY DEFINER
     SET search_path TO 'public'
-    AS $$ select t.organisation_id, t.person_id, t.token_id, t.scopes from tokens t
-            where t.token_hash = hash and t.revoked_at is null and t.expires_at > now() $$;
+    AS $$ select t.organisation_id, t.person_id, t.token_id, t.scopes, t.last_used_at from tokens t
+            where t.token_hash = hash and t.revoked_at is null and t.expires_at > moment $$;
 CREATE TABLE public.acceptances (
     organisation_id uuid NOT NULL,
     acceptance_id uuid DEFAULT gen_random_uuid() NOT NULL,
@@ -249,6 +249,7 @@ CREATE TABLE public.checkpoints (
     size bigint NOT NULL,
     root text NOT NULL,
     signed text NOT NULL,
+    certificate text NOT NULL,
     made_at timestamp with time zone NOT NULL,
     CONSTRAINT checkpoints_root_check CHECK ((root ~ '^[0-9a-f]{64}$'::text))
 );
@@ -959,16 +960,16 @@ GRANT USAGE ON SCHEMA public TO skerry_app;
 GRANT ALL ON SCHEMA public TO skerry_gate;
 REVOKE ALL ON FUNCTION public.any_organisation() FROM PUBLIC;
 GRANT ALL ON FUNCTION public.any_organisation() TO skerry_app;
-REVOKE ALL ON FUNCTION public.link_holder(hash text) FROM PUBLIC;
-GRANT ALL ON FUNCTION public.link_holder(hash text) TO skerry_app;
+REVOKE ALL ON FUNCTION public.link_holder(hash text, moment timestamp with time zone) FROM PUBLIC;
+GRANT ALL ON FUNCTION public.link_holder(hash text, moment timestamp with time zone) TO skerry_app;
 REVOKE ALL ON FUNCTION public.people_with_address(address text) FROM PUBLIC;
 GRANT ALL ON FUNCTION public.people_with_address(address text) TO skerry_app;
 REVOKE ALL ON FUNCTION public.public_document(wanted_number text, wanted_sha256 text) FROM PUBLIC;
 GRANT ALL ON FUNCTION public.public_document(wanted_number text, wanted_sha256 text) TO skerry_app;
 REVOKE ALL ON FUNCTION public.sign_in_candidates(address text) FROM PUBLIC;
 GRANT ALL ON FUNCTION public.sign_in_candidates(address text) TO skerry_app;
-REVOKE ALL ON FUNCTION public.token_holder(hash text) FROM PUBLIC;
-GRANT ALL ON FUNCTION public.token_holder(hash text) TO skerry_app;
+REVOKE ALL ON FUNCTION public.token_holder(hash text, moment timestamp with time zone) FROM PUBLIC;
+GRANT ALL ON FUNCTION public.token_holder(hash text, moment timestamp with time zone) TO skerry_app;
 GRANT SELECT,INSERT ON TABLE public.acceptances TO skerry_app;
 GRANT SELECT,INSERT ON TABLE public.attachments TO skerry_app;
 GRANT UPDATE(anchor) ON TABLE public.attachments TO skerry_app;
@@ -1094,4 +1095,5 @@ GRANT SELECT(expires_at) ON TABLE public.tokens TO skerry_gate;
 GRANT UPDATE(revoked_at) ON TABLE public.tokens TO skerry_app;
 GRANT SELECT(revoked_at) ON TABLE public.tokens TO skerry_gate;
 GRANT UPDATE(last_used_at) ON TABLE public.tokens TO skerry_app;
+GRANT SELECT(last_used_at) ON TABLE public.tokens TO skerry_gate;
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.uploads TO skerry_app;

@@ -9,6 +9,7 @@ import { jobsThrough, openBoss } from './jobs/jobs.ts'
 import { isMigrated } from './migrate.ts'
 import { openSigner, type Signer } from './seal/signer.ts'
 import type { Services } from './services.ts'
+import { Tries } from './tries.ts'
 
 /** Services with what must be closed at the end. */
 export interface OpenServices {
@@ -69,6 +70,7 @@ export function openServices(
     jobs: jobsThrough(boss),
     store: openStore(env),
     signer: signerOf(env, clock),
+    tries: new Tries(db),
     clock,
     ready: async () => (stopping ? ['stopping'] : await waitingFor(db, known)),
   }

@@ -1,7 +1,6 @@
 import type { Actor } from '#core/policy/roles.ts'
 import { inOrganisation, type Tx } from '#server/db.ts'
 import { type Refused, refuse } from '#server/http/problems.ts'
-import type { SignInThrottle } from '#server/http/sign-in-throttle.ts'
 import { findActor } from '#server/queries/actor.ts'
 import { writeAudit } from '#server/queries/audit.ts'
 import { type OrganisationName, organisationName } from '#server/queries/organisations.ts'
@@ -10,6 +9,7 @@ import type { Services } from '#server/services.ts'
 import { hashPassword, isOutdated } from './passwords.ts'
 import { takeCode } from './second-step.ts'
 import { type Membership, signIn } from './sign-in.ts'
+import { SignInThrottle } from './sign-in-throttle.ts'
 
 export interface Credentials {
   readonly email: string
@@ -53,15 +53,25 @@ async function note(
   )
 }
 
-/** Address, password and code; counted where they are wrong, and written into the trail of whose account it is. */
-export async function enter(
-  services: Services,
-  throttle: SignInThrottle,
-  credentials: Credentials,
-  origin: Origin,
-): Promise<Entered> {
+/** No refusal is quicker than this: what was looked up behind it cannot be told from its time. */
+const REFUSAL_MS = 400
+
+/**
+ * Address, password and code; counted where they are wrong, and written into the trail of whose account it is. A refusal
+ * has the same words and takes the same time whether or not anybody has the address.
+ */
+export async function enter(services: Services, credentials: Credentials, origin: Origin): Promise<Entered> {
+  const begun = performance.now()
+  const entered = await tryToEnter(services, credentials, origin)
+  const left = REFUSAL_MS - (performance.now() - begun)
+  if (entered.kind === 'refused' && left > 0) await new Promise((resolve) => setTimeout(resolve, left))
+  return entered
+}
+
+async function tryToEnter(services: Services, credentials: Credentials, origin: Origin): Promise<Entered> {
+  const throttle = new SignInThrottle(services.tries)
   const tried = { email: credentials.email, address: origin.address }
-  const wait = await throttle.wait(tried)
+  const wait = await throttle.enter(tried)
   if (wait > 0)
     return refused(
       refuse('too-many', `After several wrong tries the next one may be made in ${wait} seconds.`, {
@@ -75,7 +85,6 @@ export async function enter(
       : matching.filter(({ organisation }) => organisation === credentials.organisation)
   const [membership, ...others] = chosen
   if (membership === undefined) {
-    await throttle.failed(tried)
     for (const account of wrong) await note(services, account, 'sign-in-failed', origin)
     return refused(refuse('sign-in-failed'))
   }
@@ -92,7 +101,6 @@ export async function enter(
     admit(tx, services, membership, credentials),
   )
   if (actor === undefined) {
-    await throttle.failed(tried)
     await note(services, membership, 'sign-in-failed', origin, { reason: 'code' })
     return refused(
       refuse('sign-in-failed', 'The code of the second factor is missing or wrong.', { more: { code_needed: true } }),

@@ -14,6 +14,7 @@ const DOWN_CODES = new Set([
   '08000',
   '08003',
   '08006',
+  'OVERLOADED', // more waits for its turn than we keep waiting
 ])
 
 const DOWN_WORDS =

@@ -3,7 +3,6 @@ import type { Request, RequestHandler, Response } from 'express'
 import type { Actor } from '#core/policy/roles.ts'
 import { outside, reading, type Tx, writing } from '#server/db.ts'
 import { enterAs } from '#server/queries/actor.ts'
-import { noteTokenUse } from '#server/queries/tokens.ts'
 import type { Services } from '#server/services.ts'
 import { type Ready, ready, send, sendBytes, sendFailure, sendProblem } from './answer.ts'
 import { type AnyCall, Attempt } from './attempt.ts'
@@ -11,7 +10,7 @@ import { type Caller, findCaller } from './caller.ts'
 import { keyOf, RequestKey } from './idempotency.ts'
 import { addressOf, type Limiter } from './limits.ts'
 import { crossSite } from './origin.ts'
-import { isRefused, type Refused, refuse } from './problems.ts'
+import { isRefused, type ProblemCode, type Refused, refuse, tooMany } from './problems.ts'
 import type { Answer, Route, Visit } from './route.ts'
 import { sessionHandle } from './session.ts'
 import { type Checker, checker } from './validate.ts'
@@ -42,7 +41,13 @@ const NOT_IDS = new Set(['revision', 'number', 'name', 'code', 'sha256', 'rule',
 const idsAreSound = (request: Request): boolean =>
   Object.entries(request.params).every(([name, value]) => NOT_IDS.has(name) || UUID.test(String(value)))
 
+/** Whether an answer is all there as JSON, with nothing left to do. */
+const isWhole = (answer: Answer): boolean => answer.bytes === undefined && answer.afterwards === undefined
+
 const NOBODY: Actor = { person: '', organisation: '', roles: [], name: '', licence: null }
+
+/** Refusals that leave an event: somebody reached for what is not theirs, or did not know the password. */
+const TOLD: ReadonlySet<string> = new Set<ProblemCode>(['not-allowed', 'password-needed'])
 
 /** A route's way through the stages: caller, limit, origin, form, then the transaction. */
 class Pipeline {
@@ -60,12 +65,19 @@ class Pipeline {
     this.#checkBody = route.body === undefined ? () => [] : checker(route.body, 'body')
   }
 
+  get #keepsNothing(): boolean {
+    return 'idempotency' in this.route && this.route.idempotency === 'never'
+  }
+
+  get #asksAgain(): boolean {
+    return 'again' in this.route && this.route.again === true
+  }
+
   /** Everything that can be refused before a transaction begins. */
   async admit(request: Request, caller: Caller | undefined, query: unknown): Promise<Refused | undefined> {
     const { route } = this
     const wait = await this.limit(route.limit, caller?.person ?? addressOf(request))
-    if (wait !== undefined)
-      return refuse('too-many', `Wait ${wait} seconds.`, { headers: { 'retry-after': String(wait) } })
+    if (wait !== undefined) return tooMany(wait)
     const refused = this.#foreign(request, caller) ?? this.#reach(caller)
     if (refused !== undefined) return refused
     if (!idsAreSound(request)) return refuse('not-found')
@@ -104,22 +116,25 @@ class Pipeline {
     }
     if (caller === undefined)
       return await orRefused(outside(services.db, (tx) => this.#unknown({ ...base, tx, actor: NOBODY }, request)))
-    const key = RequestKey.of(request, caller)
+    const key = this.#keepsNothing ? undefined : RequestKey.of(request, caller)
     const refused: { call?: AnyCall } = {}
     const only = this.#attempt.onlyReads
     const work = async (tx: Tx): Promise<Outcome> => {
       const actor = await this.#actor(tx, caller)
-      if (!only && caller.token !== null) await noteTokenUse(tx, caller.organisation, caller.token, base.now)
       const kept = await this.#kept(tx, key)
       if (kept !== undefined) return kept
       const call = await this.#loaded({ ...base, tx, actor })
       refused.call = call
       return await this.#once(call, request, key)
     }
+    const tried = this.#asksAgain ? await services.tries.take('again', caller.person) : undefined
+    if (tried !== undefined) return tooMany(tried)
     const outcome = await orRefused(only ? reading(services.db, work, this.#lost) : writing(services.db, work))
     // What refused was rolled back, its event with it: a denied access leaves one of its own.
-    if (isRefused(outcome) && outcome.refused === 'not-allowed' && refused.call !== undefined)
+    if (isRefused(outcome) && TOLD.has(outcome.refused) && refused.call !== undefined)
       await this.#attempt.denied(services.db, refused.call, outcome)
+    if (this.#asksAgain && !(isRefused(outcome) && outcome.refused === 'password-needed'))
+      await services.tries.giveBack('again', caller.person)
     return outcome
   }
 
@@ -141,7 +156,7 @@ class Pipeline {
   async #unknown(call: AnyCall, request: Request): Promise<Outcome> {
     const answer = await this.#attempt.run(await this.#loaded(call), request)
     if (isRefused(answer)) throw new RolledBack(answer)
-    return answer.bytes === undefined ? ready(answer) : answer
+    return isWhole(answer) ? ready(answer) : answer
   }
 
   /** Under a key the same request is done once, and answered the same ever after. */
@@ -155,11 +170,18 @@ class Pipeline {
     const answer = await this.#attempt.run(call, request)
     if (isRefused(answer)) throw new RolledBack(answer)
     await this.#attempt.audit(call, answer)
-    if (answer.bytes !== undefined) return answer
+    if (!isWhole(answer)) return answer
     const whole = ready(answer)
     await key?.keep(call.tx, whole)
     return whole
   }
+}
+
+/** Does what was left for after the transaction. */
+async function finish(outcome: Outcome | Refused): Promise<Outcome | Refused> {
+  if (isRefused(outcome) || !('afterwards' in outcome) || outcome.afterwards === undefined) return outcome
+  const answer = await outcome.afterwards()
+  return isRefused(answer) || !isWhole(answer) ? answer : ready(answer)
 }
 
 async function deliver(response: Response, outcome: Outcome | Refused, request: string): Promise<void> {
@@ -180,7 +202,7 @@ export function handler(route: Route, services: Services, limit: Limiter): Reque
       if (refused !== undefined) return sendProblem(response, refused, id)
       const session = sessionHandle(services.env, request, services.clock())
       const visit: Visit = { request: id, address: addressOf(request), session, token: caller?.token ?? null }
-      await deliver(response, await pipeline.respond(request, visit, caller, query), id)
+      await deliver(response, await finish(await pipeline.respond(request, visit, caller, query)), id)
     } catch (error) {
       sendFailure(response, error, id, services.log)
     }

@@ -124,6 +124,9 @@ export function refuse(code: ProblemCode, detail?: string, more: Omit<Refused, '
   return detail === undefined ? { refused: code, ...more } : { refused: code, detail, ...more }
 }
 
+export const tooMany = (seconds: number): Refused =>
+  refuse('too-many', `Wait ${seconds} seconds.`, { headers: { 'retry-after': String(seconds) } })
+
 export const isRefused = (value: object): value is Refused => 'refused' in value
 
 /** The body of a problem as RFC 9457 has it. */

@@ -63,6 +63,11 @@ export interface Answer {
   readonly type?: string
   /** What the audit event tells besides who, when and what. */
   readonly audit?: Readonly<Record<string, unknown>>
+  /**
+   * Done once the transaction is committed, without holding a connection; its answer is sent instead. For what waits
+   * (hashing) and for the browser's session. Never kept under an Idempotency-Key.
+   */
+  readonly afterwards?: () => Promise<Answer | Refused>
 }
 
 type ObjectSchema = JSONSchema & { readonly type: 'object' }
@@ -100,8 +105,11 @@ export interface ReadSpec<Q, B, Subject> extends Common<Q, B, Subject> {
 
 export interface WriteSpec<Q, B, Subject> extends Common<Q, B, Subject> {
   readonly method: Exclude<Method, 'get'>
-  /** `required`: an Idempotency-Key must be sent; otherwise one is honoured when it is. */
-  readonly idempotency?: 'required'
+  /**
+   * `required`: an Idempotency-Key must be sent; otherwise one is honoured when it is. `never`: the answer holds a secret
+   * that is shown once and kept nowhere.
+   */
+  readonly idempotency?: 'required' | 'never'
   /** The password (and code) must be in the body as `password` and `code`, and is checked before `run`. */
   readonly again?: true
   /** Left out only by what changes nothing. */

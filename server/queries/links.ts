@@ -13,9 +13,7 @@ export interface NewLink {
 
 /** A new link takes the place of those before it: only the newest mail works. */
 export async function insertLink(tx: Tx, link: NewLink): Promise<void> {
-  await tx('links')
-    .where({ organisation_id: link.organisation, person_id: link.person, purpose: link.purpose, used_at: null })
-    .update({ used_at: link.now })
+  await voidLinks(tx, link.organisation, link.person, link.now)
   await tx('links').insert({
     organisation_id: link.organisation,
     token_hash: link.hash,
@@ -26,10 +24,16 @@ export async function insertLink(tx: Tx, link: NewLink): Promise<void> {
   })
 }
 
+/** Makes every link of a person worthless that was not used yet. */
+export async function voidLinks(tx: Tx, organisation: string, person: string, now: Date): Promise<void> {
+  await tx('links').where({ organisation_id: organisation, person_id: person, used_at: null }).update({ used_at: now })
+}
+
 /** Uses a link up; false when somebody was faster. */
 export async function useLink(tx: Tx, organisation: string, hash: string, now: Date): Promise<boolean> {
   const used = await tx('links')
     .where({ organisation_id: organisation, token_hash: hash, used_at: null })
+    .andWhere('expires_at', '>', now)
     .update({ used_at: now })
   return used === 1
 }
@@ -41,8 +45,8 @@ export interface LinkHolder {
 }
 
 /** Whom an unused link belongs to, asked before the organisation is known. */
-export async function findLink(tx: Tx, hash: string): Promise<LinkHolder | undefined> {
-  const { rows } = await tx.raw<{ rows: LinkHolder[] }>('select * from link_holder(?)', [hash])
+export async function findLink(tx: Tx, hash: string, now: Date): Promise<LinkHolder | undefined> {
+  const { rows } = await tx.raw<{ rows: LinkHolder[] }>('select * from link_holder(?, ?)', [hash, now])
   return rows[0]
 }
 

@@ -35,9 +35,16 @@ export async function listPeople(tx: Tx, organisation: string): Promise<PersonRo
     .select(...columns(tx))
 }
 
+const one = (tx: Tx, organisation: string, person: string) =>
+  tx('people').where({ organisation_id: organisation, person_id: person })
+
 export async function findPerson(tx: Tx, organisation: string, person: string): Promise<PersonRow | undefined> {
-  return await tx('people')
-    .where({ organisation_id: organisation, person_id: person })
+  return await one(tx, organisation, person).first<PersonRow | undefined>(...columns(tx))
+}
+
+/** A person, locked until the transaction ends. */
+export async function lockPerson(tx: Tx, organisation: string, person: string): Promise<PersonRow | undefined> {
+  return await one(tx, organisation, person)
     .forUpdate()
     .first<PersonRow | undefined>(...columns(tx))
 }
@@ -47,10 +54,11 @@ export async function countPeople(tx: Tx, organisation: string): Promise<number>
   return row?.count ?? 0
 }
 
-/** Administrators with an open account, locked so that two requests cannot each take the other's role. */
+/** Administrators who can sign in, locked so that two requests cannot each take the other's role. */
 export async function lockAdministrators(tx: Tx, organisation: string): Promise<string[]> {
   return await tx('people')
     .where({ organisation_id: organisation, active: true })
+    .whereNotNull('password_hash')
     .whereRaw("'administrator' = any(roles)")
     .orderBy('person_id')
     .forUpdate()

@@ -72,6 +72,13 @@ export async function revokeToken(
   return changed === 1
 }
 
+/** Revokes all tokens of a person. */
+export async function revokeTokens(tx: Tx, organisation: string, person: string, now: Date): Promise<number> {
+  return await tx('tokens')
+    .where({ organisation_id: organisation, person_id: person, revoked_at: null })
+    .update({ revoked_at: now })
+}
+
 /** Notes that a token was used, at most once a minute. */
 export async function noteTokenUse(tx: Tx, organisation: string, token: string, now: Date): Promise<void> {
   await tx('tokens')

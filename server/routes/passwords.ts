@@ -1,19 +1,17 @@
-import { hashPassword, passwordProblem } from '#server/commands/passwords.ts'
-import { linkHash, sendLink } from '#server/commands/send-link.ts'
-import { inOrganisation } from '#server/db.ts'
-import { type Refused, refuse } from '#server/http/problems.ts'
-import { type Answer, route } from '#server/http/route.ts'
-import { writeAudit } from '#server/queries/audit.ts'
-import { findByAddress, findLink, useLink } from '#server/queries/links.ts'
+import { askForReset } from '#server/commands/ask-for-reset.ts'
+import { choosePassword, judged, linkOwner } from '#server/commands/choose-password.ts'
+import { hashPassword } from '#server/commands/passwords.ts'
+import { sendNotice } from '#server/commands/send-link.ts'
+import { refuse, tooMany } from '#server/http/problems.ts'
+import { route } from '#server/http/route.ts'
 import { organisationName } from '#server/queries/organisations.ts'
 import { findSecrets, writeSecrets } from '#server/queries/secrets.ts'
 import { endSessions } from '#server/queries/sessions.ts'
+import { CODE, EMAIL, PASSWORD } from './fields.ts'
 
-const PASSWORD = { type: 'string', minLength: 1, maxLength: 1000 } as const
+/** Judged in words by length and by what it is made of. */
+const NEW_PASSWORD = { type: 'string', minLength: 1, maxLength: 1000 } as const
 const LINK = { type: 'string', pattern: '^[A-Za-z0-9_-]{43}$' } as const
-
-const weak = (message: string): Refused =>
-  refuse('bad-request', message, { errors: [{ pointer: '/new_password', message }] })
 
 const linkRoute = route({
   id: 'show-link',
@@ -36,17 +34,15 @@ const linkRoute = route({
       required: ['purpose', 'name', 'organisation'],
     },
   },
-  async run({ tx, body, services }): Promise<Answer | Refused> {
-    const holder = await findLink(tx, linkHash(body.link))
-    if (holder === undefined) return refuse('gone')
-    const { organisation_id: organisation, person_id: person, purpose } = holder
-    return await inOrganisation(services.db, organisation, async (inside): Promise<Answer | Refused> => {
-      const secrets = await findSecrets(inside, { organisation, person })
-      if (secrets === undefined) return refuse('gone')
-      return {
-        body: { purpose, name: secrets.name, organisation: (await organisationName(inside, organisation)).name },
-      }
-    })
+  async run({ body, services }) {
+    return {
+      async afterwards() {
+        const owner = await linkOwner(services, body.link)
+        if (owner === undefined) return refuse('gone')
+        const { holder, secrets, organisation } = owner
+        return { body: { purpose: holder.purpose, name: secrets.name, organisation } }
+      },
+    }
   },
 })
 
@@ -58,7 +54,7 @@ const chooseRoute = route({
   tag: 'session',
   body: {
     type: 'object',
-    properties: { link: LINK, new_password: PASSWORD },
+    properties: { link: LINK, new_password: NEW_PASSWORD },
     required: ['link', 'new_password'],
     additionalProperties: false,
   },
@@ -66,37 +62,8 @@ const chooseRoute = route({
   limit: 'sign-in',
   audited: false,
   answers: { 204: null },
-  async run({ tx, body, services, visit, now }): Promise<Answer | Refused> {
-    const hash = linkHash(body.link)
-    const holder = await findLink(tx, hash)
-    if (holder === undefined) return refuse('gone')
-    const { organisation_id: organisation, person_id: person, purpose } = holder
-    return await inOrganisation(services.db, organisation, async (inside): Promise<Answer | Refused> => {
-      const whom = { organisation, person }
-      const secrets = await findSecrets(inside, whom)
-      if (secrets === undefined) return refuse('gone')
-      const { name } = await organisationName(inside, organisation)
-      const problem = passwordProblem(body.new_password, {
-        words: [secrets.name, secrets.email, name],
-        secondFactor: secrets.totp_secret !== null,
-      })
-      if (problem !== undefined) return weak(problem)
-      if (!(await useLink(inside, organisation, hash, now))) return refuse('gone')
-      await writeSecrets(inside, whom, { password_hash: await hashPassword(body.new_password) })
-      await endSessions(inside, person)
-      await writeAudit(inside, {
-        organisation,
-        person,
-        roles: [],
-        action: 'choose-password',
-        subject: `person/${person}`,
-        at: now,
-        request: visit.request,
-        address: visit.address,
-        details: { purpose },
-      })
-      return {}
-    })
+  async run({ body, services, visit }) {
+    return { afterwards: async () => (await choosePassword(services, body, visit)) ?? {} }
   },
 })
 
@@ -108,7 +75,7 @@ const resetRoute = route({
   tag: 'session',
   body: {
     type: 'object',
-    properties: { email: { type: 'string', minLength: 3, maxLength: 254 } },
+    properties: { email: EMAIL },
     required: ['email'],
     additionalProperties: false,
   },
@@ -116,17 +83,14 @@ const resetRoute = route({
   limit: 'sign-in',
   audited: false,
   answers: { 202: { type: 'object', properties: { sent: { type: 'string' } }, required: ['sent'] } },
-  async run({ tx, body, services, now }) {
-    const found = await findByAddress(tx, body.email)
-    for (const { organisation_id: organisation, person_id: person } of found)
-      await inOrganisation(services.db, organisation, async (inside) => {
-        const secrets = await findSecrets(inside, { organisation, person })
-        // Who has not accepted the invitation yet gets it again, for there is no password to be lost.
-        const purpose = secrets?.password_hash === null ? 'invitation' : 'reset'
-        if (secrets !== undefined)
-          await sendLink(inside, services, { organisation, person, email: secrets.email, purpose }, now)
-      })
-    return { status: 202, body: { sent: 'If somebody has this address, a mail is on its way.' } }
+  async run({ body, services, visit }) {
+    return {
+      async afterwards() {
+        const wait = await askForReset(services, body.email, visit)
+        if (wait > 0) return tooMany(wait)
+        return { status: 202, body: { sent: 'If somebody has this address, a mail is on its way.' } }
+      },
+    }
   },
 })
 
@@ -140,8 +104,8 @@ const changeRoute = route({
     type: 'object',
     properties: {
       password: PASSWORD,
-      code: { type: 'string', maxLength: 40 },
-      new_password: PASSWORD,
+      code: CODE,
+      new_password: NEW_PASSWORD,
       end_others: { type: 'boolean' },
     },
     required: ['password', 'new_password'],
@@ -152,17 +116,20 @@ const changeRoute = route({
   again: true,
   about: ({ actor }) => `person/${actor.person}`,
   answers: { 204: null },
-  async run({ tx, actor, body, visit }) {
+  async run({ tx, actor, body, visit, services, now }) {
     const secrets = await findSecrets(tx, actor)
     if (secrets === undefined) return refuse('not-signed-in')
-    const { name } = await organisationName(tx, actor.organisation)
-    const problem = passwordProblem(body.new_password, {
-      words: [secrets.name, secrets.email, name],
-      secondFactor: secrets.totp_secret !== null,
-    })
-    if (problem !== undefined) return weak(problem)
+    const { organisation, person } = actor
+    const weak = judged(body.new_password, secrets, (await organisationName(tx, organisation)).name)
+    if (weak !== undefined) return weak
     await writeSecrets(tx, actor, { password_hash: await hashPassword(body.new_password) })
-    if (body.end_others === true) await endSessions(tx, actor.person, { but: visit.session?.id ?? '' })
+    if (body.end_others === true) await endSessions(tx, person, { but: visit.session?.id ?? '' })
+    await sendNotice(
+      tx,
+      services,
+      { organisation, person, name: secrets.name, email: secrets.email, now },
+      'The password was changed',
+    )
     return { audit: { ended_others: body.end_others === true } }
   },
 })

@@ -1,57 +1,32 @@
 import { ROLES } from '#core/policy/roles.ts'
-import { sendLink } from '#server/commands/send-link.ts'
-import { refuse } from '#server/http/problems.ts'
+import { changePerson } from '#server/commands/change-person.ts'
+import { sendInvitation } from '#server/commands/send-link.ts'
+import { type Refused, refuse } from '#server/http/problems.ts'
 import { type Call, route } from '#server/http/route.ts'
+import { PERSON_SCHEMA, presentPerson } from '#server/presenters/person.ts'
 import {
-  addressTaken,
   countPeople,
   findPerson,
   insertPerson,
   listPeople,
-  lockAdministrators,
+  lockPerson,
   type PersonRow,
-  updatePerson,
 } from '#server/queries/people.ts'
 import { endSessions } from '#server/queries/sessions.ts'
+import { CODE, LICENCE, NAME, PASSWORD } from './fields.ts'
 
 const MOST_PEOPLE = 1000
 
-const NAME = { type: 'string', minLength: 1, maxLength: 200, pattern: '^[^\\u0000-\\u001f\\u007f]*$' } as const
-const LICENCE = { type: ['string', 'null'], maxLength: 100, pattern: '^[^\\u0000-\\u001f\\u007f]*$' } as const
 const EMAIL = { type: 'string', minLength: 3, maxLength: 254, format: 'email' } as const
 const ROLE_LIST = { type: 'array', items: { type: 'string', enum: ROLES }, maxItems: 4, uniqueItems: true } as const
 
-const PERSON_SCHEMA = {
-  type: 'object',
-  properties: {
-    id: { type: 'string', format: 'uuid' },
-    email: { type: 'string' },
-    name: { type: 'string' },
-    licence: { type: ['string', 'null'] },
-    roles: { type: 'array', items: { type: 'string' } },
-    active: { type: 'boolean' },
-    invited: { type: 'boolean', description: 'Has not chosen a password yet.' },
-    second_factor: { type: 'boolean' },
-    version: { type: 'integer' },
-  },
-  required: ['id', 'email', 'name', 'licence', 'roles', 'active', 'invited', 'second_factor', 'version'],
-} as const
-
-const present = (row: PersonRow) => ({
-  id: row.person_id,
-  email: row.email,
-  name: row.name,
-  licence: row.licence,
-  roles: row.roles,
-  active: row.active,
-  invited: !row.has_password,
-  second_factor: row.second_factor,
-  version: row.version,
+const NO_MAIL: Refused = refuse('bad-request', undefined, {
+  errors: [{ pointer: '/email', message: 'No mail can be sent to this address: one plain address is taken.' }],
 })
 
 type Named = Pick<Call<unknown, unknown, unknown>, 'tx' | 'actor' | 'params'>
 
-const loadPerson = ({ tx, actor, params }: Named) => findPerson(tx, actor.organisation, params['person'] ?? '')
+const loadPerson = ({ tx, actor, params }: Named) => lockPerson(tx, actor.organisation, params['person'] ?? '')
 const versionOf = ({ version }: PersonRow) => version
 
 const listRoute = route({
@@ -66,7 +41,7 @@ const listRoute = route({
     200: { type: 'object', properties: { people: { type: 'array', items: PERSON_SCHEMA } }, required: ['people'] },
   },
   async run({ tx, actor }) {
-    return { body: { people: (await listPeople(tx, actor.organisation)).map(present) } }
+    return { body: { people: (await listPeople(tx, actor.organisation)).map(presentPerson) } }
   },
 })
 
@@ -77,12 +52,11 @@ const showRoute = route({
   summary: 'One person',
   tag: 'people',
   policy: { action: 'person.manage' },
-  limit: 'write',
-  load: async ({ tx, actor, params }) =>
-    (await listPeople(tx, actor.organisation)).find(({ person_id }) => person_id === params['person']),
+  limit: 'read',
+  load: ({ tx, actor, params }) => findPerson(tx, actor.organisation, params['person'] ?? ''),
   answers: { 200: PERSON_SCHEMA },
   async run({ subject }) {
-    return { body: present(subject), version: subject.version }
+    return { body: presentPerson(subject), version: subject.version }
   },
 })
 
@@ -100,6 +74,7 @@ const inviteRoute = route({
   },
   policy: { action: 'person.manage' },
   limit: 'write',
+  idempotency: 'required',
   answers: { 201: PERSON_SCHEMA },
   async run({ tx, actor, body, now, services }) {
     const { organisation } = actor
@@ -119,10 +94,11 @@ const inviteRoute = route({
         'conflict',
         `Somebody of the organisation has the address ${email} already. Open that account again, or invite another address.`,
       )
-    await sendLink(tx, services, { organisation, person, email, purpose: 'invitation' }, now)
+    const to = { organisation, person, name: body.name, email, now }
+    if (!(await sendInvitation(tx, services, to, { by: actor.name, roles: body.roles }))) return NO_MAIL
     const made = await findPerson(tx, organisation, person)
     if (made === undefined) throw new Error('A new person has no row.')
-    return { status: 201, body: present(made), version: made.version, audit: { person, roles: body.roles } }
+    return { status: 201, body: presentPerson(made), version: made.version, audit: { person, roles: body.roles } }
   },
 })
 
@@ -134,7 +110,18 @@ const changeRoute = route({
   tag: 'people',
   body: {
     type: 'object',
-    properties: { email: EMAIL, name: NAME, licence: LICENCE, roles: ROLE_LIST, active: { type: 'boolean' } },
+    properties: {
+      email: {
+        ...EMAIL,
+        description: 'Takes the caller’s own password, too: who has the address can have the account.',
+      },
+      name: NAME,
+      licence: LICENCE,
+      roles: ROLE_LIST,
+      active: { type: 'boolean' },
+      password: PASSWORD,
+      code: CODE,
+    },
     minProperties: 1,
     additionalProperties: false,
   },
@@ -143,27 +130,7 @@ const changeRoute = route({
   load: loadPerson,
   version: versionOf,
   answers: { 200: PERSON_SCHEMA },
-  async run({ tx, actor, subject, body }) {
-    const { organisation } = actor
-    const { person_id } = subject
-    const loses = body.active === false || (body.roles !== undefined && !body.roles.includes('administrator'))
-    const administrators = loses ? await lockAdministrators(tx, organisation) : []
-    if (administrators.length === 1 && administrators[0] === person_id)
-      return refuse('conflict', 'This is the last administrator. Give the role to somebody else first.')
-    const email = body.email?.toLowerCase()
-    if (email !== undefined && (await addressTaken(tx, organisation, email, person_id)))
-      return refuse('conflict', `Somebody else of the organisation has the address ${email}.`)
-    const { email: _, ...rest } = body
-    await updatePerson(tx, organisation, person_id, { ...rest, ...(email === undefined ? {} : { email }) })
-    if (body.active === false) await endSessions(tx, person_id)
-    const changed = await findPerson(tx, organisation, person_id)
-    if (changed === undefined) throw new Error('A changed person has no row.')
-    return {
-      body: present(changed),
-      version: changed.version,
-      audit: { before: present(subject), after: present(changed) },
-    }
-  },
+  run: (call) => changePerson(call),
 })
 
 const againRoute = route({
@@ -179,13 +146,9 @@ const againRoute = route({
   async run({ tx, actor, subject, now, services }) {
     if (subject.has_password) return refuse('conflict', 'This person has chosen a password already.')
     if (!subject.active) return refuse('conflict', 'The account is closed. Open it first.')
-    await sendLink(
-      tx,
-      services,
-      { organisation: actor.organisation, person: subject.person_id, email: subject.email, purpose: 'invitation' },
-      now,
-    )
-    return {}
+    const { person_id: person, name, email, roles } = subject
+    const to = { organisation: actor.organisation, person, name, email, now }
+    return (await sendInvitation(tx, services, to, { by: actor.name, roles })) ? {} : NO_MAIL
   },
 })
 

@@ -22,6 +22,7 @@ const offerRoute = route({
   limit: 'sign-in',
   again: true,
   audited: false,
+  idempotency: 'never',
   answers: {
     200: {
       type: 'object',
@@ -60,6 +61,7 @@ const confirmRoute = route({
   policy: { action: 'self.manage' },
   limit: 'sign-in',
   again: true,
+  idempotency: 'never',
   about: ({ actor }) => `person/${actor.person}`,
   answers: {
     200: {

@@ -1,14 +1,14 @@
 import { enter } from '#server/commands/enter.ts'
 import { type Refused, refuse } from '#server/http/problems.ts'
 import { type Answer, route } from '#server/http/route.ts'
-import { SignInThrottle } from '#server/http/sign-in-throttle.ts'
 import { presentSession, SESSION_SCHEMA } from '#server/presenters/actor.ts'
 import { endSessions, listSessions } from '#server/queries/sessions.ts'
+import { EMAIL } from './fields.ts'
 
 const CREDENTIALS = {
   type: 'object',
   properties: {
-    email: { type: 'string', minLength: 3, maxLength: 254 },
+    email: EMAIL,
     password: { type: 'string', minLength: 1, maxLength: 256 },
     code: { type: 'string', minLength: 6, maxLength: 40, description: 'Of the second factor, or a recovery code.' },
     organisation: { type: 'string', format: 'uuid', description: 'For an address that belongs to people of several.' },
@@ -59,13 +59,18 @@ const signInRoute = route({
     },
   },
   async run({ body, services, visit }): Promise<Answer | Refused> {
-    if (visit.session === null) return refuse('bad-request', 'An API token needs no sign-in.')
-    const entered = await enter(services, new SignInThrottle(services.db), body, visit)
-    if (entered.kind === 'refused') return entered.refused
-    if (entered.kind === 'choose')
-      return { body: { ...presentSession(null, undefined), choose: entered.organisations } }
-    await visit.session.signIn(entered.membership)
-    return { body: presentSession(visit.session, entered.actor) }
+    const { session } = visit
+    if (session === null) return refuse('bad-request', 'An API token needs no sign-in.')
+    return {
+      async afterwards() {
+        const entered = await enter(services, body, visit)
+        if (entered.kind === 'refused') return entered.refused
+        if (entered.kind === 'choose')
+          return { body: { ...presentSession(null, undefined), choose: entered.organisations } }
+        await session.signIn(entered.membership)
+        return { body: presentSession(session, entered.actor) }
+      },
+    }
   },
 })
 
@@ -80,8 +85,12 @@ const signOutRoute = route({
   about: ({ actor }) => `person/${actor.person}`,
   answers: { 204: null },
   async run({ visit }) {
-    await visit.session?.signOut()
-    return {}
+    return {
+      async afterwards() {
+        await visit.session?.signOut()
+        return { headers: { 'clear-site-data': '"cache", "storage"' } }
+      },
+    }
   },
 })
 

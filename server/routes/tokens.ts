@@ -3,6 +3,7 @@ import { TOKEN_PREFIX, tokenHash } from '#server/http/caller.ts'
 import { refuse } from '#server/http/problems.ts'
 import { route } from '#server/http/route.ts'
 import { insertToken, listTokens, revokeToken, type TokenRow } from '#server/queries/tokens.ts'
+import { NAME } from './fields.ts'
 
 const DAY_MS = 86_400_000
 const MOST_DAYS = 400
@@ -56,7 +57,7 @@ const createRoute = route({
   body: {
     type: 'object',
     properties: {
-      name: { type: 'string', minLength: 1, maxLength: 100 },
+      name: { ...NAME, maxLength: 100 },
       scopes: {
         type: 'array',
         items: { type: 'string', enum: ['report.read', 'report.send'] },
@@ -68,11 +69,12 @@ const createRoute = route({
       password: { type: 'string', minLength: 1, maxLength: 256 },
       code: { type: 'string', maxLength: 40 },
     },
-    required: ['name', 'scopes', 'days'],
+    required: ['name', 'scopes', 'days', 'password'],
     additionalProperties: false,
   },
   policy: { action: 'self.manage' },
   limit: 'write',
+  idempotency: 'never',
   again: true,
   about: ({ actor }) => `person/${actor.person}`,
   answers: {
