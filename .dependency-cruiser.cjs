@@ -42,7 +42,7 @@ module.exports = {
       comment:
         'Only cli/io.ts and what starts or runs beside it touch the machine, so that commands can be tested as functions.',
       severity: 'error',
-      from: { path: '^cli/', pathNot: '^cli/(io|watching|threads|launch)\\.ts$' },
+      from: { path: '^cli/', pathNot: '^cli/(io|spool|watching|threads|launch)\\.ts$' },
       to: { dependencyTypes: ['core'], pathNot: '^(node:)?(path|url)$' },
     },
     {

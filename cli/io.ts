@@ -1,8 +1,10 @@
 // The only place of the command line that touches streams, files and the process.
 import {
+  closeSync,
   type Dirent,
   existsSync,
   fstatSync,
+  openSync,
   readdirSync,
   readFileSync,
   realpathSync,
@@ -83,10 +85,23 @@ function standing(file: string): { readonly target: string; readonly mode: numbe
   return { target, mode: statSync(target).mode }
 }
 
+/** A file's content, whole or in pieces in their order. */
+type Content = string | Uint8Array | Iterable<string | Uint8Array>
+
+function writePieces(file: string, pieces: Iterable<string | Uint8Array>, mode?: number): void {
+  const open = openSync(file, 'w', mode)
+  try {
+    for (const piece of pieces) writeFileSync(open, piece)
+  } finally {
+    closeSync(open)
+  }
+}
+
 /** Writes a file whole or not at all: under another name first, then renamed. `-` is standard output. */
-export function writeWhole(file: string, content: string | Uint8Array): FileFault | { readonly ok: true } {
+export function writeWhole(file: string, content: Content): FileFault | { readonly ok: true } {
+  const pieces = typeof content === 'string' || content instanceof Uint8Array ? [content] : content
   if (file === '-') {
-    writeOut(OUTPUT, content)
+    for (const piece of pieces) writeOut(OUTPUT, piece)
     return { ok: true }
   }
   if (drafts === 0) endOnInterrupt()
@@ -96,11 +111,11 @@ export function writeWhole(file: string, content: string | Uint8Array): FileFaul
   try {
     if (mode !== undefined && !statSync(target).isFile()) {
       // What is no plain file, such as a pipe, is written to and never replaced.
-      writeFileSync(target, content)
+      writePieces(target, pieces)
       return { ok: true }
     }
     unfinished.add(draft)
-    writeFileSync(draft, content, { mode: mode ?? 0o666 })
+    writePieces(draft, pieces, mode ?? 0o666)
     renameSync(draft, target)
     return { ok: true }
   } catch (error) {
@@ -177,7 +192,7 @@ function writeOut(stream: number, content: string | Uint8Array): void {
 }
 
 /** Results go to standard output. */
-export const print = (text: string): void => writeOut(OUTPUT, text)
+export const print = (text: string | Uint8Array): void => writeOut(OUTPUT, text)
 
 /** Talk goes to standard error. */
 export const say = (text: string): void => writeOut(TALK, text)

@@ -1,4 +1,4 @@
-import type { FormatScene } from '#cli/formats/format.ts'
+import type { FormatScene, Printing } from '#cli/formats/format.ts'
 import { FORMATS, type FormatName } from '#cli/formats/formats.ts'
 import {
   bytesIn,
@@ -16,6 +16,7 @@ import {
 import { checkFile, exitCode, type FileResult, unopened } from '#cli/result.ts'
 import { select, watchedFor } from '#cli/select.ts'
 import { shelfFor } from '#cli/shelf.ts'
+import { Spool } from '#cli/spool.ts'
 import { VERSION } from '#cli/version.ts'
 import type { Shelf } from '#core/engine.ts'
 
@@ -57,17 +58,32 @@ function progress(total: number, shown: boolean): (done: number) => void {
   return (done) => say(done === total ? CLEARED : `${CLEARED}${done} of ${total} files\r`)
 }
 
-async function results(files: readonly string[], shelf: Shelf, options: CheckOptions): Promise<readonly FileResult[]> {
+/** How a file came out, without what was found: that went to where it is printed. */
+function ended({ file, outcome, counts, stops, stopsStrictly }: FileResult): FileResult {
+  return { file, outcome, findings: [], counts, stops, stopsStrictly, book: null }
+}
+
+/** Checks the files; each result is handed on as soon as it and those before it are there, and only its end is kept. */
+async function results(
+  files: readonly string[],
+  shelf: Shelf,
+  options: CheckOptions,
+  take: (result: FileResult) => void,
+): Promise<readonly FileResult[]> {
   const words = wordsOnly(options)
   const tell = progress(files.length, words !== undefined && isTerminal('stdout'))
+  const keep = (result: FileResult): FileResult => {
+    take(result)
+    return ended(result)
+  }
   if (files.length >= MANY) {
     const { checkInThreads } = await import('#cli/threads.ts')
-    return checkInThreads(files, { all: options.all, rulebook: options.rulebook, words }, tell, words && printed(words))
+    return checkInThreads(files, { all: options.all, rulebook: options.rulebook, words }, tell, keep)
   }
   if (isShort(files, options)) await expectShortRun()
   const found: FileResult[] = []
   for (const file of files) {
-    found.push(await checkOne(file, shelf, options))
+    found.push(keep(await checkOne(file, shelf, options)))
     tell(found.length)
   }
   return found
@@ -92,42 +108,57 @@ function wordsOnly(options: CheckOptions): FormatScene | undefined {
     : undefined
 }
 
-/** Prints a result at once, and keeps of it only how it came out. */
-function printed({ quiet }: FormatScene): (result: FileResult) => FileResult {
-  let first = true
-  return (result) => {
-    print(`${first || quiet ? '' : '\n'}${result.block ?? ''}`)
-    first = false
-    return { ...result, block: '' }
-  }
+/** One of the prints that were asked for. */
+interface Print {
+  readonly output: string | undefined
+  readonly printing: Printing
+  readonly spool: Spool
 }
 
-async function write(found: readonly FileResult[], options: CheckOptions): Promise<boolean> {
-  const words = wordsOnly(options)
-  if (words && found.some(({ block }) => block !== undefined)) {
-    const { closing } = await import('#cli/formats/text.ts')
-    print(closing(found, words))
-    return true
-  }
-  for (const { format, output } of options.formats) {
-    const print_ = await FORMATS[format]()
-    const content = print_(found, sceneOf(options, output))
-    if (output === undefined) print(content)
-    else {
-      const written = writeWhole(output, content)
-      if (!written.ok) {
-        say(`${written.message}\n`)
-        return false
-      }
+/** Words alone are printed as they come; anything else waits for its head, which is known at the end. */
+async function openPrints(options: CheckOptions): Promise<readonly Print[]> {
+  return Promise.all(
+    options.formats.map(async ({ format, output }) => ({
+      output,
+      printing: (await FORMATS[format]())(sceneOf(options, output)),
+      spool: new Spool(),
+    })),
+  )
+}
+
+function* whole({ printing, spool }: Print): Generator<string | Uint8Array> {
+  const { head, tail } = printing.frame()
+  yield head
+  yield* spool.pieces()
+  yield tail
+}
+
+function write(prints: readonly Print[]): boolean {
+  for (const one of prints) {
+    if (one.output === undefined) {
+      for (const piece of whole(one)) print(piece)
+      continue
+    }
+    const written = writeWhole(one.output, whole(one))
+    if (!written.ok) {
+      say(`${written.message}\n`)
+      return false
     }
   }
   return true
 }
 
 async function once(files: readonly string[], shelf: Shelf, options: CheckOptions): Promise<number> {
-  const found = await results(files, shelf, options)
-  const written = await write(found, options)
-  return written ? exitCode(found, options.strict) : 2
+  const prints = await openPrints(options)
+  const words = wordsOnly(options) !== undefined
+  const found = await results(files, shelf, options, (result) => {
+    for (const { printing, spool } of prints) {
+      const piece = printing.take(result)
+      if (words) print(piece)
+      else spool.add(piece)
+    }
+  })
+  return write(prints) ? exitCode(found, options.strict) : 2
 }
 
 /** Checks what the words mean now; answers with the files, or nothing where there was nothing to check. */

@@ -1,6 +1,6 @@
-import type { FileResult, ShownFinding } from '#cli/result.ts'
+import type { ShownFinding } from '#cli/result.ts'
 import { atFailureLevel } from '#core/report/told.ts'
-import type { Format } from './format.ts'
+import { between, type Format } from './format.ts'
 import { visible } from './visible.ts'
 
 /** The service shows no more than this many of each kind for one step, and drops the rest without a word. */
@@ -21,20 +21,36 @@ function annotation(kind: Kind, file: string, { range, rule, message }: ShownFin
   return `::${kind} ${place}::${inMessage(message)}`
 }
 
-function ofKind(kind: Kind, all: readonly (readonly [FileResult, ShownFinding])[]): string[] {
-  const own = all.filter(([, finding]) => kindOf(finding) === kind)
-  const rest = own.length - CAP
-  return [
-    ...own.slice(0, CAP).map(([{ file }, finding]) => annotation(kind, file, finding)),
-    ...(rest > 0 ? [`::${kind}::and ${rest} more like this; the log lists all`] : []),
-  ]
+/** Annotations of one kind, so many as are shown, and how many there were. */
+interface Shown {
+  readonly lines: string[]
+  count: number
 }
 
+const told = (kind: Kind, { lines, count }: Shown): string[] =>
+  count > CAP ? [...lines, `::${kind}::and ${count - CAP} more like this; the log lists all`] : lines
+
 /** Annotations for a pull request, worst first, with every place in the log as well. */
-export const github: Format = (results) => {
-  const all = results.flatMap((result) => result.findings.map((finding) => [result, finding] as const))
-  const log = all.map(([{ file }, { range, verdict, rule, message }]) =>
-    visible(`${file}:${range.line}:${range.column}: ${verdict}: ${message} (${rule})`),
-  )
-  return `${[...(['error', 'warning', 'notice'] as const).flatMap((kind) => ofKind(kind, all)), ...log].join('\n')}\n`
+export const github: Format = () => {
+  const kinds: Readonly<Record<Kind, Shown>> = {
+    error: { lines: [], count: 0 },
+    warning: { lines: [], count: 0 },
+    notice: { lines: [], count: 0 },
+  }
+  const separator = between('\n')
+  const logLine = (file: string, finding: ShownFinding): string => {
+    const { range, verdict, rule, message } = finding
+    const kind = kindOf(finding)
+    const shown = kinds[kind]
+    shown.count += 1
+    if (shown.count <= CAP) shown.lines.push(annotation(kind, file, finding))
+    return `${separator()}${visible(`${file}:${range.line}:${range.column}: ${verdict}: ${message} (${rule})`)}`
+  }
+  return {
+    take: ({ file, findings }) => findings.map((finding) => logLine(file, finding)).join(''),
+    frame: () => {
+      const head = (['error', 'warning', 'notice'] as const).flatMap((kind) => told(kind, kinds[kind])).join('\n')
+      return { head: head === '' ? '' : `${head}\n`, tail: '\n' }
+    },
+  }
 }

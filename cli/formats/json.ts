@@ -1,5 +1,5 @@
 import type { FileResult, ShownFinding } from '#cli/result.ts'
-import type { Format } from './format.ts'
+import { between, type Format, indented, listFrame } from './format.ts'
 import { pointer } from './pointer.ts'
 
 function finding({
@@ -35,20 +35,20 @@ function finding({
   }
 }
 
-/** The first book that judged a file stands for the run; each file names its own where there are several. */
-function bookOf(results: readonly FileResult[]): FileResult['book'] {
-  return results.find(({ book }) => book !== null)?.book ?? null
-}
-
-/** For other programs: stable names, positions counted from 1. */
-export const json: Format = (results, { version }) => {
-  const rulebook = bookOf(results)
-  const files = results.map(({ file, outcome, findings, counts, book }) => ({
-    file,
-    outcome,
-    ...(book !== null && book.hash !== rulebook?.hash && { rulebook: book }),
-    findings: findings.map(finding),
-    counts,
-  }))
-  return `${JSON.stringify({ version, rulebook, files }, null, 2)}\n`
+/**
+ * For other programs: stable names, positions counted from 1. The first book that judged a file stands for the run; a
+ * file names its own where that is another one.
+ */
+export const json: Format = ({ version }) => {
+  let rulebook: FileResult['book'] = null
+  const separator = between(',\n')
+  return {
+    take({ file, outcome, findings, counts, book }) {
+      rulebook ??= book
+      const own = book !== null && book.hash !== rulebook?.hash
+      const content = { file, outcome, ...(own && { rulebook: book }), findings: findings.map(finding), counts }
+      return `${separator()}${indented(content, 4)}`
+    },
+    frame: () => listFrame({ version, rulebook, files: [] }, 'files', 2, separator() !== ''),
+  }
 }

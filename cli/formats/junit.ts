@@ -1,6 +1,6 @@
 import type { FileResult, ShownFinding } from '#cli/result.ts'
 import { atFailureLevel, atStrictLevel } from '#core/report/told.ts'
-import type { Format, FormatScene } from './format.ts'
+import { between, type Format, type FormatScene } from './format.ts'
 
 const ENTITIES: Readonly<Record<string, string>> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;' }
 
@@ -37,5 +37,10 @@ function suite(result: FileResult, scene: FormatScene): string {
 }
 
 /** For build servers: a file is a suite, a finding a test case. */
-export const junit: Format = (results, scene) =>
-  `<?xml version="1.0" encoding="UTF-8"?>\n<testsuites>\n${results.map((result) => suite(result, scene)).join('\n')}\n</testsuites>\n`
+export const junit: Format = (scene) => {
+  const separator = between('\n')
+  return {
+    take: (result) => `${separator()}${suite(result, scene)}`,
+    frame: () => ({ head: '<?xml version="1.0" encoding="UTF-8"?>\n<testsuites>\n', tail: '\n</testsuites>\n' }),
+  }
+}

@@ -5,7 +5,7 @@ import { encodeUtf8 } from '#core/judge/canonical.ts'
 import { rulePage } from '#core/judge/pages.ts'
 import { sha256 } from '#core/paper/sha256.ts'
 import { atFailureLevel } from '#core/report/told.ts'
-import type { Format } from './format.ts'
+import { between, type Format, type Frame, indented, listFrame } from './format.ts'
 import { pointer } from './pointer.ts'
 
 const LEVELS = { failure: 'error', caution: 'warning', note: 'note' } as const
@@ -13,7 +13,9 @@ const LEVELS = { failure: 'error', caution: 'warning', note: 'note' } as const
 const cited = ({ publication, clause, note }: Citation): string =>
   [publication, clause, note].filter((part) => part !== undefined).join(', ')
 
-function ruleOf({ rule, key, severity }: ShownFinding): object {
+type NamedRule = Pick<ShownFinding, 'rule' | 'key' | 'severity'>
+
+function ruleOf({ rule, key, severity }: NamedRule): object {
   const name = rule
     .split('-')
     .map((word) => word.charAt(0).toUpperCase() + word.slice(1))
@@ -97,25 +99,39 @@ function resultOf(file: string, finding: ShownFinding, places: ReadonlyMap<strin
   }
 }
 
-/** SARIF 2.1.0, for tools that collect findings. */
-export const sarif: Format = (results, { version }) => {
-  const all = results.flatMap((result) => result.findings.map((finding) => [result, finding] as const))
-  const rules = new Map(all.map(([, finding]) => [finding.rule, finding]))
-  const places = new Map([...rules.keys()].map((rule, index) => [rule, index]))
-  const unread: FileResult[] = results.filter(({ outcome }) => outcome === 'unreadable')
-  const run = {
-    tool: {
-      driver: {
-        name: 'Skerry',
-        version,
-        semanticVersion: version,
-        informationUri: 'https://skerry.invalid/',
-        rules: [...rules.values()].map(ruleOf),
-      },
-    },
-    columnKind: 'utf16CodeUnits',
-    invocations: [{ executionSuccessful: unread.length === 0 }],
-    results: all.map(([{ file }, finding]) => resultOf(file, finding, places)),
+/** SARIF 2.1.0, for tools that collect findings. Of the files only the rules that they name are held. */
+export const sarif: Format = ({ version }) => {
+  const rules = new Map<string, NamedRule>()
+  const places = new Map<string, number>()
+  const separator = between(',\n')
+  let unread = false
+  const take = (result: FileResult): string => {
+    unread ||= result.outcome === 'unreadable'
+    for (const { rule, key, severity } of result.findings) {
+      if (!places.has(rule)) places.set(rule, places.size)
+      // The last finding of a rule speaks for its level, as a rule may be another one in another book.
+      rules.set(rule, { rule, key, severity })
+    }
+    return result.findings
+      .map((finding) => `${separator()}${indented(resultOf(result.file, finding, places), 8)}`)
+      .join('')
   }
-  return `${JSON.stringify({ $schema: 'https://json.schemastore.org/sarif-2.1.0.json', version: '2.1.0', runs: [run] }, null, 2)}\n`
+  const frame = (): Frame => {
+    const driver = {
+      name: 'Skerry',
+      version,
+      semanticVersion: version,
+      informationUri: 'https://skerry.invalid/',
+      rules: [...rules.values()].map(ruleOf),
+    }
+    const run = {
+      tool: { driver },
+      columnKind: 'utf16CodeUnits',
+      invocations: [{ executionSuccessful: !unread }],
+      results: [],
+    }
+    const log = { $schema: 'https://json.schemastore.org/sarif-2.1.0.json', version: '2.1.0', runs: [run] }
+    return listFrame(log, 'results', 6, separator() !== '')
+  }
+  return { take, frame }
 }

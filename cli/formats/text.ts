@@ -1,7 +1,7 @@
 import type { FileResult, ShownFinding } from '#cli/result.ts'
 import type { Severity, Verdict } from '#core/glossary.ts'
 import { STATE_WORDS } from '#core/texts/label.ts'
-import type { Format, FormatScene } from './format.ts'
+import { between, type Format, type FormatScene } from './format.ts'
 import { type Ink, inks } from './ink.ts'
 import { visible } from './visible.ts'
 import { wrapped } from './wrap.ts'
@@ -176,8 +176,15 @@ export function closing(results: readonly Pick<FileResult, 'stops' | 'stopsStric
 }
 
 /** For people at a terminal: grouped by file, worst news with its place, its words and what to do. */
-export const text: Format = (results, scene) => {
+export const text: Format = (scene) => {
   const ink = inks(scene.colour)
-  const blocks = results.map((result) => result.block ?? fileBlock(shown(result), scene, ink))
-  return `${blocks.join(scene.quiet ? '' : '\n')}${closing(results, scene)}`
+  const separator = between(scene.quiet ? '' : '\n')
+  const ends: Pick<FileResult, 'stops' | 'stopsStrictly'>[] = []
+  return {
+    take: (result) => {
+      ends.push({ stops: result.stops, stopsStrictly: result.stopsStrictly })
+      return `${separator()}${result.block ?? fileBlock(shown(result), scene, ink)}`
+    },
+    frame: () => ({ head: '', tail: closing(ends, scene) }),
+  }
 }
