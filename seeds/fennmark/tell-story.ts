@@ -1,4 +1,5 @@
 import type { End, History } from './histories.ts'
+import { sendPhoto } from './photos.ts'
 import { after, fileOf } from './sites.ts'
 import type { Stagehand } from './stage.ts'
 
@@ -59,6 +60,17 @@ export function scenesOf(
   scene(uploading, async () => {
     report = await stage.upload(uploading, text, `${reference.toLowerCase()}.skerry.yaml`)
   })
+  if (wanted(end, 'in review', 'returned', 'remarked')) {
+    const photographing = installer(1, 8.5)
+    scene(photographing, () =>
+      sendPhoto(stage.services, photographing, {
+        report,
+        name: 'notice-mb.jpg',
+        notice: 'Two supplies: island',
+        breakers: 12 + index,
+      }),
+    )
+  }
   if (end === 'draft') return scenes
   const sending = installer(1, 9)
   scene(sending, () => stage.submit(sending, report))
