@@ -12,6 +12,8 @@ export const PHOTO_LIMITS = {
   quality: 82,
   /** Time for one photo in ms, from the start of its process. */
   time: 20_000,
+  /** Work of the processor for one photo in seconds, which the kernel ends also where this server is gone. */
+  work: 40,
   /** Memory that one photo's process may write to, in kibibytes. */
   memory: 655_360,
   /** Processes at once, over all requests of this server. */

@@ -7,8 +7,9 @@ import { PHOTO_LIMITS } from './photo-limits.ts'
 /** How a photo's process is started: Node's own arguments, the last of them the program. */
 export interface PhotoProgram {
   readonly args: readonly string[]
-  /** Time in ms and memory in kibibytes for one photo; the usual ones where left out. */
+  /** Time in ms, work in s and memory in kibibytes for one photo; the usual ones where left out. */
   readonly time?: number
+  readonly work?: number
   readonly memory?: number
 }
 
@@ -17,22 +18,31 @@ const MOST_OUTPUT = 32_000_000
 
 const HEAP_MEGABYTES = 96
 
-/** The shell sets the limit that the kernel then holds Node and everything in it to. */
-const LIMITED = 'ulimit -d "$1" && shift && exec "$@"'
+/** The shell sets the limits that the kernel then holds Node and everything in it to. */
+const LIMITED = 'ulimit -d "$1" && ulimit -S -t "$2" && shift 2 && exec "$@"'
 
 function start({
   args,
   memory = PHOTO_LIMITS.memory,
+  work = PHOTO_LIMITS.work,
 }: PhotoProgram): ChildProcessByStdio<Writable, Readable, Readable> {
   const node = [process.execPath, `--max-old-space-size=${HEAP_MEGABYTES}`, ...args]
-  return spawn('/bin/sh', ['-c', LIMITED, 'photo', String(memory), ...node], {
+  return spawn('/bin/sh', ['-c', LIMITED, 'photo', String(memory), String(work), ...node], {
     stdio: ['pipe', 'pipe', 'pipe'],
     // Nothing of the server's environment: no database, no keys. Fewer memory arenas keep the limit meaningful.
     env: { MALLOC_ARENA_MAX: '2', UV_THREADPOOL_SIZE: '2' },
   })
 }
 
-const refuse = (code: Extract<PhotoProblem['code'], 'too-heavy' | 'too-slow'>): PhotoAnswer => ({
+type Ended = Extract<PhotoProblem['code'], 'too-heavy' | 'too-slow'>
+
+/** What a signal says. Out of memory, Node and the picture library end by several. */
+const endedBy = (killedBy: NodeJS.Signals): Ended => (killedBy === 'SIGXCPU' ? 'too-slow' : 'too-heavy')
+
+const whole = (code: number | null, chunks: readonly Buffer[]): PhotoAnswer | undefined =>
+  code === 0 ? unpacked(Buffer.concat(chunks)) : undefined
+
+const refuse = (code: Ended): PhotoAnswer => ({
   ok: false,
   problem: { code },
 })
@@ -75,10 +85,7 @@ export function inOwnProcess(bytes: Uint8Array, program: PhotoProgram, signal?: 
       clearTimeout(clock)
       signal?.removeEventListener('abort', end)
       if (signal?.aborted) return reject(signal.reason)
-      if (late) return resolve(refuse('too-slow'))
-      // Out of memory, Node and the picture library both end by a signal.
-      if (killedBy) return resolve(refuse('too-heavy'))
-      const answer = code === 0 ? unpacked(Buffer.concat(chunks)) : undefined
+      const answer = killedBy ? refuse(late ? 'too-slow' : endedBy(killedBy)) : whole(code, chunks)
       if (answer) return resolve(answer)
       reject(new Error(`A photo's process ended with ${code} and without an answer. It said: ${said()}`))
     })

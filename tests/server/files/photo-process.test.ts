@@ -26,6 +26,11 @@ describe('the process of a photo', () => {
     expect(performance.now() - start).toBeLessThan(5_000)
   })
 
+  it('is ended by the kernel when it works too long, also where nobody looks at the clock', async () => {
+    const endless = { ...says('for (;;) {}'), time: 60_000, work: 1 }
+    expect(await inOwnProcess(BYTES, endless)).toEqual({ ok: false, problem: { code: 'too-slow' } })
+  })
+
   it('is ended when it takes more memory than allowed, on the heap or beside it', async () => {
     const onHeap = says('const all = []; for (;;) all.push(new Array(1e6).fill(all.length))')
     const beside = says('const all = []; for (;;) all.push(Buffer.alloc(10e6, 1))')
