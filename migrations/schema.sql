@@ -143,6 +143,10 @@ CREATE FUNCTION public.link_holder(hash text, moment timestamp with time zone) R
     SET search_path TO 'public'
     AS $$ select l.organisation_id, l.person_id, l.purpose from links l
             where l.token_hash = hash and l.used_at is null and l.expires_at > moment $$;
+CREATE FUNCTION public.organisation_ids() RETURNS SETOF uuid
+    LANGUAGE sql STABLE SECURITY DEFINER
+    SET search_path TO 'public'
+    AS $$ select organisation_id from organisations order by organisation_id $$;
 CREATE FUNCTION public.people_with_address(address text) RETURNS TABLE(organisation_id uuid, person_id uuid)
     LANGUAGE sql STABLE SECURITY DEFINER
     SET search_path TO 'public'
@@ -962,6 +966,8 @@ REVOKE ALL ON FUNCTION public.any_organisation() FROM PUBLIC;
 GRANT ALL ON FUNCTION public.any_organisation() TO skerry_app;
 REVOKE ALL ON FUNCTION public.link_holder(hash text, moment timestamp with time zone) FROM PUBLIC;
 GRANT ALL ON FUNCTION public.link_holder(hash text, moment timestamp with time zone) TO skerry_app;
+REVOKE ALL ON FUNCTION public.organisation_ids() FROM PUBLIC;
+GRANT ALL ON FUNCTION public.organisation_ids() TO skerry_app;
 REVOKE ALL ON FUNCTION public.people_with_address(address text) FROM PUBLIC;
 GRANT ALL ON FUNCTION public.people_with_address(address text) TO skerry_app;
 REVOKE ALL ON FUNCTION public.public_document(wanted_number text, wanted_sha256 text) FROM PUBLIC;

@@ -4,8 +4,10 @@ import helmet from 'helmet'
 import { sendFailure, sendProblem } from './http/answer.ts'
 import { health } from './http/health.ts'
 import { limiter } from './http/limits.ts'
+import { Metrics, metricsPage } from './http/metrics.ts'
 import { openapi } from './http/openapi.ts'
 import { handler } from './http/pipeline.ts'
+import { plainPages } from './http/plain-pages.ts'
 import { type Refused, refuse } from './http/problems.ts'
 import type { BodyKind, Route } from './http/route.ts'
 import { isSecure, sessions } from './http/session.ts'
@@ -54,7 +56,7 @@ function headers(services: Services): RequestHandler {
 }
 
 /** Gives each request an id, and logs how it ended. */
-function visits(services: Services): RequestHandler {
+function visits(services: Services, metrics: Metrics): RequestHandler {
   return (request, response, next) => {
     const id = randomUUID()
     const begun = process.hrtime.bigint()
@@ -62,6 +64,8 @@ function visits(services: Services): RequestHandler {
     response.set('x-request-id', id)
     response.on('finish', () => {
       const ms = Number(process.hrtime.bigint() - begun) / 1e6
+      const route = request.route?.path ?? 'none'
+      metrics.count({ method: request.method, route, status: response.statusCode, seconds: ms / 1000 })
       services.log.info({
         event: 'request',
         request: id,
@@ -129,7 +133,9 @@ export function createApp(services: Services): Express {
   app.set('etag', false)
   app.set('query parser', 'simple')
   app.set('trust proxy', services.env.TRUST_PROXY)
-  app.use(headers(services), health(services), visits(services))
+  const metrics = new Metrics(services.db)
+  app.use(headers(services), health(services), metricsPage(metrics, services.env.METRICS_TOKEN))
+  app.use(visits(services, metrics), plainPages(services))
   const limit = limiter(services.db)
   const session = sessions(services.env, services.db)
   const noStore: RequestHandler = (_request, response, next) => {

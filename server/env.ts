@@ -24,6 +24,7 @@ export interface Env {
   readonly TSA_URL: string
   readonly LOG_LEVEL: 'silent' | 'error' | 'warn' | 'info' | 'debug'
   readonly METRICS_TOKEN: string
+  readonly SECURITY_CONTACT: string
 }
 
 const text = (description: string, fallback = '') => ({ type: 'string', default: fallback, description }) as const
@@ -86,6 +87,9 @@ export const ENV_SCHEMA: JSONSchemaType<Env> = {
       description: 'How much is logged, as JSON lines on standard output.',
     },
     METRICS_TOKEN: text('Bearer token for /metrics; without it the endpoint does not exist.'),
+    SECURITY_CONTACT: text(
+      'Whom to tell of a weakness, such as mailto:security@example.org, for /.well-known/security.txt; without it there is none.',
+    ),
   },
   required: [],
   additionalProperties: false,

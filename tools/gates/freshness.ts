@@ -1,4 +1,5 @@
 import { readFile } from 'node:fs/promises'
+import { withSettings } from '#tools/env/table.ts'
 import { generateRules } from '#tools/rules/generate.ts'
 import { generateSchemas } from '#tools/schema/generate.ts'
 import { generateSheets } from '#tools/sheets/generate.ts'
@@ -19,6 +20,7 @@ const wanted = {
   ...(await generateRules()),
   ...generateSheets(),
   ...(await generateTemplates()),
+  'README.md': withSettings(await readFile('README.md', 'utf8')),
 }
 const stale: string[] = []
 for (const [path, content] of Object.entries(wanted)) {
