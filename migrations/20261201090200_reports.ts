@@ -14,6 +14,7 @@ export async function up(knex: Knex): Promise<void> {
       reference text not null,
       title text not null,
       place text not null default '',
+      operator text not null default '',
       purpose text,
       inspected_on date,
       due_on date,
@@ -28,7 +29,7 @@ export async function up(knex: Knex): Promise<void> {
       version integer not null default 1,
       created_at timestamptz not null default now(),
       updated_at timestamptz not null default now(),
-      search text generated always as (lower(reference || ' ' || title || ' ' || place || ' ' || coalesce(number, ''))) stored,
+      search text generated always as (lower(reference || ' ' || title || ' ' || place || ' ' || operator || ' ' || coalesce(number, ''))) stored,
       primary key (organisation_id, report_id),
       unique (organisation_id, number),
       foreign key (organisation_id, created_by) references people,
@@ -46,7 +47,7 @@ export async function up(knex: Knex): Promise<void> {
     create unique index reports_by_corrected on reports (organisation_id, corrects) where corrects is not null and discarded_at is null;
     call fence('reports');
     grant select, insert on reports to skerry_app;
-    grant update (state, reference, title, place, purpose, inspected_on, due_on, outcome, revision, number, reviewer_id, discarded_at, version, updated_at)
+    grant update (state, reference, title, place, operator, purpose, inspected_on, due_on, outcome, revision, number, reviewer_id, discarded_at, version, updated_at)
       on reports to skerry_app;
 
     -- The state machine of core/policy/states.ts, as the last wall.

@@ -160,17 +160,22 @@ export async function up(knex: Knex): Promise<void> {
       returns table (number text, organisation text, issued_at timestamptz, state text, replaced_by text, ended_at timestamptz, sealed boolean, pdf_sha256 text)
       language sql stable security definer set search_path = public
       as $$
+        -- Two branches, each with its own index: one OR over both tables would read them whole.
+        with wanted as (
+          select d.organisation_id, d.document_id from documents d where d.number = upper(wanted_number)
+          union
+          select s.organisation_id, s.document_id from seals s where s.pdf_sha256 = lower(wanted_sha256)
+        )
         select d.number, o.name, d.issued_at, r.state, successor.number,
                (select max(e.written_at) from register_entries e
                 where e.organisation_id = d.organisation_id and e.document_id = d.document_id and e.kind in ('replaced', 'withdrawn')),
                s.pdf_sha256 is not null, s.pdf_sha256
-        from documents d
+        from wanted w
+        join documents d on d.organisation_id = w.organisation_id and d.document_id = w.document_id
         join organisations o on o.organisation_id = d.organisation_id
         join reports r on r.organisation_id = d.organisation_id and r.report_id = d.report_id
         left join seals s on s.organisation_id = d.organisation_id and s.document_id = d.document_id
         left join documents successor on successor.organisation_id = d.organisation_id and successor.replaces = d.document_id
-        where (wanted_number is not null and d.number = upper(wanted_number))
-           or (wanted_sha256 is not null and s.pdf_sha256 = lower(wanted_sha256))
         limit 2
       $$;
     -- What the nightly check and the sweeper go through; each organisation's rows are then read in its own transaction.

@@ -156,17 +156,22 @@ CREATE FUNCTION public.public_document(wanted_number text, wanted_sha256 text) R
     LANGUAGE sql STABLE SECURITY DEFINER
     SET search_path TO 'public'
     AS $$
+        -- Two branches, each with its own index: one OR over both tables would read them whole.
+        with wanted as (
+          select d.organisation_id, d.document_id from documents d where d.number = upper(wanted_number)
+          union
+          select s.organisation_id, s.document_id from seals s where s.pdf_sha256 = lower(wanted_sha256)
+        )
         select d.number, o.name, d.issued_at, r.state, successor.number,
                (select max(e.written_at) from register_entries e
                 where e.organisation_id = d.organisation_id and e.document_id = d.document_id and e.kind in ('replaced', 'withdrawn')),
                s.pdf_sha256 is not null, s.pdf_sha256
-        from documents d
+        from wanted w
+        join documents d on d.organisation_id = w.organisation_id and d.document_id = w.document_id
         join organisations o on o.organisation_id = d.organisation_id
         join reports r on r.organisation_id = d.organisation_id and r.report_id = d.report_id
         left join seals s on s.organisation_id = d.organisation_id and s.document_id = d.document_id
         left join documents successor on successor.organisation_id = d.organisation_id and successor.replaces = d.document_id
-        where (wanted_number is not null and d.number = upper(wanted_number))
-           or (wanted_sha256 is not null and s.pdf_sha256 = lower(wanted_sha256))
         limit 2
       $$;
 CREATE FUNCTION public.refuse_change() RETURNS trigger
@@ -497,6 +502,7 @@ CREATE TABLE public.reports (
     reference text NOT NULL,
     title text NOT NULL,
     place text DEFAULT ''::text NOT NULL,
+    operator text DEFAULT ''::text NOT NULL,
     purpose text,
     inspected_on date,
     due_on date,
@@ -511,7 +517,7 @@ CREATE TABLE public.reports (
     version integer DEFAULT 1 NOT NULL,
     created_at timestamp with time zone DEFAULT now() NOT NULL,
     updated_at timestamp with time zone DEFAULT now() NOT NULL,
-    search text GENERATED ALWAYS AS (lower(((((((reference || ' '::text) || title) || ' '::text) || place) || ' '::text) || COALESCE(number, ''::text)))) STORED,
+    search text GENERATED ALWAYS AS (lower(((((((((reference || ' '::text) || title) || ' '::text) || place) || ' '::text) || operator) || ' '::text) || COALESCE(number, ''::text)))) STORED,
     CONSTRAINT reports_check CHECK (((corrects IS NULL) OR (correction_reason IS NOT NULL))),
     CONSTRAINT reports_check1 CHECK (((number IS NULL) = (state = ANY (ARRAY['draft'::text, 'in review'::text, 'returned'::text, 'approved'::text])))),
     CONSTRAINT reports_correction_reason_check CHECK ((length(correction_reason) <= 2000)),
@@ -1059,6 +1065,7 @@ GRANT SELECT(state) ON TABLE public.reports TO skerry_gate;
 GRANT UPDATE(reference) ON TABLE public.reports TO skerry_app;
 GRANT UPDATE(title) ON TABLE public.reports TO skerry_app;
 GRANT UPDATE(place) ON TABLE public.reports TO skerry_app;
+GRANT UPDATE(operator) ON TABLE public.reports TO skerry_app;
 GRANT UPDATE(purpose) ON TABLE public.reports TO skerry_app;
 GRANT UPDATE(inspected_on) ON TABLE public.reports TO skerry_app;
 GRANT UPDATE(due_on) ON TABLE public.reports TO skerry_app;

@@ -22,6 +22,7 @@ export interface Lifted {
   readonly reference: string
   readonly title: string
   readonly place: string
+  readonly operator: string
   readonly purpose: string
   readonly inspectedOn: string | null
   readonly dueOn: string | null
@@ -66,7 +67,7 @@ function outcomeOf(judged: Judged, counts: Counts): Outcome {
 }
 
 function lift(judged: Judged, source: Uint8Array): Lifted {
-  const { report, site } = judged.install
+  const { report, site, supply } = judged.install
   const counts = countVerdicts(judged.findings)
   const { id, version, hash } = judged.book
   return {
@@ -74,6 +75,7 @@ function lift(judged: Judged, source: Uint8Array): Lifted {
     reference: report.reference,
     title: site.name,
     place: site.address.join(', '),
+    operator: supply.operator,
     purpose: report.purpose,
     inspectedOn: report.inspected?.to ?? report.inspected?.from ?? null,
     dueOn: report.next_due ?? null,

@@ -151,3 +151,26 @@ export async function listCheckpoints(tx: Tx, organisation: string): Promise<Che
     .orderBy('size')
     .select<CheckpointRow[]>(...CHECKPOINT_COLUMNS)
 }
+
+/** Everything that happened to a document, in the order of the register. */
+export async function entriesOf(tx: Tx, organisation: string, document: string): Promise<EntryRow[]> {
+  return await tx('register_entries')
+    .where({ organisation_id: organisation, document_id: document })
+    .orderBy('sequence')
+    .select<EntryRow[]>(...ENTRY_COLUMNS)
+}
+
+/** Checkpoints, the newest first, of those smaller than `before`; one more than asked for. */
+export async function pageOfCheckpoints(
+  tx: Tx,
+  organisation: string,
+  before: number | undefined,
+  limit: number,
+): Promise<CheckpointRow[]> {
+  const query = tx('checkpoints')
+    .where('organisation_id', organisation)
+    .orderBy('size', 'desc')
+    .limit(limit + 1)
+  if (before !== undefined) query.where('size', '<', before)
+  return await query.select<CheckpointRow[]>(...CHECKPOINT_COLUMNS)
+}

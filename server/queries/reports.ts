@@ -110,6 +110,7 @@ export const liftedColumns = (lifted: Lifted) => ({
   reference: lifted.reference,
   title: lifted.title,
   place: lifted.place,
+  operator: lifted.operator,
   purpose: lifted.purpose,
   inspected_on: lifted.inspectedOn,
   due_on: lifted.dueOn,

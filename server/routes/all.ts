@@ -1,6 +1,8 @@
 import type { Route } from '#server/http/route.ts'
 import { ATTACHMENT_ROUTES } from './attachments.ts'
+import { AUDIT_ROUTES } from './audit.ts'
 import { CHECK_ROUTES } from './check.ts'
+import { CHECKPOINT_ROUTES } from './checkpoints.ts'
 import { CLAIM_ROUTES } from './claims.ts'
 import { CONDITION_ROUTES } from './conditions.ts'
 import { DOCUMENT_ROUTES } from './documents.ts'
@@ -10,6 +12,10 @@ import { ISSUE_ROUTES } from './issue.ts'
 import { JOB_ROUTES } from './jobs.ts'
 import { PASSWORD_ROUTES } from './passwords.ts'
 import { PEOPLE_ROUTES } from './people.ts'
+import { PUBLIC_ROUTES } from './public.ts'
+import { REGISTER_ROUTES } from './register.ts'
+import { REGISTER_FILE_ROUTES } from './register-files.ts'
+import { SAMPLE_ROUTES } from './register-sample.ts'
 import { REMARK_ROUTES } from './remarks.ts'
 import { REPORT_STEP_ROUTES } from './report-steps.ts'
 import { VIEW_ROUTES } from './report-views.ts'
@@ -46,4 +52,11 @@ export const ROUTES: readonly Route[] = [
   ...INSTRUMENT_ROUTES,
   ...INSTRUMENT_WRITE_ROUTES,
   ...CONDITION_ROUTES,
+  // Names before ids: `/register/sample` is not the document “sample”.
+  ...REGISTER_FILE_ROUTES,
+  ...SAMPLE_ROUTES,
+  ...REGISTER_ROUTES,
+  ...CHECKPOINT_ROUTES,
+  ...AUDIT_ROUTES,
+  ...PUBLIC_ROUTES,
 ]
