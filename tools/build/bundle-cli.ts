@@ -68,10 +68,17 @@ const SHARED = {
 
 const PAPER = 'skerry-paper.cjs'
 
+/** The launcher calls a whole bundle as one function, so it need not copy it to put a head before it. */
+const AS_FUNCTION = {
+  banner: { js: '(function (exports, require, module, __filename, __dirname) {' },
+  footer: { js: '})' },
+} as const satisfies BuildOptions
+
 /** The typesetting engine stands beside the rest: it is half of the code, and serves two commands. */
 async function bundlePaper(): Promise<void> {
   await build({
     ...SHARED,
+    ...AS_FUNCTION,
     entryPoints: [`${PROJECT}core/paper/paper.ts`],
     outfile: `${DIST}/${PAPER}`,
     alias: { pdfkit: `${PROJECT}node_modules/pdfkit/js/pdfkit.browser.mjs` },
@@ -151,26 +158,30 @@ const textsBeside: Plugin = {
 async function bundle(): Promise<void> {
   await build({
     ...SHARED,
+    ...AS_FUNCTION,
     entryPoints: [`${PROJECT}cli/launch.ts`],
     outfile: `${DIST}/skerry-main.cjs`,
-    // The launcher calls the whole bundle as one function, so it need not copy it to put a head before it.
-    banner: { js: '(function (exports, require, module, __filename, __dirname) {' },
-    footer: { js: '})' },
     plugins: [plainParserState, childProcessOnCall, paperBeside, verifyBeside, seldomBeside, textsBeside],
   })
 }
 
-/** Runs a real check so that what V8 compiles for it is what the cache holds. */
-function warmCache(): void {
-  const run = spawnSync(
-    process.execPath,
-    [`${DIST}/skerry.cjs`, 'check', `${PROJECT}examples/alder-mill-bakery.skerry.yaml`],
-    {
-      env: { ...process.env, SKERRY_MAKE_CACHE: '1' },
+const EXAMPLE = `${PROJECT}examples/alder-mill-bakery.skerry.yaml`
+/** What is run so that what V8 compiles for it is what the cache of a bundle holds. */
+const WARM_RUNS = {
+  'skerry-main': ['check', EXAMPLE],
+  'skerry-paper': ['render', EXAMPLE, '-o', `${DIST}/warm.pdf`],
+} as const
+
+function warmCaches(): void {
+  for (const [name, words] of Object.entries(WARM_RUNS)) {
+    const run = spawnSync(process.execPath, [`${DIST}/skerry.cjs`, ...words], {
+      env: { ...process.env, SKERRY_MAKE_CACHE: name },
       encoding: 'utf8',
-    },
-  )
-  if (run.status !== 0 && run.status !== 1) throw new Error(`The bundle does not run:\n${run.stderr}`)
+    })
+    if (run.status !== 0 && run.status !== 1) throw new Error(`The bundle does not run:\n${run.stderr}`)
+    if (!existsSync(`${DIST}/${name}.cache`)) throw new Error(`No compiled code was kept of ${name}.`)
+  }
+  rmSync(`${DIST}/warm.pdf`, { force: true })
 }
 
 /** npx looks for commands here. */
@@ -182,7 +193,7 @@ function link(): void {
 }
 
 mkdirSync(DIST, { recursive: true })
-rmSync(`${DIST}/skerry-main.cache`, { force: true })
+for (const name of Object.keys(WARM_RUNS)) rmSync(`${DIST}/${name}.cache`, { force: true })
 await bundlePaper()
 await bundleVerify()
 await bundleSeldom()
@@ -191,5 +202,5 @@ copyFileSync(`${PROJECT}tools/build/launcher.cjs`, `${DIST}/skerry.cjs`)
 copyFileSync(`${PROJECT}schemas/install.draft-07.schema.json`, `${DIST}/install.draft-07.schema.json`)
 chmodSync(`${DIST}/skerry.cjs`, 0o755)
 copyFonts(`${DIST}/fonts`)
-warmCache()
+warmCaches()
 link()
