@@ -59,10 +59,15 @@ describe('the model of a report', () => {
       for (const judged of [judgedBase(), more]) expect(anchorsOf(modelOf(judged))).toContain(anchor)
   })
 
+  it('has examples of which something is left to tell', () => {
+    expect(
+      EXAMPLES.filter((name) => judgedExample(name).findings.some(({ verdict }) => verdict === 'fails')),
+    ).not.toEqual([])
+  })
+
   it.each(EXAMPLES)('tells every finding of %s that is not simply met, under its rule, subject and state', (name) => {
     const judged = judgedExample(name)
     const open = judged.findings.filter(({ verdict }) => verdict !== 'meets' && verdict !== 'not applicable')
-    expect(open.length).toBeGreaterThan(0)
     const anchors = new Set(anchorsOf(modelOf(judged)))
     expect(open.map(findingAnchor).filter((anchor) => !anchors.has(anchor))).toEqual([])
   })
