@@ -19,18 +19,13 @@ export interface DiskStoreOptions {
   readonly limit: number
 }
 
-export interface DiskStore extends ObjectStore {
-  /** Removes temporary files last written before a moment, left by a process that died. Returns how many. */
-  sweep(before: Date): Promise<number>
-}
-
 /** Not a name that `objectKey` could make, so no key reaches into it. */
 const PARTIAL = '.partial'
 
 const READ = constants.O_RDONLY | constants.O_NOFOLLOW
 
 /** Objects as read-only files of one folder: each written aside, through to the disk, and then renamed into place. */
-export function diskStore({ root, newId, limit }: DiskStoreOptions): DiskStore {
+export function diskStore({ root, newId, limit }: DiskStoreOptions): ObjectStore {
   async function place(key: ObjectKey): Promise<{ folder: string; file: string }> {
     const { organisation, kind, sha256 } = partsOf(key)
     const folder = await folderInside(root, [organisation, kind])

@@ -41,6 +41,8 @@ export interface ObjectStore {
   delete(key: ObjectKey): Promise<void>
   /** All objects within, in the order of their keys. */
   list(within: Within): AsyncIterable<ObjectFacts>
+  /** Removes what writers that died before a moment left behind unseen. Returns how many. */
+  sweep(before: Date): Promise<number>
 }
 
 /** What lies in the store is not what was put there. */

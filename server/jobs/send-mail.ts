@@ -1,31 +1,17 @@
 import { inOrganisation } from '#server/db.ts'
-import type { Env } from '#server/env.ts'
-import { catcher } from '#server/mail/catcher.ts'
-import type { MailSender } from '#server/mail/delivery.ts'
-import { readSender, readSmtpUrl } from '#server/mail/smtp-url.ts'
-import { smtpSender } from '#server/mail/transport.ts'
+import { openSender } from '#server/mail/open-sender.ts'
 import { lockMail, noteAttempt } from '#server/queries/mail-state.ts'
 import type { Handler } from './handler.ts'
 
 /** Limits in ms, together below what an idle transaction is allowed: a mail server that hangs is tried again later. */
 const TIMES = { connection: 4_000, greeting: 4_000, socket: 6_000 } as const
 
-/** The mail server that is configured, or else the catcher. */
-function senderOf(env: Env, now: () => Date): MailSender {
-  if (env.SMTP_URL === '') return catcher
-  const from = readSender(env.MAIL_FROM)
-  if (!from.ok) throw new Error(from.problem)
-  const settings = readSmtpUrl(env.SMTP_URL, from.value)
-  if (!settings.ok) throw new Error(settings.problem)
-  return smtpSender(settings.value, { now, times: TIMES })
-}
-
 /**
  * Sends a mail once. The row stays locked while the mail server answers; only a worker that dies between the server's
  * yes and the commit lets it be sent again, under the same Message-ID, which mail programs show once.
  */
 export const sendMail: Handler<'send-mail'> = async ({ db, env, clock }, { organisation, mail }) => {
-  const sender = senderOf(env, clock)
+  const sender = openSender(env, clock, TIMES)
   try {
     const answer = await inOrganisation(db, organisation, async (tx) => {
       const row = await lockMail(tx, organisation, mail)

@@ -15,7 +15,8 @@ export const sweep: Handler<'sweep'> = async ({ db, store, clock, log }) => {
   const now = clock().getTime()
   const sessions = await outside(db, (tx) => dropOldSessions(tx, new Date(now)))
   const limits = await outside(db, (tx) => dropOldLimits(tx, now))
-  let [keys, uploads, objects] = [0, 0, 0]
+  let [keys, uploads] = [0, 0]
+  let objects = await store.sweep(new Date(now - UPLOADS))
   for (const organisation of await everyOrganisation(db)) {
     keys += await inOrganisation(db, organisation, (tx) => dropOldKeys(tx, organisation, new Date(now - KEYS)))
     uploads += await inOrganisation(db, organisation, (tx) => dropOldUploads(tx, organisation, new Date(now)))

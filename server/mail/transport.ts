@@ -18,7 +18,7 @@ export interface SmtpSettings {
 /** How long each step may take, in ms. One attempt never takes longer than the job that makes it. */
 export const SMTP_TIMES = { connection: 10_000, greeting: 10_000, socket: 20_000 } as const
 
-type Times = { readonly [Step in keyof typeof SMTP_TIMES]: number }
+export type SmtpTimes = { readonly [Step in keyof typeof SMTP_TIMES]: number }
 
 const SECURITY = {
   tls: { secure: true },
@@ -33,7 +33,7 @@ function isFailure(error: unknown): error is SmtpFailure {
 /** Sends mails through a mail server, one connection each, so that a server that went away is noticed at once. */
 export function smtpSender(
   { host, port, security, user, password, from, ca }: SmtpSettings,
-  { now, times = SMTP_TIMES }: { readonly now: () => Date; readonly times?: Times },
+  { now, times = SMTP_TIMES }: { readonly now: () => Date; readonly times?: SmtpTimes },
 ): MailSender {
   const transport = createTransport({
     host,

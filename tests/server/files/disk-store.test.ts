@@ -6,12 +6,11 @@ import { join } from 'node:path'
 import { setTimeout as wait } from 'node:timers/promises'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { bytesOf } from '#server/files/bytes.ts'
-import type { DiskStore } from '#server/files/disk-store.ts'
 import { collected, keyFor, OURS } from './keys.ts'
 import { LIMIT, type Opened, openDisk } from './stores.ts'
 
 describe('a folder of objects', () => {
-  let opened: Opened<DiskStore>
+  let opened: Opened
   beforeAll(async () => {
     opened = await openDisk()
   })

@@ -3,7 +3,7 @@ import { mkdtemp, rm } from 'node:fs/promises'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import S3rver from 's3rver'
-import { type DiskStore, diskStore } from '#server/files/disk-store.ts'
+import { diskStore } from '#server/files/disk-store.ts'
 import { s3Client } from '#server/files/s3-client.ts'
 import { s3Store } from '#server/files/s3-store.ts'
 import type { ObjectStore } from '#server/files/store.ts'
@@ -11,8 +11,8 @@ import type { ObjectStore } from '#server/files/store.ts'
 export const LIMIT = 1_000_000
 const BUCKET = 'skerry'
 
-export interface Opened<Store extends ObjectStore = ObjectStore> {
-  readonly store: Store
+export interface Opened {
+  readonly store: ObjectStore
   /** The folder that lies behind the store. */
   readonly folder: string
   readonly close: () => Promise<void>
@@ -20,7 +20,7 @@ export interface Opened<Store extends ObjectStore = ObjectStore> {
 
 const newFolder = (): Promise<string> => mkdtemp(join(tmpdir(), 'skerry-store-'))
 
-export async function openDisk(): Promise<Opened<DiskStore>> {
+export async function openDisk(): Promise<Opened> {
   const folder = await newFolder()
   const store = diskStore({ root: folder, newId: randomUUID, limit: LIMIT })
   return { store, folder, close: () => rm(folder, { recursive: true }) }
