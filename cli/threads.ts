@@ -21,7 +21,7 @@ interface Task {
 const PORTION = 16
 const MOST_THREADS = 8
 /** MB for what lives no longer than one file: with room enough most of it is gone before it is ever looked at. */
-const YOUNG = 8
+const YOUNG = 24
 
 interface Portion {
   readonly start: number

@@ -76,13 +76,14 @@ function collectionStretch(parsed: Parsed, index: number, start: number): Stretc
   return { start, end: flow ? closingBracket(text, end) : end }
 }
 
-const SPACE = /[ \t\r\n]/
+const isSpace = (character: string | undefined): boolean =>
+  character === ' ' || character === '\n' || character === '\r' || character === '\t'
 
 /** Past white space and comments, the offset of the next character that means something. */
 function skipSpace(text: string, from: number): number {
   let at = from
   for (;;) {
-    while (at < text.length && SPACE.test(text.charAt(at))) at++
+    while (isSpace(text[at])) at++
     if (text[at] !== '#') return at
     const lineEnd = text.indexOf('\n', at)
     at = lineEnd === -1 ? text.length : lineEnd

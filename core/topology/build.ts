@@ -1,5 +1,6 @@
 import { LINES, type Problem, type State } from '#core/glossary.ts'
 import type { Install } from '#core/install.ts'
+import { askedOnce } from './by-state.ts'
 import { circuitsBelow } from './circuits-below.ts'
 import { duplicateNames } from './duplicates.ts'
 import { otherEntries, treeEntries } from './entries.ts'
@@ -42,7 +43,7 @@ function topologyOf(install: Install, supply: TopologyNode, nodes: ReadonlyMap<s
     if (!node) return false
     return state === 'grid' || node.backedUp || node.kind === 'changeover'
   }
-  const routeIn = (id: string, state: State): readonly TopologyNode[] => {
+  const routeIn = askedOnce((id, state): readonly TopologyNode[] => {
     const route: TopologyNode[] = []
     if (!live(id, state)) return route
     for (let node = nodes.get(id); node; node = node.parent) {
@@ -50,7 +51,8 @@ function topologyOf(install: Install, supply: TopologyNode, nodes: ReadonlyMap<s
       if (state === 'island' && node.id === changeover) break
     }
     return route.reverse()
-  }
+  })
+  const wiring = { install, nodes, routeIn, neutralEarthLinks: links, sources: inverters.island }
   const below = circuitsBelow(supply)
   const isBackedUp = (id: string) => live(id, 'island')
   return {
@@ -63,8 +65,7 @@ function topologyOf(install: Install, supply: TopologyNode, nodes: ReadonlyMap<s
     circuitsBelow: below,
     circuits: { backedUp: below(changeover), gridOnly: below(supply.id).filter((id) => !isBackedUp(id)) },
     overcurrentAbove: (id) => overcurrentAbove(nodes.get(id)),
-    residualProtection: (id, state) =>
-      residualProtection(id, state, { install, nodes, routeIn, neutralEarthLinks: links, sources: inverters.island }),
+    residualProtection: askedOnce((id, state) => residualProtection(id, state, wiring)),
     inverters,
     lines: LINES.slice(0, install.supply.nominal.phases),
   }
