@@ -38,3 +38,8 @@ describe('the ends of reading on', () => {
     expect(cover('a: 1_0\n', [{ code: 'number-separator', path: ['a'], message: 'Write 10.' }], 0)).toBeUndefined()
   })
 })
+
+it('a dash that is glued to its entry leaves in doubt what it starts', () => {
+  const range = { line: 1, column: 1, endLine: 1, endColumn: 3, offset: 0, endOffset: 2 }
+  expect(cover('-b\n', [{ code: 'missing-space', path: [], range, message: 'Write - b.' }], 0)).toBeUndefined()
+})
