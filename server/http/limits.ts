@@ -13,8 +13,6 @@ export const LIMITS = {
   public: { points: 60, seconds: 60 },
 } as const satisfies Readonly<Partial<Record<LimitClass, { points: number; seconds: number }>>>
 
-export type Limited = keyof typeof LIMITS
-
 /** Says how many seconds to wait, or that the request may go on. */
 export type Limiter = (limit: LimitClass, key: string) => Promise<number | undefined>
 

@@ -21,7 +21,7 @@ export async function listRemarks(
     .join('people as p', (on) => on.on('p.organisation_id', 'r.organisation_id').andOn('p.person_id', 'r.author_id'))
     .where('r.organisation_id', organisation)
     .whereIn('r.thread_id', [...threads])
-    .where((seen) => seen.whereNotNull('r.published_at').orWhere('r.author_id', viewer))
+    .where((seen) => void seen.whereNotNull('r.published_at').orWhere('r.author_id', viewer))
     .orderBy('r.sequence')
     .select<RemarkRow[]>(
       'r.remark_id',

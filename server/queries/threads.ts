@@ -48,7 +48,7 @@ const COLUMNS = [
 export async function listThreads(tx: Tx, organisation: string, report: string, viewer: string): Promise<ThreadRow[]> {
   return await tx('threads')
     .where({ organisation_id: organisation, report_id: report })
-    .where((seen) => seen.whereNotNull('published_at').orWhere('opened_by', viewer))
+    .where((seen) => void seen.whereNotNull('published_at').orWhere('opened_by', viewer))
     .orderBy(['created_at', 'thread_id'])
     .select<ThreadRow[]>(...COLUMNS)
 }
@@ -59,7 +59,7 @@ export async function findThread(
 ): Promise<ThreadRow | undefined> {
   return await tx('threads')
     .where({ organisation_id: organisation, report_id: report, thread_id: thread })
-    .where((seen) => seen.whereNotNull('published_at').orWhere('opened_by', viewer))
+    .where((seen) => void seen.whereNotNull('published_at').orWhere('opened_by', viewer))
     .first<ThreadRow | undefined>(...COLUMNS)
 }
 

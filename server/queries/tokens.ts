@@ -83,6 +83,8 @@ export async function revokeTokens(tx: Tx, organisation: string, person: string,
 export async function noteTokenUse(tx: Tx, organisation: string, token: string, now: Date): Promise<void> {
   await tx('tokens')
     .where({ organisation_id: organisation, token_id: token })
-    .where((unused) => unused.whereNull('last_used_at').orWhere('last_used_at', '<', new Date(now.getTime() - 60_000)))
+    .where(
+      (unused) => void unused.whereNull('last_used_at').orWhere('last_used_at', '<', new Date(now.getTime() - 60_000)),
+    )
     .update({ last_used_at: now })
 }

@@ -3,8 +3,12 @@ import express from 'express'
 import pg from 'pg'
 
 const pool = new pg.Pool({ connectionString: process.env['DATABASE_OWNER_URL'], max: 10 })
-pool.on('connect', (client) =>
-  client.query(`set role skerry_app; select set_config('app.organisation', '${process.env['ORGANISATION']}', false)`),
+pool.on(
+  'connect',
+  (client) =>
+    void client.query(
+      `set role skerry_app; select set_config('app.organisation', '${process.env['ORGANISATION']}', false)`,
+    ),
 )
 
 const LIST = `select report_id, state, reference, title, place, purpose, inspected_on, due_on, outcome, revision, number, corrects,
