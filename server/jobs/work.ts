@@ -4,6 +4,7 @@ import type { Services } from '#server/services.ts'
 import { checkRecords } from './check-records.ts'
 import type { Handler } from './handler.ts'
 import { type JobData, QUEUES, type Queue } from './jobs.ts'
+import { remind } from './remind.ts'
 import { sealDocument } from './seal-document.ts'
 import { sendCheckpoint } from './send-checkpoint.ts'
 import { sendMail } from './send-mail.ts'
@@ -20,6 +21,7 @@ export function handlers(): Handlers {
     'send-mail': sendMail,
     'send-checkpoint': sendCheckpoint,
     'check-records': checkRecords,
+    remind,
     sweep,
   }
 }
@@ -27,6 +29,7 @@ export function handlers(): Handlers {
 /** When the clock calls, in UTC: minute, hour, day of the month, month, day of the week. */
 const TIMETABLE: Readonly<Partial<Record<Queue, string>>> = {
   'check-records': '15 2 * * *',
+  remind: '30 4 * * *',
   sweep: '*/15 * * * *',
 }
 

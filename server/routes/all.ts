@@ -6,6 +6,7 @@ import { CHECKPOINT_ROUTES } from './checkpoints.ts'
 import { CLAIM_ROUTES } from './claims.ts'
 import { CONDITION_ROUTES } from './conditions.ts'
 import { DOCUMENT_ROUTES } from './documents.ts'
+import { DUE_ROUTES } from './due.ts'
 import { INSTRUMENT_WRITE_ROUTES } from './instrument-writes.ts'
 import { INSTRUMENT_ROUTES } from './instruments.ts'
 import { ISSUE_ROUTES } from './issue.ts'
@@ -52,6 +53,7 @@ export const ROUTES: readonly Route[] = [
   ...INSTRUMENT_ROUTES,
   ...INSTRUMENT_WRITE_ROUTES,
   ...CONDITION_ROUTES,
+  ...DUE_ROUTES,
   // Names before ids: `/register/sample` is not the document “sample”.
   ...REGISTER_FILE_ROUTES,
   ...SAMPLE_ROUTES,
