@@ -11,6 +11,7 @@ import { plainPages } from './http/plain-pages.ts'
 import { type Refused, refuse } from './http/problems.ts'
 import type { BodyKind, Route } from './http/route.ts'
 import { isSecure, sessions } from './http/session.ts'
+import { switchOffPages } from './http/switch-off.ts'
 import { ROUTES } from './routes/all.ts'
 import type { Services } from './services.ts'
 
@@ -135,7 +136,7 @@ export function createApp(services: Services): Express {
   app.set('trust proxy', services.env.TRUST_PROXY)
   const metrics = new Metrics(services.db)
   app.use(headers(services), health(services), metricsPage(metrics, services.env.METRICS_TOKEN))
-  app.use(visits(services, metrics), plainPages(services))
+  app.use(visits(services, metrics), plainPages(services), switchOffPages(services))
   const limit = limiter(services.db)
   const session = sessions(services.env, services.db)
   const noStore: RequestHandler = (_request, response, next) => {

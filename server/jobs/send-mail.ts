@@ -1,5 +1,8 @@
 import { inOrganisation } from '#server/db.ts'
+import { isMailKind } from '#server/mail/kinds.ts'
 import { openSender } from '#server/mail/open-sender.ts'
+import { switchKey } from '#server/mail/switch-key.ts'
+import { unsubscribeHeaders } from '#server/mail/unsubscribe.ts'
 import { lockMail, noteAttempt } from '#server/queries/mail-state.ts'
 import type { Handler } from './handler.ts'
 
@@ -16,8 +19,11 @@ export const sendMail: Handler<'send-mail'> = async ({ db, env, clock }, { organ
     const answer = await inOrganisation(db, organisation, async (tx) => {
       const row = await lockMail(tx, organisation, mail)
       if (row?.state !== 'waiting') return undefined
-      const { message_id, to_address, subject, text_body, html_body } = row
-      const outgoing = { messageId: message_id, to: to_address, subject, text: text_body, html: html_body, headers: {} }
+      const { message_id, to_address, subject, text_body, html_body, kind, to_person } = row
+      const headers = isMailKind(kind)
+        ? unsubscribeHeaders({ organisation, person: to_person, kind }, { baseUrl: env.BASE_URL, key: switchKey(env) })
+        : {}
+      const outgoing = { messageId: message_id, to: to_address, subject, text: text_body, html: html_body, headers }
       const delivery = await sender.send(outgoing)
       const state = delivery.outcome === 'later' ? 'waiting' : delivery.outcome
       await noteAttempt(tx, organisation, mail, { state, answer: delivery.answer, now: clock() })

@@ -3,6 +3,8 @@ import type { Tx } from '#server/db.ts'
 export interface WaitingMail {
   readonly mail_id: string
   readonly message_id: string
+  readonly kind: string
+  readonly to_person: string | null
   readonly to_address: string
   readonly subject: string
   readonly text_body: string
@@ -15,7 +17,17 @@ export async function lockMail(tx: Tx, organisation: string, mail: string): Prom
   return await tx('mails')
     .where({ organisation_id: organisation, mail_id: mail })
     .forUpdate()
-    .first<WaitingMail | undefined>('mail_id', 'message_id', 'to_address', 'subject', 'text_body', 'html_body', 'state')
+    .first<WaitingMail | undefined>(
+      'mail_id',
+      'message_id',
+      'kind',
+      'to_person',
+      'to_address',
+      'subject',
+      'text_body',
+      'html_body',
+      'state',
+    )
 }
 
 export interface Attempted {

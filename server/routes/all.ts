@@ -11,6 +11,7 @@ import { INSTRUMENT_WRITE_ROUTES } from './instrument-writes.ts'
 import { INSTRUMENT_ROUTES } from './instruments.ts'
 import { ISSUE_ROUTES } from './issue.ts'
 import { JOB_ROUTES } from './jobs.ts'
+import { MAIL_ROUTES } from './mails.ts'
 import { PASSWORD_ROUTES } from './passwords.ts'
 import { PEOPLE_ROUTES } from './people.ts'
 import { PUBLIC_ROUTES } from './public.ts'
@@ -36,6 +37,7 @@ export const ROUTES: readonly Route[] = [
   ...SECOND_FACTOR_ROUTES,
   ...TOKEN_ROUTES,
   ...PEOPLE_ROUTES,
+  ...MAIL_ROUTES,
   ...REPORT_ROUTES,
   ...REVISION_ROUTES,
   ...VIEW_ROUTES,
