@@ -90,11 +90,13 @@ function agreed(body: readonly Element[], outside: Element | undefined): boolean
  * @source RFC 5280
  */
 export function readCertificate(der: Uint8Array): KnownCertificate | undefined {
-  const [body, algorithm, signature, ...rest] = partsOf(inside(der))
+  const outer = inside(der)
+  const [body, algorithm, signature, ...rest] = partsOf(outer)
   const parts = partsOf(body)
   const [, , , issuerName, , subjectName, key] = parts
   const certificate = parsed(der)
-  if (!certificate || !body || !signature || rest.length > 0 || !issuerName || !subjectName || !key) return undefined
+  if (outer?.whole.length !== der.length || rest.length > 0) return undefined
+  if (!certificate || !body || !signature || !issuerName || !subjectName || !key) return undefined
   const { extensions = [], issuer, subject, notBefore, notAfter, signatureAlgorithm } = certificate
   if (!agreed(parts, algorithm)) return undefined
   if (extensions.some(({ critical, extnID }) => critical && !UNDERSTOOD.has(extnID))) return undefined
