@@ -1,3 +1,5 @@
+import { parseCheckpoint } from '#core/register/checkpoint.ts'
+import type { Proof } from '#core/register/proof.ts'
 import type { Entry, Particulars } from '../blocks.ts'
 import { capital, dateText, daysText, timeText } from '../print.ts'
 import type { ReportScene } from '../scene.ts'
@@ -16,10 +18,16 @@ function place({ install: { site } }: ReportScene): string | undefined {
   return `${north}, ${east}${height}`
 }
 
+/** The head of the register when the report was issued: printed, so that nobody can give the register another past. */
+function headText({ checkpoint }: Proof): string | undefined {
+  const parsed = parseCheckpoint(checkpoint)
+  return parsed.ok ? `Checkpoint of ${parsed.checkpoint.size} entries ${grouped(parsed.checkpoint.root)}` : undefined
+}
+
 /** Number, issuer and predecessor of an issued report; of a draft, that it is one. */
 function issueEntries({ context: { issue, draft } }: ReportScene): readonly Entry[] {
   if (!issue) return entry('report/issue', 'Issued', draft ? 'not issued: a draft' : undefined)
-  const { number, issued_at, organisation, issued_by, reviewed_by, replaces } = issue
+  const { number, issued_at, organisation, issued_by, reviewed_by, replaces, register, check_address } = issue
   return [
     ...entry('report/number', 'Report', number),
     ...entry('report/issue', 'Issued', timeText(issued_at)),
@@ -27,6 +35,8 @@ function issueEntries({ context: { issue, draft } }: ReportScene): readonly Entr
     ...entry('report/reviewed', 'Reviewed by', signatoryText(reviewed_by)),
     ...entry('report/authorised', 'Authorised by', signatoryText(issued_by)),
     ...entry('report/replaces', 'Replaces', replaces?.number, replaces?.reason),
+    ...entry('report/checkpoint', 'Register', `entry ${register.index + 1}`, headText(register)),
+    ...entry('report/check', 'Check at', check_address),
   ]
 }
 
@@ -50,11 +60,11 @@ export function identity(scene: ReportScene): Particulars {
           ...entry('site/position', 'Position', place(scene)),
           ...entry('supply/operator', 'Grid operator', supply.operator),
           ...entry('people/company', 'Contractor', company),
+          ...issueEntries(scene),
         ],
       },
       {
         entries: [
-          ...issueEntries(scene),
           ...entry('report/reference', 'Reference', report.reference),
           ...entry('report/purpose', 'Purpose', capital(report.purpose)),
           ...entry('report/inspected', 'Inspected', daysText(report.inspected)),
