@@ -143,10 +143,11 @@ export function createApp(services: Services): Express {
     response.set('cache-control', 'no-store')
     next()
   }
+  app.use('/api', noStore)
   for (const path of new Set(ROUTES.map((route) => route.path))) {
     const routes = ROUTES.filter((route) => route.path === path)
     for (const route of routes)
-      app[route.method](`/api${path}`, noStore, session, ...bodyOf(route), handler(route, services, limit))
+      app[route.method](`/api${path}`, session, ...bodyOf(route), handler(route, services, limit))
     const allowed = routes.map(({ method }) => method.toUpperCase()).join(', ')
     app.all(`/api${path}`, (_request, response) =>
       sendProblem(
