@@ -40,7 +40,7 @@ describe('the report on paper', () => {
       const findings = modelOf(judged)
         .sections.flatMap(({ blocks }) => blocks)
         .flatMap((block) => (block.kind === 'findings' ? block.findings : []))
-      expect(findings.length).toBeGreaterThan(1)
+      const sound = findings.length === 0 ? ['Every rule that applies is met.'] : []
       const told = findings.flatMap(({ title, says, remedy, rule, subjects }) => [
         title,
         says,
@@ -48,7 +48,7 @@ describe('the report on paper', () => {
         rule,
         ...subjects.map(({ name: subject }) => subject),
       ])
-      expect(told.filter((text) => !words.includes(bare(text)))).toEqual([])
+      expect([...sound, ...told].filter((text) => !words.includes(bare(text)))).toEqual([])
     },
   )
 
