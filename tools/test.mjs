@@ -14,6 +14,7 @@ needPrograms({
   unzip: 'unzip',
   python3: 'python3',
   openssl: 'openssl',
+  certutil: 'libnss3-tools',
 })
 run('npm', ['run', '--silent', 'build'])
 
