@@ -21,6 +21,11 @@ export function isCovered(text: string): boolean {
   return COVER.test(text)
 }
 
+/** A sentence that quotes covered text, with a mark in place of the covers: what they hide was told of already. */
+export function uncovered(sentence: string): string {
+  return sentence.replaceAll(/[\ue000-\uf8ff]+/g, '…')
+}
+
 type Stretch = { readonly start: number; readonly end: number; readonly blank?: true }
 type Finder = (text: string, range: Range) => Stretch | undefined
 

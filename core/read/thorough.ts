@@ -4,7 +4,7 @@ import { isBlock } from './block.ts'
 import { explain } from './explain.ts'
 import { guard } from './guard.ts'
 import { MAX_PROBLEMS } from './limits.ts'
-import { cover, isCovered, type Mask } from './masks.ts'
+import { cover, isCovered, type Mask, uncovered } from './masks.ts'
 import { type Certain, type Locate, type ReadResult, read } from './read.ts'
 
 /** More rounds than kinds of problem that hide others: characters, syntax, tabs line by line, numbers. */
@@ -34,7 +34,7 @@ export function readThoroughly(text: string): ReadResult {
     // A syntax error that shows only now may be made by a cover: only those that cannot be are believed.
     if (result.brief && parsed && !problems.every(isOfOneWord(now))) break
     parsed ||= guard(now).length === 0
-    found.push(...problems)
+    found.push(...problems.map((problem) => ({ ...problem, message: uncovered(problem.message) })))
     const covered = found.length > MAX_PROBLEMS ? undefined : cover(now, problems, found.length)
     if (problems.length === 0 || covered === undefined) break
     now = covered.text

@@ -10,6 +10,16 @@ function told(text: string): { found: string[]; tree: unknown } {
   return { found: result.problems.map(({ code, range }) => `${code} ${range?.line}`), tree: result.certain?.tree }
 }
 
+describe('a sentence about a line of which something was covered', () => {
+  it('shows no cover', () => {
+    const text = 'skerry: 1\ninspection:\n  - { item: notices, r\u202e #esult: good }\n'
+    const result = readThoroughly(text)
+    if (result.ok) throw new Error('It cannot be read.')
+    expect(result.problems.length).toBeGreaterThan(1)
+    for (const { message } of result.problems) expect(message).not.toMatch(/[\ue000-\uf8ff]/)
+  })
+})
+
 describe('what one error would have hidden', () => {
   it('syntax does not hide numbers, nor characters syntax', () => {
     const { found, tree } = told('a: si\u202ate\nb: @home\nc: { d: 1,5 m, e: 7 }\nf: 0x1F\ng: right\n')
