@@ -157,6 +157,13 @@ const MAKERS: Readonly<Record<Exclude<Subject, 'report'>, Maker>> = {
     })
     return { condition }
   },
+  async document(tx, side) {
+    const row = await tx('documents')
+      .where({ ...own(side), report_id: reportIn(side, 'issued') })
+      .first<{ document_id: string } | undefined>('document_id')
+    if (row === undefined) throw new Error('The issued report has no document.')
+    return { document: row.document_id }
+  },
   thread: (tx, side) => remarked(tx, side, new Date()),
   draft: (tx, side) => remarked(tx, side, null),
   async upload(tx, side) {

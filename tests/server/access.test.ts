@@ -24,6 +24,7 @@ const QUERIES: Readonly<Record<string, string>> = {
   'create-report': '?file_name=a.skerry.yaml',
   'create-revision': '?file_name=a.skerry.yaml',
   'compare-revisions': '?from=1&to=1',
+  'show-consistency': '?from=1&to=2',
 }
 
 const BODIES = {

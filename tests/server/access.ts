@@ -2,7 +2,16 @@ import type { Role } from '#core/policy/roles.ts'
 import type { ReportState } from '#core/policy/states.ts'
 
 /** What a path's first parameter names; each is made in both organisations. */
-export type Subject = 'report' | 'upload' | 'attachment' | 'thread' | 'draft' | 'person' | 'instrument' | 'condition'
+export type Subject =
+  | 'report'
+  | 'upload'
+  | 'attachment'
+  | 'thread'
+  | 'draft'
+  | 'person'
+  | 'instrument'
+  | 'condition'
+  | 'document'
 
 /**
  * Who may call a route, written down here by hand and not taken from the code that decides: a change of the policy has to
@@ -40,6 +49,7 @@ const attach = { roles: WRITERS, states: EARLY } as const
 const mine = { roles: ['installer'], hidden: true, subject: 'upload' } as const
 const annotate = { roles: REVIEWER, states: ['in review', 'approved'], fourEyes: true, subject: 'report' } as const
 const PASSWORD = 'a long password for tests only'
+const NOTHING = '3f000000-0000-4000-8000-000000000000'
 const SHA = 'a'.repeat(64)
 const INSTRUMENT = { kind: 'earth tester', calibrated_on: '2026-01-10', due_on: '2027-01-10' }
 const CONDITION = { separation: 'all poles', stated_in: 'Terms of connection, 4.2', valid_from: '2026-01-01' }
@@ -140,4 +150,24 @@ export const ACCESS: Readonly<Record<string, Cell>> = {
   'show-condition': { roles: ALL, subject: 'condition' },
   'create-condition': { roles: ADMIN, body: { operator: 'Fennmark Grid', ...CONDITION } },
   'write-condition-version': { roles: ADMIN, subject: 'condition', body: CONDITION },
+  'list-mail-switches': own,
+  'switch-mail': { roles: ALL, body: { kind: 'report issued', on: true } },
+  'list-mails': { roles: ADMIN },
+  'list-due': own,
+  'search-register': own,
+  'export-register': own,
+  'show-register-document': { roles: ALL, subject: 'document' },
+  // Sealed by the worker, which does not run in this scene.
+  'download-register-pdf': { roles: ALL, subject: 'document', absent: true },
+  'download-register-source': { roles: ALL, subject: 'document' },
+  'download-register-proof': { roles: ALL, subject: 'document', absent: true },
+  'download-register-archive': { roles: ALL, absent: true, body: { documents: [NOTHING] } },
+  'draw-sample': { roles: ['auditor', 'administrator'], body: { size: 1 } },
+  'recompute-documents': { roles: ['auditor', 'administrator'], absent: true, body: { documents: [NOTHING] } },
+  'list-checkpoints': own,
+  'show-consistency': { roles: ALL, absent: true },
+  'list-audit-events': { roles: ['auditor', 'administrator'] },
+  'export-audit-events': { roles: ['auditor', 'administrator'] },
+  'verify-audit-events': { roles: ['auditor', 'administrator'] },
+  'check-document': { public: true, roles: ALL },
 }
