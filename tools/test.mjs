@@ -1,6 +1,7 @@
 // npm test: sets everything up, then runs every gate and every test, and ends with one line of counts.
 import { spawnSync } from 'node:child_process'
 import { readFileSync, rmSync } from 'node:fs'
+import { postgresBin } from './setup/postgres.mjs'
 import { needPrograms, ready, run } from './setup/ready.mjs'
 
 ready()
@@ -16,6 +17,7 @@ needPrograms({
   openssl: 'openssl',
   certutil: 'libnss3-tools',
 })
+postgresBin()
 run('npm', ['run', '--silent', 'build'])
 
 const gates = spawnSync('npm', ['run', '--silent', 'check'], { stdio: 'inherit' })
