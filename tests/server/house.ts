@@ -90,8 +90,10 @@ async function browser(app: House['app'], member: Member): Promise<Browser> {
 }
 
 /** Opens a server on a fresh copy of the migrated database. */
-export async function openHouse(variables: Readonly<Record<string, string>> = {}): Promise<House> {
-  const admin = inject('postgres')
+export async function openHouse(
+  variables: Readonly<Record<string, string>> = {},
+  admin: string = inject('postgres'),
+): Promise<House> {
   const database = `test_${randomBytes(6).toString('hex')}`
   const addresses = await cloneDatabase(admin, 'skerry_template', database)
   const dataDir = mkdtempSync(join(tmpdir(), 'skerry-files-'))

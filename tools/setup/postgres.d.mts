@@ -5,5 +5,8 @@ export interface Cluster {
 export function postgresBin(): string
 export function homeFor(...candidates: readonly string[]): string
 export function freePort(): Promise<number>
-export function startCluster(home: string, options?: { readonly quick?: boolean }): Promise<Cluster>
+export function startCluster(
+  home: string,
+  options?: { readonly quick?: boolean; readonly port?: number },
+): Promise<Cluster>
 export function stopCluster(home: string, mode?: 'smart' | 'fast' | 'immediate'): void

@@ -114,9 +114,10 @@ function initialise(data, secret) {
  *
  * @param home the folder that holds the cluster and its secret
  * @param options.quick no durability: for tests that throw the cluster away
+ * @param options.port the port to listen on again; a free one otherwise
  * @returns port and address of the administrator's connection
  */
-export async function startCluster(home, { quick = false } = {}) {
+export async function startCluster(home, { quick = false, port: wanted } = {}) {
   const data = join(home, 'data')
   const secretFile = join(home, 'admin-password')
   if (!existsSync(join(data, 'PG_VERSION'))) {
@@ -130,7 +131,7 @@ export async function startCluster(home, { quick = false } = {}) {
 
   // A server that was killed leaves its lock file, and may linger as a zombie for some seconds.
   for (let attempt = 0; attempt < 10; attempt++) {
-    const port = await freePort()
+    const port = wanted ?? (await freePort())
     if (launch(data, port, quick) && isReady(port)) return { port, url: url(port) }
     await new Promise((resolve) => setTimeout(resolve, 500))
   }
