@@ -22,7 +22,7 @@ export interface ThreadStanding {
 
 /** Something that keeps a report from being approved and issued. */
 export interface Blocker {
-  readonly kind: 'fails' | 'not shown' | 'not decided' | 'refused' | 'correction' | 'content'
+  readonly kind: 'fails' | 'not shown' | 'not decided' | 'refused' | 'correction' | 'content' | 'register'
   readonly anchor: string
   readonly message: string
 }

@@ -5,6 +5,7 @@ import type { Tx } from '#server/db.ts'
 import { type AcceptanceRow, listAcceptances } from '#server/queries/acceptances.ts'
 import type { Report } from '#server/queries/reports.ts'
 import { listStandings } from '#server/queries/threads.ts'
+import { claimsOf } from './claims.ts'
 import { type JudgedRevision, ownRevision } from './judged-revision.ts'
 
 /** A limitation or departure with what the reviewer has said on exactly these words. */
@@ -17,6 +18,19 @@ export interface ReviewStanding {
   readonly revision: JudgedRevision
   readonly decisions: readonly Decided[]
   readonly blockers: readonly Blocker[]
+}
+
+/** What the registers of the house contradict. A file without a day of inspection is held against the day it came. */
+async function contradicted(
+  tx: Tx,
+  organisation: string,
+  { judged }: JudgedRevision,
+  { updated_at }: Report,
+): Promise<Blocker[]> {
+  const claims = await claimsOf(tx, organisation, judged, updated_at)
+  return claims
+    .filter(({ severity }) => severity === 'failure')
+    .map(({ anchor, message }) => ({ kind: 'register', anchor, message }))
 }
 
 /** Weighs the newest revision. A decision by somebody who has come to have a hand in the report since does not count. */
@@ -38,6 +52,9 @@ export async function reviewStanding(tx: Tx, organisation: string, report: Repor
   return {
     revision,
     decisions: decisionsOf(revision.judged).map((decision) => ({ ...decision, said: said(decision) })),
-    blockers: blockers(revision.judged, acceptances, threads),
+    blockers: [
+      ...blockers(revision.judged, acceptances, threads),
+      ...(await contradicted(tx, organisation, revision, report)),
+    ],
   }
 }

@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
 import { type Browser, type House, openHouse, source } from '#tests/server/house.ts'
-import { upload, well } from '#tests/server/life.ts'
+import { act, upload, well } from '#tests/server/life.ts'
 
 let house: House
 let administrator: Browser
@@ -129,5 +129,21 @@ describe('what a file says, held against the registers', () => {
     expect(await claims(lines)).toMatchObject([{ claim: 'separation-other', severity: 'failure' }])
     const nothing = dairy.replace(/ {2}separation: .*\n/, '')
     expect(await claims(nothing)).toMatchObject([{ claim: 'separation-not-stated', severity: 'failure' }])
+  })
+
+  it('keeps a report from being approved while it contradicts a register', async () => {
+    const reviewer = await house.signIn(await house.member(administrator.member.organisation, ['reviewer']))
+    const { id } = await enter({ ...T1, due_on: '2026-09-02' })
+    const report = well(await upload(installer, dairy)).body.id
+    well(await act(installer, report, 'submit'))
+    const standing = async () =>
+      well(await reviewer.get(`/api/reports/${report}/review`)).body.blockers.filter(
+        ({ kind }: { kind: string }) => kind === 'register',
+      )
+    expect(await standing()).toMatchObject([{ anchor: 'instrument/T1', message: expect.stringContaining('0417-A') }])
+    expect((await act(reviewer, report, 'approve')).status).toBe(409)
+    const { serial: _, ...mended } = T1
+    well(await administrator.post(`/api/instruments/${id}/versions`).set('if-match', '"1"').send(mended))
+    expect(await standing()).toEqual([])
   })
 })
