@@ -2,23 +2,14 @@ import { inOrganisation } from '#server/db.ts'
 import { insertCondition, insertConditionVersion } from '#server/queries/conditions.ts'
 import { insertInstrument, insertInstrumentVersion } from '#server/queries/instruments.ts'
 import type { Services } from '#server/services.ts'
+import { INSTRUMENTS, YEARS } from './calibrations.ts'
 import type { Cast } from './tell-story.ts'
-
-const INSTRUMENTS = [
-  { serial: '0417-A', kind: 'multifunction installation tester', calibrated: '03-02' },
-  { serial: '0533-C', kind: 'multifunction installation tester', calibrated: '01-19' },
-  { serial: '88-31', kind: 'PV tester', calibrated: '05-20' },
-  { serial: '91-07', kind: 'PV tester', calibrated: '11-04' },
-  { serial: 'E-212', kind: 'earth tester', calibrated: '02-24' },
-] as const
-
-const YEARS = [2024, 2025, 2026] as const
 
 /** Instruments with a calibration each year, and what the grid operator has demanded over time. */
 export async function fillRegisters({ db }: Services, { organisation, administrator }: Cast): Promise<void> {
   await inOrganisation(db, organisation, async (tx) => {
     for (const { serial, kind, calibrated } of INSTRUMENTS) {
-      const by = { organisation, person: administrator, now: new Date('2024-01-08T08:00:00Z') }
+      const by = { organisation, person: administrator, now: new Date('2023-01-09T08:00:00Z') }
       const id = await insertInstrument(tx, by, serial)
       if (id === undefined) throw new Error(`Instrument ${serial} stands in the story twice.`)
       for (const [index, year] of YEARS.entries()) {
@@ -37,7 +28,7 @@ export async function fillRegisters({ db }: Services, { organisation, administra
         )
       }
     }
-    const by = { organisation, person: administrator, now: new Date('2024-01-08T08:00:00Z') }
+    const by = { organisation, person: administrator, now: new Date('2023-01-09T08:00:00Z') }
     const id = await insertCondition(tx, by, 'Fennmark Grid')
     if (id === undefined) throw new Error('Fennmark Grid stands in the story twice.')
     const facts = {

@@ -1,4 +1,5 @@
 import { readFileSync } from 'node:fs'
+import { calibrationOn } from './calibrations.ts'
 
 /** A made-up installation: an example's file under another name and on other days. */
 export interface Site {
@@ -18,13 +19,19 @@ const quoted = (text: string): string => `"${text.replaceAll('"', '\\"')}"`
 
 const INSPECTED = /inspected: \{ from: (\d{4}-\d\d-\d\d)(?:, to: (\d{4}-\d\d-\d\d))? \}/
 
-/** The install file of a site: every date moved alike, so that calibrations stay as valid as they were. */
+const CALIBRATED = /(serial: "([^"]+)", calibrated: )\d{4}-\d\d-\d\d(, due: )\d{4}-\d\d-\d\d/g
+
+/** The install file of a site: every date moved alike, and the instruments' as the register has them on that day. */
 export function fileOf({ example, reference, name, street, on }: Site): string {
   const text = readFileSync(new URL(`../../examples/${example}.skerry.yaml`, import.meta.url), 'utf8')
   const [, from = on, to = from] = INSPECTED.exec(text) ?? []
   const days = dayNumber(on) - dayNumber(to)
   return text
     .replaceAll(/\b20\d\d-\d\d-\d\d\b/g, (date) => dateOf(dayNumber(date) + days))
+    .replaceAll(CALIBRATED, (_, before: string, serial: string, between: string) => {
+      const { calibrated, due } = calibrationOn(serial, on)
+      return `${before}${calibrated}${between}${due}`
+    })
     .replace(/^( {2}reference: ).*$/m, `$1${reference}`)
     .replace(/^( {2}name: ).*$/m, `$1${quoted(name)}`)
     .replace(/^( {2}address: ).*$/m, `$1[ ${quoted(street)}, Fennmark ]`)
