@@ -66,6 +66,13 @@ export class Tries {
     }
   }
 
+  /** The seconds to wait when there are no tries left; counts nothing. */
+  async wait(kind: TryKind, ...parts: readonly string[]): Promise<number | undefined> {
+    const state = await this.#counter(kind).get(hashed(parts))
+    if (state === null || state.consumedPoints < TRIES[kind].points) return undefined
+    return Math.max(1, Math.ceil(state.msBeforeNext / 1000))
+  }
+
   /** Takes a try back that went well. */
   async giveBack(kind: TryKind, ...parts: readonly string[]): Promise<void> {
     await this.#counter(kind).reward(hashed(parts))

@@ -127,14 +127,15 @@ class Pipeline {
       refused.call = call
       return await this.#once(call, request, key)
     }
-    const tried = this.#asksAgain ? await services.tries.take('again', caller.person) : undefined
-    if (tried !== undefined) return tooMany(tried)
+    // Only wrong passwords count: somebody who is signed in and sends a step twice at once must not be locked out by it.
+    const wait = this.#asksAgain ? await services.tries.wait('again', caller.person) : undefined
+    if (wait !== undefined) return tooMany(wait)
     const outcome = await orRefused(only ? reading(services.db, work, this.#lost) : writing(services.db, work))
     // What refused was rolled back, its event with it: a denied access leaves one of its own.
     if (isRefused(outcome) && TOLD.has(outcome.refused) && refused.call !== undefined)
       await this.#attempt.denied(services.db, refused.call, outcome)
-    if (this.#asksAgain && !(isRefused(outcome) && outcome.refused === 'password-needed'))
-      await services.tries.giveBack('again', caller.person)
+    if (this.#asksAgain && isRefused(outcome) && outcome.refused === 'password-needed')
+      await services.tries.take('again', caller.person)
     return outcome
   }
 

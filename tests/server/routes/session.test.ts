@@ -128,3 +128,26 @@ describe('the second factor', () => {
     expect((await attempt(person.email, PASSWORD, { code: recovery })).status).toBe(401)
   })
 })
+
+describe('the password asked for again', () => {
+  it('is not asked for ever: after ten wrong ones the next has to wait, right or wrong', async () => {
+    const browser = await house.signIn(await house.member(organisation, ['installer']))
+    const make = (password: string) =>
+      browser.post('/api/tokens').send({ name: 'laptop', scopes: ['report.send'], days: 30, password })
+    for (let index = 0; index < 10; index += 1) expect((await make(`wrong ${index}`)).status).toBe(403)
+    expect((await make(PASSWORD)).status).toBe(429)
+  })
+
+  it('does not lock out who sends the right one many times at once', async () => {
+    const browser = await house.signIn(await house.member(organisation, ['installer']))
+    const made = await Promise.all(
+      Array.from({ length: 20 }, (_, index) =>
+        browser
+          .post('/api/tokens')
+          .send({ name: `laptop ${index}`, scopes: ['report.send'], days: 30, password: PASSWORD }),
+      ),
+    )
+    expect(made.filter(({ status }) => status === 429)).toEqual([])
+    expect((await browser.get('/api/tokens')).body.tokens.length).toBeGreaterThan(10)
+  })
+})
