@@ -154,6 +154,15 @@ describe('watching', () => {
     }
   }
 
+  /** The first run from a number on whose output is as meant: a slow disk may tell of one change in two runs. */
+  async function first(
+    run: (count: number) => Promise<string>,
+    from: number,
+    meant: (output: string) => boolean,
+  ): Promise<number> {
+    for (let count = from; ; count += 1) if (meant(await run(count))) return count
+  }
+
   it('checks again when a file is changed, replaced or new, and ends by Ctrl-C', async () => {
     const sites = join(folder, 'sites')
     mkdirSync(sites)
@@ -183,11 +192,11 @@ describe('watching', () => {
     expect(said()).not.toContain('notes.txt')
     mkdirSync(join(valley, 'south', 'lower'), { recursive: true })
     copyFileSync(SOUND, join(valley, 'south', 'lower', 'c.skerry.yaml'))
-    expect(await run(3)).toContain('south/lower/c.skerry.yaml')
+    const third = await first(run, 3, (output) => output.includes('south/lower/c.skerry.yaml'))
     rmSync(join(valley, 'south'), { recursive: true })
-    expect(await run(4)).not.toContain('c.skerry.yaml')
+    await first(run, third + 1, (output) => !output.includes('c.skerry.yaml'))
     expect(await end()).toBe('SIGINT')
-  }, 15_000)
+  }, 30_000)
 
   it('looks at what a glob means, and at a file that is named whatever its name', async () => {
     const mixed = join(folder, 'mixed')
