@@ -5,6 +5,7 @@ import { explain } from './explain.ts'
 import { guard } from './guard.ts'
 import { MAX_PROBLEMS } from './limits.ts'
 import { cover, isCovered, type Mask, uncovered } from './masks.ts'
+import { rangeOf } from './positions.ts'
 import { type Certain, type Locate, type ReadResult, read } from './read.ts'
 
 /** More rounds than kinds of problem that hide others: characters, syntax, tabs line by line, numbers. */
@@ -34,13 +35,19 @@ export function readThoroughly(text: string): ReadResult {
     // A syntax error that shows only now may be made by a cover: only those that cannot be are believed.
     if (result.brief && parsed && !problems.every(isOfOneWord(now))) break
     parsed ||= guard(now).length === 0
-    found.push(...problems.map((problem) => ({ ...problem, message: uncovered(problem.message) })))
+    found.push(...problems.map((one) => placed(text, { ...one, message: uncovered(one.message) })))
     const covered = found.length > MAX_PROBLEMS ? undefined : cover(now, problems, found.length)
     if (problems.length === 0 || covered === undefined) break
     now = covered.text
     masks.push(...covered.masks)
   }
   return { ok: false, problems: found }
+}
+
+/** A problem of the file as a whole is shown at its beginning; the count of those that are not shown has no place. */
+function placed(text: string, one: Problem): Problem {
+  if (one.range !== undefined || one.code === 'too-many-problems') return one
+  return { ...one, range: rangeOf(text, 0, 0) }
 }
 
 /** A reader that has lost its place takes values for keys; keys that really stand twice are found once it can be read. */

@@ -10,6 +10,15 @@ function told(text: string): { found: string[]; tree: unknown } {
   return { found: result.problems.map(({ code, range }) => `${code} ${range?.line}`), tree: result.certain?.tree }
 }
 
+describe('a file of which no key is left', () => {
+  it('is told of at its beginning, like any other problem', () => {
+    const result = readThoroughly('>#@ Shows: a dwelling\nskerry: 1\n')
+    if (result.ok) throw new Error('It cannot be read.')
+    expect(result.problems.length).toBeGreaterThan(1)
+    for (const { range } of result.problems) expect(range).toBeDefined()
+  })
+})
+
 describe('a sentence about a line of which something was covered', () => {
   it('shows no cover', () => {
     const text = 'skerry: 1\ninspection:\n  - { item: notices, r\u202e #esult: good }\n'
